@@ -1,0 +1,39 @@
+package shuntwright.board;
+
+import java.util.List;
+
+/** How long an output survives a current. */
+public sealed interface Withstand {
+
+    /** @param value I²t, A²s */
+    record Energy(double value) implements Withstand {
+        /** @throws IllegalArgumentException unless value &gt; 0 */
+        public Energy {
+            if (!(value > 0) || Double.isInfinite(value)) {
+                throw new IllegalArgumentException("an I²t value must be > 0, got " + value);
+            }
+        }
+    }
+
+    /** @param points longest time for each current, interpolated between points on log-log axes */
+    record Curve(List<TimePoint> points) implements Withstand {
+        public Curve {
+            points = List.copyOf(points);
+        }
+    }
+
+    /**
+     * A conductor heated adiabatically, t = (k·S/I)² (IEC 60364-4-43, 434.5.2).
+     *
+     * @param area     S, mm²
+     * @param constant k, A·√s/mm²
+     */
+    record Conductor(double area, double constant) implements Withstand {
+        /** @throws IllegalArgumentException unless both are &gt; 0 */
+        public Conductor {
+            if (!(area > 0) || !(constant > 0)) {
+                throw new IllegalArgumentException("a conductor needs area and k > 0, got " + area + ", " + constant);
+            }
+        }
+    }
+}

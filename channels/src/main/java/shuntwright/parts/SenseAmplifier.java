@@ -1,0 +1,31 @@
+package shuntwright.parts;
+
+/**
+ * A current sense amplifier of fixed gain.
+ *
+ * @param partNumber    unique within the catalogue
+ * @param description   free text
+ * @param gain          V/V
+ * @param gainError     limit of its magnitude at 25 °C, a fraction
+ * @param gainDrift     limit of its magnitude, 1/K, referred to 25 °C
+ * @param input         errors that act at the input
+ * @param ranges        where it works
+ * @param bandwidth     -3 dB at this gain, Hz
+ * @param slewRate      V/s
+ * @param supplyCurrent largest of the whole package, A
+ * @param sections      amplifiers in one package, ≥ 1
+ * @param purchase      how it is sold
+ */
+public record SenseAmplifier(String partNumber, String description, double gain, double gainError, double gainDrift,
+        InputErrors input, AmplifierRanges ranges, double bandwidth, double slewRate, double supplyCurrent,
+        int sections, Purchase purchase) implements Part {
+
+    /** @throws IllegalArgumentException unless gain, bandwidth, slew rate are &gt; 0, limits ≥ 0 and sections ≥ 1 */
+    public SenseAmplifier {
+        if (!(gain > 0) || !(gainError >= 0 && gainError < 1) || !(gainDrift >= 0) || !(bandwidth > 0)
+                || !(slewRate > 0) || !(supplyCurrent >= 0) || sections < 1) {
+            throw new IllegalArgumentException("amplifier " + partNumber
+                    + " needs gain, bandwidth and slew rate > 0, error limits ≥ 0 and at least one section");
+        }
+    }
+}

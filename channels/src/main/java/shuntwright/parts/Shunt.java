@@ -1,0 +1,32 @@
+package shuntwright.parts;
+
+import shuntwright.quantity.Range;
+import shuntwright.quantity.Tolerance;
+
+/**
+ * A current sense resistor.
+ *
+ * @param partNumber             unique within the catalogue
+ * @param description            free text
+ * @param resistance             nominal at 25 °C, Ω
+ * @param tolerance              as delivered, at 25 °C
+ * @param temperatureCoefficient limit of its magnitude, 1/K, referred to 25 °C
+ * @param ageing                 largest relative change over life, a fraction
+ * @param terminals              two or four
+ * @param mountingResistance     series resistance of the joints at 20 °C that a two-terminal part adds, Ω; 0..0 for four
+ * @param thermalEmf             limit of its magnitude against copper, V/K
+ * @param rating                 power, temperatures, pulse
+ * @param purchase               how it is sold
+ */
+public record Shunt(String partNumber, String description, double resistance, Tolerance tolerance,
+        double temperatureCoefficient, double ageing, Terminals terminals, Range mountingResistance, double thermalEmf,
+        ShuntRating rating, Purchase purchase) implements Part {
+
+    /** @throws IllegalArgumentException unless resistance &gt; 0 and the limits are ≥ 0 */
+    public Shunt {
+        if (!(resistance > 0) || Double.isInfinite(resistance) || !(temperatureCoefficient >= 0) || !(ageing >= 0)
+                || !(ageing < 1) || !(mountingResistance.min() >= 0) || !(thermalEmf >= 0)) {
+            throw new IllegalArgumentException("shunt " + partNumber + " needs resistance > 0 and limits ≥ 0");
+        }
+    }
+}
