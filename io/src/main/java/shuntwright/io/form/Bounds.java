@@ -1,0 +1,43 @@
+package shuntwright.io.form;
+
+import shuntwright.quantity.Dimension;
+import shuntwright.quantity.QuantityWriter;
+
+/**
+ * Which numbers are allowed.
+ *
+ * @param least       lower end; -∞ for none
+ * @param withLeast   whether the lower end itself is allowed
+ * @param most        upper end; +∞ for none
+ * @param withMost    whether the upper end itself is allowed
+ */
+public record Bounds(double least, boolean withLeast, double most, boolean withMost) {
+    public static final Bounds ANY = new Bounds(Double.NEGATIVE_INFINITY, false, Double.POSITIVE_INFINITY, false);
+    public static final Bounds POSITIVE = new Bounds(0, false, Double.POSITIVE_INFINITY, false);
+    public static final Bounds NOT_NEGATIVE = new Bounds(0, true, Double.POSITIVE_INFINITY, false);
+    /** From 0 to below 1. */
+    public static final Bounds BELOW_ONE = new Bounds(0, true, 1, false);
+    /** From 0 to 1. */
+    public static final Bounds SHARE = new Bounds(0, true, 1, true);
+    /** Above 0 to below 1. */
+    public static final Bounds BETWEEN_ZERO_AND_ONE = new Bounds(0, false, 1, false);
+    /** Above 0 to 1. */
+    public static final Bounds POSITIVE_SHARE = new Bounds(0, false, 1, true);
+
+    public boolean allow(double value) {
+        return (withLeast ? value >= least : value > least) && (withMost ? value <= most : value < most);
+    }
+
+    /** In words, for example "above 0 A" or "from 0 % to below 100 %"; empty when any number will do. */
+    String words(Dimension dimension) {
+        String low = (withLeast ? "from " : "above ") + show(least, dimension);
+        if (Double.isInfinite(most)) {
+            return Double.isInfinite(least) ? "" : low.replace("from", "at least");
+        }
+        return low + (withMost ? " to " : " to below ") + show(most, dimension);
+    }
+
+    private static String show(double value, Dimension dimension) {
+        return QuantityWriter.show(value, dimension);
+    }
+}
