@@ -30,10 +30,13 @@ public record Bounds(double least, boolean withLeast, double most, boolean withM
 
     /** In words, for example "above 0 A" or "from 0 % to below 100 %"; empty when any number will do. */
     String words(Dimension dimension) {
-        String low = (withLeast ? "from " : "above ") + show(least, dimension);
-        if (Double.isInfinite(most)) {
-            return Double.isInfinite(least) ? "" : low.replace("from", "at least");
+        if (Double.isInfinite(least)) {
+            return Double.isInfinite(most) ? "" : (withMost ? "up to " : "below ") + show(most, dimension);
         }
+        if (Double.isInfinite(most)) {
+            return (withLeast ? "at least " : "above ") + show(least, dimension);
+        }
+        String low = (withLeast ? "from " : "above ") + show(least, dimension);
         return low + (withMost ? " to " : " to below ") + show(most, dimension);
     }
 
