@@ -1,0 +1,51 @@
+package shuntwright.accuracy;
+
+import java.util.List;
+
+import shuntwright.quantity.Range;
+
+/**
+ * One outcome of a solved channel: all answers from one description of the inputs; currents in A.
+ *
+ * @param outcome  which
+ * @param nominal  with every input at its nominal value
+ * @param limits   exact extremes over the box of inputs
+ * @param combined JCGM 100
+ * @param allowed  what the demand allows
+ * @param budget   contributions, largest first
+ */
+public record Assessment(Outcome outcome, double nominal, Range limits, CombinedUncertainty combined, Range allowed,
+        List<BudgetLine> budget) {
+
+    public Assessment {
+        budget = List.copyOf(budget);
+    }
+
+    /** True when the limits are within what is allowed. */
+    public boolean insideByLimits() {
+        return allowed.contains(limits);
+    }
+
+    /** True when the coverage interval is within what is allowed. */
+    public boolean insideByCoverage() {
+        return allowed.contains(combined.interval());
+    }
+
+    /**
+     * Slack of the limits as a share of the allowed half-width: 1 at a point in the middle, 0 when a limit touches,
+     * negative when it sticks out.
+     */
+    public double margin() {
+        return slack(limits);
+    }
+
+    /** The same for the coverage interval. */
+    public double coverageMargin() {
+        return slack(combined.interval());
+    }
+
+    private double slack(Range reached) {
+        double half = allowed.width() / 2;
+        return Math.min(reached.min() - allowed.min(), allowed.max() - reached.max()) / half;
+    }
+}

@@ -1,0 +1,22 @@
+package shuntwright.circuit;
+
+/**
+ * A limit applied to a circuit.
+ *
+ * @param limit   which
+ * @param reached the circuit's value, in the limit's dimension
+ * @param bound   what it must keep to
+ * @param atMost  true when {@code reached} must not exceed {@code bound}, false when it must not fall below
+ */
+public record LimitCheck(Limit limit, double reached, double bound, boolean atMost) {
+
+    /** True when the limit is respected; false also when a value is not a number. */
+    public boolean holds() {
+        return atMost ? reached <= bound : reached >= bound;
+    }
+
+    /** By how much the limit is missed, in its dimension; ≤ 0 when it holds. */
+    public double miss() {
+        return atMost ? reached - bound : bound - reached;
+    }
+}

@@ -1,0 +1,47 @@
+package shuntwright.plan;
+
+import java.util.List;
+import java.util.Optional;
+
+import shuntwright.board.Board;
+
+/**
+ * A planned board.
+ *
+ * @param board    what was asked
+ * @param currency ISO 4217 code of all costs
+ * @param channels in the board's order
+ * @param shared   supply, references, heat
+ * @param alerts   alert lines
+ * @param taps     shared thresholds
+ * @param parts    the consolidated parts list, by designator letter and part number
+ * @param findings about the board as a whole
+ */
+public record Plan(Board board, String currency, List<ChannelPlan> channels, List<SharedUse> shared,
+        List<AlertPlan> alerts, List<TapPlan> taps, List<PartUse> parts, List<Finding> findings) {
+
+    public Plan {
+        channels = List.copyOf(channels);
+        shared = List.copyOf(shared);
+        alerts = List.copyOf(alerts);
+        taps = List.copyOf(taps);
+        parts = List.copyOf(parts);
+        findings = List.copyOf(findings);
+    }
+
+    public Optional<ChannelPlan> channel(String name) {
+        return channels.stream().filter(each -> each.channel().name().equals(name)).findFirst();
+    }
+
+    /** True when every channel is accepted and no finding about the board is a fault. */
+    public boolean accepted() {
+        return channels.stream().allMatch(ChannelPlan::accepted)
+                && findings.stream().noneMatch(each -> each.key().severity() == Finding.Severity.FAULT);
+    }
+
+    /** Cost of the parts of one board at the prices of the build quantity. */
+    public double costPerBoard() {
+        return parts.stream().mapToDouble(
+                each -> each.quantity() * each.purchase().unitPriceAt(each.quantity() * board.buildQuantity())).sum();
+    }
+}

@@ -1,0 +1,29 @@
+package shuntwright.plan;
+
+/** Told of long work, and asked whether to go on. */
+public interface Progress {
+
+    /** Hears nothing, never stops. */
+    Progress SILENT = new Progress() {
+        @Override
+        public void reached(String stage, int done, int total) {
+        }
+
+        @Override
+        public boolean cancelled() {
+            return false;
+        }
+    };
+
+    /**
+     * Called from the working thread.
+     *
+     * @param stage what is being done, in words
+     * @param done  steps done
+     * @param total steps in all
+     */
+    void reached(String stage, int done, int total);
+
+    /** True when the work should stop at the next step. */
+    boolean cancelled();
+}

@@ -1,0 +1,27 @@
+package shuntwright.plan;
+
+import java.util.OptionalDouble;
+
+import shuntwright.quantity.Dimension;
+
+/**
+ * What all channels together take of a shared thing.
+ *
+ * @param kind      which kind of thing
+ * @param name      which one, for example "supply", "reference quiet", "zone port"
+ * @param used      SI
+ * @param limit     SI; empty when none is set
+ * @param dimension current or power
+ */
+public record SharedUse(Kind kind, String name, double used, OptionalDouble limit, Dimension dimension) {
+
+    /** Kinds of shared things. */
+    public enum Kind {
+        SUPPLY, REFERENCE, BOARD_HEAT, ZONE_HEAT
+    }
+
+    /** True when there is no limit or it is kept. */
+    public boolean holds() {
+        return limit.isEmpty() || used <= limit.getAsDouble();
+    }
+}
