@@ -1,5 +1,7 @@
 package shuntwright.io.form;
 
+import java.util.function.DoubleFunction;
+
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 
@@ -30,17 +32,22 @@ public record Bounds(double least, boolean withLeast, double most, boolean withM
 
     /** In words, for example "above 0 A" or "from 0 % to below 100 %"; empty when any number will do. */
     String words(Dimension dimension) {
-        if (Double.isInfinite(least)) {
-            return Double.isInfinite(most) ? "" : (withMost ? "up to " : "below ") + show(most, dimension);
-        }
-        if (Double.isInfinite(most)) {
-            return (withLeast ? "at least " : "above ") + show(least, dimension);
-        }
-        String low = (withLeast ? "from " : "above ") + show(least, dimension);
-        return low + (withMost ? " to " : " to below ") + show(most, dimension);
+        return words(value -> QuantityWriter.show(value, dimension));
     }
 
-    private static String show(double value, Dimension dimension) {
-        return QuantityWriter.show(value, dimension);
+    /** The same for numbers without a unit. */
+    String plainWords() {
+        return words(value -> value == Math.rint(value) ? String.valueOf(Math.round(value)) : String.valueOf(value));
+    }
+
+    private String words(DoubleFunction<String> show) {
+        if (Double.isInfinite(least)) {
+            return Double.isInfinite(most) ? "" : (withMost ? "up to " : "below ") + show.apply(most);
+        }
+        if (Double.isInfinite(most)) {
+            return (withLeast ? "at least " : "above ") + show.apply(least);
+        }
+        return (withLeast ? "from " : "above ") + show.apply(least) + (withMost ? " to " : " to below ")
+                + show.apply(most);
     }
 }

@@ -1,7 +1,6 @@
 package shuntwright.io.form;
 
 import java.util.HashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -22,10 +21,9 @@ public final class Fields {
 
     static Fields read(LocatedJson.Obj object, Form<?> form, Problems problems) {
         Fields fields = new Fields(object, problems);
-        List<String> names = form.keys().stream().map(Key::name).toList();
         for (LocatedJson.Member member : object.members()) {
-            if (!names.contains(member.key())) {
-                problems.add(member.place(), NearestWord.unknown("key", member.key(), names));
+            if (!form.names().contains(member.key())) {
+                problems.add(member.place(), NearestWord.unknown("key", member.key(), form.names()));
             }
         }
         for (Key<?> key : form.keys()) {

@@ -2,9 +2,11 @@ package shuntwright.io.form;
 
 import java.util.ArrayList;
 import java.util.Collections;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 
 import shuntwright.io.json.Json;
 import shuntwright.io.json.LocatedJson;
@@ -18,6 +20,7 @@ import shuntwright.io.json.Problems;
 public abstract class Form<T> implements Kind<T> {
     private final String title;
     private final List<Key<?>> keys = new ArrayList<>();
+    private final Set<String> names = new LinkedHashSet<>();
 
     /** @param title heading of its table in the documentation, for example "Alert line" */
     protected Form(String title) {
@@ -41,6 +44,7 @@ public abstract class Form<T> implements Kind<T> {
 
     private <V> Key<V> add(Key<V> key) {
         keys.add(key);
+        names.add(key.name());
         return key;
     }
 
@@ -65,7 +69,7 @@ public abstract class Form<T> implements Kind<T> {
     @Override
     public final Optional<T> read(LocatedJson value, Problems problems) {
         if (!(value instanceof LocatedJson.Obj object)) {
-            problems.add(value, "an object { … } with the keys " + keyNames() + " is needed here, not "
+            problems.add(value, "an object { … } with the keys " + String.join(", ", names) + " is needed here, not "
                     + value.inWords());
             return Optional.empty();
         }
@@ -84,8 +88,8 @@ public abstract class Form<T> implements Kind<T> {
         }
     }
 
-    final String keyNames() {
-        return String.join(", ", keys.stream().map(Key::name).toList());
+    final Set<String> names() {
+        return Collections.unmodifiableSet(names);
     }
 
     @Override

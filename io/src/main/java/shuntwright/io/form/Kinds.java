@@ -138,20 +138,25 @@ public final class Kinds {
         }
     }
 
-    private record BareKind(String unit, Bounds bounds) implements Kind<Double> {
+    private record BareKind(String name, Bounds bounds) implements Kind<Double> {
         @Override
         public Optional<Double> read(LocatedJson value, Problems problems) {
             if (value instanceof LocatedJson.Num num && bounds.allow(num.value())
                     && Double.isFinite(num.value())) {
                 return Optional.of(num.value());
             }
-            return refuse(value, "a number (" + unit + ") is needed here, without quotes, not " + value.inWords(),
+            return refuse(value, "a number (" + unit() + ") is needed here, without quotes, not " + value.inWords(),
                     problems);
         }
 
         @Override
         public Json write(Double value) {
             return new Json.Num(value);
+        }
+
+        @Override
+        public String unit() {
+            return name + ", " + bounds.plainWords();
         }
     }
 

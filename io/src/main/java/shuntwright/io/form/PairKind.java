@@ -42,6 +42,6 @@ public record PairKind<A, B, V>(String names, Kind<A> first, Kind<B> second, BiF
 
     @Override
     public String unit() {
-        return "pairs `" + names + "`";
+        return "pairs `" + names + "` (" + first.unit() + "; " + second.unit() + ")";
     }
 }

@@ -1,5 +1,6 @@
 package shuntwright.io.form;
 
+import java.util.List;
 import java.util.function.Function;
 
 import shuntwright.quantity.Dimension;
@@ -33,7 +34,13 @@ public final class Quantities {
     }
 
     private static String withoutSigns(String text) {
-        return text.strip().replaceFirst("^(±|\\+/-|\\+-)\\s*", "");
+        String stripped = text.strip();
+        for (String signs : List.of("±", "+/-", "+-")) {
+            if (stripped.startsWith(signs)) {
+                return stripped.substring(signs.length());
+            }
+        }
+        return stripped;
     }
 
     /** Two ends. */

@@ -26,6 +26,10 @@ import shuntwright.quantity.Reading;
 record QuantityKind<V>(Dimension dimension, Bounds bounds, String shape, Function<String, Reading<V>> reader,
         DoubleFunction<V> bare, Function<V, String> writer, Function<V, double[]> numbers) implements Kind<V> {
 
+    QuantityKind {
+        reader = new RememberedTexts<>(reader);
+    }
+
     @Override
     public Optional<V> read(LocatedJson value, Problems problems) {
         return switch (value) {

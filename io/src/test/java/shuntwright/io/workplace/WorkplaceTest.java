@@ -3,6 +3,8 @@ package shuntwright.io.workplace;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
+import java.lang.management.ManagementFactory;
+import java.lang.management.ThreadMXBean;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
@@ -86,13 +88,19 @@ class WorkplaceTest {
         }
         Path board = board("\"a.json\"", ", \"channels\": [" + String.join(",", channels) + "]");
 
-        long start = System.nanoTime();
-        Workplace workplace = Workplace.open(board, List.of()).ifOpened().orElseThrow();
-        Duration taken = Duration.ofNanos(System.nanoTime() - start);
+        ThreadMXBean clock = ManagementFactory.getThreadMXBean();
+        Duration best = Duration.ofHours(1);
+        for (int i = 0; i < 4; i++) {
+            long start = clock.getCurrentThreadCpuTime();
+            Workplace workplace = Workplace.open(board, List.of()).ifOpened().orElseThrow();
+            Duration taken = Duration.ofNanos(clock.getCurrentThreadCpuTime() - start);
+            best = taken.compareTo(best) < 0 ? taken : best;
 
-        assertThat(workplace.board().channels()).hasSize(64);
-        assertThat(workplace.catalogue().shunts()).hasSize(5000);
-        // Well under a second on a quiet machine; the bound leaves room for a busy one and a cold start.
-        assertThat(taken).isLessThan(Duration.ofSeconds(3));
+            assertThat(workplace.board().channels()).hasSize(64);
+            assertThat(workplace.catalogue().shunts()).hasSize(5000);
+        }
+
+        // Time of this thread, and the best of a few, because other work of the machine is no property of the program.
+        assertThat(best).isLessThan(Duration.ofMillis(800));
     }
 }
