@@ -23,6 +23,8 @@ final class PinsForm extends Form<Pins> {
     private final Key<String> amplifier = optional("amplifier", Kinds.name(), FREE,
             "part number of the sense amplifier");
     private final Key<String> comparator = optional("comparator", Kinds.name(), FREE, "part number of the comparator");
+    private final Key<String> resistors = optional("resistors", Kinds.name(), FREE,
+            "part number of the series of divider and hysteresis resistors");
     private final Key<Double> dividerTop = optional("dividerTop", RESISTANCE, FREE,
             "resistor from the source to the threshold");
     private final Key<Double> dividerBottom = optional("dividerBottom", RESISTANCE, FREE,
@@ -38,7 +40,8 @@ final class PinsForm extends Form<Pins> {
     protected Pins bind(Fields fields) {
         OptionalInt count = fields.find(shuntCount).map(OptionalInt::of).orElse(OptionalInt.empty());
         return new Pins(fields.find(shunt), count, fields.find(amplifier), fields.find(comparator),
-                fields.number(dividerTop), fields.number(dividerBottom), fields.number(hysteresisResistor));
+                fields.find(resistors), fields.number(dividerTop), fields.number(dividerBottom),
+                fields.number(hysteresisResistor));
     }
 
     @Override
@@ -47,6 +50,7 @@ final class PinsForm extends Form<Pins> {
         value.shuntCount().ifPresent(count -> sheet.put(shuntCount, count));
         sheet.put(amplifier, value.amplifier());
         sheet.put(comparator, value.comparator());
+        sheet.put(resistors, value.resistors());
         sheet.put(dividerTop, value.dividerTop());
         sheet.put(dividerBottom, value.dividerBottom());
         sheet.put(hysteresisResistor, value.hysteresisResistor());

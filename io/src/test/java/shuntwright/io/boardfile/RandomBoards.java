@@ -81,7 +81,7 @@ final class RandomBoards {
         return random.nextBoolean()
                 ? Pins.NONE
                 : new Pins(maybe(this::name), OptionalInt.of(random.nextInt(1, 5)), maybe(this::name),
-                        maybe(this::name), maybeNumber(), maybeNumber(), maybeNumber());
+                        maybe(this::name), maybe(this::name), maybeNumber(), maybeNumber(), maybeNumber());
     }
 
     private List<TimePoint> inrush() {
