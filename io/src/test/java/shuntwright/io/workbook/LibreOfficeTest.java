@@ -29,6 +29,15 @@ class LibreOfficeTest {
 
     private static final Plan PLAN = PlanFixtures.full();
     private static final int BOARDS = 997;
+    /** A profile that computes every formula on opening instead of showing stored results. */
+    private static final String ALWAYS_COMPUTE = """
+            <?xml version="1.0" encoding="UTF-8"?>
+            <oor:items xmlns:oor="http://openoffice.org/2001/registry">
+            <item oor:path="/org.openoffice.Office.Calc/Formula/Load">
+            <prop oor:name="OOXMLRecalcMode" oor:op="fuse"><value>0</value></prop>
+            </item>
+            </oor:items>
+            """;
 
     @Test
     void computesWhatThePlanSays(@TempDir Path room) throws IOException, InterruptedException {
@@ -41,6 +50,8 @@ class LibreOfficeTest {
                 book.write(out);
             }
         }
+        Path user = Files.createDirectories(room.resolve("profile/user"));
+        Files.writeString(user.resolve("registrymodifications.xcu"), ALWAYS_COMPUTE);
         Path computed = Files.createDirectory(room.resolve("computed"));
         Process office = new ProcessBuilder("soffice", "-env:UserInstallation=" + room.resolve("profile").toUri(),
                 "--headless", "--convert-to", "xlsx", "--outdir", computed.toString(), changed.toString())
