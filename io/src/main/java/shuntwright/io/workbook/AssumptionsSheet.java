@@ -17,6 +17,8 @@ final class AssumptionsSheet {
 
     static final String NAME = "Assumptions and cautions";
 
+    private static final String BOARD = "Board";
+
     private static final List<String> MODEL = List.of(
             "A shunt turns the current into a voltage, a sense amplifier multiplies it by its gain, a comparator "
                     + "compares the product with a threshold. Nominal trip current: threshold ÷ gain ÷ R_s, where R_s is "
@@ -34,35 +36,32 @@ final class AssumptionsSheet {
                     + "and do not follow when a value is changed here.");
 
     /** One line of the sheet. */
-    private record Line(String section, String item, OptionalDouble from, OptionalDouble to, String unit,
-            String text) {
+    private record Line(String section, String item, Column.Content value, OptionalDouble to, String unit) {
         static Line words(String section, String text) {
-            return new Line(section, "", OptionalDouble.empty(), OptionalDouble.empty(), "", text);
+            return new Line(section, text, new Column.Content.Empty(), OptionalDouble.empty(), "");
         }
 
         static Line text(String item, String text) {
-            return new Line("Board", item, OptionalDouble.empty(), OptionalDouble.empty(), "", text);
+            return new Line(BOARD, item, new Column.Content.Text(text), OptionalDouble.empty(), "");
         }
 
         static Line number(String item, double value, String unit) {
-            return new Line("Board", item, OptionalDouble.of(value), OptionalDouble.empty(), unit, "");
+            return new Line(BOARD, item, new Column.Content.Figure(value), OptionalDouble.empty(), unit);
         }
 
         static Line maybe(String item, OptionalDouble value, String unit) {
-            return new Line("Board", item, value, OptionalDouble.empty(), unit,
-                    value.isPresent() ? "" : "no limit set");
+            return value.isPresent() ? number(item, value.getAsDouble(), unit) : text(item, "no limit set");
         }
 
         static Line range(String item, Range range, String unit) {
-            return new Line("Board", item, OptionalDouble.of(range.min()), OptionalDouble.of(range.max()), unit, "");
+            return new Line(BOARD, item, new Column.Content.Figure(range.min()), OptionalDouble.of(range.max()), unit);
         }
     }
 
-    private static final List<Column<Line>> COLUMNS = List.of(Column.text("", "Section", 14, Line::section),
-            Column.text("", "Item", 44, Line::item),
-            Column.maybeNumber("", "Value, or from", 12, Style.GENERAL, Line::from),
-            Column.maybeNumber("", "To", 12, Style.GENERAL, Line::to), Column.text("", "Unit", 9, Line::unit),
-            Column.wrapped("Text", 90, Line::text));
+    private static final List<Column<Line>> COLUMNS = List.of(Column.text("", "Section", 12, Line::section),
+            Column.wrapped("Statement or item", 88, Line::item),
+            new Column<>("", "Value, or from", 16, Style.GENERAL, (row, _) -> row.value()),
+            Column.maybeNumber("", "To", 12, Style.GENERAL, Line::to), Column.text("", "Unit", 9, Line::unit));
 
     private AssumptionsSheet() {
     }
@@ -77,7 +76,9 @@ final class AssumptionsSheet {
 
     private static void board(Board board, List<Line> lines) {
         lines.add(Line.text("Name", board.name()));
-        lines.add(Line.text("Description", board.description()));
+        if (!board.description().isEmpty()) {
+            lines.add(Line.words(BOARD, board.description()));
+        }
         board.partsFiles().forEach(each -> lines.add(Line.text("Parts file", each)));
         lines.add(Line.number("Channels", board.channels().size(), ""));
         lines.add(Line.number("Build quantity", board.buildQuantity(), "boards"));
@@ -95,9 +96,9 @@ final class AssumptionsSheet {
         });
         lines.add(Line.maybe("Heat of all shunts, at most", board.heatLimit(), "W"));
         board.zones().forEach(each -> lines.add(Line.maybe("Heat of zone " + each.name(), each.heatLimit(), "W")));
-        lines.add(Line.text("Accepted", switch (board.acceptance().basis()) {
-            case LIMITS -> "channels that are inside by limits";
-            case COVERAGE -> "channels that are inside by limits, or whose coverage interval is";
+        lines.add(Line.words(BOARD, switch (board.acceptance().basis()) {
+            case LIMITS -> "Accepted are channels that are inside by limits.";
+            case COVERAGE -> "Accepted are channels that are inside by limits, or whose coverage interval is inside.";
         }));
         lines.add(Line.number("Coverage probability", 100 * board.acceptance().coverage(), "%"));
         rules(board.rules(), lines);

@@ -54,44 +54,65 @@ final class Look {
         made.setDataFormat(book.createDataFormat().getFormat(style.format()));
         made.setVerticalAlignment(VerticalAlignment.TOP);
         switch (style) {
-            case TITLE -> made.setFont(font(true, 16));
-            case LABEL -> made.setFont(font(false, 10));
+            case TITLE -> {
+                made.setFont(font(true, 16));
+            }
+            case LABEL -> {
+                made.setFont(font(false, 10));
+                indent(made);
+            }
             case GROUP -> {
                 made.setFont(font(true, 10));
+                indent(made);
                 made.setVerticalAlignment(VerticalAlignment.BOTTOM);
             }
             case HEADER -> {
-                made.setFont(font(true, 10));
-                made.setWrapText(true);
-                made.setVerticalAlignment(VerticalAlignment.BOTTOM);
-                tint(made, HEADER_TINT);
-                made.setBorderBottom(BorderStyle.MEDIUM);
-                made.setBottomBorderColor(colour(PETROL));
+                header(made);
+                indent(made);
+            }
+            case NUMBER_HEADER -> {
+                header(made);
+                made.setAlignment(HorizontalAlignment.RIGHT);
             }
             case WRAPPED -> {
                 made.setWrapText(true);
+                indent(made);
+                line(made);
+            }
+            case TEXT -> {
+                indent(made);
                 line(made);
             }
             case INPUT_COUNT, INPUT_SHARE -> {
                 tint(made, INPUT_TINT);
                 box(made);
-                made.setAlignment(HorizontalAlignment.LEFT);
+                indent(made);
             }
             case TOTAL_MONEY, TOTAL_COUNT -> {
                 made.setFont(font(true, 11));
-                made.setAlignment(HorizontalAlignment.LEFT);
+                indent(made);
             }
             case GOOD -> verdict(made, GOOD_TINT);
             case FAIR -> verdict(made, FAIR_TINT);
             case BAD -> verdict(made, BAD_TINT);
-            case TEXT, COUNT, VOLT, AMPERE, MILLIOHM, OHM, GAIN, PERCENT, WATT, MONEY, UNIT_PRICE, GENERAL ->
+            case COUNT, VOLT, AMPERE, MILLIOHM, OHM, GAIN, PERCENT, WATT, MONEY, UNIT_PRICE, GENERAL ->
                 line(made);
         }
         return made;
     }
 
+    private void header(XSSFCellStyle style) {
+        style.setFont(font(true, 10));
+        style.setWrapText(true);
+        style.setVerticalAlignment(VerticalAlignment.BOTTOM);
+        tint(style, HEADER_TINT);
+        style.setBorderBottom(BorderStyle.MEDIUM);
+        style.setBottomBorderColor(colour(PETROL));
+    }
+
     private XSSFFont font(boolean bold, int points) {
         XSSFFont font = book.createFont();
+        font.setFontName(XSSFFont.DEFAULT_FONT_NAME);
         font.setBold(bold);
         font.setFontHeightInPoints((short) points);
         font.setColor(colour(PETROL));
@@ -100,7 +121,13 @@ final class Look {
 
     private static void verdict(XSSFCellStyle style, int tint) {
         tint(style, tint);
+        indent(style);
         line(style);
+    }
+
+    private static void indent(XSSFCellStyle style) {
+        style.setAlignment(HorizontalAlignment.LEFT);
+        style.setIndention((short) 1);
     }
 
     private static void tint(XSSFCellStyle style, int tint) {
@@ -115,9 +142,13 @@ final class Look {
 
     private static void box(XSSFCellStyle style) {
         style.setBorderBottom(BorderStyle.THIN);
+        style.setBottomBorderColor(colour(LINE));
         style.setBorderTop(BorderStyle.THIN);
+        style.setTopBorderColor(colour(LINE));
         style.setBorderLeft(BorderStyle.THIN);
+        style.setLeftBorderColor(colour(LINE));
         style.setBorderRight(BorderStyle.THIN);
+        style.setRightBorderColor(colour(LINE));
     }
 
     private static XSSFColor colour(int rgb) {

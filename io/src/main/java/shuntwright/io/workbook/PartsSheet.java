@@ -26,16 +26,16 @@ final class PartsSheet {
     private record Line(PartUse part, int line) {}
 
     private final Plan plan;
-    private final Column<Line> needed = Column.live("Needed, pieces", 10, Style.COUNT,
+    private final Column<Line> needed = Column.live("Needed, pieces", 9, Style.COUNT,
             (row, cells) -> new Column.Content.Formula(
                     "ROUNDUP(ROUND(" + cells.at(quantity()) + "*BuildQuantity*(1+Attrition),6),0)"));
-    private final Column<Line> quantity = Column.number("Pieces per board", 10, Style.COUNT,
+    private final Column<Line> quantity = Column.number("Pieces per board", 8, Style.COUNT,
             row -> row.part().quantity());
-    private final Column<Line> minimum = Column.number("Minimum order, pieces", 11, Style.COUNT,
+    private final Column<Line> minimum = Column.number("Minimum order, pieces", 10, Style.COUNT,
             row -> row.part().purchase().minimumOrder());
-    private final Column<Line> pack = Column.number("Pack, pieces", 9, Style.COUNT,
+    private final Column<Line> pack = Column.number("Pack, pieces", 8, Style.COUNT,
             row -> row.part().purchase().packSize());
-    private final Column<Line> order = Column.live("Order, pieces", 10, Style.COUNT, this::orderQuantity);
+    private final Column<Line> order = Column.live("Order, pieces", 9, Style.COUNT, this::orderQuantity);
     private final Column<Line> unitPrice;
     private final Column<Line> extended;
     private final Column<Line> onBoard;
@@ -43,13 +43,13 @@ final class PartsSheet {
     private PartsSheet(Plan plan) {
         this.plan = plan;
         String currency = plan.currency();
-        unitPrice = Column.live("Unit price reached, " + currency, 12, Style.UNIT_PRICE,
+        unitPrice = Column.live("Unit price reached, " + currency, 11, Style.UNIT_PRICE,
                 (row, cells) -> new Column.Content.Formula(price(row, cells.at(order))));
         extended = Column.live("Extended price, " + currency, 13, Style.MONEY, (row, cells) -> {
             String price = cells.at(unitPrice);
             return new Column.Content.Formula("IF(" + price + "=\"\",\"\"," + cells.at(order) + "*" + price + ")");
         });
-        onBoard = Column.live("On one board, at the price of the pieces needed, " + currency, 16, Style.UNIT_PRICE,
+        onBoard = Column.live("On one board, at needed pieces' price, " + currency, 13, Style.UNIT_PRICE,
                 (row, cells) -> {
                     String there = "COUNT(" + PricesSheet.quantities(plan, row.line()) + ")=0";
                     return new Column.Content.Formula("IF(" + there + ",\"\"," + cells.at(quantity) + "*"
@@ -67,13 +67,13 @@ final class PartsSheet {
 
     private void write(XSSFWorkbook book, Look look) {
         List<Column<Line>> columns = List.of(
-                Column.text("", "Part number", 24, row -> row.part().partNumber()),
-                Column.wrapped("Description", 34, row -> row.part().description()),
-                Column.text("", "Body", 10, row -> row.part().purchase().body()), quantity,
-                Column.wrapped("Designators", 24, row -> Designators.fold(row.part().designators())), needed, minimum,
+                Column.text("", "Part number", 19, row -> row.part().partNumber()),
+                Column.wrapped("Description", 30, row -> row.part().description()),
+                Column.text("", "Body", 8, row -> row.part().purchase().body()), quantity,
+                Column.wrapped("Designators", 20, row -> Designators.fold(row.part().designators())), needed, minimum,
                 pack, order, unitPrice, extended, onBoard,
-                Column.wrapped("Supplier", 16, row -> row.part().purchase().supplier()),
-                Column.wrapped("Lifecycle", 14, row -> row.part().purchase().lifecycle()));
+                Column.wrapped("Supplier", 14, row -> row.part().purchase().supplier()),
+                Column.wrapped("Lifecycle", 13, row -> row.part().purchase().lifecycle()));
         TableSheet<Line> table = new TableSheet<>(book.createSheet(NAME), look, "Parts list: " + plan.board().name(),
                 columns, 7);
         int rows = plan.parts().size();

@@ -26,7 +26,7 @@ final class SettingsSheet {
     static final String NAME = "Settings";
     /** Formulas stand only where they give the plan's number to within this share of it. */
     private static final double AGREES = 1e-12;
-    private static final int A = 9;
+    private static final int A = 10;
 
     private static final Column<ChannelPlan> RESISTANCE = number("Chosen parts", "R_s, mΩ", Style.MILLIOHM,
             it -> 1000 * it.circuit().resistance());
@@ -38,53 +38,54 @@ final class SettingsSheet {
             it -> divider(it, Threshold.Divider::top));
     private static final Column<ChannelPlan> BOTTOM = maybe("Threshold", "R_b, Ω", Style.OHM,
             it -> divider(it, Threshold.Divider::bottom));
-    private static final Column<ChannelPlan> THRESHOLD = new Column<>("Threshold", "Nominal, V", A, Style.VOLT,
+    private static final Column<ChannelPlan> THRESHOLD = new Column<>("Threshold", "Threshold nominal, V", A,
+            Style.VOLT,
             (row, cells) -> row.solved().map(it -> threshold(it, cells)).orElseGet(Column.Content.Empty::new));
-    private static final Column<ChannelPlan> TRIP = new Column<>("Trip current", "Nominal, A", A, Style.AMPERE,
+    private static final Column<ChannelPlan> TRIP = new Column<>("Trip current", "Trip nominal, A", A, Style.AMPERE,
             (row, cells) -> row.solved().map(it -> trip(it, cells)).orElseGet(Column.Content.Empty::new));
 
     private static final List<Column<ChannelPlan>> COLUMNS = List.of(
-            Column.text("", "Channel", 18, row -> row.channel().name()),
+            Column.text("", "Channel", 12, row -> row.channel().name()),
             new Column<>("", "Verdict", 11, Style.TEXT, (row, _) -> verdict(row)),
-            Column.maybeNumber("", "Margin, % of half window", 11, Style.PERCENT, row -> row.solved()
+            Column.maybeNumber("", "Margin, % of half window", 10, Style.PERCENT, row -> row.solved()
                     .map(it -> OptionalDouble.of(100 * it.margin())).orElseGet(OptionalDouble::empty)),
-            text("Chosen parts", "Shunt", 20, it -> it.circuit().shunt().partNumber()),
+            text("Chosen parts", "Shunt", 11, it -> it.circuit().shunt().partNumber()),
             number("Chosen parts", "In parallel", Style.COUNT, it -> it.circuit().shuntCount()), RESISTANCE,
-            text("Chosen parts", "Amplifier", 20, it -> it.circuit().amplifier().partNumber()), GAIN,
-            text("Chosen parts", "Comparator", 20, it -> it.circuit().comparator().partNumber()),
-            text("Threshold", "From", 11, it -> it.circuit().threshold().source().source().word()),
+            text("Chosen parts", "Amplifier", 11, it -> it.circuit().amplifier().partNumber()), GAIN,
+            text("Chosen parts", "Comparator", 12, it -> it.circuit().comparator().partNumber()),
+            text("Threshold", "Threshold source", 12, it -> it.circuit().threshold().source().source().word()),
             text("Threshold", "Tap", 9, it -> it.circuit().threshold().tapName()), SOURCE, TOP, BOTTOM,
             maybe("Threshold", "DAC code", Style.COUNT, SettingsSheet::code), THRESHOLD,
-            number("Threshold", "Lowest, V", Style.VOLT, it -> it.settings().thresholdLimits().min()),
-            number("Threshold", "Highest, V", Style.VOLT, it -> it.settings().thresholdLimits().max()),
-            text("Hysteresis", "Resistor", 9, SettingsSheet::network),
-            maybe("Hysteresis", "Value, Ω", Style.OHM, SettingsSheet::networkValue),
-            maybe("Hysteresis", "Release at, V", Style.VOLT, it -> it.settings().releaseVoltage()),
-            outcome("Trip current", "Must not below, A", Outcome.TRIP, it -> it.allowed().min()),
-            outcome("Trip current", "Lowest, A", Outcome.TRIP, it -> it.limits().min()), TRIP,
-            outcome("Trip current", "Highest, A", Outcome.TRIP, it -> it.limits().max()),
-            outcome("Trip current", "Must at, A", Outcome.TRIP, it -> it.allowed().max()),
-            outcome("Release current", "Allowed from, A", Outcome.RELEASE, it -> it.allowed().min()),
-            outcome("Release current", "Lowest, A", Outcome.RELEASE, it -> it.limits().min()),
-            outcome("Release current", "Nominal, A", Outcome.RELEASE, Assessment::nominal),
-            outcome("Release current", "Highest, A", Outcome.RELEASE, it -> it.limits().max()),
-            outcome("Release current", "Allowed to, A", Outcome.RELEASE, it -> it.allowed().max()),
-            error("at least current, ±%", Outcome.READING_AT_LEAST, SettingsSheet::reached),
-            error("allowed, ±%", Outcome.READING_AT_LEAST, SettingsSheet::allowed),
-            error("at load current, ±%", Outcome.READING_AT_LOAD, SettingsSheet::reached),
-            error("allowed at load, ±%", Outcome.READING_AT_LOAD, SettingsSheet::allowed),
-            number("Shunt heat", "At load, counted, W", Style.WATT, SolvedChannel::heat),
-            maybe("Shunt heat", "At no-trip, W", Style.WATT, it -> power(it, LimitCheck::reached)),
-            maybe("Shunt heat", "Allowed, W", Style.WATT, it -> power(it, LimitCheck::bound)));
+            number("Threshold", "Threshold lowest, V", Style.VOLT, it -> it.settings().thresholdLimits().min()),
+            number("Threshold", "Threshold highest, V", Style.VOLT, it -> it.settings().thresholdLimits().max()),
+            text("Hysteresis", "Hysteresis resistor", 12, SettingsSheet::network),
+            maybe("Hysteresis", "Its value, Ω", Style.OHM, SettingsSheet::networkValue),
+            maybe("Hysteresis", "Output at release, V", Style.VOLT, it -> it.settings().releaseVoltage()),
+            outcome("Trip current", "No-trip current, A", Outcome.TRIP, it -> it.allowed().min()),
+            outcome("Trip current", "Trip lowest, A", Outcome.TRIP, it -> it.limits().min()), TRIP,
+            outcome("Trip current", "Trip highest, A", Outcome.TRIP, it -> it.limits().max()),
+            outcome("Trip current", "Must-trip current, A", Outcome.TRIP, it -> it.allowed().max()),
+            outcome("Release current", "Release from, A", Outcome.RELEASE, it -> it.allowed().min()),
+            outcome("Release current", "Release lowest, A", Outcome.RELEASE, it -> it.limits().min()),
+            outcome("Release current", "Release nominal, A", Outcome.RELEASE, Assessment::nominal),
+            outcome("Release current", "Release highest, A", Outcome.RELEASE, it -> it.limits().max()),
+            outcome("Release current", "Release to, A", Outcome.RELEASE, it -> it.allowed().max()),
+            error("Error at least current, %", Outcome.READING_AT_LEAST, SettingsSheet::reached),
+            error("Allowed there, %", Outcome.READING_AT_LEAST, SettingsSheet::allowed),
+            error("Error at load current, %", Outcome.READING_AT_LOAD, SettingsSheet::reached),
+            error("Allowed at load, %", Outcome.READING_AT_LOAD, SettingsSheet::allowed),
+            number("Shunt heat", "Heat at load, W", Style.WATT, SolvedChannel::heat),
+            maybe("Shunt heat", "One shunt at no-trip, W", Style.WATT, it -> power(it, LimitCheck::reached)),
+            maybe("Shunt heat", "Allowed for one, W", Style.WATT, it -> power(it, LimitCheck::bound)));
 
     private SettingsSheet() {
     }
 
     static void add(XSSFWorkbook book, Look look, Plan plan) {
         XSSFSheet sheet = book.createSheet(NAME);
-        TableSheet<ChannelPlan> table = new TableSheet<>(sheet, look, "Settings: " + plan.board().name(), COLUMNS, 1);
+        TableSheet<ChannelPlan> table = new TableSheet<>(sheet, look, NAME, COLUMNS, 1);
         table.add(plan.channels());
-        sheet.getPrintSetup().setFitWidth((short) 2);
+        sheet.getPrintSetup().setFitWidth((short) 3);
         sheet.setRepeatingRows(new CellRangeAddress(2, 3, -1, -1));
         sheet.setRepeatingColumns(new CellRangeAddress(-1, -1, 0, 0));
         sheet.setAutobreaks(true);

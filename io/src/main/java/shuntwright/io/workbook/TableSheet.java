@@ -19,13 +19,19 @@ import shuntwright.io.planfile.Cautions;
 final class TableSheet<T> {
 
     private static final int POINTS_PER_LINE = 14;
+    private static final int ABOVE_HEIGHT = 17;
     /** Excel measures widths in 1/256 of a digit. */
     private static final int WIDTH_UNIT = 256;
+    /** Characters of prose for each 100 digits of width: letters are narrower than digits on average. */
+    private static final int PROSE = 112;
+    /** A column of single lines grows with its text to this many characters. */
+    private static final int WIDEST = 44;
 
     private final XSSFSheet sheet;
     private final Look look;
     private final List<Column<T>> columns;
     private final int headerRow;
+    private final int[] widths;
     private int next;
 
     /**
@@ -39,6 +45,7 @@ final class TableSheet<T> {
         this.sheet = sheet;
         this.look = look;
         this.columns = List.copyOf(columns);
+        widths = new int[columns.size()];
         boolean grouped = columns.stream().anyMatch(each -> !each.group().isEmpty());
         headerRow = 1 + above + (grouped ? 1 : 0);
         next = headerRow + 1;
@@ -82,8 +89,12 @@ final class TableSheet<T> {
             Column.Content content = column.fill().of(object,
                     other -> address(columns.indexOf(other), rowNumber));
             fill(row.createCell(index), content, column.style());
-            if (column.style() == Style.WRAPPED && content instanceof Column.Content.Text(String text)) {
-                lines = Math.max(lines, lines(text, column.width()));
+            if (content instanceof Column.Content.Text(String text)) {
+                if (column.style() == Style.WRAPPED) {
+                    lines = Math.max(lines, lines(text, PROSE * column.width() / 100));
+                } else {
+                    widen(index, Math.min(text.length() + 3, WIDEST));
+                }
             }
         }
         if (lines > 1) {
@@ -91,9 +102,17 @@ final class TableSheet<T> {
         }
     }
 
+    private void widen(int column, int characters) {
+        if (widths[column] < characters) {
+            widths[column] = characters;
+            sheet.setColumnWidth(column, characters * WIDTH_UNIT);
+        }
+    }
+
     /** A line between title and table: a label and what belongs to it. */
     XSSFCell above(int line, String label, Column.Content content, Style style) {
         XSSFRow row = row(1 + line);
+        row.setHeightInPoints(ABOVE_HEIGHT);
         text(row.createCell(0), label, Style.LABEL);
         XSSFCell cell = row.createCell(1);
         fill(cell, content, style);
@@ -143,9 +162,10 @@ final class TableSheet<T> {
         int lines = 1;
         for (int index = 0; index < columns.size(); index++) {
             Column<T> column = columns.get(index);
-            text(row.createCell(index), column.header(), Style.HEADER);
-            sheet.setColumnWidth(index, column.width() * WIDTH_UNIT);
-            lines = Math.max(lines, lines(column.header(), column.width() - 3));
+            text(row.createCell(index), column.header(),
+                    column.style().isNumber() ? Style.NUMBER_HEADER : Style.HEADER);
+            widen(index, column.width());
+            lines = Math.max(lines, lines(column.header(), column.width() - 2));
         }
         row.setHeightInPoints(lines * POINTS_PER_LINE + 4f);
         sheet.createFreezePane(1, headerRow + 1);

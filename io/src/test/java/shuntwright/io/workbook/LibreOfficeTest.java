@@ -66,7 +66,7 @@ class LibreOfficeTest {
             for (ChannelPlan each : PLAN.channels()) {
                 if (each.solved().isPresent()) {
                     double trip = each.solved().get().trip().nominal();
-                    assertThat(Cells.at(settings, each.channel().name(), "Trip current", "Nominal")
+                    assertThat(Cells.at(settings, each.channel().name(), "Trip current", "Trip nominal")
                             .getNumericCellValue()).isCloseTo(trip, within(1e-9 * trip));
                 }
             }

@@ -30,22 +30,22 @@ class SettingsSheetTest {
                 String name = each.channel().name();
                 assertThat(Cells.at(sheet, name, "Verdict").getStringCellValue()).isEqualTo(each.verdict().word());
                 if (each.solved().isEmpty()) {
-                    assertThat(Cells.at(sheet, name, "Trip current", "Nominal").getCellType())
+                    assertThat(Cells.at(sheet, name, "Trip current", "Trip nominal").getCellType())
                             .isEqualTo(CellType.BLANK);
                     continue;
                 }
                 SolvedChannel solved = each.solved().get();
-                close(Cells.at(sheet, name, "Threshold", "Nominal"), solved.settings().threshold());
-                close(Cells.at(sheet, name, "Trip current", "Nominal"), solved.trip().nominal());
-                close(Cells.at(sheet, name, "Trip current", "Lowest"), solved.trip().limits().min());
-                close(Cells.at(sheet, name, "Trip current", "Highest"), solved.trip().limits().max());
+                close(Cells.at(sheet, name, "Threshold", "Threshold nominal"), solved.settings().threshold());
+                close(Cells.at(sheet, name, "Trip current", "Trip nominal"), solved.trip().nominal());
+                close(Cells.at(sheet, name, "Trip current", "Trip lowest"), solved.trip().limits().min());
+                close(Cells.at(sheet, name, "Trip current", "Trip highest"), solved.trip().limits().max());
                 close(Cells.at(sheet, name, "Chosen parts", "R_s"), 1000 * solved.circuit().resistance());
-                close(Cells.at(sheet, name, "Shunt heat", "At load"), solved.heat());
+                close(Cells.at(sheet, name, "Shunt heat", "Heat at load"), solved.heat());
                 if (solved.assessment(Outcome.RELEASE).isPresent()) {
-                    close(Cells.at(sheet, name, "Release current", "Nominal"),
+                    close(Cells.at(sheet, name, "Release current", "Release nominal"),
                             solved.assessment(Outcome.RELEASE).get().nominal());
                 } else {
-                    assertThat(Cells.at(sheet, name, "Release current", "Nominal").getCellType())
+                    assertThat(Cells.at(sheet, name, "Release current", "Release nominal").getCellType())
                             .isEqualTo(CellType.BLANK);
                 }
             }
@@ -56,8 +56,8 @@ class SettingsSheetTest {
     void readingErrorsAreInPerCentOfTheCurrent() throws IOException {
         try (XSSFWorkbook book = Cells.open(PLAN)) {
             XSSFSheet sheet = book.getSheet(SettingsSheet.NAME);
-            close(Cells.at(sheet, "Pump", "Reading error", "at load current"), 4);
-            close(Cells.at(sheet, "Pump", "Reading error", "allowed at load"), 10);
+            close(Cells.at(sheet, "Pump", "Reading error", "Error at load"), 4);
+            close(Cells.at(sheet, "Pump", "Reading error", "Allowed at load"), 10);
         }
     }
 
@@ -65,7 +65,7 @@ class SettingsSheetTest {
     void nominalFiguresFollowChangedValues() throws IOException {
         try (XSSFWorkbook book = Cells.open(PLAN)) {
             XSSFSheet sheet = book.getSheet(SettingsSheet.NAME);
-            XSSFCell trip = Cells.at(sheet, "Pump", "Trip current", "Nominal");
+            XSSFCell trip = Cells.at(sheet, "Pump", "Trip current", "Trip nominal");
             double before = trip.getNumericCellValue();
             XSSFCell resistance = Cells.at(sheet, "Pump", "Chosen parts", "R_s");
             resistance.setCellValue(2 * resistance.getNumericCellValue());
