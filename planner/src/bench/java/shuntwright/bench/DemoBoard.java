@@ -12,7 +12,6 @@ import org.openjdk.jmh.annotations.State;
 
 import shuntwright.board.Board;
 import shuntwright.io.json.FileReading;
-import shuntwright.io.workplace.Opened;
 import shuntwright.io.workplace.Workplace;
 import shuntwright.parts.Catalogue;
 
@@ -23,14 +22,14 @@ public class DemoBoard {
     @Param({"sledge-wren", "tractor-plover", "camp-lantern"})
     public String name = "";
 
-    private @Nullable Opened opened;
+    private @Nullable Workplace opened;
 
     @Setup
     public void open() {
         Path file = Path.of("demo-boards", name + ".board.json");
         opened = switch (Workplace.open(file, List.of())) {
-            case FileReading.Opened<Opened>(Opened value) -> value;
-            case FileReading.Refused<Opened> refused -> throw new IllegalStateException(refused.text());
+            case FileReading.Opened<Workplace>(Workplace value) -> value;
+            case FileReading.Refused<Workplace> refused -> throw new IllegalStateException(refused.text());
         };
     }
 

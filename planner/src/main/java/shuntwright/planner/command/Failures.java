@@ -6,6 +6,8 @@ import java.util.Optional;
 import java.util.Set;
 
 import picocli.CommandLine;
+import picocli.CommandLine.MissingParameterException;
+import picocli.CommandLine.Model.ArgSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.UnmatchedArgumentException;
 import shuntwright.io.form.NearestWord;
@@ -21,6 +23,10 @@ final class Failures {
         terminal.complain(String.valueOf(wrong.getMessage()));
         if (wrong instanceof UnmatchedArgumentException unmatched) {
             nearest(unmatched).ifPresent(word -> terminal.complain("Maybe " + word + "?"));
+        }
+        if (wrong instanceof MissingParameterException missing
+                && missing.getMissing().stream().anyMatch(ArgSpec::isPositional)) {
+            terminal.complain("Maybe the board was taken for a parts file: put it before --parts.");
         }
         terminal.complain("See: " + line.getCommandSpec().qualifiedName() + " --help");
         return ExitCode.BAD_INPUT.number();

@@ -13,9 +13,7 @@ import shuntwright.io.planfile.PlanFile;
 import shuntwright.io.save.SafeSave;
 import shuntwright.io.save.SaveResult;
 import shuntwright.io.workbook.Workbook;
-import shuntwright.io.workplace.Opened;
 import shuntwright.io.workplace.Workplace;
-import shuntwright.parts.Catalogue;
 import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.Plan;
 
@@ -54,10 +52,10 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
         inputs.add(board);
         List<Path> targets = Stream.of(output.workbook(), output.plan(), pinned).flatMap(Optional::stream).toList();
         Targets.check(inputs, targets);
-        Opened opened = open();
-        Targets.check(opened.partsFiles(), targets);
+        Workplace opened = open();
+        Targets.check(PartsPaths.of(opened.board(), board), targets);
         Plan plan = judge(opened, terminal);
-        List<String> failed = save(plan, opened.catalogue());
+        List<String> failed = save(plan);
         if (output.json()) {
             terminal.printBytes(PlanFile.bytes(plan));
         } else {
@@ -72,15 +70,15 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
         return plan.accepted() ? ExitCode.ACCEPTED : ExitCode.NOT_ACCEPTED;
     }
 
-    private Opened open() {
+    private Workplace open() {
         return switch (Workplace.open(board, parts)) {
-            case FileReading.Opened<Opened>(Opened opened) -> opened;
-            case FileReading.Refused<Opened>(List<Problem> problems) ->
+            case FileReading.Opened<Workplace>(Workplace opened) -> opened;
+            case FileReading.Refused<Workplace>(List<Problem> problems) ->
                 throw new BadInput(problems.stream().map(Problem::toString).toList());
         };
     }
 
-    private Plan judge(Opened opened, Terminal terminal) {
+    private Plan judge(Workplace opened, Terminal terminal) {
         try (ProgressLine progress = ProgressLine.on(terminal, !output.json())) {
             BoardPlanner planner = new BoardPlanner();
             return switch (kind) {
@@ -91,12 +89,13 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
     }
 
     /** Saves what is wanted. @return why something could not be saved */
-    private List<String> save(Plan plan, Catalogue catalogue) {
+    private List<String> save(Plan plan) {
         List<SaveResult> results = new ArrayList<>();
         output.plan().ifPresent(file -> results.add(SafeSave.save(file, out -> PlanFile.write(plan, out))));
         output.workbook()
                 .ifPresent(file -> results.add(SafeSave.save(file, out -> Workbook.write(plan, out))));
-        pinned.ifPresent(file -> results.add(BoardFiles.save(BoardPlanner.pinned(plan), file)));
+        pinned.ifPresent(file -> results
+                .add(BoardFiles.save(PartsPaths.moved(BoardPlanner.pinned(plan), board, parts, file), file)));
         return results.stream().flatMap(each -> switch (each) {
             case SaveResult.Saved _ -> Stream.<String>empty();
             case SaveResult.Failed(String message) -> Stream.of(message);
