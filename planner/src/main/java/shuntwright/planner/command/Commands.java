@@ -2,10 +2,13 @@ package shuntwright.planner.command;
 
 import java.io.PrintStream;
 import java.io.PrintWriter;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.List;
 
 import picocli.CommandLine;
 import picocli.CommandLine.Help;
+import picocli.CommandLine.TypeConversionException;
 
 /** The program's commands; the one place where the outcome of a command becomes an exit code. */
 public final class Commands {
@@ -28,6 +31,7 @@ public final class Commands {
         CommandLine line = new CommandLine(top).addSubcommand(new PlanCommand(terminal))
                 .addSubcommand(new CheckCommand(terminal)).addSubcommand(new WindowCommand());
         HelpText.addTo(line);
+        line.registerConverter(Path.class, Commands::path);
         line.setOut(new PrintWriter(terminal.out(), true, terminal.charset()))
                 .setErr(new PrintWriter(terminal.err(), true, terminal.charset()));
         line.setColorScheme(Help.defaultColorScheme(terminal.colour() ? Help.Ansi.ON : Help.Ansi.OFF));
@@ -40,6 +44,15 @@ public final class Commands {
             return Failures.of(terminal, exhausted, top.trace());
         } finally {
             List.of(terminal.out(), terminal.err()).forEach(PrintStream::flush);
+        }
+    }
+
+    private static Path path(String text) {
+        try {
+            return Path.of(text);
+        } catch (InvalidPathException wrong) {
+            throw new TypeConversionException("\"" + text + "\" cannot be a file name on this system with its present "
+                    + "settings (" + wrong.getReason() + "). Maybe the locale is not UTF-8.");
         }
     }
 }

@@ -93,4 +93,12 @@ class BadFilesTest {
         assertThat(run.code()).isEqualTo(2);
         assertThat(run.err()).contains("a folder has this name");
     }
+
+    @Test
+    void a_text_that_cannot_be_a_file_name_is_refused_in_words() {
+        Run run = Run.of("plan", "boat\0.board.json");
+
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.err()).contains("cannot be a file name").doesNotContain("Exception");
+    }
 }
