@@ -91,7 +91,7 @@ final class PlanText {
             Columns about = new Columns(1);
             each.findings().stream().filter(PlanText::worthALine).forEach(finding -> add(about, finding));
             each.refusals().forEach(refusal -> about.add(List.of("", "refused", words(refusal))));
-            each.cures().forEach(cure -> about.add(List.of("", cure.cures() ? "cure" : "helps", words(cure))));
+            each.cures().forEach(cure -> about.add(List.of("", cure.cures() ? "cure" : "tried", words(cure))));
             section(each.channel().name(), about);
         }
         Columns about = new Columns(1);

@@ -50,7 +50,7 @@ class PlanTextTest {
         assertThat(lines).containsSubsequence("Radar transmitter",
                 "  fault  outside its window: misses by 300 mA",
                 "  cure   a wider window: must-trip 12.5 A → 13.1 A gives inside with 7 % margin",
-                "  helps  another source for the threshold: vref gives likely with -2 % margin");
+                "  tried  another source for the threshold: vref gives likely with -2 % margin");
         assertThat(lines).containsSubsequence("Radar receiver",
                 "  refused  88 of 90 shunts: dissipation at the no-trip current within the derated power; "
                         + "nearest is NEAR-R010 with 1.25 W, at most 500 mW");
