@@ -10,8 +10,8 @@ import java.util.Set;
  *
  * <p>Ambient, supply, rail and the shunts' temperature coefficients multiply other inputs, so both their ends are
  * enumerated. With those fixed the equation is monotone in each remaining input, and its extreme is at the corner that
- * the signs of the partial derivatives pick. Should a sign differ between the middle of the box and that corner, the
- * input concerned is enumerated too.
+ * the signs of the partial derivatives pick. Should a derivative at that corner point the other way than the one in the
+ * middle of the box, where it may also be 0, the input concerned is enumerated too.
  */
 final class LimitsReader {
 
@@ -112,7 +112,8 @@ final class LimitsReader {
                 turning.clear();
                 for (Input input : monotone) {
                     int at = Layout.index(input);
-                    if (gradient[at] * atCorner[at] < 0) {
+                    boolean upper = gradient[at] > 0 == highest;
+                    if (atCorner[at] != 0 && atCorner[at] > 0 == highest != upper) {
                         turning.add(input);
                     }
                 }
