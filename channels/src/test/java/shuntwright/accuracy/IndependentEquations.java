@@ -98,7 +98,7 @@ final class IndependentEquations {
         return varied(drawn.circuit().amplifier().gain(), Slot.GAIN_ERROR, Slot.GAIN_DRIFT);
     }
 
-    private Gradient inputError() {
+    Gradient inputError() {
         var input = drawn.circuit().amplifier().input();
         var rules = drawn.around().rules();
         return x(Slot.OFFSET).add(x(Slot.OFFSET_DRIFT).multiply(kelvin))
