@@ -7,11 +7,13 @@ import java.util.Optional;
 import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.accuracy.Propagation;
 import shuntwright.board.Acceptance;
+import shuntwright.board.Pins;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.parts.Comparator;
+import shuntwright.parts.Part;
 import shuntwright.parts.ResistorSeries;
 import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
@@ -37,16 +39,23 @@ final class BruteForce {
 
     private List<Tried> all() {
         List<Tried> all = new ArrayList<>();
-        AmplifierTerms amplifiers = new AmplifierTerms(problem.catalogue().amplifiers(), problem);
+        Pins pins = problem.demand().channel().pins();
+        AmplifierTerms amplifiers = new AmplifierTerms(
+                problem.catalogue().amplifiers().stream().filter(each -> free(pins.amplifier(), each)).toList(),
+                problem);
         List<Optional<SourceVoltage>> sources = problem.tap().isPresent()
                 ? List.of(Optional.empty())
                 : problem.sources().stream().map(Optional::of).toList();
         for (Shunt shunt : problem.catalogue().shunts()) {
             for (int count = 1; count <= problem.around().rules().parallelShunts(); count++) {
+                if (!free(pins.shunt(), shunt) || pins.shuntCount().orElse(count) != count) {
+                    continue;
+                }
                 ShuntTerms terms = new ShuntTerms(shunt, count, problem);
                 for (int j = 0; j < amplifiers.size(); j++) {
                     for (Comparator comparator : problem.catalogue().comparators()) {
-                        if (ChannelPicker.suits(comparator, problem, false)) {
+                        if (free(pins.comparator(), comparator)
+                                && ChannelPicker.suits(comparator, problem, pins.comparator().isPresent())) {
                             Window window = window(terms, amplifiers, j, comparator);
                             for (Optional<SourceVoltage> source : sources) {
                                 for (ResistorSeries series : problem.resistors()) {
@@ -62,6 +71,10 @@ final class BruteForce {
         return all;
     }
 
+    private static boolean free(Optional<String> pinned, Part part) {
+        return pinned.isEmpty() || pinned.get().equals(part.partNumber());
+    }
+
     /** Edges of the threshold by limits; by combined uncertainty where they leave no room and that is accepted. */
     private Window window(ShuntTerms s, AmplifierTerms a, int j, Comparator comparator) {
         double[] low = new double[2];
@@ -70,18 +83,16 @@ final class BruteForce {
             low[end] = a.gainHigh[end][j] * (s.noTripHigh[end] + a.error[end][j] + s.emf);
             high[end] = a.gainLow[end][j] * (s.mustTripLow[end] - a.error[end][j] - s.emf);
         }
-        boolean room = Math.max(low[0], low[1]) <= Math.min(high[0], high[1])
-                && new Readings(problem, a).mayHold(s, j);
+        boolean room = Math.max(low[0], low[1]) <= Math.min(high[0], high[1]);
         if (!room && problem.acceptance().basis() == Acceptance.Basis.COVERAGE) {
             Range trip = problem.demand().tripWindow();
-            double target = problem.demand().tripTarget();
             double k = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
-            double volt = target * s.resistance;
+            double volt = trip.max() * s.resistance;
             double relative = 0.98 * k
                     * Math.sqrt(s.variance + a.gainVariance[j] + a.errorVariance[j] / (volt * volt));
             for (int end = 0; end < 2; end++) {
-                low[end] = a.gain[j] * (trip.min() + target * relative) * s.resistance;
-                high[end] = a.gain[j] * (trip.max() - target * relative) * s.resistance;
+                low[end] = a.gain[j] * trip.min() / (1 - relative) * s.resistance;
+                high[end] = a.gain[j] * trip.max() / (1 + relative) * s.resistance;
             }
         }
         Candidates one = new Candidates();
@@ -90,14 +101,19 @@ final class BruteForce {
     }
 
     private Tried tried(SenseCircuit circuit) {
+        return tried(problem, circuit);
+    }
+
+    /** Judges one circuit, whoever chose it. */
+    static Tried tried(ChannelProblem problem, SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
         boolean respects = CandidateSearch.holds(LimitRules.all(circuit, accuracy.thresholdLimits(),
                 problem.pullUp().voltage().max(), problem.demand(), problem.around()));
         return new Tried(circuit, heat(problem, circuit), cost(problem, circuit), respects,
-                respects && accepted(accuracy));
+                respects && accepted(problem, accuracy));
     }
 
-    private boolean accepted(ChannelAccuracy accuracy) {
+    private static boolean accepted(ChannelProblem problem, ChannelAccuracy accuracy) {
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
         return ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent()).stream()
                 .allMatch(each -> each.allowed().contains(accuracy.limits(each)) || (coverage && each.allowed()

@@ -89,7 +89,9 @@ final class RandomProblems {
                 ? List.of()
                 : one(List.of(bySupply), List.of(reference), List.of(reference, bySupply));
         return new ChannelProblem(demand, around, catalogue(demand.tripTarget(), series), sources, tap, series,
-                new PullUp(10e3, bySupply.voltage(), true, random.nextInt(4) == 0),
+                random.nextBoolean()
+                        ? new PullUp(10e3, bySupply.voltage(), true, random.nextInt(4) == 0)
+                        : new PullUp(2.2e3, new Toleranced(3, Tolerance.symmetric(0.001)), false, false),
                 new Acceptance(basis, one(0.95, 0.9973)), one(1, 10, 100));
     }
 
