@@ -97,7 +97,7 @@ final class BruteForce {
         }
         Candidates one = new Candidates();
         one.add(0, j, low[0], high[0], low[1], high[1]);
-        return new Window(one, 0, s, a, comparator, problem);
+        return new Window(one, 0, s, a, comparator, new ThresholdTerms(problem), problem);
     }
 
     private Tried tried(SenseCircuit circuit) {

@@ -16,7 +16,7 @@ import shuntwright.circuit.SenseCircuit;
 /** The search against a judge that rejects nothing early. */
 class ChannelPickerTest {
 
-    private static final int PROBLEMS = 600;
+    private static final int PROBLEMS = 800;
     private static final double SAME = 1e-6;
 
     private final DividerTables tables = new DividerTables();
