@@ -37,6 +37,21 @@ final class BruteForce {
         return new BruteForce(problem, tables).all();
     }
 
+    /** The window of every combination of parts, whether it leaves room or not. */
+    static List<Window> windows(ChannelProblem problem) {
+        BruteForce force = new BruteForce(problem, new DividerTables());
+        AmplifierTerms amplifiers = new AmplifierTerms(problem.catalogue().amplifiers(), problem);
+        List<Window> windows = new ArrayList<>();
+        for (Shunt shunt : problem.catalogue().shunts()) {
+            for (int j = 0; j < amplifiers.size(); j++) {
+                for (Comparator comparator : problem.catalogue().comparators()) {
+                    windows.add(force.window(new ShuntTerms(shunt, 1, problem), amplifiers, j, comparator));
+                }
+            }
+        }
+        return windows;
+    }
+
     private List<Tried> all() {
         List<Tried> all = new ArrayList<>();
         Pins pins = problem.demand().channel().pins();
