@@ -70,7 +70,7 @@ final class Window {
     }
 
     /** True when the spread of the release voltage certainly fits its window. */
-    boolean releaseMayFit(double thresholdSpread) {
+    boolean releaseMayFit(double thresholdSpread, ResistorSeries resistors) {
         if (!rearms) {
             return true;
         }
@@ -79,7 +79,8 @@ final class Window {
                 boolean fits = true;
                 for (int end = 0; end < 2; end++) {
                     double least = Math.max(0, low[end] - releaseHigh[end] - injected.builtIn().min());
-                    double share = (injected.current().max() - injected.current().min())
+                    double t = movement(resistors, end);
+                    double share = (injected.current().max() * (1 + t) - injected.current().min() * (1 - t))
                             / injected.current().nominal();
                     fits &= thresholdSpread + injected.builtIn().width() + share * least <= releaseHigh[end]
                             - releaseLow[end];

@@ -129,7 +129,8 @@ class HysteresisChoiceTest {
     @Test
     void feedbackKeepsThePinnedResistor() {
         double[] values = ESeries.E24.within(Range.of(1e3, 100e3));
-        FeedbackDemand demand = new FeedbackDemand(TrialParts.supply(3.3, 0.02), new FeedbackDemand.Levels(1.5, 1.4, 0.2),
+        FeedbackDemand demand = new FeedbackDemand(TrialParts.supply(3.3, 0.02),
+                new FeedbackDemand.Levels(1.5, 1.4, 0.2),
                 new PullUp(10e3, TrialParts.supply(3.3, 0.02).voltage(), true, false),
                 new FeedbackDemand.Values(values, values, values, 5e3, OptionalDouble.of(123456)));
         assertThat(HysteresisChoice.feedback(demand).orElseThrow().network().resistance()).isEqualTo(123456);

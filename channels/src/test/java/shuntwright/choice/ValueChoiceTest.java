@@ -137,7 +137,8 @@ class ValueChoiceTest {
     }
 
     private static Pins pins(OptionalDouble top, OptionalDouble bottom) {
-        return new Pins(Optional.empty(), OptionalInt.empty(), Optional.empty(), Optional.empty(), Optional.empty(), top,
+        return new Pins(Optional.empty(), OptionalInt.empty(), Optional.empty(), Optional.empty(), Optional.empty(),
+                top,
                 bottom, OptionalDouble.empty());
     }
 
