@@ -25,7 +25,8 @@ public record Range(double min, double max) {
     }
 
     public double mid() {
-        return min + (max - min) / 2;
+        double width = max - min;
+        return Double.isInfinite(width) ? min / 2 + max / 2 : min + width / 2;
     }
 
     public double width() {

@@ -16,6 +16,9 @@ public record Tolerance(double below, double above) {
             throw new IllegalArgumentException(
                     "a tolerance needs fractions with 0 ≤ below < 1 and above ≥ 0, got -" + below + " / +" + above);
         }
+        // Adding 0 turns -0 into 0, so that equal tolerances are equal records.
+        below += 0.0;
+        above += 0.0;
     }
 
     /** @param fraction the same on both sides, 0.01 for ±1 % */
