@@ -99,7 +99,8 @@ final class Demands {
                             : Reading.value(new ThresholdDemand.SharedTap(name.get())));
         }
         for (var reference : board.references()) {
-            if (reference.name().toLowerCase(Locale.ROOT).equals(plain)) {
+            String name = reference.name().toLowerCase(Locale.ROOT);
+            if (name.equals(plain) || plain.equals("reference " + name)) {
                 return Reading.value(new ThresholdDemand.OwnDivider(new Source.OfReference(reference.name())));
             }
         }

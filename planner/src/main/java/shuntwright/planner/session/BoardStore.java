@@ -1,11 +1,12 @@
 package shuntwright.planner.session;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 
 import shuntwright.board.Board;
 import shuntwright.io.json.FileReading;
+import shuntwright.io.json.Problem;
+import shuntwright.io.save.SaveResult;
 import shuntwright.parts.Catalogue;
 import shuntwright.plan.Plan;
 
@@ -20,13 +21,16 @@ public interface BoardStore {
     record Opened(Board board, Catalogue catalogue) {}
 
     /** @param moreParts parts files besides those the board names */
-    FileReading<Opened> open(Path file, List<Path> moreParts) throws IOException;
+    FileReading<Opened> open(Path file, List<Path> moreParts);
 
-    FileReading<Catalogue> catalogue(List<Path> files) throws IOException;
+    FileReading<Catalogue> catalogue(List<Path> files);
 
-    void save(Board board, Path file) throws IOException;
+    /** Why the board's file could not be opened again; empty when it could. */
+    List<Problem> objections(Board board);
 
-    void exportWorkbook(Plan plan, Catalogue catalogue, Path file) throws IOException;
+    SaveResult save(Board board, Path file);
 
-    void exportPlan(Plan plan, Path file) throws IOException;
+    SaveResult exportWorkbook(Plan plan, Path file);
+
+    SaveResult exportPlan(Plan plan, Path file);
 }

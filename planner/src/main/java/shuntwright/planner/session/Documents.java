@@ -14,6 +14,7 @@ import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.io.json.FileReading;
 import shuntwright.io.json.Problem;
+import shuntwright.io.save.SaveResult;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.work.FileWork;
@@ -55,7 +56,7 @@ public final class Documents {
                         session.start(Board.named("new board").withPartsFiles(
                                 partsFiles.stream().map(path -> path.toAbsolutePath().toString()).toList()),
                                 catalogue, true);
-                    }), problem -> failed("open the parts", problem));
+                    }));
         });
     }
 
@@ -77,7 +78,7 @@ public final class Documents {
                             PartsPaths.resolved(opened.board().partsFiles(), folder).stream().map(Path::toString)
                                     .toList()),
                             opened.catalogue(), true);
-                }), problem -> failed("open " + path, problem)));
+                })));
     }
 
     private void read(Path path) {
@@ -85,7 +86,7 @@ public final class Documents {
                 reading -> refusedOr(reading, path.getFileName().toString(), opened -> {
                     file.set(Optional.of(path));
                     session.start(opened.board(), opened.catalogue(), true);
-                }), problem -> failed("open " + path, problem));
+                }));
     }
 
     private <T> void refusedOr(FileReading<T> reading, String what, java.util.function.Consumer<T> opened) {
@@ -98,11 +99,12 @@ public final class Documents {
         }
     }
 
-    private void failed(String what, IOException problem) {
-        questions.tell("Not done", "Could not " + what + ".", List.of(
-                problem instanceof java.nio.file.NoSuchFileException
-                        ? "There is no file " + problem.getMessage() + "."
-                        : String.valueOf(problem.getMessage())));
+    private void savedOr(SaveResult result, java.util.function.Consumer<Path> saved) {
+        switch (result) {
+            case SaveResult.Saved(Path path) -> saved.accept(path);
+            case SaveResult.Failed(String message) ->
+                questions.tell("Not saved", "The file is as it was before.", List.of(message));
+        }
     }
 
     public void save() {
@@ -136,10 +138,13 @@ public final class Documents {
 
     private void write(Path target, Board board, Runnable then) {
         List<String> left = wrongEntries();
-        work.run(() -> {
-            store.save(board, target);
-            return target;
-        }, path -> {
+        List<Problem> objections = store.objections(board);
+        if (!objections.isEmpty()) {
+            questions.tell("Not saved", "The board could not be opened again as it stands. Mend this first:",
+                    objections.stream().map(Problem::message).toList());
+            return;
+        }
+        work.run(() -> store.save(board, target), result -> savedOr(result, path -> {
             file.set(Optional.of(path));
             session.markSaved(board);
             if (left.isEmpty()) {
@@ -151,7 +156,7 @@ public final class Documents {
                         left);
             }
             then.run();
-        }, problem -> failed("save " + target, problem));
+        }));
     }
 
     /** One line for each text that could not be taken over. */
@@ -184,17 +189,13 @@ public final class Documents {
                 .orElse(fileName(session.state().board().name()));
         Path suggestion = file.get().map(path -> path.resolveSibling(name + kind.ending()))
                 .orElse(Path.of(name + kind.ending()));
-        Catalogue catalogue = session.catalogueProperty().get();
-        questions.fileToSave(kind, suggestion).ifPresent(target -> work.run(() -> {
-            switch (kind) {
-                case WORKBOOK -> store.exportWorkbook(planned.get().plan(), catalogue, target);
-                case PLAN -> store.exportPlan(planned.get().plan(), target);
-                case BOARD, PARTS -> throw new IllegalArgumentException(kind + " is not exported");
-            }
-            return target;
-        }, path -> questions.done("exported " + path.getFileName()
+        questions.fileToSave(kind, suggestion).ifPresent(target -> work.run(() -> switch (kind) {
+            case WORKBOOK -> store.exportWorkbook(planned.get().plan(), target);
+            case PLAN -> store.exportPlan(planned.get().plan(), target);
+            case BOARD, PARTS -> throw new IllegalArgumentException(kind + " is not exported");
+        }, result -> savedOr(result, path -> questions.done("exported " + path.getFileName()
                 + ". Verify the board by test at its temperature extremes; it does not replace the fuse or breaker that "
-                + "codes ask for."), problem -> failed("write " + target, problem)));
+                + "codes ask for."))));
     }
 
     /** Adds a parts file to the board. */
@@ -214,7 +215,7 @@ public final class Documents {
                 session.edit("add parts file " + added.getFileName(),
                         now -> now.withBoard(now.board().withPartsFiles(names)));
                 session.useCatalogue(parts);
-            }), problem -> failed("open " + added, problem));
+            }));
         });
     }
 
@@ -240,16 +241,21 @@ public final class Documents {
             for (Path folder = start.toAbsolutePath(); folder != null; folder = folder.getParent()) {
                 Path demos = folder.resolve("demo-boards");
                 if (Files.isDirectory(demos)) {
-                    return boardsIn(demos);
+                    return filesIn(demos, Kind.BOARD);
                 }
             }
         }
         return List.of();
     }
 
-    private static List<Path> boardsIn(Path folder) {
+    /** Parts files in the folder of the demo boards, for new boards to start with. */
+    public static List<Path> partsBeside(List<Path> demoBoards) {
+        return demoBoards.isEmpty() ? List.of() : filesIn(PartsPaths.folder(demoBoards.getFirst()), Kind.PARTS);
+    }
+
+    private static List<Path> filesIn(Path folder, Kind kind) {
         try (var all = Files.list(folder)) {
-            return all.filter(path -> path.toString().endsWith(Kind.BOARD.ending())).sorted().toList();
+            return all.filter(path -> path.toString().endsWith(kind.ending())).sorted().toList();
         } catch (IOException _) {
             return List.of(); // a folder that cannot be listed offers nothing
         }

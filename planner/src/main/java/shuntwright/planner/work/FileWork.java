@@ -1,17 +1,11 @@
 package shuntwright.planner.work;
 
-import java.io.IOException;
 import java.util.concurrent.Executor;
 import java.util.function.Consumer;
+import java.util.function.Supplier;
 
 /** Reads and writes files in the background, one after the other; outcomes arrive on the publisher's thread. */
 public final class FileWork {
-    /** Reading or writing that may fail for reasons of the file system. */
-    @FunctionalInterface
-    public interface Work<T> {
-        T run() throws IOException;
-    }
-
     private final Executor background;
     private final Executor publisher;
 
@@ -20,18 +14,11 @@ public final class FileWork {
         this.publisher = publisher;
     }
 
-    /**
-     * @param done   hears the result
-     * @param failed hears what the file system said
-     */
-    public <T> void run(Work<T> work, Consumer<T> done, Consumer<IOException> failed) {
+    /** @param done hears the result */
+    public <T> void run(Supplier<T> work, Consumer<T> done) {
         background.execute(() -> {
-            try {
-                T result = work.run();
-                publisher.execute(() -> done.accept(result));
-            } catch (IOException problem) {
-                publisher.execute(() -> failed.accept(problem));
-            }
+            T result = work.get();
+            publisher.execute(() -> done.accept(result));
         });
     }
 }
