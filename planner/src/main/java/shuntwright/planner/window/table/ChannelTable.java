@@ -7,22 +7,25 @@ import java.util.function.Function;
 
 import javafx.beans.InvalidationListener;
 import javafx.beans.binding.Bindings;
+import javafx.beans.property.DoubleProperty;
+import javafx.beans.property.ReadOnlyDoubleProperty;
+import javafx.beans.property.SimpleDoubleProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.transformation.SortedList;
 import javafx.css.PseudoClass;
+import javafx.geometry.Orientation;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollBar;
 import javafx.scene.control.SelectionMode;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TablePosition;
 import javafx.scene.control.TableRow;
+import javafx.scene.control.TableView;
 import javafx.scene.control.Tooltip;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
-
-import org.controlsfx.control.tableview2.TableColumn2;
-import org.controlsfx.control.tableview2.TableView2;
 
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.window.table.ChannelTableModel.Spot;
@@ -35,9 +38,10 @@ public final class ChannelTable {
             ChannelField.SOURCE);
 
     private final ChannelTableModel model;
-    private final TableView2<RowModel> table = new TableView2<>();
+    private final TableView<RowModel> table = new TableView<>();
     private final List<TableColumn<RowModel, ?>> columns = new ArrayList<>();
     private String typed = "";
+    private final DoubleProperty scrolled = new SimpleDoubleProperty();
     private boolean following;
 
     public ChannelTable(ChannelTableModel model) {
@@ -60,6 +64,11 @@ public final class ChannelTable {
         table.setSortPolicy(_ -> true);
         addColumns();
         table.setItems(sorted);
+        table.skinProperty().subscribe(skin -> {
+            if (skin != null) {
+                javafx.application.Platform.runLater(this::pinNames);
+            }
+        });
         table.addEventFilter(KeyEvent.KEY_PRESSED, this::pressed);
         table.addEventHandler(KeyEvent.KEY_TYPED, this::startTyping);
         table.getSelectionModel().getSelectedCells().addListener((InvalidationListener) _ -> tellSelection());
@@ -100,11 +109,11 @@ public final class ChannelTable {
             }
         }
         table.getColumns().setAll(columns);
-        table.getFixedColumns().add(name);
+        name.setReorderable(false);
     }
 
     private TableColumn<RowModel, CellEntry> asked(ChannelField field, double width) {
-        TableColumn<RowModel, CellEntry> column = new TableColumn2<>();
+        TableColumn<RowModel, CellEntry> column = new TableColumn<>();
         head(column, field.title(), field.words() + ": " + field.hint(), width);
         column.setUserData(field);
         column.setEditable(true);
@@ -125,7 +134,7 @@ public final class ChannelTable {
     private TableColumn<RowModel, RowFigures> computed(String title, String words, double width,
             javafx.util.Callback<TableColumn<RowModel, RowFigures>, javafx.scene.control.TableCell<RowModel, RowFigures>> cells,
             Comparator<RowFigures> order) {
-        TableColumn<RowModel, RowFigures> column = new TableColumn2<>();
+        TableColumn<RowModel, RowFigures> column = new TableColumn<>();
         head(column, title, words, width);
         column.setEditable(false);
         column.setCellValueFactory(row -> row.getValue().isEmptyRow()
@@ -157,8 +166,26 @@ public final class ChannelTable {
     }
 
     /** The control for the window. */
-    public javafx.scene.control.TableView<?> node() {
+    public TableView<?> node() {
         return table;
+    }
+
+    /** How far the columns are scrolled; the name column moves along to stay in sight. */
+    ReadOnlyDoubleProperty scrolledProperty() {
+        return scrolled;
+    }
+
+    private void pinNames() {
+        table.lookupAll(".scroll-bar").stream()
+                .filter(node -> node instanceof ScrollBar bar && bar.getOrientation() == Orientation.HORIZONTAL)
+                .map(ScrollBar.class::cast).findFirst()
+                .ifPresent(bar -> scrolled.bind(Bindings.when(bar.visibleProperty()).then(bar.valueProperty())
+                        .otherwise(0.0)));
+        table.lookupAll(".column-header").stream().filter(node -> "column-channel".equals(node.getId())).findFirst()
+                .ifPresent(header -> {
+                    header.setViewOrder(-1);
+                    header.translateXProperty().bind(scrolled);
+                });
     }
 
     ChannelTableModel model() {

@@ -21,6 +21,7 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
     private final ChannelTable view;
     private final Tooltip tip = new Tooltip();
     private @Nullable TextField editor;
+    private ChannelTableModel.@Nullable Spot edited;
 
     EntryCell(ChannelField field, ChannelTable view) {
         this.field = field;
@@ -32,6 +33,11 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
         tip.setWrapText(true);
         tip.setMaxWidth(420);
         setAccessibleRole(AccessibleRole.TABLE_CELL);
+        if (field == ChannelField.NAME) {
+            getStyleClass().add("pinned");
+            setViewOrder(-1);
+            translateXProperty().bind(view.scrolledProperty());
+        }
     }
 
     private @Nullable RowModel row() {
@@ -86,6 +92,7 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
             }
         });
         editor = text;
+        edited = new ChannelTableModel.Spot(row.id(), field);
         setText(null);
         setGraphic(text);
         setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
@@ -100,16 +107,16 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
     }
 
     private void key(KeyEvent event, TextField text) {
+        ChannelTableModel.Spot spot = edited;
+        if (spot == null) {
+            return;
+        }
         switch (event.getCode()) {
             case ENTER -> {
                 event.consume();
                 if (event.isControlDown()) {
-                    RowModel row = row();
-                    editor = null;
-                    cancelEdit();
-                    if (row != null) {
-                        view.enterSelected(new ChannelTableModel.Spot(row.id(), field), text.getText());
-                    }
+                    drop();
+                    view.enterSelected(spot, text.getText());
                 } else {
                     finish(text);
                     view.move(event.isShiftDown() ? -1 : 1, 0);
@@ -122,18 +129,20 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
             }
             case ESCAPE -> {
                 event.consume();
-                editor = null;
-                RowModel row = row();
-                cancelEdit();
-                if (row != null && getItem() != null && getItem().reason().isPresent()) {
-                    view.model().revert(new ChannelTableModel.Spot(row.id(), field));
-                }
+                drop();
+                view.model().revert(spot);
                 getTableView().requestFocus();
             }
             default -> {
                 // typed into the text
             }
         }
+    }
+
+    /** Ends the typing without taking the text over. */
+    private void drop() {
+        editor = null;
+        cancelEdit();
     }
 
     private void finish(TextField text) {
@@ -146,13 +155,14 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
     @Override
     public void cancelEdit() {
         TextField text = editor;
+        ChannelTableModel.Spot spot = edited;
+        boolean hadFocus = text != null && text.isFocused();
         editor = null;
-        RowModel row = row();
+        edited = null;
         super.cancelEdit();
         updateItem(getItem(), isEmpty());
-        if (text != null && row != null) {
-            boolean hadFocus = text.isFocused();
-            view.model().enter(new ChannelTableModel.Spot(row.id(), field), text.getText());
+        if (text != null && spot != null) {
+            view.model().enter(spot, text.getText());
             if (hadFocus) {
                 getTableView().requestFocus();
             }
