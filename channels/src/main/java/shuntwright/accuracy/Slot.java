@@ -60,6 +60,17 @@ public enum Slot {
         return words;
     }
 
+    /** True for ambient, supply and rail, which multiply other inputs. */
+    public boolean multiplies() {
+        return this == AMBIENT || this == SUPPLY || this == RAIL;
+    }
+
+    /** Its place in the order above; the vector of inputs is laid out by it. */
+    @SuppressWarnings("EnumOrdinal")
+    int place() {
+        return ordinal();
+    }
+
     /** SI unit of the input that enters here. */
     public String unit() {
         return unit;

@@ -125,6 +125,11 @@ public record Channel(String name, String note, Optional<Spread> rail, Side side
                 diversity, stress, pins);
     }
 
+    public Channel withStress(Stress newStress) {
+        return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone, diversity,
+                newStress, pins);
+    }
+
     public Channel withPins(Pins newPins) {
         return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone, diversity,
                 stress, newPins);

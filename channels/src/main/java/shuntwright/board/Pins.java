@@ -13,14 +13,16 @@ import java.util.OptionalInt;
  * @param comparator         part number
  * @param dividerTop         R_t of the channel's own divider, Ω
  * @param dividerBottom      R_b of the channel's own divider, Ω
+ * @param resistors          part number of the series of divider and hysteresis resistors
  * @param hysteresisResistor R_H (injected current) or R_F (positive feedback), Ω
  */
 public record Pins(Optional<String> shunt, OptionalInt shuntCount, Optional<String> amplifier,
-        Optional<String> comparator, OptionalDouble dividerTop, OptionalDouble dividerBottom,
+        Optional<String> comparator, Optional<String> resistors, OptionalDouble dividerTop,
+        OptionalDouble dividerBottom,
         OptionalDouble hysteresisResistor) {
 
     public static final Pins NONE = new Pins(Optional.empty(), OptionalInt.empty(), Optional.empty(), Optional.empty(),
-            OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
+            Optional.empty(), OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
 
     /** @throws IllegalArgumentException unless counts are ≥ 1 and resistances &gt; 0 */
     public Pins {

@@ -1,9 +1,30 @@
 package shuntwright.plan;
 
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
 
 import shuntwright.board.Board;
+import shuntwright.board.Channel;
+import shuntwright.board.Demand;
+import shuntwright.board.Tap;
+import shuntwright.board.ThresholdDemand;
+import shuntwright.choice.ChannelChoice;
+import shuntwright.choice.ChannelPicker;
+import shuntwright.choice.ChannelProblem;
+import shuntwright.choice.DividerTables;
+import shuntwright.choice.TapPicker;
+import shuntwright.circuit.HysteresisNetwork;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Threshold;
 import shuntwright.parts.Catalogue;
+import shuntwright.parts.OpenDrainOutput;
 
 /**
  * Plans boards. Keeps what it worked out for each channel, so that planning again after an edit works out only what the
@@ -11,23 +32,232 @@ import shuntwright.parts.Catalogue;
  */
 public final class BoardPlanner {
 
+    /** Kept choices and judgements; beyond this many everything is worked out anew. */
+    private static final int MOST_KEPT = 20_000;
+
+    private final DividerTables tables = new DividerTables();
+    private final ChannelPicker picker = new ChannelPicker(tables);
+    private final Map<ChannelProblem, ChannelChoice> choices = new HashMap<>();
+    private final Map<Judged, ChannelPlan> judgements = new HashMap<>();
+
+    private record Judged(ChannelProblem problem, SenseCircuit circuit) {}
+
     /** Thrown out of a plan that its {@link Progress} cancelled. */
-    @SuppressWarnings("serial")
     public static final class Cancelled extends RuntimeException {
+        private static final long serialVersionUID = 1;
     }
 
-    /** Chooses parts for every channel and judges the board. @throws Cancelled when progress says so */
+    /**
+     * Chooses parts for every channel and judges the board.
+     *
+     * @throws Cancelled when progress says so
+     */
     public Plan plan(Board board, Catalogue catalogue, Progress progress) {
-        return new Plan(board, catalogue.currency(), List.of(), List.of(), List.of(), List.of(), List.of(), List.of());
+        Plan first = planned(board, catalogue, Map.of(), progress);
+        Map<String, Double> pullUps = new HashMap<>();
+        boolean again = false;
+        for (AlertPlan alert : first.alerts()) {
+            pullUps.put(alert.line().name(), alert.pullUp());
+            again |= alert.pullUp() != BoardContext.DEFAULT_PULL_UP && alert.line().pullUp().isEmpty()
+                    && first.channels().stream().anyMatch(each -> alert.channels().contains(each.channel().name())
+                            && feeds(each));
+        }
+        return again ? planned(board, catalogue, pullUps, progress) : first;
     }
 
-    /** Judges the board as its pins have it: whatever is not pinned is a finding, nothing is chosen. */
+    private static boolean feeds(ChannelPlan plan) {
+        return plan.solved().map(each -> each.circuit().network() instanceof HysteresisNetwork.Feedback)
+                .orElse(false);
+    }
+
+    /**
+     * Judges the board as its pins have it: whatever is not pinned is a finding, nothing is chosen.
+     *
+     * @throws Cancelled when progress says so
+     */
     public Plan check(Board board, Catalogue catalogue, Progress progress) {
-        return plan(board, catalogue, progress);
+        BoardContext context = new BoardContext(board, catalogue, Map.of());
+        List<TapPlan> taps = taps(context);
+        List<ChannelPlan> channels = new ArrayList<>();
+        for (Channel channel : board.channels()) {
+            step(progress, "checking channels", channels.size(), board.channels().size());
+            channels.add(switch (Demand.of(channel)) {
+                case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(channel, missing);
+                case Demand.Reading.Complete(Demand demand) -> {
+                    ChannelProblem problem = context.problem(demand, threshold(channel, taps));
+                    List<String> unknown = ChannelSolver.unknownPins(channel, catalogue);
+                    yield unknown.isEmpty() ? checked(problem, context) : ChannelSolver.unknown(channel, unknown);
+                }
+            });
+        }
+        return assembled(context, channels, taps);
+    }
+
+    private ChannelPlan checked(ChannelProblem problem, BoardContext context) {
+        return switch (ChannelSolver.pinned(problem)) {
+            case ChannelSolver.Pinned.Complete(SenseCircuit circuit) -> {
+                ChannelPlan plan = ChannelSolver.judged(problem, circuit);
+                yield withCures(plan, new BoardTrials(this, context, problem));
+            }
+            case ChannelSolver.Pinned.Incomplete(List<String> missing) -> {
+                Channel channel = problem.demand().channel();
+                yield new ChannelPlan(channel, Verdict.INCOMPLETE, false, Optional.empty(),
+                        List.of(Findings.channel(Finding.Key.NOT_PINNED, channel,
+                                "Not checked: not pinned are " + String.join(", ", missing)
+                                        + ". Pin them, or plan the board and keep its choices as pins.")),
+                        List.of(), List.of());
+            }
+        };
+    }
+
+    private Plan planned(Board board, Catalogue catalogue, Map<String, Double> pullUps, Progress progress) {
+        if (choices.size() > MOST_KEPT || judgements.size() > MOST_KEPT) {
+            choices.clear();
+            judgements.clear();
+        }
+        BoardContext context = new BoardContext(board, catalogue, pullUps);
+        List<TapPlan> taps = taps(context);
+        List<ChannelPlan> channels = new ArrayList<>();
+        Set<String> used = new HashSet<>();
+        for (Channel channel : board.channels()) {
+            step(progress, "choosing parts", channels.size(), board.channels().size());
+            ChannelPlan plan = solve(context, channel, taps, used);
+            plan.solved().ifPresent(solved -> used.addAll(numbers(solved.circuit())));
+            channels.add(plan);
+        }
+        step(progress, "choosing parts", channels.size(), board.channels().size());
+        return assembled(context, channels, taps);
+    }
+
+    private static void step(Progress progress, String stage, int done, int total) {
+        if (progress.cancelled()) {
+            throw new Cancelled();
+        }
+        progress.reached(stage, done, total);
+    }
+
+    private ChannelPlan solve(BoardContext context, Channel channel, List<TapPlan> taps, Set<String> used) {
+        List<String> unknown = ChannelSolver.unknownPins(channel, context.catalogue());
+        if (!unknown.isEmpty()) {
+            return ChannelSolver.unknown(channel, unknown);
+        }
+        return switch (Demand.of(channel)) {
+            case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(channel, missing);
+            case Demand.Reading.Complete(Demand demand) -> {
+                ChannelProblem problem = context.problem(demand, threshold(channel, taps));
+                yield withCures(solve(problem, used), new BoardTrials(this, context, problem));
+            }
+        };
+    }
+
+    /** One channel by itself, without cures. */
+    ChannelPlan solve(ChannelProblem problem, Set<String> used) {
+        ChannelChoice choice = choices.get(problem);
+        if (choice == null) {
+            choice = picker.pick(problem);
+            choices.put(problem, choice);
+        }
+        return switch (choice) {
+            case ChannelChoice.Accepted(List<SenseCircuit> circuits) -> judged(problem, preferred(circuits, used));
+            case ChannelChoice.Nearest(SenseCircuit circuit) -> judged(problem, circuit);
+            case ChannelChoice.NoFit none -> ChannelSolver.noFit(problem.demand().channel(), none);
+        };
+    }
+
+    private ChannelPlan judged(ChannelProblem problem, SenseCircuit circuit) {
+        return judgements.computeIfAbsent(new Judged(problem, circuit),
+                key -> ChannelSolver.judged(key.problem(), key.circuit()));
+    }
+
+    private ChannelPlan withCures(ChannelPlan plan, BoardTrials trials) {
+        List<Cure> cures = Cures.of(plan, trials);
+        return cures.isEmpty()
+                ? plan
+                : new ChannelPlan(plan.channel(), plan.verdict(), plan.accepted(), plan.solved(), plan.findings(),
+                        cures, plan.refusals());
+    }
+
+    /** Of equally good circuits the one with most parts and values the board already uses; the first among equals. */
+    private static SenseCircuit preferred(List<SenseCircuit> circuits, Set<String> used) {
+        SenseCircuit best = circuits.getFirst();
+        long most = -1;
+        for (SenseCircuit circuit : circuits) {
+            long there = numbers(circuit).stream().filter(used::contains).count();
+            if (there > most) {
+                most = there;
+                best = circuit;
+            }
+        }
+        return best;
+    }
+
+    private static List<String> numbers(SenseCircuit circuit) {
+        List<String> numbers = new ArrayList<>(List.of(circuit.shunt().partNumber(),
+                circuit.amplifier().partNumber(), circuit.comparator().partNumber()));
+        if (circuit.threshold() instanceof Threshold.Divider divider) {
+            numbers.add(circuit.resistors().partNumber() + " " + divider.top());
+            numbers.add(circuit.resistors().partNumber() + " " + divider.bottom());
+        }
+        return numbers;
+    }
+
+    static Optional<Threshold> threshold(Channel channel, List<TapPlan> taps) {
+        return channel.threshold() instanceof ThresholdDemand.SharedTap(String name)
+                ? taps.stream().filter(each -> each.tap().name().equals(name)).findFirst()
+                        .flatMap(TapPlan::threshold)
+                : Optional.empty();
+    }
+
+    private List<TapPlan> taps(BoardContext context) {
+        List<TapPlan> taps = new ArrayList<>();
+        for (Tap tap : context.board().taps()) {
+            List<ChannelProblem> problems = new ArrayList<>();
+            List<String> names = new ArrayList<>();
+            for (Channel channel : context.board().channels()) {
+                if (channel.threshold() instanceof ThresholdDemand.SharedTap(String name)
+                        && name.equals(tap.name())) {
+                    names.add(channel.name());
+                    if (Demand.of(channel) instanceof Demand.Reading.Complete(Demand demand)
+                            && ChannelSolver.unknownPins(channel, context.catalogue()).isEmpty()) {
+                        problems.add(context.problem(demand, Optional.empty()));
+                    }
+                }
+            }
+            Optional<SourceVoltage> source = context.source(tap.source());
+            Optional<Threshold> threshold = source.isPresent() && !problems.isEmpty()
+                    && !problems.getFirst().resistors().isEmpty()
+                            ? new TapPicker(tables).pick(tap, source.get(), problems, names.size())
+                            : Optional.empty();
+            taps.add(new TapPlan(tap, names, threshold));
+        }
+        return taps;
+    }
+
+    private static Plan assembled(BoardContext context, List<ChannelPlan> planned, List<TapPlan> taps) {
+        Board board = context.board();
+        List<Finding> findings = new ArrayList<>(context.findings());
+        List<ChannelPlan> channels = TapFindings.added(planned, taps, findings);
+        List<AlertPlan> alerts = new ArrayList<>();
+        for (var line : board.alertLines()) {
+            List<ChannelPlan> on = channels.stream()
+                    .filter(each -> context.line(each.channel()).filter(line::equals).isPresent()).toList();
+            List<OpenDrainOutput> outputs = on.stream().flatMap(each -> each.solved().stream())
+                    .map(each -> each.circuit().comparator().output()).toList();
+            AlertPlan alert = AlertJudge.judge(line, context.lineVoltage(line),
+                    on.stream().map(each -> each.channel().name()).toList(), outputs);
+            alerts.add(alert);
+            findings.addAll(AlertJudge.findings(alert, context.lineVoltage(line), outputs));
+        }
+        List<SharedUse> uses = new SharedBudget(context, channels, taps, alerts).uses();
+        findings.addAll(SharedBudget.findings(uses));
+        List<PartUse> parts = PartsList.of(channels, new LinkedHashMap<>(context.referenceParts()), taps, alerts,
+                context.tapResistors(), context.pullUpResistors());
+        return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps, parts,
+                Findings.sorted(findings));
     }
 
     /** The board with every choice of the plan pinned, so that {@link #check} judges exactly this plan. */
     public static Board pinned(Plan plan) {
-        return plan.board();
+        return Pinning.of(plan);
     }
 }

@@ -35,7 +35,7 @@ record Amount(BigDecimal number, boolean negative, Optional<Unit> unit, boolean 
         if (symbol.isEmpty()) {
             return Reading.value(new Amount(found.number(), found.negative(), Optional.empty(), false));
         }
-        if ("±+-~".indexOf(symbol.charAt(0)) >= 0) {
+        if (symbol.chars().anyMatch(c -> "±+-~".indexOf(c) >= 0)) {
             return Reading.misread(TypedText.quote(text) + " is more than one value. Where a range can stand it is "
                     + "written 3 .. 5, where a tolerance can stand ±2 %.");
         }

@@ -17,8 +17,10 @@ record NumberText(BigDecimal number, boolean negative, String rest) {
             .compile("([+-]?) ?((?:[0-9]+\\.?[0-9]*|\\.[0-9]+))(?:[eE]([+-]?[0-9]+))?");
     private static final Pattern NOT_FINITE = Pattern.compile("[+-]? ?(?:nan|inf|infinity|∞)(?![a-z]).*",
             Pattern.CASE_INSENSITIVE);
+    private static final Pattern THOUSANDS = Pattern.compile("[+-]? ?[1-9][0-9]{0,2},[0-9]{3}(?![0-9]).*");
     private static final Pattern COMMA = Pattern.compile(".*(?:[0-9] ?,|, ?[0-9]).*");
-    private static final Pattern GROUPED = Pattern.compile("['’_´`]?[0-9].*");
+    /** A digit goes on after a gap or a separator; not the one of "1/K". */
+    private static final Pattern GROUPED = Pattern.compile("['’_´`]?[0-9](?!/).*");
     /** Longer exponents are far outside what a double holds. */
     private static final int EXPONENT_CHARACTERS = 5;
 
@@ -26,9 +28,9 @@ record NumberText(BigDecimal number, boolean negative, String rest) {
     static Reading<NumberText> leading(String text, Dimension dimension) {
         String quoted = TypedText.quote(text);
         if (COMMA.matcher(text).matches()) {
-            return Reading.misread(quoted + " has a comma: write " + quoted.replace(',', '.')
-                    + " with a point; a comma is not taken because it means the decimal point in one country and "
-                    + "thousands in another.");
+            return Reading.misread(quoted + " has a comma: write " + withoutComma(text)
+                    + "; a comma is not taken because it means the decimal point in one country and thousands in "
+                    + "another.");
         }
         if (NOT_FINITE.matcher(text).matches()) {
             return Reading.misread(quoted + " is not a finite number. Write " + article(dimension) + ".");
@@ -53,6 +55,17 @@ record NumberText(BigDecimal number, boolean negative, String rest) {
         boolean negative = matcher.group(1).equals("-");
         BigDecimal digits = new BigDecimal(matcher.group(2)).scaleByPowerOfTen(Integer.parseInt(exponent));
         return Reading.value(new NumberText(negative ? digits.negate() : digits, negative, rest));
+    }
+
+    /** What may be meant, as far as the comma can only stand for a point or for thousands. */
+    private static String withoutComma(String text) {
+        if (text.indexOf('.') >= 0 || text.indexOf(',') != text.lastIndexOf(',')) {
+            return "the digits without separators and with one point";
+        }
+        String point = TypedText.quote(text.replace(',', '.')) + " with a point";
+        return THOUSANDS.matcher(text).matches()
+                ? point + " or " + TypedText.quote(text.replace(",", "")) + " for thousands"
+                : point;
     }
 
     private static String article(Dimension dimension) {

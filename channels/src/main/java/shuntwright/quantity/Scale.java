@@ -1,9 +1,12 @@
 package shuntwright.quantity;
 
 import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.IntSummaryStatistics;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.stream.Collectors;
-import java.util.stream.IntStream;
 
 /**
  * The units a dimension is written in, by size of the value; beyond them numbers get an exponent.
@@ -24,7 +27,21 @@ record Scale(List<Step> steps, int until, Unit far, Unit zero) {
     /** In one range values further apart than this many powers of ten get a prefix of their own. */
     private static final int TOGETHER = 3;
 
+    private static final Map<Dimension, Scale> SCALES = scales();
+
     static Scale of(Dimension dimension) {
+        return Objects.requireNonNull(SCALES.get(dimension));
+    }
+
+    private static Map<Dimension, Scale> scales() {
+        Map<Dimension, Scale> scales = new EnumMap<>(Dimension.class);
+        for (Dimension dimension : Dimension.values()) {
+            scales.put(dimension, scale(dimension));
+        }
+        return scales;
+    }
+
+    private static Scale scale(Dimension dimension) {
         return switch (dimension) {
             case CURRENT, VOLTAGE, RESISTANCE, POWER, ENERGY, FREQUENCY, CAPACITANCE ->
                 prefixed(dimension, SMALLEST, LARGEST, LARGEST + 3);
@@ -86,8 +103,7 @@ record Scale(List<Step> steps, int until, Unit far, Unit zero) {
             return false;
         }
         List<Decimal> sized = values.stream().filter(value -> !value.isZero()).toList();
-        IntStream exponents = sized.stream().mapToInt(Decimal::exponent);
-        var span = exponents.summaryStatistics();
+        IntSummaryStatistics span = sized.stream().mapToInt(Decimal::exponent).summaryStatistics();
         return sized.stream().map(this::unit).distinct().count() <= 1 || span.getMax() - span.getMin() <= TOGETHER;
     }
 

@@ -33,6 +33,10 @@ final class ToleranceText {
         if (!signed && text.startsWith("+")) {
             return Reading.misread(TypedText.quote(text) + " gives one side of the tolerance only. " + FORMS);
         }
+        if (!signed && text.startsWith("-")) {
+            return Reading.misread(TypedText.quote(text) + " is negative, but a tolerance is 0 or more on each side. "
+                    + FORMS + " A range is written 3 .. 5.");
+        }
         String size = signed ? symmetric.group(1) : text;
         return fraction(size, text).then(fraction -> tolerance(fraction, fraction, text));
     }

@@ -1,0 +1,147 @@
+package shuntwright.accuracy;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+import shuntwright.board.Channel;
+import shuntwright.board.Demand;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.circuit.Surroundings;
+import shuntwright.quantity.Range;
+
+/** Judges one circuit against one demand: the readers of one {@link InputDescription}. */
+public final class ChannelAccuracy {
+
+    private final ChannelEquations equations;
+    private final InputDescription description;
+    private final SenseCircuit circuit;
+    private final Demand demand;
+    private final boolean reads;
+
+    private ChannelAccuracy(SenseCircuit circuit, Surroundings around, Demand demand) {
+        this.equations = new ChannelEquations(circuit, around);
+        this.description = InputDescription.of(circuit, around, demand);
+        this.circuit = circuit;
+        this.demand = demand;
+        this.reads = around.adc().isPresent();
+    }
+
+    public static ChannelAccuracy of(SenseCircuit circuit, Surroundings around, Demand demand) {
+        return new ChannelAccuracy(circuit, around, demand);
+    }
+
+    /** The uncertain inputs of all outcomes. */
+    public List<Input> inputs() {
+        return List.copyOf(description.inputs());
+    }
+
+    /** What the demand allows for each outcome it asks for, trip first. */
+    public static List<Asked> asked(Demand demand, boolean reads) {
+        List<Asked> asked = new ArrayList<>();
+        asked.add(new Asked(Outcome.TRIP, 0, demand.tripWindow()));
+        demand.rearm().ifPresent(window -> asked.add(new Asked(Outcome.RELEASE, 0, window)));
+        Channel channel = demand.channel();
+        if (reads) {
+            OptionalDouble least = channel.currents().least();
+            if (least.isPresent()) {
+                within(Outcome.READING_AT_LEAST, least.getAsDouble(), channel.reading().atLeast(), asked);
+            }
+            within(Outcome.READING_AT_LOAD, demand.load(), channel.reading().atLoad(), asked);
+        }
+        return asked;
+    }
+
+    /**
+     * One thing a demand asks for.
+     *
+     * @param outcome which
+     * @param current at which a reading is taken, A; 0 for trip and release
+     * @param allowed A
+     */
+    public record Asked(Outcome outcome, double current, Range allowed) {}
+
+    private static void within(Outcome outcome, double current, OptionalDouble error, List<Asked> asked) {
+        if (error.isPresent()) {
+            double share = error.getAsDouble();
+            asked.add(new Asked(outcome, current, Range.of(current * (1 - share), current * (1 + share))));
+        }
+    }
+
+    /** Every outcome the demand asks for, with limits, combined uncertainty and budget. */
+    public List<Assessment> assess(double coverage) {
+        List<Assessment> all = new ArrayList<>();
+        for (Asked each : asked(demand, reads)) {
+            all.add(assess(each, coverage));
+        }
+        return all;
+    }
+
+    private Assessment assess(Asked asked, double coverage) {
+        Equation equation = equation(asked);
+        LimitsReader reader = new LimitsReader(equation, description);
+        LimitsReader.Corner low = reader.lowest();
+        LimitsReader.Corner high = reader.highest();
+        Propagation propagation = propagate(equation);
+        double nominal = equation.value(description.nominal());
+        return new Assessment(asked.outcome(), nominal, Range.of(finite(low.value()), finite(high.value())),
+                propagation.expanded(coverage), asked.allowed(),
+                ErrorBudget.lines(equation, description, low, high, propagation));
+    }
+
+    /** Thermal runaway is reported as a current beyond any board, so that it stays a number. */
+    private static double finite(double current) {
+        return Math.min(current, 1e9);
+    }
+
+    /** The exact limits of one outcome, A. */
+    public Range limits(Asked asked) {
+        LimitsReader reader = new LimitsReader(equation(asked), description);
+        return Range.of(finite(reader.lowest().value()), finite(reader.highest().value()));
+    }
+
+    /** Combined standard uncertainty of one outcome and its expanded interval. */
+    public CombinedUncertainty combined(Asked asked, double coverage) {
+        return propagate(equation(asked)).expanded(coverage);
+    }
+
+    /** The outcome with every input at its nominal value, A. */
+    public double nominal(Asked asked) {
+        return equation(asked).value(description.nominal());
+    }
+
+    /** Nominal amplifier output voltage at which the comparator trips (false) or releases (true), V. */
+    public double outputVoltage(boolean tripped) {
+        return equations.outputVoltage(tripped, description.nominal());
+    }
+
+    /** Exact extremes of the amplifier output voltage at which the comparator trips, V. */
+    public Range thresholdLimits() {
+        LimitsReader reader = new LimitsReader(new ThresholdVoltage(equations), description);
+        return Range.of(reader.lowest().value(), reader.highest().value());
+    }
+
+    private Equation equation(Asked asked) {
+        return switch (asked.outcome()) {
+            case TRIP -> equations.trip();
+            case RELEASE -> equations.release();
+            case READING_AT_LEAST, READING_AT_LOAD -> equations.reading(asked.current());
+        };
+    }
+
+    private Propagation propagate(Equation equation) {
+        List<Estimate> estimates = new ArrayList<>();
+        for (double value : description.nominal()) {
+            estimates.add(Estimate.of(value, 0));
+        }
+        for (Input input : description.inputs()) {
+            estimates.set(Layout.index(input), Estimate.of(input.limits().mid(), input.standardUncertainty()));
+        }
+        return Propagation.secondOrder(equation, estimates);
+    }
+
+    /** The circuit judged. */
+    public SenseCircuit circuit() {
+        return circuit;
+    }
+}

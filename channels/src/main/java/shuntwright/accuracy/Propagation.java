@@ -1,0 +1,174 @@
+package shuntwright.accuracy;
+
+import java.util.Arrays;
+import java.util.List;
+
+import org.hipparchus.distribution.continuous.NormalDistribution;
+import org.hipparchus.distribution.continuous.TDistribution;
+
+/**
+ * Propagation of uncertainty by JCGM 100:2008, first order with correlation (eq. 13) and, where asked, the next terms of
+ * the Taylor series for independent inputs (5.1.2, note).
+ *
+ * <p>The next terms matter here: a drift multiplies a temperature difference whose expectation may be zero, so its first
+ * order sensitivity is zero although its effect is not.
+ */
+public final class Propagation {
+
+    /** Relative part of the last digit up to which an effective number of degrees of freedom counts as whole. */
+    private static final double WHOLE = 1e-9;
+
+    private final double value;
+    private final double[] sensitivities;
+    private final double[] variances;
+    private final double variance;
+    private final double effectiveDegrees;
+
+    private Propagation(double value, double[] sensitivities, double[] variances, double variance,
+            double effectiveDegrees) {
+        this.value = value;
+        this.sensitivities = sensitivities;
+        this.variances = variances;
+        this.variance = variance;
+        this.effectiveDegrees = effectiveDegrees;
+    }
+
+    /** First order, independent inputs. */
+    public static Propagation firstOrder(Equation f, List<Estimate> inputs) {
+        return of(f, inputs, new double[0][], false);
+    }
+
+    /** With the next terms of the Taylor series, independent inputs. */
+    public static Propagation secondOrder(Equation f, List<Estimate> inputs) {
+        return of(f, inputs, new double[0][], true);
+    }
+
+    /** First order with correlation coefficients r[i][j] (symmetric, ones on the diagonal). */
+    public static Propagation correlated(Equation f, List<Estimate> inputs, double[][] correlation) {
+        if (correlation.length != inputs.size()) {
+            throw new IllegalArgumentException(
+                    "the correlation matrix needs " + inputs.size() + " rows, got " + correlation.length);
+        }
+        return of(f, inputs, correlation, false);
+    }
+
+    private static Propagation of(Equation f, List<Estimate> inputs, double[][] correlation, boolean second) {
+        int n = inputs.size();
+        double[] x = new double[n];
+        double[] u = new double[n];
+        for (int i = 0; i < n; i++) {
+            x[i] = inputs.get(i).value();
+            u[i] = inputs.get(i).standard();
+        }
+        double[] c = new double[n];
+        double y = f.gradient(x, c);
+        double[] parts = new double[n];
+        double fourth = 0;
+        double first = 0;
+        for (int i = 0; i < n; i++) {
+            double ui = c[i] * u[i];
+            parts[i] = ui * ui;
+            first += ui * ui;
+            fourth += parts[i] * parts[i] / inputs.get(i).degreesOfFreedom();
+        }
+        double variance = first + crossTerms(c, u, correlation);
+        // The Welch-Satterthwaite formula is for the first order combination of independent inputs (G.4.1).
+        double degrees = fourth > 0 ? first * first / fourth : Double.POSITIVE_INFINITY;
+        if (second) {
+            double[] next = nextTerms(f, x, u, c);
+            for (int i = 0; i < n; i++) {
+                parts[i] += next[i];
+                variance += next[i];
+            }
+        }
+        return new Propagation(y, c, parts, Math.max(0, variance), degrees);
+    }
+
+    private static double crossTerms(double[] c, double[] u, double[][] correlation) {
+        double sum = 0;
+        for (int i = 0; i < correlation.length; i++) {
+            for (int j = i + 1; j < correlation.length; j++) {
+                sum += 2 * c[i] * c[j] * u[i] * u[j] * correlation[i][j];
+            }
+        }
+        return sum;
+    }
+
+    /**
+     * The terms [½ (∂²f/∂xi∂xj)² + ∂f/∂xi ∂³f/∂xi∂xj²] u²(xi) u²(xj), summed over j, by differences of the gradient over
+     * ± u(xj).
+     */
+    private static double[] nextTerms(Equation f, double[] x, double[] u, double[] c) {
+        int n = x.length;
+        double[] terms = new double[n];
+        double[] above = new double[n];
+        double[] below = new double[n];
+        double[] point = Arrays.copyOf(x, n);
+        for (int j = 0; j < n; j++) {
+            if (u[j] == 0) {
+                continue;
+            }
+            point[j] = x[j] + u[j];
+            f.gradient(point, above);
+            point[j] = x[j] - u[j];
+            f.gradient(point, below);
+            point[j] = x[j];
+            for (int i = 0; i < n; i++) {
+                if (u[i] == 0) {
+                    continue;
+                }
+                // Both differences already carry one factor of u(xj) each: h = u(xj).
+                double mixed = (above[i] - below[i]) / 2;
+                double third = above[i] - 2 * c[i] + below[i];
+                terms[i] += (0.5 * mixed * mixed + c[i] * third) * u[i] * u[i];
+            }
+        }
+        return terms;
+    }
+
+    /** y = f(expectations). */
+    public double value() {
+        return value;
+    }
+
+    /** u_c(y). */
+    public double standard() {
+        return Math.sqrt(variance);
+    }
+
+    /** ν_eff (eq. G.2b), infinite when every input's is. */
+    public double effectiveDegreesOfFreedom() {
+        return effectiveDegrees;
+    }
+
+    /** ∂f/∂xi. */
+    public double sensitivity(int input) {
+        return sensitivities[input];
+    }
+
+    /** The part of u_c² that comes with an input (half of each mixed second order term). */
+    public double variancePart(int input) {
+        return variances[input];
+    }
+
+    /** Expanded with the coverage factor for {@code probability}. */
+    public CombinedUncertainty expanded(double probability) {
+        return new CombinedUncertainty(value, standard(), effectiveDegrees, probability,
+                coverageFactor(effectiveDegrees, probability));
+    }
+
+    /**
+     * k for a two-sided probability: t-quantile with the degrees of freedom truncated to the next lower whole number
+     * (G.4.1), normal quantile when they are infinite.
+     */
+    public static double coverageFactor(double degreesOfFreedom, double probability) {
+        double upper = (1 + probability) / 2;
+        if (degreesOfFreedom > 1e6) {
+            return STANDARD_NORMAL.inverseCumulativeProbability(upper);
+        }
+        double whole = Math.max(1, Math.floor(degreesOfFreedom * (1 + WHOLE)));
+        return new TDistribution(whole).inverseCumulativeProbability(upper);
+    }
+
+    private static final NormalDistribution STANDARD_NORMAL = new NormalDistribution(0, 1);
+}

@@ -1,0 +1,185 @@
+package shuntwright.choice;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalInt;
+
+import shuntwright.accuracy.Propagation;
+import shuntwright.board.Acceptance;
+import shuntwright.board.Channel;
+import shuntwright.board.Demand;
+import shuntwright.circuit.LimitCheck;
+import shuntwright.circuit.LimitRules;
+import shuntwright.parts.SenseAmplifier;
+import shuntwright.parts.Shunt;
+import shuntwright.quantity.Range;
+
+/**
+ * Finds the candidates of one channel: every shunt, every number in parallel, every amplifier, rejected early by the
+ * limits and by the room that their errors leave for a threshold. Never rejects what exact limits would accept.
+ */
+final class CandidateSearch {
+
+    private final ChannelProblem problem;
+    private final ShuntTerms[] shunts;
+    private final AmplifierTerms amplifiers;
+    private final Readings readings;
+
+    CandidateSearch(ChannelProblem problem) {
+        this.problem = problem;
+        this.shunts = shunts(problem);
+        this.amplifiers = new AmplifierTerms(amplifiers(problem), problem);
+        this.readings = new Readings(problem, amplifiers);
+    }
+
+    private static ShuntTerms[] shunts(ChannelProblem problem) {
+        Demand demand = problem.demand();
+        Optional<String> pinned = demand.channel().pins().shunt();
+        List<ShuntTerms> terms = new ArrayList<>();
+        for (Shunt shunt : problem.catalogue().shunts()) {
+            if (pinned.isPresent() && !pinned.get().equals(shunt.partNumber())) {
+                continue;
+            }
+            for (int count : counts(problem)) {
+                if (holds(LimitRules.ofShunt(shunt, count, demand, problem.around()))) {
+                    terms.add(new ShuntTerms(shunt, count, problem));
+                }
+            }
+        }
+        terms.sort(Comparator.comparingDouble((ShuntTerms t) -> t.heat).thenComparingDouble(t -> t.cost));
+        return terms.toArray(new ShuntTerms[0]);
+    }
+
+    /** The numbers of shunts in parallel that may be tried. */
+    static int[] counts(ChannelProblem problem) {
+        OptionalInt pinned = problem.demand().channel().pins().shuntCount();
+        if (pinned.isPresent()) {
+            return new int[]{pinned.getAsInt()};
+        }
+        int[] counts = new int[problem.around().rules().parallelShunts()];
+        for (int i = 0; i < counts.length; i++) {
+            counts[i] = i + 1;
+        }
+        return counts;
+    }
+
+    private static List<SenseAmplifier> amplifiers(ChannelProblem problem) {
+        Optional<String> pinned = problem.demand().channel().pins().amplifier();
+        return problem.catalogue().amplifiers().stream()
+                .filter(each -> pinned.isEmpty() || pinned.get().equals(each.partNumber()))
+                .filter(each -> holds(LimitRules.ofAmplifier(each, problem.demand(), problem.around()))).toList();
+    }
+
+    static boolean holds(List<LimitCheck> checks) {
+        for (LimitCheck check : checks) {
+            if (!check.holds()) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    ShuntTerms shunt(int term) {
+        return shunts[term];
+    }
+
+    AmplifierTerms amplifiers() {
+        return amplifiers;
+    }
+
+    int combinations() {
+        return shunts.length * amplifiers.size();
+    }
+
+    /** Candidates that may be inside (or likely, where the board accepts that). */
+    Candidates promising() {
+        Candidates found = new Candidates();
+        Demand demand = problem.demand();
+        Channel.Stress stress = demand.channel().stress();
+        double fullScale = demand.fullScale();
+        double least = demand.channel().currents().least().orElse(0);
+        double fault = stress.fault().orElse(0);
+        boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
+        AmplifierTerms a = amplifiers;
+        for (int i = 0; i < shunts.length; i++) {
+            ShuntTerms s = shunts[i];
+            double full = fullScale * s.resistance;
+            double small = least * s.resistance;
+            double surge = fault * s.resistance;
+            double emf = s.emf;
+            for (int j = 0; j < a.gain.length; j++) {
+                if (full > a.mostAtFull[j] || small < a.leastAtLeast[j] || surge > a.mostAtFault[j]) {
+                    continue;
+                }
+                double low0 = a.gainHigh[0][j] * (s.noTripHigh[0] + a.error[0][j] + emf);
+                double high0 = a.gainLow[0][j] * (s.mustTripLow[0] - a.error[0][j] - emf);
+                double low1 = a.gainHigh[1][j] * (s.noTripHigh[1] + a.error[1][j] + emf);
+                double high1 = a.gainLow[1][j] * (s.mustTripLow[1] - a.error[1][j] - emf);
+                if (low0 <= high0 && low1 <= high1 && Math.max(low0, low1) <= Math.min(high0, high1)
+                        && readings.mayHold(s, j)) {
+                    found.add(i, j, low0, high0, low1, high1);
+                } else if (coverage) {
+                    addLikely(i, j, found);
+                }
+            }
+        }
+        return found;
+    }
+
+    private void addLikely(int i, int j, Candidates found) {
+        ShuntTerms s = shunts[i];
+        Range window = problem.demand().tripWindow();
+        double target = problem.demand().tripTarget();
+        double k = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
+        double shuntVoltage = target * s.resistance;
+        double relative = 0.98 * k * Math.sqrt(s.variance + amplifiers.gainVariance[j]
+                + amplifiers.errorVariance[j] / (shuntVoltage * shuntVoltage));
+        double low = amplifiers.gain[j] * (window.min() + target * relative) * s.resistance;
+        double high = amplifiers.gain[j] * (window.max() - target * relative) * s.resistance;
+        if (low <= high) {
+            found.add(i, j, low, high, low, high);
+        }
+    }
+
+    /** Candidates that respect the limits, whatever their errors, best room first, at most {@code most}. */
+    Candidates nearest(int most) {
+        List<double[]> all = new ArrayList<>();
+        Demand demand = problem.demand();
+        double least = demand.channel().currents().least().orElse(0);
+        double fault = demand.channel().stress().fault().orElse(0);
+        AmplifierTerms a = amplifiers;
+        for (int i = 0; i < shunts.length; i++) {
+            ShuntTerms s = shunts[i];
+            for (int j = 0; j < a.size(); j++) {
+                if (demand.fullScale() * s.resistance > a.mostAtFull[j] || least * s.resistance < a.leastAtLeast[j]
+                        || fault * s.resistance > a.mostAtFault[j]) {
+                    continue;
+                }
+                double room = readings.room(s, j);
+                double[] row = {i, j, 0, 0, 0, 0, 0};
+                for (int end = 0; end < 2; end++) {
+                    double low = a.gainHigh[end][j] * (s.noTripHigh[end] + a.error[end][j] + s.emf);
+                    double high = a.gainLow[end][j] * (s.mustTripLow[end] - a.error[end][j] - s.emf);
+                    row[2 + 2 * end] = low;
+                    row[3 + 2 * end] = high;
+                    room = Math.min(room, high / low - 1);
+                    if (demand.rearm().isPresent()) {
+                        double from = a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf);
+                        double to = a.gainLow[end][j] * (s.rearmHighLow[end] - a.error[end][j] - s.emf);
+                        room = Math.min(room, to / from - 1);
+                    }
+                }
+                row[6] = Double.isNaN(room) ? Double.NEGATIVE_INFINITY : room;
+                all.add(row);
+            }
+        }
+        all.sort(Comparator.comparingDouble((double[] row) -> -row[6]));
+        Candidates found = new Candidates();
+        for (double[] row : all.subList(0, Math.min(most, all.size()))) {
+            found.add((int) row[0], (int) row[1], row[2], row[3], row[4], row[5]);
+        }
+        return found;
+    }
+}

@@ -1,0 +1,236 @@
+package shuntwright.choice;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+
+import shuntwright.board.Acceptance;
+import shuntwright.circuit.LimitRules;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Threshold;
+import shuntwright.parts.Hysteresis;
+import shuntwright.parts.ResistorSeries;
+import shuntwright.quantity.Range;
+
+/**
+ * Chooses for one channel: of all circuits that respect every limit and are accepted, those with least heat, then least
+ * cost; where none is accepted, the nearest one that respects the limits; where there is none, the reasons.
+ */
+public final class ChannelPicker {
+
+    /** Heats and costs closer than this, relative, count as equal. */
+    private static final double SAME = 1e-9;
+    private static final int NEAREST_PAIRS = 60;
+    private static final int NEAREST_CIRCUITS = 120;
+
+    private final DividerTables tables;
+
+    public ChannelPicker(DividerTables tables) {
+        this.tables = tables;
+    }
+
+    /** How many combinations of shunts and amplifier there are, and how many are promising. */
+    public record Count(int combinations, int promising) {}
+
+    /** Runs only the search for candidates. */
+    public Count count(ChannelProblem problem) {
+        CandidateSearch search = new CandidateSearch(problem);
+        return new Count(search.combinations(), search.promising().size());
+    }
+
+    /** The choice; a pure function of the problem. */
+    public ChannelChoice pick(ChannelProblem problem) {
+        CandidateSearch search = new CandidateSearch(problem);
+        List<shuntwright.parts.Comparator> comparators = comparators(problem);
+        Judge judge = new Judge(problem);
+        Candidates promising = search.promising();
+        Optional<ChannelChoice> accepted = accepted(problem, search, promising, comparators, judge);
+        if (accepted.isPresent()) {
+            return accepted.get();
+        }
+        return nearest(problem, search, comparators, judge)
+                .<ChannelChoice>map(ChannelChoice.Nearest::new)
+                .orElseGet(() -> new ChannelChoice.NoFit(Refusals.of(problem, tables)));
+    }
+
+    /** The comparators that respect their own limits and suit the demanded release. */
+    static List<shuntwright.parts.Comparator> comparators(ChannelProblem problem) {
+        Optional<String> pinned = problem.demand().channel().pins().comparator();
+        return problem.catalogue().comparators().stream()
+                .filter(each -> pinned.isEmpty() || pinned.get().equals(each.partNumber()))
+                .filter(each -> suits(each, problem, pinned.isPresent()))
+                .filter(each -> CandidateSearch.holds(
+                        LimitRules.ofComparator(each, problem.pullUp().voltage().max(), problem.around())))
+                .toList();
+    }
+
+    /** Positive feedback on a shared tap or line couples channels, so it is taken only where the user has pinned it. */
+    static boolean suits(shuntwright.parts.Comparator comparator, ChannelProblem problem, boolean pinned) {
+        boolean rearms = problem.demand().rearm().isPresent();
+        return switch (comparator.hysteresis()) {
+            case Hysteresis.Latched _ -> !rearms;
+            case Hysteresis.PositiveFeedback _ ->
+                rearms && (pinned || (problem.tap().isEmpty() && !problem.pullUp().sharedLine()));
+            case Hysteresis.InjectedCurrent _,Hysteresis.BuiltIn _ -> rearms;
+        };
+    }
+
+    /** One way to complete a candidate. */
+    private record Option(int candidate, shuntwright.parts.Comparator comparator, Optional<SourceVoltage> source,
+            ResistorSeries resistors, double cost, double room) {}
+
+    private Optional<ChannelChoice> accepted(ChannelProblem problem, CandidateSearch search, Candidates found,
+            List<shuntwright.parts.Comparator> comparators, Judge judge) {
+        CircuitBuilder builder = new CircuitBuilder(problem, tables);
+        int from = 0;
+        while (from < found.size()) {
+            double heat = search.shunt(found.shunt(from)).heat;
+            int to = from;
+            List<Option> options = new ArrayList<>();
+            while (to < found.size() && search.shunt(found.shunt(to)).heat <= heat * (1 + SAME)) {
+                options(problem, search, found, to, comparators, true, options);
+                to++;
+            }
+            options.sort(Comparator.comparingDouble(Option::cost).thenComparing(Comparator.comparingDouble(
+                    Option::room).reversed()));
+            List<SenseCircuit> circuits = firstAccepted(problem, search, found, options, builder, judge);
+            if (!circuits.isEmpty()) {
+                return Optional.of(new ChannelChoice.Accepted(circuits));
+            }
+            from = to;
+        }
+        return Optional.empty();
+    }
+
+    private static List<SenseCircuit> firstAccepted(ChannelProblem problem, CandidateSearch search, Candidates found,
+            List<Option> options, CircuitBuilder builder, Judge judge) {
+        List<SenseCircuit> circuits = new ArrayList<>();
+        double cost = Double.POSITIVE_INFINITY;
+        for (Option option : options) {
+            if (option.cost() > cost * (1 + SAME) || circuits.size() >= 8) {
+                break;
+            }
+            for (SenseCircuit circuit : build(problem, search, found, option, builder)) {
+                if (judge.accepts(circuit)) {
+                    circuits.add(circuit);
+                    cost = option.cost();
+                }
+            }
+        }
+        return circuits;
+    }
+
+    private static List<SenseCircuit> build(ChannelProblem problem, CandidateSearch search, Candidates found,
+            Option option, CircuitBuilder builder) {
+        ShuntTerms shunt = search.shunt(found.shunt(option.candidate()));
+        Window window = new Window(found, option.candidate(), shunt, search.amplifiers(), option.comparator(),
+                problem);
+        return builder.build(shunt, search.amplifiers(), found.amplifier(option.candidate()), window,
+                option.source(), option.resistors());
+    }
+
+    private void options(ChannelProblem problem, CandidateSearch search, Candidates found, int candidate,
+            List<shuntwright.parts.Comparator> comparators, boolean strict, List<Option> options) {
+        ShuntTerms shunt = search.shunt(found.shunt(candidate));
+        double base = shunt.cost + search.amplifiers().cost[found.amplifier(candidate)];
+        double[] ratios = new double[2];
+        for (shuntwright.parts.Comparator comparator : comparators) {
+            Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
+            double cost = base
+                    + comparator.purchase().unitPriceAt(problem.buildQuantity()) / comparator.sections();
+            for (ResistorSeries resistors : problem.resistors()) {
+                double own = cost + resistorCount(comparator, problem)
+                        * resistors.purchase().unitPriceAt(problem.buildQuantity());
+                if (problem.tap().isPresent()) {
+                    double room = tapRoom(window, problem.tap().get(), resistors);
+                    if (!strict || room >= 0) {
+                        options.add(new Option(candidate, comparator, Optional.empty(), resistors, own, room));
+                    }
+                }
+                for (SourceVoltage source : problem.sources()) {
+                    window.ratios(source, resistors, ratios);
+                    if (!strict || mayServe(problem, window, source, resistors, ratios)) {
+                        double room = ratios[1] / ratios[0] - 1;
+                        options.add(new Option(candidate, comparator, Optional.of(source), resistors, own, room));
+                    }
+                }
+            }
+        }
+    }
+
+    /** False only when no pair of this series can serve from this source. */
+    private boolean mayServe(ChannelProblem problem, Window window, SourceVoltage source, ResistorSeries resistors,
+            double[] ratios) {
+        boolean feedback = window.comparator.hysteresis() instanceof Hysteresis.PositiveFeedback;
+        boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
+        double spread = narrowest(window, source, resistors, ratios);
+        if (coverage) {
+            // Tolerances need not add up here: only the room without the threshold's own spread is certain.
+            double middle = source.voltage().nominal() * (ratios[0] + ratios[1]) / 2;
+            return ratios[0] <= ratios[1] + spread / middle;
+        }
+        boolean there = feedback || problem.demand().channel().pins().dividerTop().isPresent()
+                || tables.of(resistors).has(ratios[0], ratios[1]);
+        return ratios[0] <= ratios[1] && there && window.releaseMayFit(feedback ? 0 : spread);
+    }
+
+    /** The spread of a threshold at the lowest ratio, V. */
+    private static double narrowest(Window window, SourceVoltage source, ResistorSeries resistors, double[] ratios) {
+        double least = Double.POSITIVE_INFINITY;
+        for (int end = 0; end < 2; end++) {
+            least = Math.min(least, window.highest(source, resistors, ratios[0], end)
+                    - window.lowest(source, resistors, ratios[0], end));
+        }
+        return least;
+    }
+
+    private static double tapRoom(Window window, Threshold tap, ResistorSeries resistors) {
+        double room = Double.POSITIVE_INFINITY;
+        for (int end = 0; end < 2; end++) {
+            Range spread = HysteresisChoice.spread(window, tap, resistors, end);
+            room = Math.min(room, window.slack(spread.min(), spread.max(), end));
+        }
+        return room;
+    }
+
+    private static int resistorCount(shuntwright.parts.Comparator comparator, ChannelProblem problem) {
+        int divider = problem.tap().isPresent() ? 0 : 2;
+        return switch (comparator.hysteresis()) {
+            case Hysteresis.InjectedCurrent _,Hysteresis.PositiveFeedback _ -> divider + 1;
+            case Hysteresis.BuiltIn _,Hysteresis.Latched _ -> divider;
+        };
+    }
+
+    private Optional<SenseCircuit> nearest(ChannelProblem problem, CandidateSearch search,
+            List<shuntwright.parts.Comparator> comparators, Judge judge) {
+        Candidates found = search.nearest(NEAREST_PAIRS);
+        CircuitBuilder builder = new CircuitBuilder(problem, tables);
+        List<Option> options = new ArrayList<>();
+        for (int candidate = 0; candidate < found.size(); candidate++) {
+            options(problem, search, found, candidate, comparators, false, options);
+        }
+        options.sort(Comparator.comparingDouble(Option::room).reversed());
+        SenseCircuit best = null;
+        double margin = Double.NEGATIVE_INFINITY;
+        int looked = 0;
+        for (Option option : options) {
+            for (SenseCircuit circuit : build(problem, search, found, option, builder)) {
+                if (!CandidateSearch.holds(judge.limits(circuit))) {
+                    continue;
+                }
+                looked++;
+                double reached = judge.margin(circuit);
+                if (reached > margin) {
+                    margin = reached;
+                    best = circuit;
+                }
+            }
+            if (looked >= NEAREST_CIRCUITS) {
+                break;
+            }
+        }
+        return Optional.ofNullable(best);
+    }
+}

@@ -1,0 +1,35 @@
+package shuntwright.choice;
+
+import java.util.List;
+import java.util.Optional;
+
+import shuntwright.board.Acceptance;
+import shuntwright.board.Demand;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Surroundings;
+import shuntwright.circuit.Threshold;
+import shuntwright.parts.Catalogue;
+import shuntwright.parts.ResistorSeries;
+
+/**
+ * Everything the choice for one channel depends on; two equal problems have equal answers.
+ *
+ * @param demand        what is asked
+ * @param around        supply, ambient, rules, ADC
+ * @param catalogue     parts
+ * @param sources       sources its own divider may start from; empty when a tap is used
+ * @param tap           the threshold of the tap it uses; empty for an own divider
+ * @param resistors     resistor series that may be used, cheapest first
+ * @param pullUp        of its output
+ * @param acceptance    what counts as accepted
+ * @param buildQuantity boards built at once
+ */
+public record ChannelProblem(Demand demand, Surroundings around, Catalogue catalogue, List<SourceVoltage> sources,
+        Optional<Threshold> tap, List<ResistorSeries> resistors, PullUp pullUp, Acceptance acceptance,
+        int buildQuantity) {
+
+    public ChannelProblem {
+        sources = List.copyOf(sources);
+        resistors = List.copyOf(resistors);
+    }
+}

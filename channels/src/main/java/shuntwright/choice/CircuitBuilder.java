@@ -1,0 +1,125 @@
+package shuntwright.choice;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
+
+import shuntwright.board.Pins;
+import shuntwright.circuit.HysteresisNetwork;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Threshold;
+import shuntwright.parts.Comparator;
+import shuntwright.parts.Hysteresis;
+import shuntwright.parts.ResistorSeries;
+import shuntwright.quantity.Range;
+
+/** Gives a combination of parts its divider and hysteresis values. */
+final class CircuitBuilder {
+
+    private final ChannelProblem problem;
+    private final ValueChoice values;
+    private final DividerTables tables;
+
+    CircuitBuilder(ChannelProblem problem, DividerTables tables) {
+        this.problem = problem;
+        this.values = new ValueChoice(tables);
+        this.tables = tables;
+    }
+
+    /** The circuits with the best values (several when equally good); empty when no values fit. */
+    List<SenseCircuit> build(ShuntTerms shunt, AmplifierTerms amplifiers, int amplifier, Window window,
+            Optional<SourceVoltage> source, ResistorSeries resistors) {
+        Parts parts = new Parts(shunt, amplifiers, amplifier, window.comparator, resistors);
+        if (window.comparator.hysteresis() instanceof Hysteresis.PositiveFeedback positive) {
+            return feedback(parts, window, positive, source);
+        }
+        List<? extends Threshold> thresholds = problem.tap().isPresent()
+                ? List.of(problem.tap().get())
+                : values.dividers(window, source.orElseThrow(), resistors, problem.around().rules(), pins());
+        return thresholds.stream()
+                .flatMap(threshold -> network(window, threshold, resistors).stream()
+                        .map(network -> parts.circuit(threshold, network)))
+                .toList();
+    }
+
+    private Pins pins() {
+        return problem.demand().channel().pins();
+    }
+
+    /** The parts chosen so far. */
+    private record Parts(ShuntTerms shunt, AmplifierTerms amplifiers, int amplifier, Comparator comparator,
+            ResistorSeries resistors) {
+        SenseCircuit circuit(Threshold threshold, HysteresisNetwork network) {
+            return new SenseCircuit(shunt.shunt, shunt.count, amplifiers.amplifiers[amplifier], comparator, threshold,
+                    network, resistors);
+        }
+    }
+
+    private Optional<HysteresisNetwork> network(Window window, Threshold threshold, ResistorSeries resistors) {
+        return switch (window.comparator.hysteresis()) {
+            case Hysteresis.InjectedCurrent injected -> HysteresisChoice.senseResistor(window, injected, threshold,
+                    resistors, pins().hysteresisResistor());
+            case Hysteresis.BuiltIn _,Hysteresis.Latched _,Hysteresis.PositiveFeedback _ -> Optional
+                    .of(new HysteresisNetwork.None());
+        };
+    }
+
+    private List<SenseCircuit> feedback(Parts parts, Window window, Hysteresis.PositiveFeedback positive,
+            Optional<SourceVoltage> source) {
+        PullUp pull = problem.pullUp();
+        Optional<Threshold.Divider> fixed = fixedDivider(source);
+        OptionalDouble pinned = pins().hysteresisResistor();
+        if (fixed.isPresent() && pinned.isPresent()) {
+            return List.of(parts.circuit(fixed.get(), new HysteresisNetwork.Feedback(pinned.getAsDouble(),
+                    pull.resistance(), pull.voltage(), pull.supplied())));
+        }
+        if (problem.tap().isPresent() || source.isEmpty()) {
+            return List.of();
+        }
+        double trip = middle(window.low, window.high);
+        double release = middle(window.releaseLow, window.releaseHigh) + positive.builtIn().mid();
+        if (!(release < trip)) {
+            return List.of();
+        }
+        double least = source.get().voltage().max() / problem.around().rules().dividerCurrent();
+        DoubleStream bottoms = fixed.map(divider -> DoubleStream.of(divider.bottom()))
+                .orElseGet(() -> DoubleStream.of(tables.of(parts.resistors()).values())
+                        .filter(value -> value >= least / 20 && value <= biasBound(trip)));
+        return HysteresisChoice
+                .feedback(new HysteresisChoice.FeedbackDemand(source.get(), trip, release,
+                        window.comparator.output().lowLevel().mid(), pull, least, bottoms.boxed().toList(),
+                        parts.resistors(), pinned))
+                .map(found -> List.of(parts.circuit(found.threshold(), found.network()))).orElse(List.of());
+    }
+
+    private Optional<Threshold.Divider> fixedDivider(Optional<SourceVoltage> source) {
+        if (problem.tap().isPresent()) {
+            return problem.tap().get() instanceof Threshold.Divider divider ? Optional.of(divider) : Optional.empty();
+        }
+        Pins pins = pins();
+        return source.isPresent() && pins.dividerTop().isPresent() && pins.dividerBottom().isPresent()
+                ? Optional.of(new Threshold.Divider(source.get(), pins.dividerTop().getAsDouble(),
+                        pins.dividerBottom().getAsDouble(), "", 1))
+                : Optional.empty();
+    }
+
+    /** Largest R_b at which a bias current shifts the threshold by the allowed share at most, Ω. */
+    private double biasBound(double threshold) {
+        double bias = problem.catalogue().comparators().stream().map(each -> each.inputs().biasCurrent())
+                .mapToDouble(range -> Math.max(Math.abs(range.min()), Math.abs(range.max()))).max().orElse(0);
+        return bias > 0 ? problem.around().rules().biasShare() * threshold / bias * 10 : DividerTable.TOTAL.max();
+    }
+
+    private static double middle(double[] low, double[] high) {
+        return (Math.max(low[0], low[1]) + Math.min(high[0], high[1])) / 2;
+    }
+
+    /** Extremes of the threshold voltage to compare with limits, before exact evaluation. */
+    static Range spread(Window window, Threshold threshold, ResistorSeries resistors) {
+        Range cold = HysteresisChoice.spread(window, threshold, resistors, 0);
+        Range hot = HysteresisChoice.spread(window, threshold, resistors, 1);
+        return Range.of(Math.min(cold.min(), hot.min()), Math.max(cold.max(), hot.max()));
+    }
+}

@@ -1,0 +1,59 @@
+package shuntwright.choice;
+
+import java.util.List;
+
+import shuntwright.accuracy.ChannelAccuracy;
+import shuntwright.board.Acceptance;
+import shuntwright.circuit.LimitCheck;
+import shuntwright.circuit.LimitRules;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.quantity.Range;
+
+/** Judges complete circuits exactly. */
+final class Judge {
+
+    private final ChannelProblem problem;
+    private final List<ChannelAccuracy.Asked> asked;
+
+    Judge(ChannelProblem problem) {
+        this.problem = problem;
+        this.asked = ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent());
+    }
+
+    /** Every limit with its numbers. */
+    List<LimitCheck> limits(SenseCircuit circuit) {
+        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        return LimitRules.all(circuit, accuracy.thresholdLimits(), problem.pullUp().voltage().max(), problem.demand(),
+                problem.around());
+    }
+
+    /** True when the circuit respects every limit and its outcomes are accepted. */
+    boolean accepts(SenseCircuit circuit) {
+        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
+        boolean byLimits = true;
+        boolean byCoverage = coverage;
+        for (ChannelAccuracy.Asked each : asked) {
+            byLimits &= byLimits && each.allowed().contains(accuracy.limits(each));
+            byCoverage &= byCoverage && each.allowed()
+                    .contains(accuracy.combined(each, problem.acceptance().coverage()).interval());
+            if (!byLimits && !byCoverage) {
+                return false;
+            }
+        }
+        return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.thresholdLimits(), circuit.amplifier(),
+                circuit.comparator(), problem.around()));
+    }
+
+    /** Smallest slack of all outcomes as a share of the allowed half-width; negative outside. */
+    double margin(SenseCircuit circuit) {
+        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        double margin = Double.POSITIVE_INFINITY;
+        for (ChannelAccuracy.Asked each : asked) {
+            Range reached = accuracy.limits(each);
+            double slack = Math.min(reached.min() - each.allowed().min(), each.allowed().max() - reached.max());
+            margin = Math.min(margin, slack / (each.allowed().width() / 2));
+        }
+        return margin;
+    }
+}

@@ -1,0 +1,87 @@
+package shuntwright.choice;
+
+import static shuntwright.circuit.Surroundings.COPPER_COEFFICIENT;
+import static shuntwright.circuit.Surroundings.COPPER_TEMPERATURE;
+import static shuntwright.circuit.Surroundings.REFERENCE_TEMPERATURE;
+
+import shuntwright.board.Demand;
+import shuntwright.parts.Shunt;
+import shuntwright.quantity.Range;
+
+/**
+ * What n equal shunts in parallel contribute, worked out once for all amplifiers: extreme shunt voltages at the currents
+ * of the demand for both ends of ambient (index 0 and 1).
+ */
+final class ShuntTerms {
+
+    final Shunt shunt;
+    final int count;
+    /** Nominal resistance of all together, Ω. */
+    final double resistance;
+    /** I_L²·R_s times diversity, W. */
+    final double heat;
+    /** Price of all, currency of the catalogue. */
+    final double cost;
+    /** Thermal EMF limit, V. */
+    final double emf;
+    /** Largest shunt voltage at the no-trip current, V. */
+    final double[] noTripHigh = new double[2];
+    /** Smallest shunt voltage at the must-trip current, V. */
+    final double[] mustTripLow = new double[2];
+    /** Largest at the lower end of the release window, V; 0 where it latches. */
+    final double[] rearmLowHigh = new double[2];
+    /** Smallest at the upper end of the release window, V. */
+    final double[] rearmHighLow = new double[2];
+    /** Relative standard uncertainty of the resistance, squared. */
+    final double variance;
+
+    private final Range ambient;
+    private final double heating;
+
+    ShuntTerms(Shunt shunt, int count, ChannelProblem problem) {
+        this.shunt = shunt;
+        this.count = count;
+        Demand demand = problem.demand();
+        this.ambient = problem.around().ambient();
+        this.heating = shunt.rating().thermalResistance() / count;
+        this.resistance = (shunt.resistance() + shunt.mountingResistance().mid()) / count;
+        this.heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
+        this.cost = count * shunt.purchase().unitPriceAt(saturated(count, problem.buildQuantity()));
+        this.emf = shunt.thermalEmf() * problem.around().rules().shuntGradient();
+        for (int end = 0; end < 2; end++) {
+            noTripHigh[end] = voltage(demand.tripWindow().min(), end, true);
+            mustTripLow[end] = voltage(demand.tripWindow().max(), end, false);
+            if (demand.rearm().isPresent()) {
+                rearmLowHigh[end] = voltage(demand.rearm().get().min(), end, true);
+                rearmHighLow[end] = voltage(demand.rearm().get().max(), end, false);
+            }
+        }
+        double a = (shunt.tolerance().above() + shunt.tolerance().below()) / 2;
+        double swing = Math.max(ambient.max() - REFERENCE_TEMPERATURE, REFERENCE_TEMPERATURE - ambient.min());
+        double tcr = shunt.temperatureCoefficient() * swing / Math.sqrt(3);
+        this.variance = (a * a + shunt.ageing() * shunt.ageing() + tcr * tcr) / 3 / count;
+    }
+
+    private static int saturated(int count, int boards) {
+        return (int) Math.min(Integer.MAX_VALUE, (long) count * boards);
+    }
+
+    /** Extreme shunt voltage at a current, self-heating included, V; infinite in thermal runaway. */
+    double voltage(double current, int end, boolean highest) {
+        double ta = (end == 0 ? ambient.min() : ambient.max()) - REFERENCE_TEMPERATURE;
+        double tolerance = highest ? shunt.tolerance().above() : -shunt.tolerance().below();
+        double ageing = highest ? shunt.ageing() : -shunt.ageing();
+        double own = shunt.resistance() * (1 + tolerance) * (1 + ageing);
+        double mounting = highest ? shunt.mountingResistance().max() : shunt.mountingResistance().min();
+        double at25 = own + mounting * (1 + COPPER_COEFFICIENT * (REFERENCE_TEMPERATURE - COPPER_TEMPERATURE));
+        double up = of(current, at25, own * shunt.temperatureCoefficient() + mounting * COPPER_COEFFICIENT, ta);
+        double down = of(current, at25, -own * shunt.temperatureCoefficient() + mounting * COPPER_COEFFICIENT, ta);
+        return highest ? Math.max(up, down) : Math.min(up, down);
+    }
+
+    private double of(double current, double at25, double slope, double ta) {
+        double room = 1 - slope / count * heating * current * current;
+        return room > 0 ? current * (at25 + slope * ta) / count / room : Double.POSITIVE_INFINITY;
+    }
+
+}

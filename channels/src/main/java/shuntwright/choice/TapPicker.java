@@ -1,0 +1,116 @@
+package shuntwright.choice;
+
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+
+import shuntwright.board.Tap;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Threshold;
+import shuntwright.parts.Comparator;
+import shuntwright.parts.ResistorSeries;
+
+/**
+ * Chooses the voltage of a tap: the one at which most of its channels find a candidate, then the one with least heat of
+ * them all, in the middle of the widest stretch of equally good voltages.
+ */
+public final class TapPicker {
+
+    private static final int STEPS = 600;
+    private static final double LEAST = 0.01;
+    private static final double MOST = 0.995;
+
+    private final DividerTables tables;
+
+    public TapPicker(DividerTables tables) {
+        this.tables = tables;
+    }
+
+    /**
+     * @param tap      the tap
+     * @param source   its source
+     * @param problems of the channels that use it, as if each had an own divider from that source
+     * @param users    comparators that load it
+     */
+    public Optional<Threshold> pick(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users) {
+        double nominal = source.voltage().nominal();
+        double ratio = tap.voltage().isPresent() ? tap.voltage().getAsDouble() / nominal : best(source, problems);
+        return switch (tap.kind()) {
+            case Tap.Kind.Dac dac -> {
+                int steps = 1 << dac.bits();
+                int code = (int) Math.max(1, Math.min(steps - 1, Math.round(ratio * steps)));
+                yield Optional.of(new Threshold.DacOutput(source, dac, code, tap.name()));
+            }
+            case Tap.Kind.Divider divider -> problems.isEmpty()
+                    ? Optional.empty()
+                    : new ValueChoice(tables)
+                            .nearest(source, ratio * nominal, problems.getFirst().resistors().getFirst(),
+                                    problems.getFirst().around().rules(), tap.name(), users, divider.top(),
+                                    divider.bottom())
+                            .map(Threshold.class::cast);
+        };
+    }
+
+    private double best(SourceVoltage source, List<ChannelProblem> problems) {
+        int[] served = new int[STEPS];
+        double[] heat = new double[STEPS];
+        for (ChannelProblem problem : problems) {
+            double[] least = leastHeat(source, problem);
+            for (int i = 0; i < STEPS; i++) {
+                if (least[i] < Double.POSITIVE_INFINITY) {
+                    served[i]++;
+                    heat[i] += least[i];
+                }
+            }
+        }
+        int best = 0;
+        for (int i = 1; i < STEPS; i++) {
+            if (served[i] > served[best] || (served[i] == served[best] && heat[i] < heat[best] * (1 - 1e-9))) {
+                best = i;
+            }
+        }
+        int end = best;
+        while (end + 1 < STEPS && served[end + 1] == served[best] && heat[end + 1] <= heat[best] * (1 + 1e-9)) {
+            end++;
+        }
+        return ratio((best + end) / 2.0);
+    }
+
+    private static double ratio(double step) {
+        return LEAST * Math.pow(MOST / LEAST, step / (STEPS - 1));
+    }
+
+    private static int step(double ratio) {
+        return (int) Math.round(Math.log(ratio / LEAST) / Math.log(MOST / LEAST) * (STEPS - 1));
+    }
+
+    /** Least heat of a channel's candidates for each step of the ratio; infinite where there is none. */
+    private static double[] leastHeat(SourceVoltage source, ChannelProblem problem) {
+        CandidateSearch search = new CandidateSearch(problem);
+        Candidates found = search.promising();
+        boolean none = found.size() == 0;
+        if (none) {
+            found = search.nearest(40);
+        }
+        double[] least = new double[STEPS];
+        Arrays.fill(least, Double.POSITIVE_INFINITY);
+        List<Comparator> comparators = ChannelPicker.comparators(problem);
+        ResistorSeries resistors = problem.resistors().getFirst();
+        double[] ratios = new double[2];
+        for (int candidate = 0; candidate < found.size(); candidate++) {
+            ShuntTerms shunt = search.shunt(found.shunt(candidate));
+            for (Comparator comparator : comparators) {
+                Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
+                window.ratios(source, resistors, ratios);
+                double low = none ? Math.min(ratios[0], ratios[1]) : ratios[0];
+                double high = none ? Math.max(ratios[0], ratios[1]) : ratios[1];
+                int from = Math.max(0, step(Math.max(low, LEAST)));
+                int to = Math.min(STEPS - 1, step(Math.max(high, LEAST)));
+                for (int i = from; i <= to && low <= high; i++) {
+                    least[i] = Math.min(least[i], shunt.heat);
+                }
+            }
+        }
+        return least;
+    }
+}

@@ -1,0 +1,136 @@
+package shuntwright.choice;
+
+import static shuntwright.circuit.Surroundings.REFERENCE_TEMPERATURE;
+
+import shuntwright.circuit.LimitRules;
+import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Surroundings;
+import shuntwright.parts.Comparator;
+import shuntwright.parts.Hysteresis;
+import shuntwright.parts.ResistorSeries;
+import shuntwright.quantity.Range;
+
+/**
+ * Where a threshold may lie for given shunts, amplifier and comparator, at both ends of ambient; and how far a threshold
+ * from a given source spreads. Everything that decides the values of divider and hysteresis, in volts at the amplifier's
+ * output.
+ */
+final class Window {
+
+    /** The threshold must stay at or above, by end of ambient, V. */
+    final double[] low = new double[2];
+    /** The threshold must stay at or below, V. */
+    final double[] high = new double[2];
+    /** The release voltage must stay at or above, V; unused where it latches. */
+    final double[] releaseLow = new double[2];
+    /** The release voltage must stay at or below, V. */
+    final double[] releaseHigh = new double[2];
+    /** Comparator offset with drift, V. */
+    final double[] offset = new double[2];
+    final Comparator comparator;
+    final boolean rearms;
+
+    private final double[] distance = new double[2];
+    private final double ceiling;
+
+    Window(Candidates candidates, int candidate, ShuntTerms s, AmplifierTerms a, Comparator comparator,
+            ChannelProblem problem) {
+        this.comparator = comparator;
+        this.rearms = problem.demand().rearm().isPresent();
+        Surroundings around = problem.around();
+        int j = candidates.amplifier(candidate);
+        for (int end = 0; end < 2; end++) {
+            double ta = (end == 0 ? around.ambient().min() : around.ambient().max()) - REFERENCE_TEMPERATURE;
+            distance[end] = Math.abs(ta);
+            offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * distance[end];
+            low[end] = candidates.low(candidate, end);
+            high[end] = candidates.high(candidate, end);
+            if (rearms) {
+                releaseLow[end] = a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf);
+                releaseHigh[end] = a.gainLow[end][j] * (s.rearmHighLow[end] - a.error[end][j] - s.emf);
+            }
+            if (rearms && comparator.hysteresis() instanceof Hysteresis.BuiltIn(Range builtIn)) {
+                low[end] = Math.max(low[end], releaseLow[end] + builtIn.max());
+                high[end] = Math.min(high[end], releaseHigh[end] + builtIn.min());
+            }
+        }
+        ceiling = Math.min(LimitRules.highestOutput(a.amplifiers[j], around),
+                LimitRules.highestThreshold(comparator, around));
+    }
+
+    /** Relative movement of a resistor at an end of ambient. */
+    double movement(ResistorSeries resistors, int end) {
+        return resistors.tolerance() + resistors.ageing() + resistors.temperatureCoefficient() * distance[end];
+    }
+
+    Range source(SourceVoltage source, int end) {
+        return SourceTerms.extremes(source, distance[end]);
+    }
+
+    /** Highest threshold that amplifier and comparator take, V. */
+    double ceiling() {
+        return ceiling;
+    }
+
+    /** True when the spread of the release voltage certainly fits its window. */
+    boolean releaseMayFit(double thresholdSpread) {
+        if (!rearms) {
+            return true;
+        }
+        return switch (comparator.hysteresis()) {
+            case Hysteresis.InjectedCurrent injected -> {
+                boolean fits = true;
+                for (int end = 0; end < 2; end++) {
+                    double least = Math.max(0, low[end] - releaseHigh[end]);
+                    double share = (injected.current().max() - injected.current().min())
+                            / injected.current().nominal();
+                    fits &= thresholdSpread + injected.builtIn().width() + share * least <= releaseHigh[end]
+                            - releaseLow[end];
+                }
+                yield fits;
+            }
+            case Hysteresis.PositiveFeedback _,Hysteresis.BuiltIn _ -> {
+                boolean fits = true;
+                for (int end = 0; end < 2; end++) {
+                    fits &= thresholdSpread <= releaseHigh[end] - releaseLow[end];
+                }
+                yield fits;
+            }
+            case Hysteresis.Latched _ -> false;
+        };
+    }
+
+    /**
+     * Ratios k of a divider whose threshold stays within the window at both ends, without bias current; min &gt; max when
+     * there is none. Written to {@code into}.
+     */
+    void ratios(SourceVoltage source, ResistorSeries resistors, double[] into) {
+        double least = 0;
+        double most = 1;
+        for (int end = 0; end < 2; end++) {
+            double t = movement(resistors, end);
+            Range vx = source(source, end);
+            double upper = (Math.min(high[end], ceiling) - offset[end]) / vx.max();
+            double lower = (Math.max(low[end], comparator.inputs().lowest()) + offset[end]) / vx.min();
+            most = Math.min(most, upper >= 1 ? 1 : upper <= 0 ? 0 : SourceTerms.moved(upper, -t));
+            least = Math.max(least, lower >= 1 ? 1 : lower <= 0 ? 0 : SourceTerms.moved(lower, t));
+        }
+        into[0] = least;
+        into[1] = most;
+    }
+
+    /** Largest possible threshold at an end of ambient for a divider of ratio k without bias, V. */
+    double highest(SourceVoltage source, ResistorSeries resistors, double k, int end) {
+        return source(source, end).max() * SourceTerms.moved(k, movement(resistors, end)) + offset[end];
+    }
+
+    /** Smallest possible threshold, V. */
+    double lowest(SourceVoltage source, ResistorSeries resistors, double k, int end) {
+        return source(source, end).min() * SourceTerms.moved(k, -movement(resistors, end)) - offset[end];
+    }
+
+    /** Slack of a threshold that spreads over {@code least} .. {@code most} at an end, V; negative outside. */
+    double slack(double least, double most, int end) {
+        return Math.min(Math.min(high[end], ceiling) - most, least - low[end]);
+    }
+}

@@ -1,0 +1,100 @@
+package shuntwright.plan;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+
+import shuntwright.board.Board;
+import shuntwright.board.BoardReference;
+import shuntwright.board.Channel;
+import shuntwright.board.Demand;
+import shuntwright.board.DesignRules;
+import shuntwright.board.Source;
+import shuntwright.board.ThresholdDemand;
+import shuntwright.choice.ChannelProblem;
+import shuntwright.circuit.Threshold;
+import shuntwright.parts.Reference;
+
+/**
+ * Variants of one channel on its board.
+ *
+ * @param planner solves them and keeps what it worked out
+ * @param context of the board
+ * @param problem of the channel as it is
+ */
+record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem problem) implements Trials {
+
+    private static final String ADDED = "added";
+
+    @Override
+    public ChannelPlan of(Channel edited) {
+        return on(context, edited);
+    }
+
+    private ChannelPlan on(BoardContext where, Channel edited) {
+        return switch (Demand.of(edited)) {
+            case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(edited, missing);
+            case Demand.Reading.Complete(Demand demand) -> {
+                boolean sameTap = edited.threshold().equals(problem.demand().channel().threshold());
+                Optional<Threshold> tap = sameTap ? problem.tap() : Optional.empty();
+                yield planner.solve(where.problem(demand, tap), Set.of());
+            }
+        };
+    }
+
+    @Override
+    public List<Source> sources() {
+        List<Source> sources = new ArrayList<>();
+        sources.add(new Source.Supply());
+        for (BoardReference reference : context.board().references()) {
+            sources.add(new Source.OfReference(reference.name()));
+        }
+        return sources;
+    }
+
+    @Override
+    public Optional<ChannelPlan> withBestReference(Channel channel) {
+        if (!context.board().references().isEmpty() || best().isEmpty()) {
+            return Optional.empty();
+        }
+        Board b = context.board();
+        Board richer = new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
+                List.of(new BoardReference(ADDED, best().get().partNumber())), b.adc(), b.alertLines(), b.taps(),
+                b.zones(), b.heatLimit(), b.acceptance(), b.rules(), b.channels());
+        return Optional.of(on(new BoardContext(richer, context.catalogue(), Map.of()),
+                channel.withThreshold(new ThresholdDemand.OwnDivider(new Source.OfReference(ADDED)))));
+    }
+
+    @Override
+    public String bestReference() {
+        return best().map(Reference::partNumber).orElse("");
+    }
+
+    /** The most accurate reference that the supply can feed. */
+    private Optional<Reference> best() {
+        return context.catalogue().references().stream()
+                .filter(each -> each.supply().contains(context.board().supply().voltage().range()))
+                .min(Comparator.comparingDouble(each -> each.voltage().tolerance().widest() + each.ageing()
+                        + each.drift() * context.board().ambient().width() / 2));
+    }
+
+    @Override
+    public int parallelShunts() {
+        return context.board().rules().parallelShunts();
+    }
+
+    @Override
+    public ChannelPlan withParallel(Channel channel, int parallel) {
+        Board b = context.board();
+        DesignRules r = b.rules();
+        DesignRules more = new DesignRules(parallel, r.powerMargin(), r.dividerCurrent(), r.biasShare(),
+                r.resistors(), r.shuntGradient(), r.inputResistance(), r.inputMismatch());
+        Board richer = new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
+                b.references(), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(), more,
+                b.channels());
+        return on(new BoardContext(richer, context.catalogue(), Map.of()), channel);
+    }
+}
