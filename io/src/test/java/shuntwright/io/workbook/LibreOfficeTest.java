@@ -1,0 +1,101 @@
+package shuntwright.io.workbook;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
+
+import java.io.File;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.TimeUnit;
+import java.util.regex.Pattern;
+
+import org.apache.poi.openxml4j.exceptions.InvalidFormatException;
+import org.apache.poi.xssf.usermodel.XSSFSheet;
+import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+import shuntwright.io.fixture.PlanFixtures;
+import shuntwright.parts.Purchase;
+import shuntwright.plan.ChannelPlan;
+import shuntwright.plan.PartUse;
+import shuntwright.plan.Plan;
+
+/** Lets another spreadsheet program compute the workbook; runs only where LibreOffice is on the path. */
+class LibreOfficeTest {
+
+    private static final Plan PLAN = PlanFixtures.full();
+    private static final int BOARDS = 997;
+    /** A profile that computes every formula on opening instead of showing stored results. */
+    private static final String ALWAYS_COMPUTE = """
+            <?xml version="1.0" encoding="UTF-8"?>
+            <oor:items xmlns:oor="http://openoffice.org/2001/registry">
+            <item oor:path="/org.openoffice.Office.Calc/Formula/Load">
+            <prop oor:name="OOXMLRecalcMode" oor:op="fuse"><value>0</value></prop>
+            </item>
+            </oor:items>
+            """;
+
+    @Test
+    void computesWhatThePlanSays(@TempDir Path room) throws IOException, InterruptedException {
+        assumeTrue(onPath("soffice"), "soffice is not on the path");
+        Path changed = room.resolve("changed.xlsx");
+        try (XSSFWorkbook book = Cells.open(PLAN)) {
+            // The cached results now belong to another build quantity, so only a fresh computation gives the right ones.
+            Cells.row(book.getSheet(PartsSheet.NAME), "Build quantity, boards").getCell(1).setCellValue(BOARDS);
+            try (var out = Files.newOutputStream(changed)) {
+                book.write(out);
+            }
+        }
+        Path user = Files.createDirectories(room.resolve("profile/user"));
+        Files.writeString(user.resolve("registrymodifications.xcu"), ALWAYS_COMPUTE);
+        Path computed = Files.createDirectory(room.resolve("computed"));
+        Process office = new ProcessBuilder("soffice", "-env:UserInstallation=" + room.resolve("profile").toUri(),
+                "--headless", "--convert-to", "xlsx", "--outdir", computed.toString(), changed.toString())
+                .redirectErrorStream(true).redirectOutput(room.resolve("office.log").toFile()).start();
+        if (!office.waitFor(180, TimeUnit.SECONDS)) {
+            office.destroyForcibly();
+            throw new AssertionError("soffice took more than 180 s");
+        }
+        try (XSSFWorkbook book = new XSSFWorkbook(computed.resolve("changed.xlsx").toFile())) {
+            checkParts(book.getSheet(PartsSheet.NAME));
+            XSSFSheet settings = book.getSheet(SettingsSheet.NAME);
+            for (ChannelPlan each : PLAN.channels()) {
+                if (each.solved().isPresent()) {
+                    double trip = each.solved().get().trip().nominal();
+                    assertThat(Cells.at(settings, each.channel().name(), "Trip current", "Trip nominal")
+                            .getNumericCellValue()).isCloseTo(trip, within(1e-9 * trip));
+                }
+            }
+        } catch (InvalidFormatException unreadable) {
+            throw new AssertionError("LibreOffice wrote what cannot be read", unreadable);
+        }
+    }
+
+    private static void checkParts(XSSFSheet sheet) {
+        double total = 0;
+        for (PartUse part : PLAN.parts()) {
+            Purchase purchase = part.purchase();
+            int ordered = purchase.orderQuantity(part.quantity() * BOARDS);
+            assertThat(Cells.at(sheet, part.partNumber(), "Order, pieces").getNumericCellValue()).isEqualTo(ordered);
+            if (!purchase.prices().isEmpty()) {
+                assertThat(Cells.at(sheet, part.partNumber(), "Unit price").getNumericCellValue())
+                        .isEqualTo(purchase.unitPriceAt(ordered));
+            }
+            total += ordered * purchase.unitPriceAt(ordered);
+        }
+        assertThat(Cells.row(sheet, "Order total, EUR").getCell(1).getNumericCellValue()).isCloseTo(total,
+                within(1e-6));
+        assertThat(Cells.row(sheet, "Lines without price").getCell(1).getNumericCellValue()).isEqualTo(1);
+    }
+
+    private static boolean onPath(String program) {
+        List<String> folders = List
+                .of(System.getenv().getOrDefault("PATH", "").split(Pattern.quote(File.pathSeparator)));
+        return folders.stream().filter(each -> !each.isEmpty())
+                .anyMatch(each -> Files.isExecutable(Path.of(each, program)));
+    }
+}
