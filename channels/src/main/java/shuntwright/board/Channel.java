@@ -159,9 +159,4 @@ public record Channel(String name, String note, Optional<Spread> rail, Side side
         return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone,
                 newDiversity, stress, pins);
     }
-
-    public Channel withStress(Stress newStress) {
-        return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone, diversity,
-                newStress, pins);
-    }
 }

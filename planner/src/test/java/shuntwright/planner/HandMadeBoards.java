@@ -20,7 +20,8 @@ public final class HandMadeBoards {
     /** Two channels inside, one likely, one outside, one incomplete by {@link HandMadePlans}. */
     public static Board boat() {
         return Board.named("boat")
-                .withZones(List.of(new Zone("port", OptionalDouble.of(2)), new Zone("starboard", OptionalDouble.empty())))
+                .withZones(
+                        List.of(new Zone("port", OptionalDouble.of(2)), new Zone("starboard", OptionalDouble.empty())))
                 .withAlertLines(List.of(AlertLine.named("alert"))).withHeatLimit(OptionalDouble.of(6))
                 .withChannels(List.of(channel("bilge pump", 20, 25, 31), channel("windlass", 12, 15, 18).withZone(
                         Optional.of("port")), channel("radar", 4, 9.8, 10.2), channel("anchor light", 2, 4.95, 5.05),

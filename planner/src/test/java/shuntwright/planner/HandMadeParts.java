@@ -23,7 +23,8 @@ import shuntwright.quantity.Toleranced;
 
 /** One part of each kind, invented. */
 public final class HandMadeParts {
-    public static final Purchase PURCHASE = new Purchase("2512", List.of(new PriceBreak(1, 0.6), new PriceBreak(100, 0.4)),
+    public static final Purchase PURCHASE = new Purchase("2512",
+            List.of(new PriceBreak(1, 0.6), new PriceBreak(100, 0.4)),
             10, 10, "maker", "active");
     public static final Shunt SHUNT = new Shunt("SH-4M", "4 mΩ ±1 %", 0.004, Tolerance.symmetric(0.01), 50e-6, 0.002,
             Terminals.FOUR, Range.exactly(0), 1e-6, new ShuntRating(3, 70, 170, 20, OptionalDouble.empty()), PURCHASE);

@@ -41,16 +41,18 @@ public enum BoardField {
     REFERENCES("References", "name = part number: quiet = REF-2V5", BoardLists::references,
             BoardLists::withReferences),
     ALERT_LINES("Alert lines", "names: alert, alert 2", BoardLists::alertLines, BoardLists::withAlertLines),
-    BASIS("Accepted are", "limits (only inside) or coverage (also likely)", board -> switch (board.acceptance().basis()) {
-        case LIMITS -> "limits";
-        case COVERAGE -> "coverage";
-    }, (text, board) -> switch (Words.plain(text)) {
-        case "limits", "inside" -> Reading.value(board.withAcceptance(
-                new Acceptance(Acceptance.Basis.LIMITS, board.acceptance().coverage())));
-        case "coverage", "likely" -> Reading.value(board.withAcceptance(
-                new Acceptance(Acceptance.Basis.COVERAGE, board.acceptance().coverage())));
-        default -> Reading.misread("Type limits (only inside is accepted) or coverage (likely is accepted too).");
-    }),
+    BASIS("Accepted are", "limits (only inside) or coverage (also likely)",
+            board -> switch (board.acceptance().basis()) {
+                case LIMITS -> "limits";
+                case COVERAGE -> "coverage";
+            }, (text, board) -> switch (Words.plain(text)) {
+                case "limits", "inside" -> Reading.value(board.withAcceptance(
+                        new Acceptance(Acceptance.Basis.LIMITS, board.acceptance().coverage())));
+                case "coverage", "likely" -> Reading.value(board.withAcceptance(
+                        new Acceptance(Acceptance.Basis.COVERAGE, board.acceptance().coverage())));
+                default ->
+                    Reading.misread("Type limits (only inside is accepted) or coverage (likely is accepted too).");
+            }),
     COVERAGE("Coverage probability", "50 % to below 100 %, such as 99.73 %",
             board -> QuantityWriter.write(board.acceptance().coverage(), Dimension.RATIO),
             (text, board) -> QuantityReader.number(text, Dimension.RATIO).then(value -> value >= 0.5 && value < 1

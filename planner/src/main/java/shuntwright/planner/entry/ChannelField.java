@@ -43,7 +43,7 @@ public enum ChannelField {
                     old.tripTarget(), old.least(), old.fullScale()))),
     RELEASE("Release", "release", "auto (between load and no-trip), a window such as 21 .. 24 A, or latch",
             channel -> Demands.release(channel.release()), Demands::withRelease),
-    SOURCE("Threshold from", "threshold source", "any, supply, a reference of the board, or tap NAME",
+    SOURCE("Source", "threshold source", "any, supply, a reference of the board, or tap NAME",
             channel -> Demands.threshold(channel.threshold()), Demands::withThreshold),
     TRIP_TARGET("Trip target", "trip target", "the wanted trip current; empty for the geometric mean",
             channel -> amperes(channel.currents().tripTarget()),
@@ -80,15 +80,18 @@ public enum ChannelField {
     PINNED_SHUNT("Pinned shunt", "pinned shunt", "a part number, or nothing to let the plan choose",
             channel -> channel.pins().shunt().orElse(""),
             (text, at) -> pins(at, old -> new Pins(Words.word(text), old.shuntCount(), old.amplifier(),
-                    old.comparator(), old.dividerTop(), old.dividerBottom(), old.hysteresisResistor()))),
+                    old.comparator(), old.resistors(), old.dividerTop(), old.dividerBottom(),
+                    old.hysteresisResistor()))),
     PINNED_AMPLIFIER("Pinned amplifier", "pinned amplifier", "a part number, or nothing to let the plan choose",
             channel -> channel.pins().amplifier().orElse(""),
-            (text, at) -> pins(at, old -> new Pins(old.shunt(), old.shuntCount(), Words.word(text), old.comparator(),
-                    old.dividerTop(), old.dividerBottom(), old.hysteresisResistor()))),
+            (text, at) -> pins(at,
+                    old -> new Pins(old.shunt(), old.shuntCount(), Words.word(text), old.comparator(), old.resistors(),
+                            old.dividerTop(), old.dividerBottom(), old.hysteresisResistor()))),
     PINNED_COMPARATOR("Pinned comparator", "pinned comparator", "a part number, or nothing to let the plan choose",
             channel -> channel.pins().comparator().orElse(""),
-            (text, at) -> pins(at, old -> new Pins(old.shunt(), old.shuntCount(), old.amplifier(), Words.word(text),
-                    old.dividerTop(), old.dividerBottom(), old.hysteresisResistor()))),
+            (text, at) -> pins(at,
+                    old -> new Pins(old.shunt(), old.shuntCount(), old.amplifier(), Words.word(text), old.resistors(),
+                            old.dividerTop(), old.dividerBottom(), old.hysteresisResistor()))),
     NOTE("Note", "note", "anything worth remembering", Channel::note,
             (text, at) -> Reading.value(at.channel().withNote(text.strip())));
 
@@ -144,7 +147,8 @@ public enum ChannelField {
     public boolean isNumber() {
         return switch (this) {
             case RAIL, LOAD, NO_TRIP, MUST_TRIP, RELEASE, TRIP_TARGET, LEAST, FULL_SCALE, READING_AT_LOAD,
-                    READING_AT_LEAST, DIVERSITY, FAULT -> true;
+                    READING_AT_LEAST, DIVERSITY, FAULT ->
+                true;
             case NAME, ZONE, SIDE, SOURCE, ALERT_LINE, PINNED_SHUNT, PINNED_AMPLIFIER, PINNED_COMPARATOR, NOTE ->
                 false;
         };

@@ -181,8 +181,10 @@ public final class Documents {
     private void export(Kind kind) {
         Optional<Planned> planned = session.plannedProperty().get();
         if (planned.isEmpty() || !session.currentBinding().get()) {
-            questions.tell("Not exported", "The plan of the latest edit is not ready yet, so there is nothing to export "
-                    + "that belongs to what is on show.", List.of("Wait until planning has ended, then export again."));
+            questions.tell("Not exported",
+                    "The plan of the latest edit is not ready yet, so there is nothing to export "
+                            + "that belongs to what is on show.",
+                    List.of("Wait until planning has ended, then export again."));
             return;
         }
         String name = file.get().map(path -> path.getFileName().toString().replaceFirst("(\\.board)?\\.json$", ""))
@@ -211,11 +213,12 @@ public final class Documents {
             }
             List<Path> all = new ArrayList<>(PartsPaths.resolved(names, folder));
             moreParts.stream().filter(path -> !all.contains(path)).forEach(all::add);
-            work.run(() -> store.catalogue(all), reading -> refusedOr(reading, added.getFileName().toString(), parts -> {
-                session.edit("add parts file " + added.getFileName(),
-                        now -> now.withBoard(now.board().withPartsFiles(names)));
-                session.useCatalogue(parts);
-            }));
+            work.run(() -> store.catalogue(all),
+                    reading -> refusedOr(reading, added.getFileName().toString(), parts -> {
+                        session.edit("add parts file " + added.getFileName(),
+                                now -> now.withBoard(now.board().withPartsFiles(names)));
+                        session.useCatalogue(parts);
+                    }));
         });
     }
 

@@ -105,7 +105,8 @@ final class Commands {
     private static Menu help(Window window) {
         Menu menu = new Menu("Help");
         for (HelpTopic topic : HelpTopic.values()) {
-            menu.getItems().add(item(topic.title(), topic == HelpTopic.FIRST_STEPS ? "F1" : "", () -> window.help(topic)));
+            menu.getItems()
+                    .add(item(topic.title(), topic == HelpTopic.FIRST_STEPS ? "F1" : "", () -> window.help(topic)));
         }
         return menu;
     }

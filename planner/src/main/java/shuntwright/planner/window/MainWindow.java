@@ -75,7 +75,7 @@ final class MainWindow {
         Commands commands = new Commands(session, documents, themes, start.demos(), start.newParts(), menus());
         SplitPane split = new SplitPane(table.node(), tabs());
         split.setOrientation(Orientation.VERTICAL);
-        split.setDividerPositions(0.62);
+        split.setDividerPositions(0.56);
         BorderPane work = new BorderPane(split);
         work.setTop(strip.node());
         work.visibleProperty().bind(session.openProperty());
@@ -137,7 +137,8 @@ final class MainWindow {
         Button remove = whenOpen(
                 button("Remove", "Remove the selected channels (Ctrl+Delete)", session::removeSelected));
         Button workbook = whenOpen(
-                button("Workbook…", "Export the workbook for purchasing and bench (Ctrl+E)", documents::exportWorkbook));
+                button("Workbook…", "Export the workbook for purchasing and bench (Ctrl+E)",
+                        documents::exportWorkbook));
         find.setPromptText("find channel");
         find.setId("find");
         find.setPrefColumnCount(14);

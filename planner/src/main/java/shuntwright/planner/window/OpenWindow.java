@@ -6,7 +6,9 @@ import java.util.List;
 import javafx.application.ColorScheme;
 import javafx.application.Platform;
 import javafx.beans.value.ObservableValue;
+import javafx.geometry.Rectangle2D;
 import javafx.scene.Scene;
+import javafx.stage.Screen;
 import javafx.stage.Stage;
 
 import shuntwright.planner.session.BoardSession;
@@ -25,6 +27,7 @@ final class OpenWindow {
     private final ThemeChoice themes;
     private final Documents documents;
     private final MainWindow content;
+    private final Dialogs dialogs;
     private final Stage stage;
 
     /**
@@ -38,14 +41,15 @@ final class OpenWindow {
         Theme.loadFonts();
         themes = new ThemeChoice(system);
         StatusModel status = new StatusModel(session);
-        Dialogs dialogs = new Dialogs(choosers, () -> stage, pane -> themes.themeProperty().get().apply(pane),
+        dialogs = new Dialogs(choosers, () -> stage, pane -> themes.themeProperty().get().apply(pane),
                 status::done);
         documents = new Documents(session, new FileBoardStore(), dialogs,
                 new FileWork(threads.files(), Platform::runLater));
         List<Path> demos = Documents.demoBoards(nearby);
         MainWindow.Start start = new MainWindow.Start(demos, Documents.partsBeside(demos));
         content = new MainWindow(session, documents, dialogs, status, themes, start, this::close);
-        Scene scene = content.scene(1400, 900);
+        Rectangle2D screen = Screen.getPrimary().getVisualBounds();
+        Scene scene = content.scene(Math.min(1500, screen.getWidth()), Math.min(920, screen.getHeight()));
         stage.setScene(scene);
         stage.titleProperty().bind(new TitleModel(session, documents).titleBinding());
         stage.setOnCloseRequest(event -> {
@@ -77,6 +81,12 @@ final class OpenWindow {
             stage.close();
             release();
         });
+    }
+
+    /** Tells of a mistake within the program. */
+    void tellProblem(Throwable problem) {
+        dialogs.tell("A mistake within the program", "Something went wrong within the program; the board on show is "
+                + "unharmed. Save it under another name to be safe.", List.of(problem.toString()));
     }
 
     /** Closes what floats over the window. */

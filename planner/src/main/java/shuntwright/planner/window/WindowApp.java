@@ -71,6 +71,11 @@ public final class WindowApp extends Application {
         OpenWindow opened = new OpenWindow(stage, new BoardPlanner()::plan, new SystemChoosers(() -> stage),
                 Platform.getPreferences().colorSchemeProperty(), nearby());
         window = opened;
+        Thread.setDefaultUncaughtExceptionHandler((thread, problem) -> {
+            System.getLogger(WindowApp.class.getName()).log(System.Logger.Level.ERROR,
+                    "unexpected problem on thread " + thread.getName(), problem);
+            Platform.runLater(() -> opened.tellProblem(problem));
+        });
         List<String> arguments = getParameters().getRaw();
         opened.documents().useParts(arguments.stream().filter(each -> each.startsWith(PARTS))
                 .map(each -> Path.of(each.substring(PARTS.length()))).toList());

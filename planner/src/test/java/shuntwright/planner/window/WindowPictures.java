@@ -4,10 +4,10 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
 
+import javax.imageio.ImageIO;
+
 import javafx.embed.swing.SwingFXUtils;
 import javafx.scene.Scene;
-
-import javax.imageio.ImageIO;
 
 /** Takes pictures of the window. */
 final class WindowPictures {

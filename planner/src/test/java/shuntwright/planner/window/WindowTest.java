@@ -89,9 +89,11 @@ class WindowTest {
 
     private static TableCell<?, ?> cell(FxRobot robot, int row, String column) {
         TableView<?> table = robot.lookup("#channel-table").queryAs(TableView.class);
-        return robot.from(table).lookup((Node node) -> node instanceof TableCell<?, ?> cell && cell.getTableColumn() != null
-                && column.equals(cell.getTableColumn().getId()) && cell.getIndex() == row && cell.isVisible()
-                && cell.getTableRow().isVisible()).queryAs(TableCell.class);
+        return robot.from(table)
+                .lookup((Node node) -> node instanceof TableCell<?, ?> cell && cell.getTableColumn() != null
+                        && column.equals(cell.getTableColumn().getId()) && cell.getIndex() == row && cell.isVisible()
+                        && cell.getTableRow().isVisible())
+                .queryAs(TableCell.class);
     }
 
     private static void type(FxRobot robot, int row, String column, String text) {
@@ -202,25 +204,5 @@ class WindowTest {
         settle();
         assertThat(window.session().state().board().supply().availableCurrent()).isEqualTo(0.06);
         robot.interact(window::closePopUps);
-    }
-
-    @Test
-    void picturesInBothLooks(FxRobot robot) {
-        settle();
-        for (ThemeChoice.Wish wish : List.of(ThemeChoice.Wish.LIGHT, ThemeChoice.Wish.DARK)) {
-            robot.interact(() -> {
-                window.themes().wishProperty().set(wish);
-                stage.setWidth(1400);
-                stage.setHeight(860);
-            });
-            WaitForAsyncUtils.waitForFxEvents();
-            Path picture = folder.resolve(wish + ".png");
-            robot.interact(() -> WindowPictures.write(stage.getScene(), picture));
-            assertThat(picture).isNotEmptyFile();
-            String keep = System.getProperty("shuntwright.pictures", "");
-            if (!keep.isEmpty()) {
-                robot.interact(() -> WindowPictures.write(stage.getScene(), Path.of(keep, wish + ".png")));
-            }
-        }
     }
 }

@@ -63,7 +63,8 @@ public final class BudgetModel {
         if (!there.equals(outcomes)) {
             outcomes.setAll(there);
         }
-        Optional<Assessment> chosen = solved.flatMap(each -> each.assessment(outcome.get()).or(() -> Optional.of(each.trip())));
+        Optional<Assessment> chosen = solved
+                .flatMap(each -> each.assessment(outcome.get()).or(() -> Optional.of(each.trip())));
         if (chosen.isEmpty() || solved.isEmpty()) {
             rows.clear();
             summary.set(plan.isPresent()

@@ -14,31 +14,34 @@ public enum HelpTopic {
                     + "button; Undo takes it back.",
             "5. The error budget shows which tolerance costs most. The shared strip shows what all channels take of "
                     + "supply, references and heat; click a tile to change its limits.",
-            "6. Export the workbook for purchasing and for the bench.")), VERDICTS("Verdicts", List.of(
-                    "● inside – even in the worst case of all tolerances it trips (releases, reads) within what is asked.",
-                    "○ likely – not in the worst case, but the coverage interval is within. The board's acceptance decides "
-                            + "whether that counts.",
-                    "▲ outside – neither; the findings say by how much and what would cure it.",
-                    "✕ no fit – no choice of parts respects the limits, such as an amplifier's output swing or a shunt's "
-                            + "power; the findings name the nearest miss.",
-                    "▫ incomplete – something needed is not typed yet; the findings say what.")), KEYBOARD("Keyboard",
-                            List.of("Arrow keys, Tab, Shift+Tab: move between cells (Ctrl+Tab leaves the table)",
-                                    "Typing, F2 or Enter: edit the cell",
-                                    "Enter: take the text over and go down; Tab: and go right",
-                                    "Ctrl+Enter: type the text into all selected cells of the column",
-                                    "Esc: leave the cell as it was; on a wrong entry: give it up",
-                                    "Delete: clear the selected cells", "Ctrl+C, Ctrl+V: copy and paste blocks of cells",
-                                    "Ctrl+Z, Ctrl+Shift+Z: undo, redo", "Insert: add a channel",
-                                    "Ctrl+D: duplicate the selected channels",
-                                    "Ctrl+Delete: remove the selected channels", "Ctrl+F: find a channel",
-                                    "Ctrl+N, Ctrl+O, Ctrl+S, Ctrl+Shift+S: new, open, save, save as",
-                                    "Ctrl+E: export the workbook", "Ctrl+plus, Ctrl+minus: larger, smaller text")), CAUTIONS("Cautions",
-                                            List.of("Electronic overcurrent detection is not a replacement for the fuse or circuit breaker "
-                                                    + "that codes ask for.",
-                                                    "Verify every channel by test, at both ends of its temperature range.",
-                                                    "The figures are as good as the part data typed in; compare them with the data sheets of "
-                                                            + "the parts you buy.",
-                                                    "Local codes and a licensed practitioner decide what is permitted."));
+            "6. Export the workbook for purchasing and for the bench.")),
+    VERDICTS("Verdicts", List.of(
+            "● inside – even in the worst case of all tolerances it trips (releases, reads) within what is asked.",
+            "○ likely – not in the worst case, but the coverage interval is within. The board's acceptance decides "
+                    + "whether that counts.",
+            "▲ outside – neither; the findings say by how much and what would cure it.",
+            "✕ no fit – no choice of parts respects the limits, such as an amplifier's output swing or a shunt's "
+                    + "power; the findings name the nearest miss.",
+            "▫ incomplete – something needed is not typed yet; the findings say what.")),
+    KEYBOARD("Keyboard",
+            List.of("Arrow keys, Tab, Shift+Tab: move between cells (Ctrl+Tab leaves the table)",
+                    "Typing, F2 or Enter: edit the cell",
+                    "Enter: take the text over and go down; Tab: and go right",
+                    "Ctrl+Enter: type the text into all selected cells of the column",
+                    "Esc: leave the cell as it was; on a wrong entry: give it up",
+                    "Delete: clear the selected cells", "Ctrl+C, Ctrl+V: copy and paste blocks of cells",
+                    "Ctrl+Z, Ctrl+Shift+Z: undo, redo", "Insert: add a channel",
+                    "Ctrl+D: duplicate the selected channels",
+                    "Ctrl+Delete: remove the selected channels", "Ctrl+F: find a channel",
+                    "Ctrl+N, Ctrl+O, Ctrl+S, Ctrl+Shift+S: new, open, save, save as",
+                    "Ctrl+E: export the workbook", "Ctrl+plus, Ctrl+minus: larger, smaller text")),
+    CAUTIONS("Cautions",
+            List.of("Electronic overcurrent detection is not a replacement for the fuse or circuit breaker "
+                    + "that codes ask for.",
+                    "Verify every channel by test, at both ends of its temperature range.",
+                    "The figures are as good as the part data typed in; compare them with the data sheets of "
+                            + "the parts you buy.",
+                    "Local codes and a licensed practitioner decide what is permitted."));
 
     private final String title;
     private final List<String> lines;

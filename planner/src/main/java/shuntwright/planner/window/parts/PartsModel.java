@@ -36,7 +36,8 @@ public final class PartsModel {
                 + String.format(Locale.ROOT, "Parts of a board %.2f %s; order for %d %s %.2f %s",
                         plan.costPerBoard(), plan.currency(), boards, boards == 1 ? "board" : "boards", build,
                         plan.currency())
-                + " (whole packs, without attrition)" + (unpriced.isEmpty() ? "." : ", " + unpriced.size() + " without a price."));
+                + " (whole packs, without attrition)"
+                + (unpriced.isEmpty() ? "." : ", " + unpriced.size() + " without a price."));
     }
 
     ObservableList<PartUse> parts() {

@@ -52,8 +52,11 @@ public final class SharedStripModel {
             case LIMITS -> "inside by limits";
             case COVERAGE -> "likely too, " + QuantityWriter.show(board.acceptance().coverage(), Dimension.RATIO);
         }, OptionalDouble.empty(), true, List.of(BoardField.BASIS, BoardField.COVERAGE)));
-        all.add(new SharedTile("Build", board.buildQuantity() == 1 ? "1 board" : board.buildQuantity() + " boards"
-                + plan.map(SharedStripModel::cost).orElse(""), OptionalDouble.empty(), true,
+        all.add(new SharedTile("Build", board.buildQuantity() == 1
+                ? "1 board"
+                : board.buildQuantity() + " boards"
+                        + plan.map(SharedStripModel::cost).orElse(""),
+                OptionalDouble.empty(), true,
                 List.of(BoardField.NAME, BoardField.BUILD_QUANTITY, BoardField.PARALLEL_SHUNTS,
                         BoardField.POWER_MARGIN)));
         if (!all.equals(tiles)) {
@@ -62,8 +65,10 @@ public final class SharedStripModel {
     }
 
     private static String cost(Plan plan) {
-        return plan.parts().isEmpty() ? "" : String.format(java.util.Locale.ROOT, ", %.2f %s each", plan.costPerBoard(),
-                plan.currency());
+        return plan.parts().isEmpty()
+                ? ""
+                : String.format(java.util.Locale.ROOT, ", %.2f %s each", plan.costPerBoard(),
+                        plan.currency());
     }
 
     private static SharedTile supply(Board board, Optional<Plan> plan) {
@@ -112,7 +117,8 @@ public final class SharedStripModel {
         String value = first.line().name() + " " + QuantityWriter.show(first.pullUp(), Dimension.RESISTANCE, 3)
                 + (alerts.size() > 1 ? " and " + (alerts.size() - 1) + " more" : "");
         boolean holds = alerts.stream().allMatch(each -> each.allowed().isPresent());
-        return new SharedTile("Alert pull-up", holds ? value : value + " – no value fits", OptionalDouble.empty(), holds,
+        return new SharedTile("Alert pull-up", holds ? value : value + " – no value fits", OptionalDouble.empty(),
+                holds,
                 fields);
     }
 
@@ -124,7 +130,8 @@ public final class SharedStripModel {
         String used = QuantityWriter.show(use.used(), use.dimension(), 3);
         return use.limit().isEmpty()
                 ? new SharedTile(title, used + ", no limit", OptionalDouble.empty(), true, fields)
-                : new SharedTile(title, used + " of " + QuantityWriter.show(use.limit().getAsDouble(), use.dimension(), 3),
+                : new SharedTile(title,
+                        used + " of " + QuantityWriter.show(use.limit().getAsDouble(), use.dimension(), 3),
                         OptionalDouble.of(use.used() / use.limit().getAsDouble()), use.holds(), fields);
     }
 

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.function.Function;
 
+import javafx.application.Platform;
 import javafx.beans.InvalidationListener;
 import javafx.beans.binding.Bindings;
 import javafx.beans.property.DoubleProperty;
@@ -14,6 +15,7 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.transformation.SortedList;
 import javafx.css.PseudoClass;
 import javafx.geometry.Orientation;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollBar;
 import javafx.scene.control.SelectionMode;
@@ -32,6 +34,7 @@ import shuntwright.planner.window.table.ChannelTableModel.Spot;
 
 /** The channel table. */
 public final class ChannelTable {
+    private static final String WORDS = "words";
     private static final PseudoClass ACTIVE = PseudoClass.getPseudoClass("active");
     private static final List<ChannelField> ASKED = List.of(ChannelField.ZONE, ChannelField.SIDE, ChannelField.RAIL,
             ChannelField.LOAD, ChannelField.NO_TRIP, ChannelField.MUST_TRIP, ChannelField.RELEASE,
@@ -66,9 +69,10 @@ public final class ChannelTable {
         table.setItems(sorted);
         table.skinProperty().subscribe(skin -> {
             if (skin != null) {
-                javafx.application.Platform.runLater(this::pinNames);
+                Platform.runLater(this::dressHeaders);
             }
         });
+        table.getVisibleLeafColumns().addListener((InvalidationListener) _ -> Platform.runLater(this::dressHeaders));
         table.addEventFilter(KeyEvent.KEY_PRESSED, this::pressed);
         table.addEventHandler(KeyEvent.KEY_TYPED, this::startTyping);
         table.getSelectionModel().getSelectedCells().addListener((InvalidationListener) _ -> tellSelection());
@@ -76,30 +80,31 @@ public final class ChannelTable {
     }
 
     private void addColumns() {
-        TableColumn<RowModel, ?> name = asked(ChannelField.NAME, 150);
+        TableColumn<RowModel, ?> name = asked(ChannelField.NAME, 140);
         columns.add(name);
-        columns.add(computed("Verdict", "whether the demand is met", 104, _ -> new VerdictCell(),
+        columns.add(computed("Verdict", "whether the demand is met", 92, _ -> new VerdictCell(),
                 Comparator.comparing(figures -> figures.verdict().map(Enum::ordinal).orElse(-1))));
         for (ChannelField field : ASKED) {
             columns.add(asked(field, switch (field) {
-                case RAIL -> 116;
-                case RELEASE -> 104;
-                case SOURCE -> 104;
-                case ZONE -> 84;
-                case SIDE -> 48;
-                default -> 74;
+                case RAIL -> 118;
+                case RELEASE -> 84;
+                case SOURCE -> 84;
+                case ZONE -> 80;
+                case SIDE -> 46;
+                case MUST_TRIP -> 72;
+                default -> 64;
             }));
         }
-        columns.add(figure("Shunt", "chosen shunts in parallel × resistance of one", 92, RowFigures::shunt));
-        columns.add(figure("Gain", "of the chosen amplifier, V/V", 52, RowFigures::gain));
-        columns.add(figure("Threshold", "nominal voltage at which the comparator trips", 84, RowFigures::threshold));
-        columns.add(computed("Trip interval in its allowed window",
+        columns.add(figure("Shunt", "chosen shunts in parallel × resistance of one", 84, RowFigures::shunt));
+        columns.add(figure("Gain", "of the chosen amplifier, V/V", 48, RowFigures::gain));
+        columns.add(figure("Threshold", "nominal voltage at which the comparator trips", 78, RowFigures::threshold));
+        columns.add(computed("Trip interval in its window",
                 "limits (wide bar) and coverage interval (inner bar) of the trip current; the frame is no-trip to must-trip",
-                264, _ -> new TripCell(), Comparator.comparing(figures -> figures.trip().map(trip -> trip.limits().width())
-                        .orElse(-1.0))));
-        columns.add(figure("Reading", "largest reading error at load current", 72, RowFigures::reading));
-        columns.add(figure("Heat", "of the shunts at load current", 74, RowFigures::heat));
-        columns.add(figure("Margin", "smallest distance of a limit from the end of its window, of the half-width", 74,
+                230, _ -> new TripCell(), Comparator.comparing(
+                        figures -> figures.trip().map(trip -> trip.limits().width()).orElse(-1.0))));
+        columns.add(figure("Reading", "largest reading error at load current", 64, RowFigures::reading));
+        columns.add(figure("Heat", "of the shunts at load current", 70, RowFigures::heat));
+        columns.add(figure("Margin", "smallest distance of a limit from the end of its window, of the half-width", 66,
                 RowFigures::margin));
         for (ChannelField field : ChannelField.values()) {
             if (field != ChannelField.NAME && !ASKED.contains(field)) {
@@ -148,12 +153,10 @@ public final class ChannelTable {
 
     private static void head(TableColumn<RowModel, ?> column, String title, String words, double width) {
         column.setText(title);
-        Label hover = new Label();
-        hover.setTooltip(new Tooltip(words));
         column.setPrefWidth(width);
         column.setMinWidth(40);
         column.setId("column-" + title.toLowerCase(java.util.Locale.ROOT).replaceAll("[^a-z]+", "-"));
-        column.setGraphic(hover);
+        column.getProperties().put(WORDS, words);
     }
 
     private TableRow<RowModel> row() {
@@ -175,17 +178,22 @@ public final class ChannelTable {
         return scrolled;
     }
 
-    private void pinNames() {
+    /** Gives each header its explanation, and pins that of the names; headers exist only once they are laid out. */
+    private void dressHeaders() {
         table.lookupAll(".scroll-bar").stream()
                 .filter(node -> node instanceof ScrollBar bar && bar.getOrientation() == Orientation.HORIZONTAL)
                 .map(ScrollBar.class::cast).findFirst()
                 .ifPresent(bar -> scrolled.bind(Bindings.when(bar.visibleProperty()).then(bar.valueProperty())
                         .otherwise(0.0)));
-        table.lookupAll(".column-header").stream().filter(node -> "column-channel".equals(node.getId())).findFirst()
-                .ifPresent(header -> {
-                    header.setViewOrder(-1);
-                    header.translateXProperty().bind(scrolled);
-                });
+        for (Node header : table.lookupAll(".column-header")) {
+            columns.stream().filter(column -> column.getId().equals(header.getId())).findFirst()
+                    .ifPresent(column -> Tooltip.install(header,
+                            new Tooltip(String.valueOf(column.getProperties().get(WORDS)))));
+            if (columns.getFirst().getId().equals(header.getId())) {
+                header.setViewOrder(-1);
+                header.translateXProperty().bind(scrolled);
+            }
+        }
     }
 
     ChannelTableModel model() {

@@ -128,7 +128,8 @@ public final class ChannelTableModel {
         BoardState state = session.state();
         StringBuilder text = new StringBuilder();
         for (int row : rowIds) {
-            text.append(String.join("\t", fields.stream().map(field -> state.text(new Place.Cell(row, field))).toList()))
+            text.append(
+                    String.join("\t", fields.stream().map(field -> state.text(new Place.Cell(row, field))).toList()))
                     .append('\n');
         }
         return text.toString();

@@ -3,6 +3,7 @@ package shuntwright.planner.window.table;
 import java.util.Optional;
 
 import javafx.css.PseudoClass;
+import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.layout.Region;
 
@@ -13,8 +14,8 @@ import shuntwright.quantity.Range;
 
 /** Draws a {@link TripDrawing}: the allowed window as a track, limits and coverage interval as bars, nominal as a tick. */
 final class IntervalBar extends Region {
-    private static final double LABEL = 58;
-    private static final double GAP = 6;
+    private static final double LABEL = 50;
+    private static final double GAP = 5;
 
     private final Label lower = new Label();
     private final Label upper = new Label();
@@ -26,6 +27,7 @@ final class IntervalBar extends Region {
 
     IntervalBar() {
         getStyleClass().add("interval-bar");
+        lower.setAlignment(Pos.CENTER_RIGHT);
         lower.getStyleClass().add("interval-end");
         upper.getStyleClass().add("interval-end");
         getChildren().addAll(window, limits, coverage, nominal, lower, upper);
@@ -58,7 +60,7 @@ final class IntervalBar extends Region {
 
     @Override
     protected double computePrefWidth(double height) {
-        return 230;
+        return 210;
     }
 
     @Override
@@ -69,7 +71,6 @@ final class IntervalBar extends Region {
         }
         double width = getWidth();
         double height = getHeight();
-        lower.setAlignment(javafx.geometry.Pos.CENTER_RIGHT);
         lower.resizeRelocate(0, 0, LABEL, height);
         upper.resizeRelocate(width - LABEL, 0, LABEL, height);
         double middle = Math.rint(height / 2);

@@ -54,7 +54,8 @@ record RowFigures(Optional<Verdict> verdict, boolean accepted, boolean stale, St
     }
 
     private static Figure reading(Assessment reading, double load) {
-        double error = Math.max(Math.abs(reading.limits().min() - load), Math.abs(reading.limits().max() - load)) / load;
+        double error = Math.max(Math.abs(reading.limits().min() - load), Math.abs(reading.limits().max() - load))
+                / load;
         return new Figure("±" + oneDecimal(error * 100) + " %", error);
     }
 

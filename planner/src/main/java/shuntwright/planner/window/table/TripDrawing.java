@@ -20,7 +20,7 @@ record TripDrawing(Range limits, Range coverage, double nominal, String lower, S
         implements
             Comparable<TripDrawing> {
     /** Half of the axis, in half-widths of the window; what lies beyond is cut off at the end. */
-    static final double SPAN = 1.75;
+    static final double SPAN = 1.5;
 
     static TripDrawing of(Assessment trip) {
         Range allowed = trip.allowed();
