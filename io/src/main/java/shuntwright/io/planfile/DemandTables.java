@@ -87,6 +87,7 @@ final class DemandTables {
             .maybeCount("shuntCount", "shunts in parallel", Pins::shuntCount)
             .maybeText("amplifier", "part number", Pins::amplifier)
             .maybeText("comparator", "part number", Pins::comparator)
+            .maybeText("resistors", "part number of the series of divider and hysteresis resistors", Pins::resistors)
             .maybeNumber("dividerTop", Unit.OHM, "R_t", Pins::dividerTop)
             .maybeNumber("dividerBottom", Unit.OHM, "R_b", Pins::dividerBottom)
             .maybeNumber("hysteresisResistor", Unit.OHM, "R_H or R_F", Pins::hysteresisResistor).form();

@@ -13,6 +13,8 @@ import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Cure;
 import shuntwright.plan.Finding;
 import shuntwright.plan.Plan;
+import shuntwright.quantity.Dimension;
+import shuntwright.quantity.QuantityWriter;
 
 /** What a user should know, the board's own findings first, then each channel's. */
 final class FindingsSheet {
@@ -70,8 +72,9 @@ final class FindingsSheet {
     }
 
     private static String words(Assessment assessment, BudgetLine line) {
-        return String.format(Locale.ROOT, "%s: %s, %.3f A (%.2f %%)", assessment.outcome().words(),
-                line.input().label(), line.widest(), 100 * line.widest() / Math.abs(assessment.nominal()));
+        return String.format(Locale.ROOT, "%s: %s, %s (%.2f %%)", assessment.outcome().words(),
+                line.input().label(), QuantityWriter.show(line.widest(), Dimension.CURRENT, 3),
+                100 * line.widest() / Math.abs(assessment.nominal()));
     }
 
     private static Optional<String> cure(ChannelPlan channel) {

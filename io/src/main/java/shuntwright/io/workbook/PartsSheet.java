@@ -69,7 +69,7 @@ final class PartsSheet {
         List<Column<Line>> columns = List.of(
                 Column.text("", "Part number", 19, row -> row.part().partNumber()),
                 Column.wrapped("Description", 30, row -> row.part().description()),
-                Column.text("", "Body", 8, row -> row.part().purchase().body()), quantity,
+                Column.wrapped("Body", 13, row -> row.part().purchase().body()), quantity,
                 Column.wrapped("Designators", 20, row -> Designators.fold(row.part().designators())), needed, minimum,
                 pack, order, unitPrice, extended, onBoard,
                 Column.wrapped("Supplier", 14, row -> row.part().purchase().supplier()),

@@ -32,8 +32,8 @@ final class SharedSheet {
 
     private static final List<Column<SharedUse>> USES = List.of(
             Column.text("", "Shared thing", 26, SharedUse::name), Column.text("", "Kind", 14, SharedSheet::kind),
-            Column.number("Used", 12, Style.GENERAL, SharedUse::used),
-            Column.maybeNumber("", "Limit", 12, Style.GENERAL, SharedUse::limit),
+            Column.number("Used", 12, Style.WATT, SharedUse::used),
+            Column.maybeNumber("", "Limit", 12, Style.WATT, SharedUse::limit),
             Column.text("", "Unit", 8, row -> row.dimension().unit()),
             Column.maybeNumber("", "Used, % of limit", 12, Style.PERCENT, SharedSheet::share),
             new Column<>("", "Kept", 9, Style.TEXT, (row, _) -> new Column.Content.Marked(row.holds() ? "yes" : "no",

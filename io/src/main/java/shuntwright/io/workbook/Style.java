@@ -2,7 +2,7 @@ package shuntwright.io.workbook;
 
 /** How a cell looks; each with its number format. */
 enum Style {
-    TEXT("@"), WRAPPED("@"), COUNT("#,##0"), VOLT("0.0000"), AMPERE("0.000"), MILLIOHM("0.000"), OHM("General"),
+    TEXT("@"), WRAPPED("@"), COUNT("#,##0"), VOLT("0.0000"), AMPERE("0.0000"), MILLIOHM("0.0000"), OHM("General"),
     GAIN("General"), PERCENT("0.00"), WATT("0.0000"), MONEY("#,##0.00"), UNIT_PRICE("#,##0.0000"), GENERAL("General"),
     TITLE("@"), LABEL("@"), GROUP("@"), HEADER("@"), NUMBER_HEADER("@"), INPUT_COUNT("#,##0"), INPUT_SHARE("0.0%"),
     TOTAL_MONEY("#,##0.00"),

@@ -23,7 +23,7 @@ final class TableSheet<T> {
     /** Excel measures widths in 1/256 of a digit. */
     private static final int WIDTH_UNIT = 256;
     /** Characters of prose for each 100 digits of width: letters are narrower than digits on average. */
-    private static final int PROSE = 112;
+    private static final int PROSE = 120;
     /** A column of single lines grows with its text to this many characters. */
     private static final int WIDEST = 44;
 
