@@ -14,6 +14,7 @@ import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Reading;
 
 /** Something all channels share that takes what is typed. */
+@SuppressWarnings("ImmutableEnumChecker") // the functions keep no state
 public enum BoardField {
     NAME("Board name", "shown in titles and exports", Board::name,
             (text, board) -> text.isBlank()

@@ -17,6 +17,7 @@ import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Reading;
 
 /** A column of the channel table that takes what is typed. */
+@SuppressWarnings("ImmutableEnumChecker") // the functions keep no state
 public enum ChannelField {
     NAME("Channel", "name", "a name that no other channel has", Channel::name, Demands::name),
     ZONE("Zone", "zone", "a zone of the board, or nothing", channel -> channel.zone().orElse(""),

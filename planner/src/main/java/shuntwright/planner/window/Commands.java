@@ -26,7 +26,7 @@ final class Commands {
 
         void help(HelpTopic topic);
 
-        void scaleText(int steps);
+        void scaleText(boolean larger);
     }
 
     private final BoardSession session;
@@ -97,8 +97,8 @@ final class Commands {
             menu.getItems().add(item);
         }
         menu.getItems().addAll(new SeparatorMenuItem(),
-                item("Larger text", "Shortcut+Plus", () -> window.scaleText(1)),
-                item("Smaller text", "Shortcut+Minus", () -> window.scaleText(-1)));
+                item("Larger text", "Shortcut+Plus", () -> window.scaleText(true)),
+                item("Smaller text", "Shortcut+Minus", () -> window.scaleText(false)));
         return menu;
     }
 

@@ -212,8 +212,8 @@ final class MainWindow {
             }
 
             @Override
-            public void scaleText(int steps) {
-                textSize = TextSize.values()[Math.clamp(textSize.ordinal() + steps, 0, TextSize.values().length - 1)];
+            public void scaleText(boolean larger) {
+                textSize = larger ? textSize.larger() : textSize.smaller();
                 textSize.show(root.getScene().getRoot());
             }
         };

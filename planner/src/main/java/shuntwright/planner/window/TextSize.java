@@ -7,6 +7,24 @@ import javafx.scene.Node;
 enum TextSize {
     SMALL, NORMAL, LARGE, LARGER, LARGEST;
 
+    TextSize larger() {
+        return switch (this) {
+            case SMALL -> NORMAL;
+            case NORMAL -> LARGE;
+            case LARGE -> LARGER;
+            case LARGER, LARGEST -> LARGEST;
+        };
+    }
+
+    TextSize smaller() {
+        return switch (this) {
+            case SMALL, NORMAL -> SMALL;
+            case LARGE -> NORMAL;
+            case LARGER -> LARGE;
+            case LARGEST -> LARGER;
+        };
+    }
+
     void show(Node root) {
         for (TextSize each : values()) {
             root.pseudoClassStateChanged(

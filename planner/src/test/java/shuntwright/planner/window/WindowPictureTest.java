@@ -34,6 +34,7 @@ import shuntwright.planner.window.dialog.Choosers;
  * are written there.
  */
 @ExtendWith(ApplicationExtension.class)
+@SuppressWarnings("NullAway.Init") // set before each test
 class WindowPictureTest {
     private OpenWindow window;
     private Stage stage;

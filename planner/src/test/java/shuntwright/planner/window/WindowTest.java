@@ -38,6 +38,7 @@ import shuntwright.planner.window.dialog.Choosers;
 
 /** The real window, worked by clicking and typing. */
 @ExtendWith(ApplicationExtension.class)
+@SuppressWarnings("NullAway.Init") // set before each test
 class WindowTest {
     @TempDir
     static Path folder;

@@ -29,11 +29,11 @@ public final class BudgetPanel {
         table.setPlaceholder(new Label(""));
         words("Contribution", 300, BudgetRow::label, Comparator.comparing(BudgetRow::label));
         bars(260);
-        number("Lower limit", BudgetRow::low, Comparator.comparing(BudgetRow::lowBar));
-        number("of trip target", BudgetRow::lowPercent, Comparator.comparing(BudgetRow::lowBar));
-        number("Upper limit", BudgetRow::high, Comparator.comparing(BudgetRow::highBar));
-        number("of trip target ", BudgetRow::highPercent, Comparator.comparing(BudgetRow::highBar));
-        number("Variance share", BudgetRow::variance, Comparator.comparing(BudgetRow::share));
+        number("Lower limit", BudgetRow::low, Comparator.comparingDouble(BudgetRow::lowBar));
+        number("of trip target", BudgetRow::lowPercent, Comparator.comparingDouble(BudgetRow::lowBar));
+        number("Upper limit", BudgetRow::high, Comparator.comparingDouble(BudgetRow::highBar));
+        number("of trip target ", BudgetRow::highPercent, Comparator.comparingDouble(BudgetRow::highBar));
+        number("Variance share", BudgetRow::variance, Comparator.comparingDouble(BudgetRow::share));
         table.setItems(model.rows());
         ComboBox<Outcome> outcomes = new ComboBox<>(model.outcomes());
         outcomes.setId("budget-outcome");
@@ -97,7 +97,7 @@ public final class BudgetPanel {
 
     private void bars(double width) {
         TableColumn<BudgetRow, BudgetRow> column = column("Moves the limits by", width,
-                Comparator.comparing(BudgetRow::widest));
+                Comparator.comparingDouble(BudgetRow::widest));
         column.setCellFactory(_ -> new BarCell());
     }
 

@@ -3,6 +3,7 @@ package shuntwright.planner.window.help;
 import java.util.List;
 
 /** A page of the help menu. */
+@SuppressWarnings("ImmutableEnumChecker") // the lists are never changed
 public enum HelpTopic {
     FIRST_STEPS("First steps", List.of(
             "1. Open a demo board, or make a new board and add a parts file (File menu).",

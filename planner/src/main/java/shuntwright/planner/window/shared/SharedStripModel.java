@@ -8,7 +8,6 @@ import java.util.OptionalDouble;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 
-import shuntwright.board.Acceptance;
 import shuntwright.board.Board;
 import shuntwright.plan.AlertPlan;
 import shuntwright.plan.Plan;

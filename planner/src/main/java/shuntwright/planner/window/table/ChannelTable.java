@@ -212,7 +212,7 @@ public final class ChannelTable {
         boolean command = event.isShortcutDown() || event.isAltDown() || event.isMetaDown();
         TablePosition<?, ?> focus = table.getFocusModel().getFocusedCell();
         if (command || text.isEmpty() || Character.isISOControl(text.charAt(0)) || table.getEditingCell() != null
-                || focus.getRow() < 0 || fieldOf(focus.getTableColumn()) == null || event.getTarget() != table) {
+                || focus.getRow() < 0 || fieldOf(focus.getTableColumn()) == null || !table.equals(event.getTarget())) {
             return;
         }
         event.consume();
@@ -370,7 +370,7 @@ public final class ChannelTable {
         }
         List<Integer> wanted = model.session().selectionProperty().get();
         TableColumn<RowModel, ?> column = table.getVisibleLeafColumns().stream()
-                .filter(each -> each == table.getFocusModel().getFocusedCell().getTableColumn()).findFirst()
+                .filter(each -> each.equals(table.getFocusModel().getFocusedCell().getTableColumn())).findFirst()
                 .orElse(table.getVisibleLeafColumn(0));
         following = true;
         table.getSelectionModel().clearSelection();

@@ -47,21 +47,25 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
     @Override
     protected void updateItem(@Nullable CellEntry entry, boolean empty) {
         super.updateItem(entry, empty);
-        RowModel row = row();
-        boolean none = empty || entry == null;
-        boolean invite = !none && row != null && row.isEmptyRow() && field == ChannelField.NAME;
-        pseudoClassStateChanged(WRONG, !none && entry.reason().isPresent());
-        pseudoClassStateChanged(INVITING, invite);
-        if (isEditing()) {
+        if (empty || entry == null) {
+            pseudoClassStateChanged(WRONG, false);
+            pseudoClassStateChanged(INVITING, false);
+            if (!isEditing()) {
+                setGraphic(null);
+                setText(null);
+                setTooltip(null);
+                setAccessibleText(null);
+            }
             return;
         }
-        setGraphic(null);
-        setContentDisplay(ContentDisplay.TEXT_ONLY);
-        setText(none ? null : invite ? "+ type a name" : entry.text());
-        if (none) {
-            setTooltip(null);
-            setAccessibleText(null);
-        } else {
+        RowModel row = row();
+        boolean invite = row != null && row.isEmptyRow() && field == ChannelField.NAME;
+        pseudoClassStateChanged(WRONG, entry.reason().isPresent());
+        pseudoClassStateChanged(INVITING, invite);
+        if (!isEditing()) {
+            setGraphic(null);
+            setContentDisplay(ContentDisplay.TEXT_ONLY);
+            setText(invite ? "+ type a name" : entry.text());
             tip.setText(entry.reason().orElse("Takes " + field.hint() + "."));
             setTooltip(tip);
             setAccessibleText(field.title() + " " + entry.text()
@@ -87,7 +91,7 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
         text.setAlignment(field.isNumber() ? javafx.geometry.Pos.CENTER_RIGHT : javafx.geometry.Pos.CENTER_LEFT);
         text.addEventFilter(KeyEvent.KEY_PRESSED, event -> key(event, text));
         text.focusedProperty().subscribe((_, focused) -> {
-            if (!focused && editor == text) {
+            if (!focused && text.equals(editor)) {
                 finish(text);
             }
         });
@@ -146,7 +150,7 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
     }
 
     private void finish(TextField text) {
-        if (editor == text) {
+        if (text.equals(editor)) {
             cancelEdit();
         }
     }

@@ -19,8 +19,12 @@ final class FigureCell extends TableCell<RowModel, RowFigures> {
     @Override
     protected void updateItem(@Nullable RowFigures figures, boolean empty) {
         super.updateItem(figures, empty);
-        boolean none = empty || figures == null;
-        setText(none ? null : which.apply(figures).text());
-        pseudoClassStateChanged(STALE, !none && figures.stale());
+        if (empty || figures == null) {
+            setText(null);
+            pseudoClassStateChanged(STALE, false);
+        } else {
+            setText(which.apply(figures).text());
+            pseudoClassStateChanged(STALE, figures.stale());
+        }
     }
 }
