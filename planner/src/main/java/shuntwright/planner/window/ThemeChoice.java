@@ -32,6 +32,7 @@ final class ThemeChoice {
         this.system = system;
         wish.subscribe(this::refresh);
         system.subscribe(_ -> refresh());
+        refresh();
     }
 
     private void refresh() {

@@ -32,6 +32,7 @@ public final class BudgetModel {
         session.plannedProperty().subscribe(this::refresh);
         session.selectionProperty().subscribe(this::refresh);
         outcome.subscribe(this::refresh);
+        refresh();
     }
 
     ObservableList<BudgetRow> rows() {

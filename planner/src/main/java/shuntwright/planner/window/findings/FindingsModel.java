@@ -47,6 +47,7 @@ public final class FindingsModel {
         session.stateProperty().subscribe(this::refresh);
         session.plannedProperty().subscribe(this::refresh);
         session.selectionProperty().subscribe(this::refresh);
+        refresh();
     }
 
     ReadOnlyObjectProperty<Shown> shownProperty() {

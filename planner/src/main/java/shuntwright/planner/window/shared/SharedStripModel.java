@@ -27,6 +27,7 @@ public final class SharedStripModel {
         this.session = session;
         session.stateProperty().subscribe(this::refresh);
         session.plannedProperty().subscribe(this::refresh);
+        refresh();
     }
 
     ObservableList<SharedTile> tiles() {

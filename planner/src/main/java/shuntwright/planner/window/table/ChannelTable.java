@@ -86,10 +86,10 @@ public final class ChannelTable {
                 Comparator.comparing(figures -> figures.verdict().map(Enum::ordinal).orElse(-1))));
         for (ChannelField field : ASKED) {
             columns.add(asked(field, switch (field) {
-                case RAIL -> 118;
+                case RAIL -> 128;
                 case RELEASE -> 84;
                 case SOURCE -> 84;
-                case ZONE -> 80;
+                case ZONE -> 90;
                 case SIDE -> 46;
                 case MUST_TRIP -> 72;
                 default -> 64;

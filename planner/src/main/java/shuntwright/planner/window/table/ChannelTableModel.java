@@ -39,6 +39,7 @@ public final class ChannelTableModel {
         this.session = session;
         session.stateProperty().subscribe(this::refresh);
         session.plannedProperty().subscribe(this::refresh);
+        refresh();
         filter.subscribe(this::refilter);
     }
 
