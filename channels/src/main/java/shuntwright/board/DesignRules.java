@@ -10,25 +10,27 @@ import java.util.Optional;
  * @param dividerCurrent   largest current one divider may draw from its source, A; bounds its resistance from below
  * @param biasShare        largest share of the threshold by which the comparator's bias current may shift it; bounds the
  *                         divider's resistance from above
- * @param resistors        part number of the resistor series for dividers and hysteresis; empty for the most accurate
- *                         series of the catalogue that has prices like the others
- * @param shuntGradient    temperature difference along a shunt that its thermal EMF sees, K
+ * @param resistors        part number of the resistor series for dividers and hysteresis; empty for any series of 1 % or
+ *                         better, whichever serves at least cost
+ * @param heatStep         heats that differ by less count as equal when parts are chosen, W; 0 for an exact comparison
  * @param inputResistance  resistor in each amplifier input lead, Ω (0 for none)
  * @param inputMismatch    relative mismatch of those two resistors, a fraction
  */
 public record DesignRules(int parallelShunts, double powerMargin, double dividerCurrent, double biasShare,
-        Optional<String> resistors, double shuntGradient, double inputResistance, double inputMismatch) {
+        Optional<String> resistors, double heatStep, double shuntGradient, double inputResistance,
+        double inputMismatch) {
 
     /** Common practice: up to 3 in parallel, 70 % of rated power, 0.5 mA, 0.1 %, 1 K, no input resistors. */
-    public static final DesignRules DEFAULT = new DesignRules(3, 0.7, 0.5e-3, 1e-3, Optional.empty(), 1, 0, 0.02);
+    public static final DesignRules DEFAULT = new DesignRules(3, 0.7, 0.5e-3, 1e-3, Optional.empty(), 0, 1, 0, 0.02);
 
     /** @throws IllegalArgumentException unless each is within the range stated above */
     public DesignRules {
         if (parallelShunts < 1 || parallelShunts > 8 || !(powerMargin > 0 && powerMargin <= 1)
-                || !(dividerCurrent > 0) || !(biasShare > 0 && biasShare < 1) || !(shuntGradient >= 0)
+                || !(dividerCurrent > 0) || !(biasShare > 0 && biasShare < 1) || !(heatStep >= 0)
+                || !(shuntGradient >= 0)
                 || !(inputResistance >= 0) || !(inputMismatch >= 0 && inputMismatch < 1)) {
             throw new IllegalArgumentException("design rules out of range: 1 to 8 shunts in parallel, power margin "
-                    + "above 0 to 1, divider current > 0, bias share between 0 and 1, gradient and input resistance ≥ 0");
+                    + "above 0 to 1, divider current > 0, bias share between 0 and 1, heat step, gradient and input resistance ≥ 0");
         }
     }
 }

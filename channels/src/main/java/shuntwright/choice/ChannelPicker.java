@@ -84,12 +84,13 @@ public final class ChannelPicker {
     private Optional<ChannelChoice> accepted(ChannelProblem problem, CandidateSearch search, Candidates found,
             List<shuntwright.parts.Comparator> comparators, Judge judge) {
         CircuitBuilder builder = new CircuitBuilder(problem, tables);
+        double step = problem.around().rules().heatStep();
         int from = 0;
         while (from < found.size()) {
             double heat = search.shunt(found.shunt(from)).heat;
             int to = from;
             List<Option> options = new ArrayList<>();
-            while (to < found.size() && search.shunt(found.shunt(to)).heat <= heat * (1 + SAME)) {
+            while (to < found.size() && search.shunt(found.shunt(to)).heat <= heat * (1 + SAME) + step) {
                 options(problem, search, found, to, comparators, true, options);
                 to++;
             }
@@ -134,6 +135,10 @@ public final class ChannelPicker {
     private void options(ChannelProblem problem, CandidateSearch search, Candidates found, int candidate,
             List<shuntwright.parts.Comparator> comparators, boolean strict, List<Option> options) {
         ShuntTerms shunt = search.shunt(found.shunt(candidate));
+        if (strict && problem.acceptance().basis() == Acceptance.Basis.LIMITS
+                && !roomForAny(problem, found, candidate)) {
+            return;
+        }
         double base = shunt.cost + search.amplifiers().cost[found.amplifier(candidate)];
         double[] ratios = new double[2];
         for (shuntwright.parts.Comparator comparator : comparators) {
@@ -158,6 +163,21 @@ public final class ChannelPicker {
                 }
             }
         }
+    }
+
+    /** False only when the spread of every source alone exceeds the candidate's window. */
+    private static boolean roomForAny(ChannelProblem problem, Candidates found, int candidate) {
+        if (problem.tap().isPresent()) {
+            return true;
+        }
+        double hot = found.high(candidate, 1) / found.low(candidate, 1);
+        for (SourceVoltage source : problem.sources()) {
+            double tolerance = source.voltage().tolerance().above() + source.voltage().tolerance().below();
+            if (1 + tolerance * 0.9 <= hot || hot < 0) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** False only when no pair of this series can serve from this source. */

@@ -2,7 +2,7 @@ package shuntwright.choice;
 
 import java.util.Arrays;
 
-import shuntwright.parts.ResistorSeries;
+import shuntwright.quantity.ESeries;
 import shuntwright.quantity.Range;
 
 /**
@@ -13,6 +13,8 @@ final class DividerTable {
 
     /** Smallest and largest total of a pair, Ω; above a megohm leakage on the board decides (common practice). */
     static final Range TOTAL = Range.of(500, 1e6);
+    /** Smallest single value, Ω: below it the copper of the board counts (common practice). */
+    private static final double SMALLEST = 47;
     private static final int INDEX_BITS = 21;
     private static final long INDEX_MASK = (1L << INDEX_BITS) - 1;
 
@@ -26,10 +28,11 @@ final class DividerTable {
         this.pairs = pairs;
     }
 
-    static DividerTable of(ResistorSeries series) {
-        double least = Math.max(series.values().min(), 10);
-        double most = Math.min(series.values().max(), TOTAL.max());
-        double[] values = least <= most ? series.series().within(Range.of(least, most)) : new double[0];
+    /** All pairs of preferred values within {@code made}, Ω. */
+    static DividerTable of(ESeries series, Range made) {
+        double least = Math.max(made.min(), SMALLEST);
+        double most = Math.min(made.max(), TOTAL.max());
+        double[] values = least <= most ? series.within(Range.of(least, most)) : new double[0];
         int n = values.length;
         long[] keys = new long[n * n];
         int count = 0;

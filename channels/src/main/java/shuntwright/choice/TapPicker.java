@@ -17,7 +17,8 @@ import shuntwright.parts.ResistorSeries;
 public final class TapPicker {
 
     private static final int STEPS = 600;
-    private static final double LEAST = 0.01;
+    /** Below this share of the source a divider or DAC is of no use: offsets decide (common practice). */
+    private static final double LEAST = 0.02;
     private static final double MOST = 0.995;
 
     private final DividerTables tables;
@@ -34,7 +35,9 @@ public final class TapPicker {
      */
     public Optional<Threshold> pick(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users) {
         double nominal = source.voltage().nominal();
-        double ratio = tap.voltage().isPresent() ? tap.voltage().getAsDouble() / nominal : best(source, problems);
+        double ratio = tap.voltage().isPresent()
+                ? tap.voltage().getAsDouble() / nominal
+                : best(tap.kind(), source, problems);
         return switch (tap.kind()) {
             case Tap.Kind.Dac dac -> {
                 int steps = 1 << dac.bits();
@@ -51,11 +54,11 @@ public final class TapPicker {
         };
     }
 
-    private double best(SourceVoltage source, List<ChannelProblem> problems) {
+    private static double best(Tap.Kind kind, SourceVoltage source, List<ChannelProblem> problems) {
         int[] served = new int[STEPS];
         double[] heat = new double[STEPS];
         for (ChannelProblem problem : problems) {
-            double[] least = leastHeat(source, problem);
+            double[] least = leastHeat(kind, source, problem);
             for (int i = 0; i < STEPS; i++) {
                 if (least[i] < Double.POSITIVE_INFINITY) {
                     served[i]++;
@@ -84,8 +87,32 @@ public final class TapPicker {
         return (int) Math.round(Math.log(ratio / LEAST) / Math.log(MOST / LEAST) * (STEPS - 1));
     }
 
+    /** Steps not yet taken; finds the next one in almost constant time. */
+    private static final class Free {
+        private final int[] next = new int[STEPS + 1];
+
+        Free() {
+            for (int i = 0; i <= STEPS; i++) {
+                next[i] = i;
+            }
+        }
+
+        int from(int step) {
+            int root = Math.min(step, STEPS);
+            while (next[root] != root) {
+                next[root] = next[next[root]];
+                root = next[root];
+            }
+            return root;
+        }
+
+        void take(int step) {
+            next[step] = step + 1;
+        }
+    }
+
     /** Least heat of a channel's candidates for each step of the ratio; infinite where there is none. */
-    private static double[] leastHeat(SourceVoltage source, ChannelProblem problem) {
+    private static double[] leastHeat(Tap.Kind kind, SourceVoltage source, ChannelProblem problem) {
         CandidateSearch search = new CandidateSearch(problem);
         Candidates found = search.promising();
         boolean none = found.size() == 0;
@@ -97,17 +124,29 @@ public final class TapPicker {
         List<Comparator> comparators = ChannelPicker.comparators(problem);
         ResistorSeries resistors = problem.resistors().getFirst();
         double[] ratios = new double[2];
+        Free free = new Free();
         for (int candidate = 0; candidate < found.size(); candidate++) {
             ShuntTerms shunt = search.shunt(found.shunt(candidate));
             for (Comparator comparator : comparators) {
                 Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
-                window.ratios(source, resistors, ratios);
+                switch (kind) {
+                    case Tap.Kind.Divider _ -> window.ratios(source, resistors, ratios);
+                    case Tap.Kind.Dac dac -> window.dacRatios(source, dac.gainError(),
+                            dac.offset() + dac.nonlinearity() * source.voltage().nominal() / (1 << dac.bits()), ratios);
+                }
                 double low = none ? Math.min(ratios[0], ratios[1]) : ratios[0];
                 double high = none ? Math.max(ratios[0], ratios[1]) : ratios[1];
-                int from = Math.max(0, step(Math.max(low, LEAST)));
-                int to = Math.min(STEPS - 1, step(Math.max(high, LEAST)));
-                for (int i = from; i <= to && low <= high; i++) {
-                    least[i] = Math.min(least[i], shunt.heat);
+                if (low <= high && high >= LEAST && low <= MOST) {
+                    int to = Math.min(STEPS - 1, step(high));
+                    // By ascending heat the first candidate to reach a step is its best (not so for the nearest ones).
+                    for (int i = none
+                            ? Math.max(0, step(Math.max(low, LEAST)))
+                            : free.from(Math.max(0, step(Math.max(low, LEAST)))); i <= to; i = none
+                                    ? i + 1
+                                    : free.from(i + 1)) {
+                        least[i] = Math.min(least[i], shunt.heat);
+                        free.take(i);
+                    }
                 }
             }
         }

@@ -119,6 +119,21 @@ final class Window {
         into[1] = most;
     }
 
+    /** The same for a DAC output whose full scale is the source; error is its offset and non-linearity, V. */
+    void dacRatios(SourceVoltage source, double gainError, double error, double[] into) {
+        double least = 0;
+        double most = 1;
+        for (int end = 0; end < 2; end++) {
+            Range vx = source(source, end);
+            double slip = offset[end] + error;
+            most = Math.min(most, (Math.min(high[end], ceiling) - slip) / (vx.max() * (1 + gainError)));
+            least = Math.max(least,
+                    (Math.max(low[end], comparator.inputs().lowest()) + slip) / (vx.min() * (1 - gainError)));
+        }
+        into[0] = least;
+        into[1] = most;
+    }
+
     /** Largest possible threshold at an end of ambient for a divider of ratio k without bias, V. */
     double highest(SourceVoltage source, ResistorSeries resistors, double k, int end) {
         return source(source, end).max() * SourceTerms.moved(k, movement(resistors, end)) + offset[end];

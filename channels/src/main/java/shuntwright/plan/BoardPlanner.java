@@ -35,12 +35,17 @@ public final class BoardPlanner {
     /** Kept choices and judgements; beyond this many everything is worked out anew. */
     private static final int MOST_KEPT = 20_000;
 
-    private final DividerTables tables = new DividerTables();
-    private final ChannelPicker picker = new ChannelPicker(tables);
+    /** A table depends on nothing but preferred numbers, so all planners share them. */
+    private static final DividerTables TABLES = new DividerTables();
+
+    private final ChannelPicker picker = new ChannelPicker(TABLES);
     private final Map<ChannelProblem, ChannelChoice> choices = new HashMap<>();
     private final Map<Judged, ChannelPlan> judgements = new HashMap<>();
+    private final Map<TapProblem, Optional<Threshold>> voltages = new HashMap<>();
 
     private record Judged(ChannelProblem problem, SenseCircuit circuit) {}
+
+    private record TapProblem(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users) {}
 
     /** Thrown out of a plan that its {@link Progress} cancelled. */
     public static final class Cancelled extends RuntimeException {
@@ -114,6 +119,7 @@ public final class BoardPlanner {
         if (choices.size() > MOST_KEPT || judgements.size() > MOST_KEPT) {
             choices.clear();
             judgements.clear();
+            voltages.clear();
         }
         BoardContext context = new BoardContext(board, catalogue, pullUps);
         List<TapPlan> taps = taps(context);
@@ -164,7 +170,8 @@ public final class BoardPlanner {
         };
     }
 
-    private ChannelPlan judged(ChannelProblem problem, SenseCircuit circuit) {
+    /** A circuit judged, kept. */
+    ChannelPlan judged(ChannelProblem problem, SenseCircuit circuit) {
         return judgements.computeIfAbsent(new Judged(problem, circuit),
                 key -> ChannelSolver.judged(key.problem(), key.circuit()));
     }
@@ -226,7 +233,10 @@ public final class BoardPlanner {
             Optional<SourceVoltage> source = context.source(tap.source());
             Optional<Threshold> threshold = source.isPresent() && !problems.isEmpty()
                     && !problems.getFirst().resistors().isEmpty()
-                            ? new TapPicker(tables).pick(tap, source.get(), problems, names.size())
+                            ? voltages.computeIfAbsent(
+                                    new TapProblem(tap, source.get(), problems, names.size()),
+                                    key -> new TapPicker(TABLES).pick(key.tap(), key.source(), key.problems(),
+                                            key.users()))
                             : Optional.empty();
             taps.add(new TapPlan(tap, names, threshold));
         }

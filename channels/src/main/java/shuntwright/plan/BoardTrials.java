@@ -15,6 +15,7 @@ import shuntwright.board.DesignRules;
 import shuntwright.board.Source;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.choice.ChannelProblem;
+import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.Threshold;
 import shuntwright.parts.Reference;
 
@@ -43,6 +44,11 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
                 yield planner.solve(where.problem(demand, tap), Set.of());
             }
         };
+    }
+
+    @Override
+    public ChannelPlan judged(ChannelProblem where, SenseCircuit circuit) {
+        return planner.judged(where, circuit);
     }
 
     @Override
@@ -91,7 +97,7 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
         Board b = context.board();
         DesignRules r = b.rules();
         DesignRules more = new DesignRules(parallel, r.powerMargin(), r.dividerCurrent(), r.biasShare(),
-                r.resistors(), r.shuntGradient(), r.inputResistance(), r.inputMismatch());
+                r.resistors(), r.heatStep(), r.shuntGradient(), r.inputResistance(), r.inputMismatch());
         Board richer = new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(), more,
                 b.channels());

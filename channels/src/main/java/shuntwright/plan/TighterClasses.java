@@ -30,21 +30,20 @@ final class TighterClasses {
 
     static List<Cure> of(SolvedChannel solved, Trials trials) {
         SenseCircuit c = solved.circuit();
-        ChannelProblem problem = trials.problem();
         List<Cure> cures = new ArrayList<>();
-        attempt("shunt tolerance", c.shunt().tolerance().widest(), t -> with(c, shunt(c.shunt(), t)), problem, cures);
-        attempt("amplifier gain error", c.amplifier().gainError(), t -> with(c, amplifier(c.amplifier(), t)), problem,
+        attempt("shunt tolerance", c.shunt().tolerance().widest(), t -> with(c, shunt(c.shunt(), t)), trials, cures);
+        attempt("amplifier gain error", c.amplifier().gainError(), t -> with(c, amplifier(c.amplifier(), t)), trials,
                 cures);
         attempt("divider resistor tolerance", c.resistors().tolerance(), t -> with(c, resistors(c.resistors(), t)),
-                problem, cures);
+                trials, cures);
         SourceVoltage source = c.threshold().source();
         attempt(source.isSupply() ? "supply tolerance at the divider" : "reference tolerance",
                 source.voltage().tolerance().widest(), t -> with(c, source(c.threshold(), t)),
-                problem, cures);
+                trials, cures);
         return cures;
     }
 
-    private static void attempt(String what, double now, DoubleFunction<SenseCircuit> tighter, ChannelProblem problem,
+    private static void attempt(String what, double now, DoubleFunction<SenseCircuit> tighter, Trials trials,
             List<Cure> cures) {
         Optional<Cure> last = Optional.empty();
         int steps = 0;
@@ -53,7 +52,7 @@ final class TighterClasses {
                 continue;
             }
             steps++;
-            ChannelPlan reached = ChannelSolver.judged(supplied(problem, what, next), tighter.apply(next));
+            ChannelPlan reached = trials.judged(supplied(trials.problem(), what, next), tighter.apply(next));
             last = Optional.of(new Cure(Cure.Lever.TOLERANCE_CLASS,
                     what + " ±" + show(now, Dimension.RATIO, 3) + " → ±" + show(next, Dimension.RATIO, 3),
                     reached.verdict(), reached.solved().map(SolvedChannel::margin), EFFORT * steps, Optional.empty()));

@@ -6,6 +6,7 @@ import java.util.Optional;
 import shuntwright.board.Channel;
 import shuntwright.board.Source;
 import shuntwright.choice.ChannelProblem;
+import shuntwright.circuit.SenseCircuit;
 
 /** Solves variants of one channel on its board, for {@link Cures}. */
 interface Trials {
@@ -27,6 +28,9 @@ interface Trials {
 
     /** The channel with another rule for parallel shunts. */
     ChannelPlan withParallel(Channel channel, int parallel);
+
+    /** A complete circuit on this or a similar problem. */
+    ChannelPlan judged(ChannelProblem where, SenseCircuit circuit);
 
     /** The problem of the channel as it is. */
     ChannelProblem problem();

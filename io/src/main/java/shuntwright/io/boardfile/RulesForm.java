@@ -24,8 +24,11 @@ final class RulesForm extends Form<DesignRules> {
     private final Key<Double> biasShare = withDefault("biasShare",
             Quantities.number(Dimension.RATIO, Bounds.BETWEEN_ZERO_AND_ONE), DEFAULT.biasShare(),
             "largest share of the threshold by which the comparator's bias current may shift it");
-    private final Key<String> resistors = optional("resistors", Kinds.name(), "the most accurate series there is",
+    private final Key<String> resistors = optional("resistors", Kinds.name(), "any of 1 % or better, at least cost",
             "part number of the resistor series for dividers and hysteresis");
+    private final Key<Double> heatStep = withDefault("heatStep",
+            Quantities.number(Dimension.POWER, Bounds.NOT_NEGATIVE), DEFAULT.heatStep(),
+            "heats that differ by less count as equal when parts are chosen; 0 W compares exactly");
     private final Key<Double> shuntGradient = withDefault("shuntGradient",
             Quantities.number(Dimension.TEMPERATURE_DIFFERENCE, Bounds.NOT_NEGATIVE), DEFAULT.shuntGradient(),
             "temperature difference along a shunt that its thermal EMF sees");
@@ -43,7 +46,8 @@ final class RulesForm extends Form<DesignRules> {
     @Override
     protected DesignRules bind(Fields fields) {
         return new DesignRules(fields.get(parallelShunts), fields.get(powerMargin), fields.get(dividerCurrent),
-                fields.get(biasShare), fields.find(resistors), fields.get(shuntGradient), fields.get(inputResistance),
+                fields.get(biasShare), fields.find(resistors), fields.get(heatStep), fields.get(shuntGradient),
+                fields.get(inputResistance),
                 fields.get(inputMismatch));
     }
 
@@ -54,6 +58,7 @@ final class RulesForm extends Form<DesignRules> {
         sheet.put(dividerCurrent, value.dividerCurrent());
         sheet.put(biasShare, value.biasShare());
         sheet.put(resistors, value.resistors());
+        sheet.put(heatStep, value.heatStep());
         sheet.put(shuntGradient, value.shuntGradient());
         sheet.put(inputResistance, value.inputResistance());
         sheet.put(inputMismatch, value.inputMismatch());

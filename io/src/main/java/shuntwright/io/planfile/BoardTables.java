@@ -96,6 +96,8 @@ final class BoardTables {
             .number("biasShare", Unit.FRACTION, "largest share of the threshold by which bias current may shift it",
                     DesignRules::biasShare)
             .maybeText("resistors", "resistor series to use; without it the program chooses", DesignRules::resistors)
+            .number("heatStep", Unit.WATT, "heats that differ by less count as equal when parts are chosen",
+                    DesignRules::heatStep)
             .number("shuntGradient", Unit.KELVIN, "temperature difference along a shunt that its thermal EMF sees",
                     DesignRules::shuntGradient)
             .number("inputResistance", Unit.OHM, "resistor in each amplifier input lead", DesignRules::inputResistance)

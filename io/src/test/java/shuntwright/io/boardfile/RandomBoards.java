@@ -57,7 +57,8 @@ final class RandomBoards {
                 List.of(new Zone("Z", maybeNumber())), maybeNumber(),
                 new Acceptance(pick(Acceptance.Basis.values()), random.nextDouble(0.5, 1)),
                 new DesignRules(random.nextInt(1, 9), random.nextDouble(0.01, 1), positive(),
-                        random.nextDouble(0.01, 1), maybe(this::name), positive(), positive(), random.nextDouble()),
+                        random.nextDouble(0.01, 1), maybe(this::name), positive(), positive(), positive(),
+                        random.nextDouble()),
                 channels);
     }
 
