@@ -6,7 +6,6 @@ import java.util.function.Function;
 
 import shuntwright.board.Acceptance;
 import shuntwright.board.Board;
-import shuntwright.board.DesignRules;
 import shuntwright.board.SenseSupply;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityReader;
@@ -64,18 +63,18 @@ public enum BoardField {
             board -> Integer.toString(board.buildQuantity()),
             (text, board) -> whole(text, 1, 10_000_000).then(count -> Reading.value(board.withBuildQuantity(count)))),
     PARALLEL_SHUNTS("Most shunts in parallel", "1 to 8", board -> Integer.toString(board.rules().parallelShunts()),
-            (text, board) -> whole(text, 1, 8).then(count -> Reading.value(board.withRules(
-                    new DesignRules(count, board.rules().powerMargin(), board.rules().dividerCurrent(),
-                            board.rules().biasShare(), board.rules().resistors(), board.rules().shuntGradient(),
-                            board.rules().inputResistance(), board.rules().inputMismatch()))))),
+            (text, board) -> whole(text, 1, 8)
+                    .then(count -> Reading.value(board.withRules(board.rules().withParallelShunts(count))))),
     POWER_MARGIN("Share of rated power used", "above 0 to 100 %, such as 70 %",
             board -> QuantityWriter.write(board.rules().powerMargin(), Dimension.RATIO),
             (text, board) -> needed(text, "the share of rated power", Dimension.RATIO).then(value -> value <= 1
-                    ? Reading.value(board.withRules(new DesignRules(board.rules().parallelShunts(), value,
-                            board.rules().dividerCurrent(), board.rules().biasShare(), board.rules().resistors(),
-                            board.rules().shuntGradient(), board.rules().inputResistance(),
-                            board.rules().inputMismatch())))
-                    : Reading.misread("The share of rated power must not be above 100 %. Write 70 % for 0.7.")));
+                    ? Reading.value(board.withRules(board.rules().withPowerMargin(value)))
+                    : Reading.misread("The share of rated power must not be above 100 %. Write 70 % for 0.7."))),
+    HEAT_STEP("Heats count as equal within", "a cheaper choice may be this much warmer, such as 50 mW; 0 W for never",
+            board -> QuantityWriter.write(board.rules().heatStep(), Dimension.POWER),
+            (text, board) -> QuantityReader.number(text, Dimension.POWER).then(value -> value >= 0
+                    ? Reading.value(board.withRules(board.rules().withHeatStep(value)))
+                    : Reading.misread("The heat step must not be below 0 W.")));
 
     private final String title;
     private final String hint;

@@ -83,7 +83,8 @@ public final class FindingsPanel {
             VerdictMark mark = new VerdictMark();
             mark.show(java.util.Optional.of(cure.reached()));
             Label words = text(cure.change() + " – then " + cure.reached().word() + cure.margin().map(
-                    margin -> String.format(java.util.Locale.ROOT, ", margin %.1f %%", margin * 100).replace('-', '−')).orElse(""));
+                    margin -> String.format(java.util.Locale.ROOT, ", margin %.1f %%", margin * 100).replace('-', '−'))
+                    .orElse(""));
             HBox row = new HBox(apply, mark, words);
             HBox.setHgrow(words, Priority.ALWAYS);
             row.getStyleClass().add("cure");

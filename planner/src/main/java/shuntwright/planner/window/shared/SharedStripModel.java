@@ -58,7 +58,7 @@ public final class SharedStripModel {
                         + plan.map(SharedStripModel::cost).orElse(""),
                 OptionalDouble.empty(), true,
                 List.of(BoardField.NAME, BoardField.BUILD_QUANTITY, BoardField.PARALLEL_SHUNTS,
-                        BoardField.POWER_MARGIN)));
+                        BoardField.POWER_MARGIN, BoardField.HEAT_STEP)));
         if (!all.equals(tiles)) {
             tiles.setAll(all);
         }
