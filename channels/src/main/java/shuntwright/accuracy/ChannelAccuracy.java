@@ -80,8 +80,9 @@ public final class ChannelAccuracy {
     private Assessment assess(Asked asked, double coverage) {
         Equation equation = equation(asked);
         LimitsReader reader = new LimitsReader(equation, description);
-        LimitsReader.Corner low = reader.lowest();
-        LimitsReader.Corner high = reader.highest();
+        List<LimitsReader.Corner> extremes = reader.extremes();
+        LimitsReader.Corner low = extremes.get(0);
+        LimitsReader.Corner high = extremes.get(1);
         Propagation propagation = propagate(equation);
         double nominal = equation.value(description.nominal());
         return new Assessment(asked.outcome(), nominal, Range.of(finite(low.value()), finite(high.value())),
@@ -96,8 +97,8 @@ public final class ChannelAccuracy {
 
     /** The exact limits of one outcome, A. */
     public Range limits(Asked asked) {
-        LimitsReader reader = new LimitsReader(equation(asked), description);
-        return Range.of(finite(reader.lowest().value()), finite(reader.highest().value()));
+        List<LimitsReader.Corner> extremes = new LimitsReader(equation(asked), description).extremes();
+        return Range.of(finite(extremes.get(0).value()), finite(extremes.get(1).value()));
     }
 
     /** Combined standard uncertainty of one outcome and its expanded interval. */
@@ -117,8 +118,8 @@ public final class ChannelAccuracy {
 
     /** Exact extremes of the amplifier output voltage at which the comparator trips, V. */
     public Range thresholdLimits() {
-        LimitsReader reader = new LimitsReader(new ThresholdVoltage(equations), description);
-        return Range.of(reader.lowest().value(), reader.highest().value());
+        List<LimitsReader.Corner> extremes = new LimitsReader(new ThresholdVoltage(equations), description).extremes();
+        return Range.of(extremes.get(0).value(), extremes.get(1).value());
     }
 
     private Equation equation(Asked asked) {

@@ -62,36 +62,36 @@ final class LimitsReader {
         }
     }
 
-    Corner lowest() {
-        return extreme(false);
-    }
-
-    Corner highest() {
-        return extreme(true);
-    }
-
-    private Corner extreme(boolean highest) {
+    /** The lowest and the highest corner. */
+    List<Corner> extremes() {
         while (true) {
+            Corner[] found = bothEnds();
             List<Input> turning = new ArrayList<>();
-            Corner best = best(highest, turning);
+            turning(found[0], turning);
+            turning(found[1], turning);
             if (turning.isEmpty() || enumerated.size() >= MOST_ENUMERATED) {
-                return best;
+                return List.of(found);
             }
             for (Input input : turning) {
-                monotone.remove(input);
-                enumerated.add(List.of(input));
+                if (monotone.remove(input)) {
+                    enumerated.add(List.of(input));
+                }
             }
         }
     }
 
-    private Corner best(boolean highest, List<Input> turning) {
+    private Corner[] bothEnds() {
         double[] gradient = new double[nominal.length];
-        double[] atCorner = new double[nominal.length];
-        double bestValue = highest ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
-        double[] best = nominal;
-        boolean found = false;
+        double[] x = nominal.clone();
+        double[] lowest = nominal;
+        double[] highest = nominal;
+        double low = Double.POSITIVE_INFINITY;
+        double high = Double.NEGATIVE_INFINITY;
         for (int scenario = 0; scenario < 1 << enumerated.size(); scenario++) {
-            double[] x = nominal.clone();
+            for (Input input : monotone) {
+                int at = Layout.index(input);
+                x[at] = nominal[at];
+            }
             for (int group = 0; group < enumerated.size(); group++) {
                 boolean upper = (scenario >> group & 1) == 1;
                 for (Input input : enumerated.get(group)) {
@@ -99,25 +99,46 @@ final class LimitsReader {
                 }
             }
             equation.gradient(x, gradient);
-            for (Input input : monotone) {
-                int at = Layout.index(input);
-                x[at] = gradient[at] > 0 == highest ? input.limits().max() : input.limits().min();
+            corner(x, gradient, false);
+            double down = equation.value(x);
+            if (down < low || scenario == 0) {
+                low = down;
+                lowest = x.clone();
             }
-            double value = equation.gradient(x, atCorner);
-            boolean better = highest ? value > bestValue : value < bestValue;
-            if (better || !found) {
-                found = true;
-                bestValue = value;
-                best = x;
-                turning.clear();
-                for (Input input : monotone) {
-                    int at = Layout.index(input);
-                    if (gradient[at] * atCorner[at] < 0) {
-                        turning.add(input);
-                    }
-                }
+            corner(x, gradient, true);
+            double up = equation.value(x);
+            if (up > high || scenario == 0) {
+                high = up;
+                highest = x.clone();
             }
         }
-        return new Corner(best, bestValue);
+        return new Corner[]{new Corner(lowest, low), new Corner(highest, high)};
+    }
+
+    /** Moves the monotone inputs to the corner that the signs pick. */
+    private void corner(double[] x, double[] gradient, boolean highest) {
+        for (Input input : monotone) {
+            int at = Layout.index(input);
+            x[at] = gradient[at] > 0 == highest ? input.limits().max() : input.limits().min();
+        }
+    }
+
+    /** Adds the inputs whose derivative has another sign at the corner than the one that led there. */
+    private void turning(Corner corner, List<Input> turning) {
+        double[] gradient = new double[nominal.length];
+        equation.gradient(corner.x, gradient);
+        double[] middle = corner.x.clone();
+        for (Input input : monotone) {
+            int at = Layout.index(input);
+            middle[at] = nominal[at];
+        }
+        double[] led = new double[nominal.length];
+        equation.gradient(middle, led);
+        for (Input input : monotone) {
+            int at = Layout.index(input);
+            if (gradient[at] * led[at] < 0 && !turning.contains(input)) {
+                turning.add(input);
+            }
+        }
     }
 }

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.PriorityQueue;
 
 import shuntwright.accuracy.Propagation;
 import shuntwright.board.Acceptance;
@@ -26,12 +27,14 @@ final class CandidateSearch {
     private final ShuntTerms[] shunts;
     private final AmplifierTerms amplifiers;
     private final Readings readings;
+    private final ThresholdTerms thresholds;
 
     CandidateSearch(ChannelProblem problem) {
         this.problem = problem;
         this.shunts = shunts(problem);
         this.amplifiers = new AmplifierTerms(amplifiers(problem), problem);
         this.readings = new Readings(problem, amplifiers);
+        this.thresholds = new ThresholdTerms(problem);
     }
 
     private static ShuntTerms[] shunts(ChannelProblem problem) {
@@ -87,6 +90,16 @@ final class CandidateSearch {
 
     AmplifierTerms amplifiers() {
         return amplifiers;
+    }
+
+    ThresholdTerms thresholds() {
+        return thresholds;
+    }
+
+    /** The window of a candidate with a comparator. */
+    Window window(Candidates found, int candidate, shuntwright.parts.Comparator comparator) {
+        return new Window(found, candidate, shunt(found.shunt(candidate)), amplifiers, comparator, thresholds,
+                problem);
     }
 
     int combinations() {
@@ -145,7 +158,7 @@ final class CandidateSearch {
 
     /** Candidates that respect the limits, whatever their errors, best room first, at most {@code most}. */
     Candidates nearest(int most) {
-        List<double[]> all = new ArrayList<>();
+        PriorityQueue<double[]> best = new PriorityQueue<>(Comparator.comparingDouble((double[] row) -> row[6]));
         Demand demand = problem.demand();
         double least = demand.channel().currents().least().orElse(0);
         double fault = demand.channel().stress().fault().orElse(0);
@@ -157,29 +170,47 @@ final class CandidateSearch {
                         || fault * s.resistance > a.mostAtFault[j]) {
                     continue;
                 }
-                double room = readings.room(s, j);
-                double[] row = {i, j, 0, 0, 0, 0, 0};
-                for (int end = 0; end < 2; end++) {
-                    double low = a.gainHigh[end][j] * (s.noTripHigh[end] + a.error[end][j] + s.emf);
-                    double high = a.gainLow[end][j] * (s.mustTripLow[end] - a.error[end][j] - s.emf);
-                    row[2 + 2 * end] = low;
-                    row[3 + 2 * end] = high;
-                    room = Math.min(room, high / low - 1);
-                    if (demand.rearm().isPresent()) {
-                        double from = a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf);
-                        double to = a.gainLow[end][j] * (s.rearmHighLow[end] - a.error[end][j] - s.emf);
-                        room = Math.min(room, to / from - 1);
-                    }
-                }
-                row[6] = Double.isNaN(room) ? Double.NEGATIVE_INFINITY : room;
-                all.add(row);
+                offer(i, j, most, best);
             }
         }
-        all.sort(Comparator.comparingDouble((double[] row) -> -row[6]));
+        List<double[]> all = new ArrayList<>(best);
+        all.sort(Comparator.comparingDouble((double[] row) -> -row[6]).thenComparingDouble(row -> row[0])
+                .thenComparingDouble(row -> row[1]));
         Candidates found = new Candidates();
-        for (double[] row : all.subList(0, Math.min(most, all.size()))) {
+        for (double[] row : all) {
             found.add((int) row[0], (int) row[1], row[2], row[3], row[4], row[5]);
         }
         return found;
+    }
+
+    /** Keeps the pair in the queue when it has more room than the worst there. */
+    private void offer(int i, int j, int most, PriorityQueue<double[]> best) {
+        ShuntTerms s = shunts[i];
+        AmplifierTerms a = amplifiers;
+        double[] row = {i, j, 0, 0, 0, 0, 0};
+        double room = Double.POSITIVE_INFINITY;
+        for (int end = 0; end < 2; end++) {
+            double low = a.gainHigh[end][j] * (s.noTripHigh[end] + a.error[end][j] + s.emf);
+            double high = a.gainLow[end][j] * (s.mustTripLow[end] - a.error[end][j] - s.emf);
+            row[2 + 2 * end] = low;
+            row[3 + 2 * end] = high;
+            room = Math.min(room, high / low - 1);
+            if (problem.demand().rearm().isPresent()) {
+                double from = a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf);
+                double to = a.gainLow[end][j] * (s.rearmHighLow[end] - a.error[end][j] - s.emf);
+                room = Math.min(room, to / from - 1);
+            }
+        }
+        double worst = best.size() < most ? Double.NEGATIVE_INFINITY : best.element()[6];
+        if (!(room > worst)) {
+            return;
+        }
+        row[6] = Math.min(room, readings.room(s, j));
+        if (row[6] > worst || best.size() < most) {
+            best.add(row);
+            if (best.size() > most) {
+                best.remove();
+            }
+        }
     }
 }

@@ -22,8 +22,9 @@ public final class ChannelPicker {
 
     /** Heats and costs closer than this, relative, count as equal. */
     private static final double SAME = 1e-9;
-    private static final int NEAREST_PAIRS = 60;
-    private static final int NEAREST_CIRCUITS = 120;
+    private static final int MOST_TIES = 4;
+    private static final int NEAREST_PAIRS = 40;
+    private static final int NEAREST_CIRCUITS = 60;
 
     private final DividerTables tables;
 
@@ -45,14 +46,19 @@ public final class ChannelPicker {
         CandidateSearch search = new CandidateSearch(problem);
         List<shuntwright.parts.Comparator> comparators = comparators(problem);
         Judge judge = new Judge(problem);
-        Candidates promising = search.promising();
-        Optional<ChannelChoice> accepted = accepted(problem, search, promising, comparators, judge);
+        Optional<ChannelChoice> accepted = accepted(problem, search, search.promising(), comparators, judge);
         if (accepted.isPresent()) {
             return accepted.get();
         }
         return nearest(problem, search, comparators, judge)
                 .<ChannelChoice>map(ChannelChoice.Nearest::new)
                 .orElseGet(() -> new ChannelChoice.NoFit(Refusals.of(problem, tables)));
+    }
+
+    /** True when some circuit is accepted; cheaper than {@link #pick} when none is. */
+    public boolean accepts(ChannelProblem problem) {
+        CandidateSearch search = new CandidateSearch(problem);
+        return accepted(problem, search, search.promising(), comparators(problem), new Judge(problem)).isPresent();
     }
 
     /** The comparators that respect their own limits and suit the demanded release. */
@@ -96,7 +102,7 @@ public final class ChannelPicker {
             }
             options.sort(Comparator.comparingDouble(Option::cost).thenComparing(Comparator.comparingDouble(
                     Option::room).reversed()));
-            List<SenseCircuit> circuits = firstAccepted(problem, search, found, options, builder, judge);
+            List<SenseCircuit> circuits = firstAccepted(search, found, options, builder, judge);
             if (!circuits.isEmpty()) {
                 return Optional.of(new ChannelChoice.Accepted(circuits));
             }
@@ -105,15 +111,15 @@ public final class ChannelPicker {
         return Optional.empty();
     }
 
-    private static List<SenseCircuit> firstAccepted(ChannelProblem problem, CandidateSearch search, Candidates found,
+    private static List<SenseCircuit> firstAccepted(CandidateSearch search, Candidates found,
             List<Option> options, CircuitBuilder builder, Judge judge) {
         List<SenseCircuit> circuits = new ArrayList<>();
         double cost = Double.POSITIVE_INFINITY;
         for (Option option : options) {
-            if (option.cost() > cost * (1 + SAME) || circuits.size() >= 8) {
+            if (option.cost() > cost * (1 + SAME) || circuits.size() >= MOST_TIES) {
                 break;
             }
-            for (SenseCircuit circuit : build(problem, search, found, option, builder)) {
+            for (SenseCircuit circuit : build(search, found, option, builder)) {
                 if (judge.accepts(circuit)) {
                     circuits.add(circuit);
                     cost = option.cost();
@@ -123,11 +129,10 @@ public final class ChannelPicker {
         return circuits;
     }
 
-    private static List<SenseCircuit> build(ChannelProblem problem, CandidateSearch search, Candidates found,
+    private static List<SenseCircuit> build(CandidateSearch search, Candidates found,
             Option option, CircuitBuilder builder) {
         ShuntTerms shunt = search.shunt(found.shunt(option.candidate()));
-        Window window = new Window(found, option.candidate(), shunt, search.amplifiers(), option.comparator(),
-                problem);
+        Window window = search.window(found, option.candidate(), option.comparator());
         return builder.build(shunt, search.amplifiers(), found.amplifier(option.candidate()), window,
                 option.source(), option.resistors());
     }
@@ -136,13 +141,13 @@ public final class ChannelPicker {
             List<shuntwright.parts.Comparator> comparators, boolean strict, List<Option> options) {
         ShuntTerms shunt = search.shunt(found.shunt(candidate));
         if (strict && problem.acceptance().basis() == Acceptance.Basis.LIMITS
-                && !roomForAny(problem, found, candidate)) {
+                && !roomForAny(problem, search, found, candidate)) {
             return;
         }
         double base = shunt.cost + search.amplifiers().cost[found.amplifier(candidate)];
         double[] ratios = new double[2];
         for (shuntwright.parts.Comparator comparator : comparators) {
-            Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
+            Window window = search.window(found, candidate, comparator);
             double cost = base
                     + comparator.purchase().unitPriceAt(problem.buildQuantity()) / comparator.sections();
             for (ResistorSeries resistors : problem.resistors()) {
@@ -166,18 +171,12 @@ public final class ChannelPicker {
     }
 
     /** False only when the spread of every source alone exceeds the candidate's window. */
-    private static boolean roomForAny(ChannelProblem problem, Candidates found, int candidate) {
-        if (problem.tap().isPresent()) {
-            return true;
-        }
-        double hot = found.high(candidate, 1) / found.low(candidate, 1);
-        for (SourceVoltage source : problem.sources()) {
-            double tolerance = source.voltage().tolerance().above() + source.voltage().tolerance().below();
-            if (1 + tolerance * 0.9 <= hot || hot < 0) {
-                return true;
-            }
-        }
-        return false;
+    private static boolean roomForAny(ChannelProblem problem, CandidateSearch search, Candidates found,
+            int candidate) {
+        double[] tightest = search.thresholds().tightest;
+        return problem.tap().isPresent()
+                || (found.high(candidate, 0) >= found.low(candidate, 0) * tightest[0]
+                        && found.high(candidate, 1) >= found.low(candidate, 1) * tightest[1]);
     }
 
     /** False only when no pair of this series can serve from this source. */
@@ -236,7 +235,7 @@ public final class ChannelPicker {
         double margin = Double.NEGATIVE_INFINITY;
         int looked = 0;
         for (Option option : options) {
-            for (SenseCircuit circuit : build(problem, search, found, option, builder)) {
+            for (SenseCircuit circuit : build(search, found, option, builder)) {
                 if (!CandidateSearch.holds(judge.limits(circuit))) {
                     continue;
                 }

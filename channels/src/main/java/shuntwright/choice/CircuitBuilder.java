@@ -18,6 +18,9 @@ import shuntwright.quantity.Range;
 /** Gives a combination of parts its divider and hysteresis values. */
 final class CircuitBuilder {
 
+    /** R_b is looked for between the smallest total divided by this and the bias bound times this. */
+    private static final double BOTTOMS = 20;
+
     private final ChannelProblem problem;
     private final ValueChoice values;
     private final DividerTables tables;
@@ -84,13 +87,15 @@ final class CircuitBuilder {
             return List.of();
         }
         double least = source.get().voltage().max() / problem.around().rules().dividerCurrent();
-        DoubleStream bottoms = fixed.map(divider -> DoubleStream.of(divider.bottom()))
-                .orElseGet(() -> DoubleStream.of(tables.of(parts.resistors()).values())
-                        .filter(value -> value >= least / 20 && value <= biasBound(trip)));
-        return HysteresisChoice
-                .feedback(new HysteresisChoice.FeedbackDemand(source.get(), trip, release,
-                        window.comparator.output().lowLevel().mid(), pull, least, bottoms.boxed().toList(),
-                        parts.resistors(), pinned))
+        DividerTable table = tables.of(parts.resistors());
+        double most = biasBound(window, trip);
+        double[] bottoms = fixed.map(divider -> new double[]{divider.bottom()}).orElseGet(() -> DoubleStream
+                .of(table.values()).filter(value -> value >= least / BOTTOMS && value <= most).toArray());
+        double[] tops = fixed.map(divider -> new double[]{divider.top()}).orElseGet(table::values);
+        return HysteresisChoice.feedback(new FeedbackDemand(source.get(),
+                new FeedbackDemand.Levels(trip, release, window.comparator.output().lowLevel().mid()), pull,
+                new FeedbackDemand.Values(tops, bottoms,
+                        parts.resistors().series().within(parts.resistors().values()), least, pinned)))
                 .map(found -> List.of(parts.circuit(found.threshold(), found.network()))).orElse(List.of());
     }
 
@@ -105,11 +110,14 @@ final class CircuitBuilder {
                 : Optional.empty();
     }
 
-    /** Largest R_b at which a bias current shifts the threshold by the allowed share at most, Ω. */
-    private double biasBound(double threshold) {
-        double bias = problem.catalogue().comparators().stream().map(each -> each.inputs().biasCurrent())
-                .mapToDouble(range -> Math.max(Math.abs(range.min()), Math.abs(range.max()))).max().orElse(0);
-        return bias > 0 ? problem.around().rules().biasShare() * threshold / bias * 10 : DividerTable.TOTAL.max();
+    /** Largest R_b at which the comparator's bias current shifts the threshold by the allowed share at most, Ω. */
+    private double biasBound(Window window, double threshold) {
+        Range bias = window.comparator.inputs().biasCurrent();
+        double largest = Math.max(Math.abs(bias.min()), Math.abs(bias.max()));
+        // The parallel resistance is what counts; R_b may exceed it by the ratio of the divider.
+        return largest > 0
+                ? problem.around().rules().biasShare() * threshold / largest * BOTTOMS
+                : DividerTable.TOTAL.max();
     }
 
     private static double middle(double[] low, double[] high) {

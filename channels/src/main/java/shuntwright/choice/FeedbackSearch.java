@@ -1,11 +1,10 @@
 package shuntwright.choice;
 
+import java.util.Arrays;
 import java.util.Optional;
 
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.Threshold;
-import shuntwright.quantity.ESeries;
-import shuntwright.quantity.Range;
 
 /**
  * The search for R_t and R_F at a given R_b: with g_p = 1/(R_F + R_PU) and g = 1/R_F, the node equations
@@ -13,7 +12,7 @@ import shuntwright.quantity.Range;
  */
 final class FeedbackSearch {
 
-    private final HysteresisChoice.FeedbackDemand demand;
+    private final FeedbackDemand demand;
     private final double source;
     private final double io;
     private double best = Double.POSITIVE_INFINITY;
@@ -21,53 +20,47 @@ final class FeedbackSearch {
     private double bottom;
     private double feedback;
 
-    FeedbackSearch(HysteresisChoice.FeedbackDemand demand) {
+    FeedbackSearch(FeedbackDemand demand) {
         this.demand = demand;
         this.source = demand.source().voltage().nominal();
         this.io = demand.pullUp().voltage().nominal();
     }
 
     void look(double rb) {
-        Range values = demand.series().values();
-        ESeries series = demand.series().series();
+        double[] values = demand.values();
         if (demand.pinned().isPresent()) {
-            tryTop(rb, demand.pinned().getAsDouble(), series, values);
+            tryTop(rb, demand.pinned().getAsDouble(), values);
             return;
         }
         // The hysteresis falls as R_F grows: bisect for the R_F whose exact R_t gives the wanted lower threshold.
-        double low = Math.log(values.min());
-        double high = Math.log(values.max());
-        if (!(lower(rb, Math.exp(low)) < demand.releaseAt()) || !(lower(rb, Math.exp(high)) > demand.releaseAt())) {
-            return;
-        }
-        for (int i = 0; i < 40; i++) {
-            double middle = (low + high) / 2;
-            if (lower(rb, Math.exp(middle)) < demand.releaseAt()) {
-                low = middle;
+        double[] feedbacks = demand.feedbacks();
+        int low = 0;
+        int high = feedbacks.length;
+        while (low < high) {
+            int middle = (low + high) >>> 1;
+            if (lower(rb, feedbacks[middle]) < demand.releaseAt()) {
+                low = middle + 1;
             } else {
                 high = middle;
             }
         }
-        double rf = HysteresisChoice.below(series, Math.exp(low));
-        for (int i = 0; i < 4; i++) {
-            if (values.contains(rf)) {
-                tryTop(rb, rf, series, values);
-            }
-            rf = HysteresisChoice.above(series, rf);
+        for (int at = Math.max(0, low - 2); at < Math.min(feedbacks.length, low + 2); at++) {
+            tryTop(rb, feedbacks[at], values);
         }
     }
 
-    private void tryTop(double rb, double rf, ESeries series, Range values) {
+    private void tryTop(double rb, double rf, double[] values) {
         double ideal = exactTop(rb, rf);
-        if (!(ideal > values.min() && ideal < values.max())) {
+        if (!(ideal > 0)) {
             return;
         }
-        double rt = HysteresisChoice.below(series, ideal);
-        for (int i = 0; i < 4; i++) {
-            if (values.contains(rt) && rt + rb >= demand.leastTotal() && DividerTable.TOTAL.contains(rt + rb)) {
+        int found = Arrays.binarySearch(values, ideal);
+        int from = found < 0 ? -found - 1 : found;
+        for (int at = Math.max(0, from - 2); at < Math.min(values.length, from + 2); at++) {
+            double rt = values[at];
+            if (rt + rb >= demand.leastTotal() && DividerTable.TOTAL.contains(rt + rb)) {
                 judge(rt, rb, rf);
             }
-            rt = HysteresisChoice.above(series, rt);
         }
     }
 

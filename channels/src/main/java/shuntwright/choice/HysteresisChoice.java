@@ -4,7 +4,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 
 import shuntwright.circuit.HysteresisNetwork;
-import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Threshold;
 import shuntwright.parts.Hysteresis;
 import shuntwright.parts.ResistorSeries;
@@ -118,25 +117,9 @@ final class HysteresisChoice {
      */
     static Optional<Feedback> feedback(FeedbackDemand demand) {
         FeedbackSearch search = new FeedbackSearch(demand);
-        for (double bottom : demand.values()) {
+        for (double bottom : demand.bottoms()) {
             search.look(bottom);
         }
         return search.best();
     }
-
-    /**
-     * What a feedback network must do.
-     *
-     * @param source     of the divider
-     * @param tripAt     wanted threshold while not tripped, V
-     * @param releaseAt  wanted threshold while tripped, V
-     * @param outputLow  output voltage while tripped, V
-     * @param pullUp     of the output
-     * @param leastTotal smallest R_t + R_b, Ω
-     * @param values     resistor values that may be used, ascending, Ω
-     * @param series     of the feedback resistor
-     * @param pinned     R_F where the user fixed it, Ω
-     */
-    record FeedbackDemand(SourceVoltage source, double tripAt, double releaseAt, double outputLow, PullUp pullUp,
-            double leastTotal, java.util.List<Double> values, ResistorSeries series, OptionalDouble pinned) {}
 }

@@ -138,7 +138,7 @@ final class Refusals {
             ShuntTerms shunt = search.shunt(found.shunt(candidate));
             int amplifier = found.amplifier(candidate);
             for (Comparator comparator : comparators) {
-                Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
+                Window window = search.window(found, candidate, comparator);
                 for (var source : problem.tap().isPresent()
                         ? List.of(problem.tap().get().source())
                         : problem.sources()) {

@@ -1,5 +1,6 @@
 package shuntwright.choice;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -8,6 +9,7 @@ import shuntwright.board.Tap;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Threshold;
 import shuntwright.parts.Comparator;
+import shuntwright.parts.Hysteresis;
 import shuntwright.parts.ResistorSeries;
 
 /**
@@ -19,6 +21,8 @@ public final class TapPicker {
     private static final int STEPS = 600;
     /** Below this share of the source a divider or DAC is of no use: offsets decide (common practice). */
     private static final double LEAST = 0.02;
+    /** A source further off than this factor from its nominal voltage is not served well anyway. */
+    private static final double WIDEST = 1.3;
     private static final double MOST = 0.995;
 
     private final DividerTables tables;
@@ -87,6 +91,15 @@ public final class TapPicker {
         return (int) Math.round(Math.log(ratio / LEAST) / Math.log(MOST / LEAST) * (STEPS - 1));
     }
 
+    /** Those with built-in hysteresis only, whose window depends on it, and the one with least offset of the others. */
+    private static List<Comparator> distinct(List<Comparator> comparators) {
+        List<Comparator> distinct = new ArrayList<>(comparators.stream()
+                .filter(each -> each.hysteresis() instanceof Hysteresis.BuiltIn).toList());
+        comparators.stream().filter(each -> !(each.hysteresis() instanceof Hysteresis.BuiltIn))
+                .min(java.util.Comparator.comparingDouble(each -> each.inputs().offset())).ifPresent(distinct::add);
+        return distinct;
+    }
+
     /** Steps not yet taken; finds the next one in almost constant time. */
     private static final class Free {
         private final int[] next = new int[STEPS + 1];
@@ -106,6 +119,12 @@ public final class TapPicker {
             return root;
         }
 
+        /** True when some step within these ratios is not yet taken. */
+        boolean within(double low, double high) {
+            return low <= MOST && high >= LEAST
+                    && from(Math.max(0, step(Math.max(low, LEAST)))) <= Math.min(STEPS - 1, step(high));
+        }
+
         void take(int step) {
             next[step] = step + 1;
         }
@@ -121,14 +140,19 @@ public final class TapPicker {
         }
         double[] least = new double[STEPS];
         Arrays.fill(least, Double.POSITIVE_INFINITY);
-        List<Comparator> comparators = ChannelPicker.comparators(problem);
+        List<Comparator> comparators = distinct(ChannelPicker.comparators(problem));
         ResistorSeries resistors = problem.resistors().getFirst();
         double[] ratios = new double[2];
         Free free = new Free();
+        double nominal = source.voltage().nominal();
         for (int candidate = 0; candidate < found.size(); candidate++) {
             ShuntTerms shunt = search.shunt(found.shunt(candidate));
+            if (!none && !free.within(found.low(candidate, 1) / nominal / WIDEST,
+                    found.high(candidate, 1) / nominal * WIDEST)) {
+                continue;
+            }
             for (Comparator comparator : comparators) {
-                Window window = new Window(found, candidate, shunt, search.amplifiers(), comparator, problem);
+                Window window = search.window(found, candidate, comparator);
                 switch (kind) {
                     case Tap.Kind.Divider _ -> window.ratios(source, resistors, ratios);
                     case Tap.Kind.Dac dac -> window.dacRatios(source, dac.gainError(),

@@ -20,7 +20,7 @@ final class ValueChoice {
 
     /** Rooms closer than this, relative to the window, count as equal. */
     private static final double SAME = 1e-9;
-    private static final int MOST_TIES = 6;
+    private static final int MOST_TIES = 3;
 
     private final DividerTables tables;
 

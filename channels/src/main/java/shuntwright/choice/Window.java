@@ -1,7 +1,5 @@
 package shuntwright.choice;
 
-import static shuntwright.circuit.Surroundings.REFERENCE_TEMPERATURE;
-
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Surroundings;
@@ -30,19 +28,18 @@ final class Window {
     final Comparator comparator;
     final boolean rearms;
 
-    private final double[] distance = new double[2];
+    private final ThresholdTerms terms;
     private final double ceiling;
 
     Window(Candidates candidates, int candidate, ShuntTerms s, AmplifierTerms a, Comparator comparator,
-            ChannelProblem problem) {
+            ThresholdTerms terms, ChannelProblem problem) {
         this.comparator = comparator;
+        this.terms = terms;
         this.rearms = problem.demand().rearm().isPresent();
         Surroundings around = problem.around();
         int j = candidates.amplifier(candidate);
         for (int end = 0; end < 2; end++) {
-            double ta = (end == 0 ? around.ambient().min() : around.ambient().max()) - REFERENCE_TEMPERATURE;
-            distance[end] = Math.abs(ta);
-            offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * distance[end];
+            offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * terms.distance[end];
             low[end] = candidates.low(candidate, end);
             high[end] = candidates.high(candidate, end);
             if (rearms) {
@@ -60,11 +57,11 @@ final class Window {
 
     /** Relative movement of a resistor at an end of ambient. */
     double movement(ResistorSeries resistors, int end) {
-        return resistors.tolerance() + resistors.ageing() + resistors.temperatureCoefficient() * distance[end];
+        return resistors.tolerance() + resistors.ageing() + resistors.temperatureCoefficient() * terms.distance[end];
     }
 
     Range source(SourceVoltage source, int end) {
-        return SourceTerms.extremes(source, distance[end]);
+        return terms.extremes(source, end);
     }
 
     /** Highest threshold that amplifier and comparator take, V. */

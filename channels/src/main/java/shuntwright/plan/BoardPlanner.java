@@ -41,6 +41,7 @@ public final class BoardPlanner {
     private final ChannelPicker picker = new ChannelPicker(TABLES);
     private final Map<ChannelProblem, ChannelChoice> choices = new HashMap<>();
     private final Map<Judged, ChannelPlan> judgements = new HashMap<>();
+    private final Map<ChannelProblem, Boolean> acceptances = new HashMap<>();
     private final Map<TapProblem, Optional<Threshold>> voltages = new HashMap<>();
 
     private record Judged(ChannelProblem problem, SenseCircuit circuit) {}
@@ -120,6 +121,7 @@ public final class BoardPlanner {
             choices.clear();
             judgements.clear();
             voltages.clear();
+            acceptances.clear();
         }
         BoardContext context = new BoardContext(board, catalogue, pullUps);
         List<TapPlan> taps = taps(context);
@@ -154,6 +156,14 @@ public final class BoardPlanner {
                 yield withCures(solve(problem, used), new BoardTrials(this, context, problem));
             }
         };
+    }
+
+    /** True when some circuit is accepted for this channel by itself. */
+    boolean accepts(ChannelProblem problem) {
+        ChannelChoice choice = choices.get(problem);
+        return choice != null
+                ? choice instanceof ChannelChoice.Accepted
+                : acceptances.computeIfAbsent(problem, picker::accepts);
     }
 
     /** One channel by itself, without cures. */

@@ -35,14 +35,21 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
         return on(context, edited);
     }
 
+    @Override
+    public boolean accepts(Channel edited) {
+        return Demand.of(edited) instanceof Demand.Reading.Complete(Demand demand)
+                && planner.accepts(context.problem(demand, tap(edited)));
+    }
+
+    private Optional<Threshold> tap(Channel edited) {
+        return edited.threshold().equals(problem.demand().channel().threshold()) ? problem.tap() : Optional.empty();
+    }
+
     private ChannelPlan on(BoardContext where, Channel edited) {
         return switch (Demand.of(edited)) {
             case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(edited, missing);
-            case Demand.Reading.Complete(Demand demand) -> {
-                boolean sameTap = edited.threshold().equals(problem.demand().channel().threshold());
-                Optional<Threshold> tap = sameTap ? problem.tap() : Optional.empty();
-                yield planner.solve(where.problem(demand, tap), Set.of());
-            }
+            case Demand.Reading.Complete(Demand demand) ->
+                planner.solve(where.problem(demand, tap(edited)), Set.of());
         };
     }
 

@@ -175,17 +175,17 @@ final class Cures {
     /** The smallest share up to {@code most} whose edit is accepted, by doubling and bisection; verified by solving. */
     private Optional<Channel> smallest(double most, DoubleFunction<Channel> edit) {
         double high = 0.01;
-        while (high < most && !trials.of(edit.apply(high)).accepted()) {
+        while (high < most && !trials.accepts(edit.apply(high))) {
             high *= 2;
         }
         high = Math.min(high, most);
-        if (!trials.of(edit.apply(high)).accepted()) {
+        if (!trials.accepts(edit.apply(high))) {
             return Optional.empty();
         }
         double low = high <= 0.01 ? 0 : high / 2;
         for (int i = 0; i < BISECTIONS; i++) {
             double middle = (low + high) / 2;
-            if (trials.of(edit.apply(middle)).accepted()) {
+            if (trials.accepts(edit.apply(middle))) {
                 high = middle;
             } else {
                 low = middle;

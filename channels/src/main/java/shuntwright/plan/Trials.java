@@ -14,6 +14,9 @@ interface Trials {
     /** The channel with its demand changed, planned by itself. */
     ChannelPlan of(Channel edited);
 
+    /** True when the channel with its demand changed is accepted. */
+    boolean accepts(Channel edited);
+
     /** Sources an own divider may start from on this board. */
     List<Source> sources();
 

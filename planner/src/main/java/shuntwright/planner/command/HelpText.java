@@ -1,0 +1,57 @@
+package shuntwright.planner.command;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+
+import picocli.CommandLine;
+import picocli.CommandLine.Model.UsageMessageSpec;
+
+/** What the help says besides the options: examples and exit codes. */
+final class HelpText {
+    private static final String DEMO = "demo-boards/sledge-wren.board.json";
+
+    private HelpText() {
+    }
+
+    /** Adds examples to every command, and exit codes to those that judge a board. */
+    static void addTo(CommandLine line) {
+        line.getCommandSpec().usageMessage().synopsisSubcommandLabel("[COMMAND]").description(
+                "Plans the overcurrent protection of every output of a power distribution board.",
+                "Without a command: opens the window; where there is no display, plans a demo board.");
+        examples(line, "window " + DEMO, "plan " + DEMO + " --workbook wren.xlsx", "check wren-chosen.board.json");
+        for (Map.Entry<String, CommandLine> each : line.getSubcommands().entrySet()) {
+            switch (each.getKey()) {
+                case "plan" -> {
+                    examples(each.getValue(), "plan " + DEMO, "plan " + DEMO + " --workbook wren.xlsx",
+                            "plan " + DEMO + " --pinned wren-chosen.board.json",
+                            "plan " + DEMO + " --json > wren.plan.json");
+                    exitCodes(each.getValue());
+                }
+                case "check" -> {
+                    examples(each.getValue(), "check wren-chosen.board.json",
+                            "check wren-chosen.board.json --parts bought.parts.json",
+                            "check wren-chosen.board.json --json");
+                    exitCodes(each.getValue());
+                }
+                default -> examples(each.getValue(), "window", "window " + DEMO);
+            }
+        }
+    }
+
+    private static void examples(CommandLine line, String... examples) {
+        UsageMessageSpec usage = line.getCommandSpec().usageMessage();
+        String[] lines = new String[examples.length];
+        for (int i = 0; i < examples.length; i++) {
+            lines[i] = "  shuntwright " + examples[i];
+        }
+        usage.footerHeading("%nExamples:%n").footer(lines);
+    }
+
+    private static void exitCodes(CommandLine line) {
+        Map<String, String> codes = new LinkedHashMap<>();
+        for (ExitCode each : ExitCode.values()) {
+            codes.put(Integer.toString(each.number()), each.words());
+        }
+        line.getCommandSpec().usageMessage().exitCodeListHeading("%nExit codes:%n").exitCodeList(codes);
+    }
+}

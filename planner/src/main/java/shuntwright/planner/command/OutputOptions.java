@@ -1,0 +1,23 @@
+package shuntwright.planner.command;
+
+import java.nio.file.Path;
+import java.util.Optional;
+
+import picocli.CommandLine.Option;
+
+/** What to make of a plan. */
+final class OutputOptions {
+
+    @Option(names = "--workbook", paramLabel = "FILE", description = "Write the workbook (.xlsx): parts list with prices, settings, findings, bench check.")
+    private Optional<Path> workbook = Optional.empty();
+
+    @Option(names = "--plan", paramLabel = "FILE", description = "Write the plan file (.json): everything computed.")
+    private Optional<Path> plan = Optional.empty();
+
+    @Option(names = "--json", description = "Print the plan file's JSON instead of the table, and nothing else.")
+    private boolean json;
+
+    Job.Output chosen() {
+        return new Job.Output(workbook, plan, json);
+    }
+}

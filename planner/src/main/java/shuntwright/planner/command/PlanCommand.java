@@ -1,0 +1,33 @@
+package shuntwright.planner.command;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** Plans a board. */
+@Command(name = "plan", description = "Chooses parts for every channel of a board and judges the result.")
+final class PlanCommand implements Callable<Integer> {
+    private final Terminal terminal;
+
+    @Mixin
+    private BoardOptions input = new BoardOptions();
+
+    @Mixin
+    private OutputOptions output = new OutputOptions();
+
+    @Option(names = "--pinned", paramLabel = "FILE", description = "Write the board with every choice pinned, so that check judges exactly this plan.")
+    private Optional<Path> pinned = Optional.empty();
+
+    PlanCommand(Terminal terminal) {
+        this.terminal = terminal;
+    }
+
+    @Override
+    public Integer call() {
+        return new Job(Job.Kind.PLAN, input.board(), input.parts(), output.chosen(), pinned).run(terminal).number();
+    }
+}

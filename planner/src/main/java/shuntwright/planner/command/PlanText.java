@@ -1,0 +1,165 @@
+package shuntwright.planner.command;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.function.UnaryOperator;
+import java.util.stream.Stream;
+
+import shuntwright.circuit.LimitCheck;
+import shuntwright.circuit.SenseCircuit;
+import shuntwright.io.planfile.Cautions;
+import shuntwright.plan.ChannelPlan;
+import shuntwright.plan.Cure;
+import shuntwright.plan.FamilyRefusal;
+import shuntwright.plan.Finding;
+import shuntwright.plan.Plan;
+import shuntwright.plan.SharedUse;
+import shuntwright.plan.SolvedChannel;
+import shuntwright.plan.Verdict;
+import shuntwright.quantity.Dimension;
+import shuntwright.quantity.QuantityWriter;
+import shuntwright.quantity.Range;
+
+/** A plan as text for people: the table of channels, then what to know, then what is shared. */
+final class PlanText {
+    private static final int DIGITS = 4;
+
+    private final Plan plan;
+    private final boolean colour;
+    private final List<String> lines = new ArrayList<>();
+
+    private PlanText(Plan plan, boolean colour) {
+        this.plan = plan;
+        this.colour = colour;
+    }
+
+    /** The lines to print. */
+    static List<String> of(Plan plan, boolean colour) {
+        PlanText text = new PlanText(plan, colour);
+        text.summary();
+        text.channels();
+        text.findings();
+        text.shared();
+        text.lines.add("");
+        text.lines.add(Cautions.LINE);
+        return List.copyOf(text.lines);
+    }
+
+    private void summary() {
+        long accepted = plan.channels().stream().filter(ChannelPlan::accepted).count();
+        lines.add(plan.board().name() + ": " + accepted + " of " + plan.channels().size() + " channels accepted, parts "
+                + String.format(Locale.ROOT, "%.2f %s", plan.costPerBoard(), plan.currency())
+                + " for each board of a build of " + plan.board().buildQuantity());
+        lines.add("");
+    }
+
+    private void channels() {
+        Columns table = new Columns(1);
+        table.add(List.of("channel", "verdict", "trips within", "allowed", "shunt", "gain", "threshold", "heat"));
+        for (ChannelPlan each : plan.channels()) {
+            List<String> start = List.of(each.channel().name(), verdict(each));
+            List<String> cells = each.solved().map(PlanText::solved).orElse(List.of("-", "-", "-", "-", "-", "-"));
+            table.add(Stream.concat(start.stream(), cells.stream()).toList(), Paint.of(each, colour));
+        }
+        lines.addAll(table.lines());
+    }
+
+    /** The verdict's word; where acceptance does not follow from it, that too. */
+    private static String verdict(ChannelPlan channel) {
+        String word = channel.verdict().word();
+        return switch (channel.verdict()) {
+            case INSIDE -> channel.accepted() ? word : word + ", not accepted";
+            case LIKELY -> word + (channel.accepted() ? ", accepted" : ", not accepted");
+            case OUTSIDE, NO_FIT, INCOMPLETE -> word;
+        };
+    }
+
+    private static List<String> solved(SolvedChannel solved) {
+        SenseCircuit circuit = solved.circuit();
+        String count = circuit.shuntCount() > 1 ? circuit.shuntCount() + " × " : "";
+        String shunt = count + show(circuit.shunt().resistance(), Dimension.RESISTANCE) + " "
+                + circuit.shunt().partNumber();
+        return List.of(range(solved.trip().limits()), range(solved.trip().allowed()), shunt,
+                show(circuit.amplifier().gain(), Dimension.GAIN),
+                show(solved.settings().threshold(), Dimension.VOLTAGE), show(solved.heat(), Dimension.POWER));
+    }
+
+    private void findings() {
+        for (ChannelPlan each : plan.channels()) {
+            Columns about = new Columns(1);
+            each.findings().stream().filter(PlanText::worthALine).forEach(finding -> add(about, finding));
+            each.refusals().forEach(refusal -> about.add(List.of("", "refused", words(refusal))));
+            each.cures().forEach(cure -> about.add(List.of("", cure.cures() ? "cure" : "tried", words(cure))));
+            section(each.channel().name(), about);
+        }
+        Columns about = new Columns(1);
+        plan.findings().stream().filter(PlanText::worthALine).forEach(finding -> add(about, finding));
+        section("Board", about);
+        long notes = Stream.concat(plan.channels().stream().flatMap(each -> each.findings().stream()),
+                plan.findings().stream()).filter(each -> !worthALine(each)).count();
+        if (notes > 0) {
+            lines.add("");
+            lines.add(notes + (notes == 1 ? " note" : " notes") + " more with --json, in the workbook and the window");
+        }
+    }
+
+    private static boolean worthALine(Finding finding) {
+        return finding.key().severity() != Finding.Severity.NOTE;
+    }
+
+    private void add(Columns about, Finding finding) {
+        UnaryOperator<String> paint = Paint.of(finding.key().severity(), colour);
+        about.add(List.of("", finding.key().severity().word(), finding.key().words() + ": " + finding.text()), paint);
+    }
+
+    private void section(String title, Columns about) {
+        List<String> body = about.lines();
+        if (!body.isEmpty()) {
+            lines.add("");
+            lines.add(title);
+            lines.addAll(body);
+        }
+    }
+
+    private static String words(FamilyRefusal refusal) {
+        LimitCheck miss = refusal.nearMiss();
+        Dimension dimension = miss.limit().dimension();
+        return refusal.refused() + " of " + refusal.examined() + " " + refusal.family().word() + ": "
+                + miss.limit().words() + "; nearest is " + refusal.nearest() + " with "
+                + show(miss.reached(), dimension)
+                + ", " + (miss.atMost() ? "at most " : "at least ") + show(miss.bound(), dimension);
+    }
+
+    private static String words(Cure cure) {
+        Optional<String> margin = cure.margin().map(share -> Math.round(share * 100) + " % margin");
+        boolean none = cure.reached() == Verdict.NO_FIT || cure.reached() == Verdict.INCOMPLETE;
+        return cure.lever().words() + ": " + cure.change() + " gives " + cure.reached().word()
+                + (none ? "" : margin.map(text -> " with " + text).orElse(""));
+    }
+
+    private void shared() {
+        if (plan.shared().isEmpty()) {
+            return;
+        }
+        Columns table = new Columns(1);
+        for (SharedUse each : plan.shared()) {
+            String limit = each.limit().isPresent() ? "of " + show(each.limit().getAsDouble(), each.dimension()) : "";
+            UnaryOperator<String> paint = Paint.of(
+                    each.holds() ? Finding.Severity.NOTE : Finding.Severity.FAULT, colour);
+            String state = each.holds() ? "" : "over its limit";
+            table.add(List.of(each.name(), show(each.used(), each.dimension()), limit, state), paint);
+        }
+        lines.add("");
+        lines.addAll(table.lines());
+    }
+
+    private static String show(double value, Dimension dimension) {
+        return QuantityWriter.show(value, dimension, DIGITS);
+    }
+
+    private static String range(Range range) {
+        return QuantityWriter.show(range, Dimension.CURRENT, DIGITS);
+    }
+}

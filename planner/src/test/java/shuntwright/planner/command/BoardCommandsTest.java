@@ -1,0 +1,117 @@
+package shuntwright.planner.command;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+import shuntwright.board.Board;
+import shuntwright.io.boardfile.BoardFiles;
+import shuntwright.io.planfile.PlanFile;
+import shuntwright.io.workplace.Workplace;
+import shuntwright.plan.BoardPlanner;
+import shuntwright.plan.ChannelPlan;
+import shuntwright.plan.Plan;
+import shuntwright.plan.Progress;
+
+/** Planning and checking the demo board, one of whose channels asks for more than can be promised. */
+class BoardCommandsTest {
+    @TempDir
+    private static Path folder = Path.of("");
+    private static Plan plan = PlanFixture.plan();
+    private static Path easy = Path.of("");
+
+    @BeforeAll
+    static void planOnce() {
+        Workplace wren = Workplace.open(Run.WREN, List.of()).ifOpened().orElseThrow();
+        plan = new BoardPlanner().plan(wren.board(), wren.catalogue(), Progress.SILENT);
+        easy = folder.resolve("easy.board.json");
+        List<String> accepted = plan.channels().stream().filter(ChannelPlan::accepted)
+                .map(each -> each.channel().name()).toList();
+        Board board = wren.board().withChannels(
+                wren.board().channels().stream().filter(each -> accepted.contains(each.name())).limit(2).toList());
+        BoardFiles.save(PartsPaths.moved(board, Run.WREN, List.of(), easy), easy);
+    }
+
+    @Test
+    void the_table_has_every_channel_with_its_verdict() {
+        Run run = Run.of("plan", Run.WREN);
+
+        assertThat(run.err()).isEmpty();
+        assertThat(plan.channels()).hasSize(8);
+        for (ChannelPlan each : plan.channels()) {
+            assertThat(run.out().lines()).anySatisfy(line -> assertThat(line).startsWith(each.channel().name() + " ")
+                    .contains("  " + each.verdict().word()));
+        }
+    }
+
+    @Test
+    void a_channel_that_is_not_accepted_shows_in_the_exit_code() {
+        assertThat(plan.accepted()).isFalse();
+        assertThat(Run.of("plan", Run.WREN).code()).isEqualTo(1);
+    }
+
+    @Test
+    void a_board_of_accepted_channels_exits_with_zero() {
+        Run run = Run.of("plan", easy);
+
+        assertThat(run.out()).contains("2 of 2 channels accepted");
+        assertThat(run.code()).isZero();
+    }
+
+    @Test
+    void json_is_the_plan_file_and_nothing_else() throws IOException {
+        Path file = folder.resolve("wren.plan.json");
+
+        Run run = Run.of("plan", Run.WREN, "--json", "--plan", file);
+
+        assertThat(run.err()).isEmpty();
+        assertThat(run.out()).isEqualTo(new String(PlanFile.bytes(plan), StandardCharsets.UTF_8));
+        assertThat(file).hasContent(run.out());
+        assertThat(run.code()).isEqualTo(1);
+    }
+
+    @Test
+    void outputs_are_written_and_named() {
+        Path workbook = folder.resolve("wren.xlsx");
+        Path file = folder.resolve("out.plan.json");
+
+        Run run = Run.of("plan", Run.WREN, "--workbook", workbook, "--plan", file);
+
+        assertThat(run.out()).contains("Written: " + workbook, "Written: " + file);
+        assertThat(workbook).isNotEmptyFile();
+        assertThat(file).isNotEmptyFile();
+    }
+
+    @Test
+    void the_pinned_board_checks_as_it_was_planned_from_wherever_it_stands() throws IOException {
+        Path pinned = Files.createDirectory(folder.resolve("deeper")).resolve("pinned.board.json");
+
+        Run planned = Run.of("plan", easy, "--pinned", pinned);
+        Run checked = Run.of("check", pinned);
+
+        assertThat(checked.err()).isEmpty();
+        assertThat(checked.code()).isZero();
+        assertThat(table(checked)).isEqualTo(table(planned)).hasSize(3);
+    }
+
+    private static List<String> table(Run run) {
+        return run.out().lines().dropWhile(line -> !line.startsWith("channel ")).takeWhile(line -> !line.isEmpty())
+                .toList();
+    }
+
+    @Test
+    void checking_chooses_nothing() {
+        Run run = Run.of("check", easy);
+
+        assertThat(run.code()).isEqualTo(1);
+        assertThat(run.out()).contains("not pinned");
+    }
+}
