@@ -43,9 +43,7 @@ public final class WindowApp extends Application {
         parts.forEach(path -> arguments.add(PARTS + path));
         try {
             Application.launch(WindowApp.class, arguments.toArray(String[]::new));
-        } catch (UnsupportedOperationException | UnsatisfiedLinkError | IllegalStateException problem) {
-            throw noWindow(problem);
-        } catch (RuntimeException problem) {
+        } catch (RuntimeException | UnsatisfiedLinkError problem) {
             // once the window stood, a failure is the program's and not the display's
             if (STARTED.get()) {
                 throw problem;

@@ -39,11 +39,11 @@ final class BoardFieldEditor {
         Label title = new Label(field.title());
         TextField text = new TextField(session.state().text(place));
         text.setId("board-" + field.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-'));
-        text.setPrefColumnCount(24);
+        text.setPrefColumnCount(34);
         title.setLabelFor(text);
         Label hint = new Label();
         hint.setWrapText(true);
-        hint.setMaxWidth(300);
+        hint.setMaxWidth(400);
         hint.getStyleClass().add("hint");
         Runnable mark = () -> {
             var wrong = session.state().wrong(place);

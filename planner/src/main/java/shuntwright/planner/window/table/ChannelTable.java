@@ -97,13 +97,13 @@ public final class ChannelTable {
         }
         columns.add(figure("Shunt", "chosen shunts in parallel × resistance of one", 84, RowFigures::shunt));
         columns.add(figure("Gain", "of the chosen amplifier, V/V", 48, RowFigures::gain));
-        columns.add(figure("Threshold", "nominal voltage at which the comparator trips", 78, RowFigures::threshold));
+        columns.add(figure("Threshold", "nominal voltage at which the comparator trips", 74, RowFigures::threshold));
         columns.add(computed("Trip interval in its window",
                 "limits (wide bar) and coverage interval (inner bar) of the trip current; the frame is no-trip to must-trip",
-                230, _ -> new TripCell(), Comparator.comparing(
+                220, _ -> new TripCell(), Comparator.comparing(
                         figures -> figures.trip().map(trip -> trip.limits().width()).orElse(-1.0))));
         columns.add(figure("Reading", "largest reading error at load current", 64, RowFigures::reading));
-        columns.add(figure("Heat", "of the shunts at load current", 70, RowFigures::heat));
+        columns.add(figure("Heat", "of the shunts at load current", 64, RowFigures::heat));
         columns.add(figure("Margin", "smallest distance of a limit from the end of its window, of the half-width", 66,
                 RowFigures::margin));
         for (ChannelField field : ChannelField.values()) {

@@ -66,10 +66,17 @@ final class RowModel {
         }
         for (ChannelField field : ChannelField.values()) {
             Place.Cell place = new Place.Cell(id, field);
-            wrapper(field).set(new CellEntry(state.text(place), state.wrong(place).map(WrongEntry::reason),
+            change(wrapper(field), new CellEntry(state.text(place), state.wrong(place).map(WrongEntry::reason),
                     field.key(channel.get())));
         }
-        figures.set(planned.flatMap(plan -> plan.channel(id))
+        change(figures, planned.flatMap(plan -> plan.channel(id))
                 .map(plan -> RowFigures.of(plan, !plan.channel().equals(channel.get()))).orElse(RowFigures.NONE));
+    }
+
+    /** Leaves equal values alone, so that only cells that change are drawn again. */
+    private static <T> void change(ReadOnlyObjectWrapper<T> property, T value) {
+        if (!value.equals(property.get())) {
+            property.set(value);
+        }
     }
 }
