@@ -2,6 +2,7 @@ package shuntwright.accuracy;
 
 import java.util.ArrayList;
 import java.util.EnumSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 
@@ -10,12 +11,13 @@ import java.util.Set;
  *
  * <p>Ambient, supply, rail and the shunts' temperature coefficients multiply other inputs, so both their ends are
  * enumerated. With those fixed the equation is monotone in each remaining input, and its extreme is at the corner that
- * the signs of the partial derivatives pick. Should a sign differ between the middle of the box and that corner, the
- * input concerned is enumerated too.
+ * the signs of the partial derivatives pick. The derivatives are looked at again in that corner (in the middle of the box
+ * one may be 0): inputs that point the other way there change ends, and if that does not settle, they are enumerated too.
  */
 final class LimitsReader {
 
     private static final Set<Slot> ALWAYS = EnumSet.of(Slot.AMBIENT, Slot.SUPPLY, Slot.RAIL, Slot.SHUNT_DRIFT);
+    private static final int MOST_TURNS = 4;
     private static final int MOST_ENUMERATED = 12;
 
     private final Equation equation;
@@ -65,80 +67,80 @@ final class LimitsReader {
     /** The lowest and the highest corner. */
     List<Corner> extremes() {
         while (true) {
-            Corner[] found = bothEnds();
-            List<Input> turning = new ArrayList<>();
-            turning(found[0], turning);
-            turning(found[1], turning);
+            Set<Input> turning = new LinkedHashSet<>();
+            Corner low = extreme(false, turning);
+            Corner high = extreme(true, turning);
             if (turning.isEmpty() || enumerated.size() >= MOST_ENUMERATED) {
-                return List.of(found);
+                return List.of(low, high);
             }
             for (Input input : turning) {
-                if (monotone.remove(input)) {
-                    enumerated.add(List.of(input));
-                }
+                monotone.remove(input);
+                enumerated.add(List.of(input));
             }
         }
     }
 
-    private Corner[] bothEnds() {
+    private Corner extreme(boolean highest, Set<Input> turning) {
         double[] gradient = new double[nominal.length];
         double[] x = nominal.clone();
-        double[] lowest = nominal;
-        double[] highest = nominal;
-        double low = Double.POSITIVE_INFINITY;
-        double high = Double.NEGATIVE_INFINITY;
+        double[] best = nominal;
+        double bestValue = highest ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
         for (int scenario = 0; scenario < 1 << enumerated.size(); scenario++) {
-            for (Input input : monotone) {
-                int at = Layout.index(input);
-                x[at] = nominal[at];
-            }
-            for (int group = 0; group < enumerated.size(); group++) {
-                boolean upper = (scenario >> group & 1) == 1;
-                for (Input input : enumerated.get(group)) {
-                    x[Layout.index(input)] = upper ? input.limits().max() : input.limits().min();
-                }
-            }
+            start(scenario, x);
             equation.gradient(x, gradient);
-            corner(x, gradient, false);
-            double down = equation.value(x);
-            if (down < low || scenario == 0) {
-                low = down;
-                lowest = x.clone();
+            settle(x, gradient, highest);
+            double value = equation.gradient(x, gradient);
+            int turns = 0;
+            while (settle(x, gradient, highest) && turns < MOST_TURNS) {
+                value = equation.gradient(x, gradient);
+                turns++;
             }
-            corner(x, gradient, true);
-            double up = equation.value(x);
-            if (up > high || scenario == 0) {
-                high = up;
-                highest = x.clone();
+            if (turns == MOST_TURNS) {
+                turning.addAll(unsettled(x, gradient, highest));
+            }
+            if ((highest ? value > bestValue : value < bestValue) || scenario == 0) {
+                bestValue = value;
+                best = x.clone();
             }
         }
-        return new Corner[]{new Corner(lowest, low), new Corner(highest, high)};
+        return new Corner(best, bestValue);
     }
 
-    /** Moves the monotone inputs to the corner that the signs pick. */
-    private void corner(double[] x, double[] gradient, boolean highest) {
+    private void start(int scenario, double[] x) {
         for (Input input : monotone) {
             int at = Layout.index(input);
-            x[at] = gradient[at] > 0 == highest ? input.limits().max() : input.limits().min();
+            x[at] = nominal[at];
+        }
+        for (int group = 0; group < enumerated.size(); group++) {
+            boolean upper = (scenario >> group & 1) == 1;
+            for (Input input : enumerated.get(group)) {
+                x[Layout.index(input)] = upper ? input.limits().max() : input.limits().min();
+            }
         }
     }
 
-    /** Adds the inputs whose derivative has another sign at the corner than the one that led there. */
-    private void turning(Corner corner, List<Input> turning) {
-        double[] gradient = new double[nominal.length];
-        equation.gradient(corner.x, gradient);
-        double[] middle = corner.x.clone();
+    /** Moves each monotone input to the end that its derivative asks for; true when one has moved. */
+    private boolean settle(double[] x, double[] gradient, boolean highest) {
+        boolean moved = false;
         for (Input input : monotone) {
             int at = Layout.index(input);
-            middle[at] = nominal[at];
-        }
-        double[] led = new double[nominal.length];
-        equation.gradient(middle, led);
-        for (Input input : monotone) {
-            int at = Layout.index(input);
-            if (gradient[at] * led[at] < 0 && !turning.contains(input)) {
-                turning.add(input);
+            if (gradient[at] != 0 || x[at] == nominal[at]) {
+                double end = wanted(input, gradient[at], highest);
+                moved |= x[at] != end;
+                x[at] = end;
             }
         }
+        return moved;
+    }
+
+    private static double wanted(Input input, double derivative, boolean highest) {
+        return derivative > 0 == highest ? input.limits().max() : input.limits().min();
+    }
+
+    private List<Input> unsettled(double[] x, double[] gradient, boolean highest) {
+        return monotone.stream().filter(input -> {
+            double derivative = gradient[Layout.index(input)];
+            return derivative != 0 && x[Layout.index(input)] != wanted(input, derivative, highest);
+        }).toList();
     }
 }

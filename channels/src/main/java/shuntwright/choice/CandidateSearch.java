@@ -131,7 +131,7 @@ final class CandidateSearch {
                 double low1 = a.gainHigh[1][j] * (s.noTripHigh[1] + a.error[1][j] + emf);
                 double high1 = a.gainLow[1][j] * (s.mustTripLow[1] - a.error[1][j] - emf);
                 if (low0 <= high0 && low1 <= high1 && Math.max(low0, low1) <= Math.min(high0, high1)
-                        && readings.mayHold(s, j)) {
+                        && (coverage || readings.mayHold(s, j))) {
                     found.add(i, j, low0, high0, low1, high1);
                 } else if (coverage) {
                     addLikely(i, j, found);
@@ -144,14 +144,13 @@ final class CandidateSearch {
     private void addLikely(int i, int j, Candidates found) {
         ShuntTerms s = shunts[i];
         Range window = problem.demand().tripWindow();
-        double target = problem.demand().tripTarget();
         double k = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
-        double shuntVoltage = target * s.resistance;
+        double shuntVoltage = window.max() * s.resistance;
         double relative = 0.98 * k * Math.sqrt(s.variance + amplifiers.gainVariance[j]
                 + amplifiers.errorVariance[j] / (shuntVoltage * shuntVoltage));
-        double low = amplifiers.gain[j] * (window.min() + target * relative) * s.resistance;
-        double high = amplifiers.gain[j] * (window.max() - target * relative) * s.resistance;
-        if (low <= high) {
+        double low = amplifiers.gain[j] * window.min() / (1 - relative) * s.resistance;
+        double high = amplifiers.gain[j] * window.max() / (1 + relative) * s.resistance;
+        if (relative < 1 && low <= high) {
             found.add(i, j, low, high, low, high);
         }
     }

@@ -141,7 +141,8 @@ public final class ChannelPicker {
             List<shuntwright.parts.Comparator> comparators, boolean strict, List<Option> options) {
         ShuntTerms shunt = search.shunt(found.shunt(candidate));
         if (strict && problem.acceptance().basis() == Acceptance.Basis.LIMITS
-                && !roomForAny(problem, search, found, candidate)) {
+                && !roomForAny(problem, search, found, candidate)
+                && comparators.stream().noneMatch(ChannelPicker::feedsBack)) {
             return;
         }
         double base = shunt.cost + search.amplifiers().cost[found.amplifier(candidate)];
@@ -155,7 +156,7 @@ public final class ChannelPicker {
                         * resistors.purchase().unitPriceAt(problem.buildQuantity());
                 if (problem.tap().isPresent()) {
                     double room = tapRoom(window, problem.tap().get(), resistors);
-                    if (!strict || room >= 0) {
+                    if (!strict || tapMayServe(problem, window, resistors, room)) {
                         options.add(new Option(candidate, comparator, Optional.empty(), resistors, own, room));
                     }
                 }
@@ -182,27 +183,73 @@ public final class ChannelPicker {
     /** False only when no pair of this series can serve from this source. */
     private boolean mayServe(ChannelProblem problem, Window window, SourceVoltage source, ResistorSeries resistors,
             double[] ratios) {
-        boolean feedback = window.comparator.hysteresis() instanceof Hysteresis.PositiveFeedback;
-        boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
-        double spread = narrowest(window, source, resistors, ratios);
-        if (coverage) {
-            // Tolerances need not add up here: only the room without the threshold's own spread is certain.
-            double middle = source.voltage().nominal() * (ratios[0] + ratios[1]) / 2;
-            return ratios[0] <= ratios[1] + spread / middle;
+        if (feedsBack(window.comparator) || problem.acceptance().basis() == Acceptance.Basis.COVERAGE) {
+            // The pull-up shares in a threshold with feedback, and uncertainties do not add up as limits do.
+            return true;
         }
-        boolean there = feedback || problem.demand().channel().pins().dividerTop().isPresent()
+        double nominal = source.voltage().nominal();
+        double shift = ownShift(problem, window, resistors, ratios[1] * nominal) / nominal;
+        ratios[0] -= shift;
+        ratios[1] += shift;
+        boolean there = problem.demand().channel().pins().dividerTop().isPresent()
                 || tables.of(resistors).has(ratios[0], ratios[1]);
-        return ratios[0] <= ratios[1] && there && window.releaseMayFit(feedback ? 0 : spread);
+        return ratios[0] <= ratios[1] && there
+                && window.releaseMayFit(narrowest(window, source, resistors, ratios));
     }
 
-    /** The spread of a threshold at the lowest ratio, V. */
+    private static boolean feedsBack(shuntwright.parts.Comparator comparator) {
+        return comparator.hysteresis() instanceof Hysteresis.PositiveFeedback;
+    }
+
+    /** The smallest spread of a threshold between two ratios, V; a concave function of the ratio, so at one of them. */
     private static double narrowest(Window window, SourceVoltage source, ResistorSeries resistors, double[] ratios) {
         double least = Double.POSITIVE_INFINITY;
-        for (int end = 0; end < 2; end++) {
-            least = Math.min(least, window.highest(source, resistors, ratios[0], end)
-                    - window.lowest(source, resistors, ratios[0], end));
+        for (double ratio : ratios) {
+            double k = Math.max(0, Math.min(1, ratio));
+            for (int end = 0; end < 2; end++) {
+                least = Math.min(least,
+                        window.highest(source, resistors, k, end) - window.lowest(source, resistors, k, end));
+            }
         }
         return least;
+    }
+
+    /** Largest shift of a threshold of about that voltage by a bias current that never vanishes, V. */
+    private static double ownShift(ChannelProblem problem, Window window, ResistorSeries resistors, double voltage) {
+        double bias = leastBias(window);
+        if (bias == 0) {
+            return 0;
+        }
+        var pins = problem.demand().channel().pins();
+        double divider = pins.dividerTop().isPresent() && pins.dividerBottom().isPresent()
+                ? bias / (1 / pins.dividerTop().getAsDouble() + 1 / pins.dividerBottom().getAsDouble())
+                : problem.around().rules().biasShare() * voltage;
+        return 1.1 * (divider + bias * senseResistor(problem, window, resistors));
+    }
+
+    private static double leastBias(Window window) {
+        Range bias = window.comparator.inputs().biasCurrent();
+        return bias.contains(0) ? 0 : Math.min(Math.abs(bias.min()), Math.abs(bias.max()));
+    }
+
+    /** Largest R_H that may come to stand before the sense input, Ω. */
+    private static double senseResistor(ChannelProblem problem, Window window, ResistorSeries resistors) {
+        return window.comparator.hysteresis() instanceof Hysteresis.InjectedCurrent
+                ? problem.demand().channel().pins().hysteresisResistor().orElse(resistors.values().max())
+                : 0;
+    }
+
+    /** False only when the tap's threshold cannot serve, whatever the bias current does. */
+    private static boolean tapMayServe(ChannelProblem problem, Window window, ResistorSeries resistors, double room) {
+        if (problem.acceptance().basis() == Acceptance.Basis.COVERAGE) {
+            return true;
+        }
+        Range bias = window.comparator.inputs().biasCurrent();
+        double most = Math.max(Math.abs(bias.min()), Math.abs(bias.max()));
+        double load = problem.tap().orElseThrow() instanceof Threshold.Divider divider
+                ? divider.parallel() * divider.users()
+                : 0;
+        return room >= -(most * load + leastBias(window) * (load + senseResistor(problem, window, resistors)));
     }
 
     private static double tapRoom(Window window, Threshold tap, ResistorSeries resistors) {

@@ -31,13 +31,9 @@ final class Judge {
     boolean accepts(SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
-        boolean byLimits = true;
-        boolean byCoverage = coverage;
         for (ChannelAccuracy.Asked each : asked) {
-            byLimits &= byLimits && each.allowed().contains(accuracy.limits(each));
-            byCoverage &= byCoverage && each.allowed()
-                    .contains(accuracy.combined(each, problem.acceptance().coverage()).interval());
-            if (!byLimits && !byCoverage) {
+            if (!each.allowed().contains(accuracy.limits(each)) && !(coverage && each.allowed()
+                    .contains(accuracy.combined(each, problem.acceptance().coverage()).interval()))) {
                 return false;
             }
         }

@@ -49,7 +49,8 @@ final class Refusals {
         if (!shunts.isEmpty() && !amplifiers.isEmpty()) {
             refusals.pairs(problem, shunts, amplifiers);
         }
-        if (!shunts.isEmpty() && !amplifiers.isEmpty() && !comparators.isEmpty()) {
+        if (!shunts.isEmpty() && !amplifiers.isEmpty() && !comparators.isEmpty()
+                && !problem.resistors().isEmpty()) {
             refusals.thresholds(problem, tables, comparators);
         }
         return refusals.list();

@@ -78,7 +78,7 @@ final class Window {
             case Hysteresis.InjectedCurrent injected -> {
                 boolean fits = true;
                 for (int end = 0; end < 2; end++) {
-                    double least = Math.max(0, low[end] - releaseHigh[end]);
+                    double least = Math.max(0, low[end] - releaseHigh[end] - injected.builtIn().min());
                     double share = (injected.current().max() - injected.current().min())
                             / injected.current().nominal();
                     fits &= thresholdSpread + injected.builtIn().width() + share * least <= releaseHigh[end]

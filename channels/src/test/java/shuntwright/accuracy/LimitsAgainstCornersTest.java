@@ -1,0 +1,94 @@
+package shuntwright.accuracy;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.ArrayList;
+import java.util.EnumSet;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.random.RandomGenerator;
+import java.util.random.RandomGeneratorFactory;
+
+import org.junit.jupiter.api.Test;
+
+import shuntwright.board.Channel;
+import shuntwright.circuit.Threshold;
+import shuntwright.fixture.RandomCircuits;
+import shuntwright.parts.Hysteresis;
+import shuntwright.quantity.Range;
+
+/** The limits reader against every corner of the box, each shunt's temperature coefficient on its own. */
+class LimitsAgainstCornersTest {
+
+    private static final int CIRCUITS = 800;
+    private static final int MOST_INPUTS = 13;
+
+    @Test
+    void limitsAreTheExtremesOfAllCorners() {
+        RandomGenerator random = RandomGeneratorFactory.of("L64X128MixRandom").create(5);
+        Map<String, Integer> tried = new HashMap<>();
+        Set<Slot> uncertain = EnumSet.noneOf(Slot.class);
+        Set<String> kinds = new TreeSet<>();
+        for (int done = 0; done < CIRCUITS;) {
+            RandomCircuits.Drawn drawn = RandomCircuits.sparse(random, random.nextDouble(0.1, 0.5)).next();
+            if (RandomPoints.describe(drawn).inputs().size() > MOST_INPUTS) {
+                continue;
+            }
+            done++;
+            kinds.add(drawn.circuit().comparator().hysteresis().getClass().getSimpleName());
+            kinds.add(drawn.circuit().threshold().getClass().getSimpleName());
+            kinds.add("shunts " + drawn.circuit().shuntCount());
+            kinds.add(drawn.demand().commonMode().nominal() > 0 ? Channel.Side.HIGH.name() : Channel.Side.LOW.name());
+            kinds.add(drawn.circuit().threshold().source().isSupply() ? "from the supply" : "from a reference");
+            for (Input input : RandomPoints.describe(drawn).inputs()) {
+                uncertain.add(input.slot());
+            }
+            for (Outcomes.Named outcome : Outcomes.of(drawn)) {
+                tried.merge(outcome.name(), 1, Integer::sum);
+                compare(drawn, outcome);
+            }
+        }
+        assertThat(tried.values()).allMatch(count -> count > CIRCUITS / 4);
+        assertThat(kinds).contains("shunts 1", "shunts 2", "shunts 3", "HIGH", "LOW", "from the supply",
+                "from a reference", Threshold.DacOutput.class.getSimpleName(), Threshold.Divider.class.getSimpleName(),
+                Hysteresis.InjectedCurrent.class.getSimpleName(), Hysteresis.PositiveFeedback.class.getSimpleName(),
+                Hysteresis.BuiltIn.class.getSimpleName(), Hysteresis.Latched.class.getSimpleName());
+        assertThat(uncertain).containsExactlyInAnyOrder(Slot.values());
+    }
+
+    private static void compare(RandomCircuits.Drawn drawn, Outcomes.Named outcome) {
+        InputDescription description = RandomPoints.describe(drawn);
+        LimitsReader reader = new LimitsReader(outcome.equation(), description);
+        Range corners = corners(outcome.equation(), description);
+        double tolerance = 1e-12 * Math.abs(corners.max());
+        assertThat(reader.lowest().value())
+                .as("lowest %s of %s", outcome.name(), RandomPoints.describe(drawn).inputs())
+                .isCloseTo(corners.min(),
+                        within(tolerance));
+        assertThat(reader.highest().value())
+                .as("highest %s of %s", outcome.name(), RandomPoints.describe(drawn).inputs())
+                .isCloseTo(corners.max(), within(tolerance));
+        assertThat(outcome.equation().value(reader.lowest().x())).isEqualTo(reader.lowest().value());
+    }
+
+    private static Range corners(Equation equation, InputDescription description) {
+        List<Input> inputs = new ArrayList<>(description.inputs());
+        double least = Double.POSITIVE_INFINITY;
+        double most = Double.NEGATIVE_INFINITY;
+        double[] x = description.nominal();
+        for (int corner = 0; corner < 1 << inputs.size(); corner++) {
+            for (int i = 0; i < inputs.size(); i++) {
+                Range limits = inputs.get(i).limits();
+                x[Layout.index(inputs.get(i))] = (corner >> i & 1) == 1 ? limits.max() : limits.min();
+            }
+            double value = equation.value(x);
+            least = Math.min(least, value);
+            most = Math.max(most, value);
+        }
+        return Range.of(least, most);
+    }
+}

@@ -1,0 +1,35 @@
+package shuntwright.accuracy;
+
+import java.util.ArrayList;
+import java.util.List;
+
+import shuntwright.fixture.RandomCircuits;
+
+/** The equations of a drawn circuit by name. */
+final class Outcomes {
+
+    private Outcomes() {
+    }
+
+    /**
+     * An equation with its name.
+     *
+     * @param name     what it gives
+     * @param equation of the channel
+     */
+    record Named(String name, Equation equation) {}
+
+    static List<Named> of(RandomCircuits.Drawn drawn) {
+        ChannelEquations equations = new ChannelEquations(drawn.circuit(), drawn.around());
+        List<Named> all = new ArrayList<>();
+        all.add(new Named("trip", equations.trip()));
+        all.add(new Named("release", equations.release()));
+        all.add(new Named("threshold voltage", new ThresholdVoltage(equations)));
+        if (drawn.around().adc().isPresent()) {
+            double load = drawn.demand().load();
+            all.add(new Named("reading at least current", equations.reading(load / 10)));
+            all.add(new Named("reading at load", equations.reading(load)));
+        }
+        return all;
+    }
+}
