@@ -58,6 +58,61 @@ public record Board(String name, String description, List<String> partsFiles, in
                 taps, zones, heatLimit, acceptance, rules, newChannels);
     }
 
+    public Board withName(String newName) {
+        return new Board(newName, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withPartsFiles(List<String> newPartsFiles) {
+        return new Board(name, description, newPartsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withBuildQuantity(int newBuildQuantity) {
+        return new Board(name, description, partsFiles, newBuildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withAmbient(Range newAmbient) {
+        return new Board(name, description, partsFiles, buildQuantity, newAmbient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withSupply(SenseSupply newSupply) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, newSupply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withReferences(List<BoardReference> newReferences) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, newReferences, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withAlertLines(List<AlertLine> newAlertLines) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, newAlertLines,
+                taps, zones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withZones(List<Zone> newZones) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, newZones, heatLimit, acceptance, rules, channels);
+    }
+
+    public Board withHeatLimit(OptionalDouble newHeatLimit) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, newHeatLimit, acceptance, rules, channels);
+    }
+
+    public Board withAcceptance(Acceptance newAcceptance) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, newAcceptance, rules, channels);
+    }
+
+    public Board withRules(DesignRules newRules) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, newRules, channels);
+    }
+
     public Optional<Tap> tap(String wanted) {
         return taps.stream().filter(tap -> tap.name().equals(wanted)).findFirst();
     }

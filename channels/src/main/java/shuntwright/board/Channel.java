@@ -134,4 +134,29 @@ public record Channel(String name, String note, Optional<Spread> rail, Side side
         return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone, diversity,
                 stress, newPins);
     }
+
+    public Channel withNote(String newNote) {
+        return new Channel(name, newNote, rail, side, currents, release, reading, threshold, alertLine, zone,
+                diversity, stress, pins);
+    }
+
+    public Channel withSide(Side newSide) {
+        return new Channel(name, note, rail, newSide, currents, release, reading, threshold, alertLine, zone,
+                diversity, stress, pins);
+    }
+
+    public Channel withAlertLine(Optional<String> newAlertLine) {
+        return new Channel(name, note, rail, side, currents, release, reading, threshold, newAlertLine, zone,
+                diversity, stress, pins);
+    }
+
+    public Channel withZone(Optional<String> newZone) {
+        return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, newZone,
+                diversity, stress, pins);
+    }
+
+    public Channel withDiversity(double newDiversity) {
+        return new Channel(name, note, rail, side, currents, release, reading, threshold, alertLine, zone,
+                newDiversity, stress, pins);
+    }
 }

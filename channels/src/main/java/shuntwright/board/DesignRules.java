@@ -33,4 +33,19 @@ public record DesignRules(int parallelShunts, double powerMargin, double divider
                     + "above 0 to 1, divider current > 0, bias share between 0 and 1, heat step, gradient and input resistance ≥ 0");
         }
     }
+
+    public DesignRules withParallelShunts(int newParallelShunts) {
+        return new DesignRules(newParallelShunts, powerMargin, dividerCurrent, biasShare, resistors, heatStep,
+                shuntGradient, inputResistance, inputMismatch);
+    }
+
+    public DesignRules withPowerMargin(double newPowerMargin) {
+        return new DesignRules(parallelShunts, newPowerMargin, dividerCurrent, biasShare, resistors, heatStep,
+                shuntGradient, inputResistance, inputMismatch);
+    }
+
+    public DesignRules withHeatStep(double newHeatStep) {
+        return new DesignRules(parallelShunts, powerMargin, dividerCurrent, biasShare, resistors, newHeatStep,
+                shuntGradient, inputResistance, inputMismatch);
+    }
 }

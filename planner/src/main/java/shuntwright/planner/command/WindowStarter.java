@@ -5,13 +5,12 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import java.util.logging.Logger;
+
+import shuntwright.planner.window.NoWindow;
+import shuntwright.planner.window.WindowApp;
 
 /** Opens the window where there is a display. */
 final class WindowStarter {
-    /** Held here so that it is not collected: JavaFX warns when it runs from the class path, which is meant so. */
-    private static final Logger JAVAFX = Logger.getLogger("javafx");
-
     private WindowStarter() {
     }
 
@@ -20,8 +19,12 @@ final class WindowStarter {
         if (!display(System.getenv(), System.getProperty("os.name", ""))) {
             return Optional.of("There is no display for the window (neither DISPLAY nor WAYLAND_DISPLAY is set).");
         }
-        JAVAFX.setFilter(each -> !String.valueOf(each.getMessage()).startsWith("Unsupported JavaFX configuration"));
-        return Optional.of("This build has no window: " + board + parts);
+        try {
+            WindowApp.launch(board, parts);
+            return Optional.empty();
+        } catch (NoWindow problem) {
+            return Optional.of(String.valueOf(problem.getMessage()));
+        }
     }
 
     /** Whether a window can be expected to open: always, except on a Unix-like desktop's system without a display. */

@@ -1,0 +1,30 @@
+package shuntwright.planner.window.table;
+
+import javafx.css.PseudoClass;
+import javafx.scene.control.TableCell;
+
+import org.jspecify.annotations.Nullable;
+
+/** A computed figure; faded while it belongs to an earlier state of the channel. */
+final class FigureCell extends TableCell<RowModel, RowFigures> {
+    private static final PseudoClass STALE = PseudoClass.getPseudoClass("stale");
+
+    private final java.util.function.Function<RowFigures, Figure> which;
+
+    FigureCell(java.util.function.Function<RowFigures, Figure> which) {
+        this.which = which;
+        getStyleClass().addAll("figure-cell", "computed");
+    }
+
+    @Override
+    protected void updateItem(@Nullable RowFigures figures, boolean empty) {
+        super.updateItem(figures, empty);
+        if (empty || figures == null) {
+            setText(null);
+            pseudoClassStateChanged(STALE, false);
+        } else {
+            setText(which.apply(figures).text());
+            pseudoClassStateChanged(STALE, figures.stale());
+        }
+    }
+}

@@ -1,0 +1,27 @@
+package shuntwright.planner.work;
+
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+
+/** The window's background threads, each with a name and a purpose. */
+public final class Threads implements AutoCloseable {
+    private final ExecutorService planning = Executors
+            .newSingleThreadExecutor(Thread.ofPlatform().name("planning").daemon().factory());
+    private final ExecutorService files = Executors
+            .newSingleThreadExecutor(Thread.ofPlatform().name("files").factory());
+
+    public ExecutorService planning() {
+        return planning;
+    }
+
+    /** Not a daemon: a save that has begun is finished even when the window closes. */
+    public ExecutorService files() {
+        return files;
+    }
+
+    @Override
+    public void close() {
+        planning.shutdownNow();
+        files.shutdown();
+    }
+}

@@ -1,0 +1,53 @@
+package shuntwright.planner.window;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import javafx.application.ColorScheme;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
+
+import org.junit.jupiter.api.Test;
+
+import shuntwright.planner.HandMadeBoards;
+import shuntwright.planner.Sessions;
+import shuntwright.planner.entry.ChannelField;
+import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.session.Place;
+
+class StatusModelTest {
+    private final BoardSession session = Sessions.of(HandMadeBoards.boat());
+    private final StatusModel status = new StatusModel(session);
+
+    @Test
+    void countsTheAcceptedChannels() {
+        assertThat(status.textBinding().get()).isEqualTo("2 of 5 channels accepted");
+    }
+
+    @Test
+    void whatWasDoneStaysUntilTheNextEdit() {
+        status.done("saved boat.board.json");
+        assertThat(status.textBinding().get()).isEqualTo("Saved boat.board.json");
+        session.enter(new Place.Cell(0, ChannelField.LOAD), "19");
+        assertThat(status.textBinding().get()).isEqualTo("2 of 5 channels accepted");
+    }
+
+    @Test
+    void wrongEntriesAreCountedWithTheReasonOfTheLast() {
+        assertThat(status.wrongBinding().get()).isEmpty();
+        session.enter(new Place.Cell(0, ChannelField.SIDE), "middle");
+        assertThat(status.wrongBinding().get()).startsWith("1 wrong entry: ").contains("high or low");
+        session.enter(new Place.Cell(1, ChannelField.LOAD), "-1");
+        assertThat(status.wrongBinding().get()).startsWith("2 wrong entries, the last: ").contains("above 0 A");
+    }
+
+    @Test
+    void theLookFollowsTheSystemUnlessChosen() {
+        ObjectProperty<ColorScheme> system = new SimpleObjectProperty<>(ColorScheme.LIGHT);
+        ThemeChoice choice = new ThemeChoice(system);
+        assertThat(choice.themeProperty().get()).isEqualTo(Theme.LIGHT);
+        system.set(ColorScheme.DARK);
+        assertThat(choice.themeProperty().get()).isEqualTo(Theme.DARK);
+        choice.wishProperty().set(ThemeChoice.Wish.LIGHT);
+        assertThat(choice.themeProperty().get()).isEqualTo(Theme.LIGHT);
+    }
+}

@@ -1,0 +1,121 @@
+package shuntwright.planner.window;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.nio.file.Path;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.Set;
+import java.util.concurrent.TimeUnit;
+
+import javafx.application.ColorScheme;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.scene.control.TabPane;
+import javafx.scene.image.WritableImage;
+import javafx.stage.Stage;
+
+import org.junit.jupiter.api.extension.ExtendWith;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
+import org.testfx.api.FxRobot;
+import org.testfx.framework.junit5.ApplicationExtension;
+import org.testfx.framework.junit5.Start;
+import org.testfx.framework.junit5.Stop;
+import org.testfx.util.WaitForAsyncUtils;
+
+import shuntwright.plan.BoardPlanner;
+import shuntwright.planner.session.Questions.Kind;
+import shuntwright.planner.window.dialog.Choosers;
+
+/**
+ * The window with a demo board and its real plan. With -Dshuntwright.pictures=FOLDER the pictures of the documentation
+ * are written there.
+ */
+@ExtendWith(ApplicationExtension.class)
+@SuppressWarnings("NullAway.Init") // set before each test
+class WindowPictureTest {
+    private OpenWindow window;
+    private Stage stage;
+
+    @Start
+    void start(Stage shown) {
+        stage = shown;
+        Path root = Path.of(System.getProperty("shuntwright.root", "."));
+        Choosers none = new Choosers() {
+            @Override
+            public Optional<Path> open(Kind kind) {
+                return Optional.empty();
+            }
+
+            @Override
+            public Optional<Path> save(Kind kind, Path suggestion) {
+                return Optional.empty();
+            }
+        };
+        window = new OpenWindow(shown, new BoardPlanner()::plan, none, new SimpleObjectProperty<>(ColorScheme.LIGHT),
+                List.of(root));
+        window.show();
+        stage.setWidth(1500);
+        stage.setHeight(900);
+    }
+
+    @Stop
+    void stop() {
+        window.release();
+    }
+
+    private void settle() throws Exception {
+        WaitForAsyncUtils.waitFor(120, TimeUnit.SECONDS,
+                () -> WaitForAsyncUtils.asyncFx(() -> window.session().currentBinding().get()).get());
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    private static Set<Integer> colours(WritableImage image) {
+        Set<Integer> colours = new HashSet<>();
+        for (int y = 0; y < image.getHeight(); y += 3) {
+            for (int x = 0; x < image.getWidth(); x += 3) {
+                colours.add(image.getPixelReader().getArgb(x, y));
+            }
+        }
+        return colours;
+    }
+
+    @ParameterizedTest
+    @EnumSource(value = ThemeChoice.Wish.class, names = {"LIGHT", "DARK"})
+    void theDemoBoardIsDrawn(ThemeChoice.Wish wish, FxRobot robot) throws Exception {
+        Path root = Path.of(System.getProperty("shuntwright.root", "."));
+        robot.interact(() -> {
+            window.themes().wishProperty().set(wish);
+            window.documents().openCopy(root.resolve("demo-boards/sledge-wren.board.json"));
+        });
+        settle();
+        robot.interact(() -> window.session().selectionProperty().set(List.of(7)));
+        WaitForAsyncUtils.waitForFxEvents();
+        write(robot, wish, "window");
+        for (int tab = 1; tab < 3; tab++) {
+            int shown = tab;
+            robot.interact(() -> robot.lookup("#tabs").queryAs(TabPane.class).getSelectionModel().select(shown));
+            WaitForAsyncUtils.waitForFxEvents();
+            write(robot, wish, tab == 1 ? "budget" : "parts");
+        }
+        WritableImage[] image = new WritableImage[1];
+        robot.interact(() -> image[0] = stage.getScene().snapshot(null));
+        assertThat(colours(image[0])).as("a drawn window has text, lines and verdicts in many colours")
+                .hasSizeGreaterThan(50);
+        int corner = image[0].getPixelReader().getArgb(4, (int) image[0].getHeight() - 4) & 0xff;
+        assertThat(corner).as("brightness of the window's corner").satisfies(
+                wish == ThemeChoice.Wish.DARK
+                        ? (Integer dark) -> assertThat(dark).isLessThan(80)
+                        : (Integer light) -> assertThat(light).isGreaterThan(200));
+    }
+
+    private void write(FxRobot robot, ThemeChoice.Wish wish, String name) {
+        String folder = System.getProperty("shuntwright.pictures", "");
+        if (!folder.isEmpty()) {
+            robot.interact(() -> WindowPictures.write(stage.getScene(),
+                    Path.of(folder, name + "-" + wish.name().toLowerCase(Locale.ROOT) + ".png")));
+        }
+    }
+}
