@@ -58,11 +58,14 @@ class CuresTest {
     }
 
     private static Board boardOf(Channel channel) {
+        return boardOf(channel, OptionalDouble.of(1.1));
+    }
+
+    private static Board boardOf(Channel channel, OptionalDouble tapVoltage) {
         return TrialBoards.withTaps(board(channel, channel("other", 3).withThreshold(
                 new ThresholdDemand.SharedTap("tap"))),
                 new Tap("tap", new Source.OfReference("quiet"),
-                        new Tap.Kind.Divider(OptionalDouble.empty(), OptionalDouble.empty()),
-                        OptionalDouble.of(1.1)));
+                        new Tap.Kind.Divider(OptionalDouble.empty(), OptionalDouble.empty()), tapVoltage));
     }
 
     @Test
@@ -70,7 +73,8 @@ class CuresTest {
         Set<Cure.Lever> cured = EnumSet.noneOf(Cure.Lever.class);
         int verified = 0;
         for (int seed = 0; seed < 40; seed++) {
-            Board board = boardOf(failing(new SplittableRandom(seed)));
+            Board board = boardOf(failing(new SplittableRandom(seed)),
+                    seed % 2 == 0 ? OptionalDouble.of(1.1) : OptionalDouble.empty());
             ChannelPlan plan = only(plan(board));
             if (plan.accepted()) {
                 assertThat(plan.cures()).isEmpty();
@@ -90,7 +94,7 @@ class CuresTest {
                 }
             }
         }
-        assertThat(verified).isGreaterThan(40);
+        assertThat(verified).isGreaterThan(30);
         assertThat(cured).contains(Cure.Lever.WINDOW, Cure.Lever.OTHER_SHUNT, Cure.Lever.OTHER_AMPLIFIER,
                 Cure.Lever.SOURCE);
     }
@@ -98,7 +102,7 @@ class CuresTest {
     @Test
     void windowsAreWidenedAsLittleAsNeedBe() {
         int compared = 0;
-        for (int seed = 0; seed < 40; seed++) {
+        for (int seed = 0; seed < 16; seed++) {
             Board board = boardOf(failing(new SplittableRandom(seed)));
             Channel channel = board.channels().getFirst();
             for (Cure cure : only(plan(board)).cures()) {
@@ -117,7 +121,7 @@ class CuresTest {
                 compared++;
             }
         }
-        assertThat(compared).isGreaterThan(20);
+        assertThat(compared).isGreaterThan(10);
     }
 
     private static List<Cure> cures(Board board, Cure.Lever lever) {
