@@ -95,6 +95,11 @@ final class BoardContext {
                 .toList();
     }
 
+    /** The same with another board. */
+    BoardContext with(Board other) {
+        return new BoardContext(other, catalogue, pullUps);
+    }
+
     Board board() {
         return board;
     }

@@ -218,6 +218,11 @@ public final class BoardPlanner {
         return numbers;
     }
 
+    /** The threshold of the tap that a channel uses on this board; empty where it uses none. */
+    Optional<Threshold> tap(BoardContext context, Channel channel) {
+        return threshold(channel, taps(context));
+    }
+
     static Optional<Threshold> threshold(Channel channel, List<TapPlan> taps) {
         return channel.threshold() instanceof ThresholdDemand.SharedTap(String name)
                 ? taps.stream().filter(each -> each.tap().name().equals(name)).findFirst()

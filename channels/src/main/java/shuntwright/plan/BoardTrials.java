@@ -49,8 +49,19 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
         return switch (Demand.of(edited)) {
             case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(edited, missing);
             case Demand.Reading.Complete(Demand demand) ->
-                planner.solve(where.problem(demand, tap(edited)), Set.of());
+                planner.solve(where.problem(demand, chosenAnew(where, edited)), Set.of());
         };
+    }
+
+    /** The tap's threshold as the edited board would choose it; a tap without a given voltage follows its channels. */
+    private Optional<Threshold> chosenAnew(BoardContext where, Channel edited) {
+        if (tap(edited).isEmpty()) {
+            return Optional.empty();
+        }
+        Channel now = problem.demand().channel();
+        Board board = where.board();
+        return planner.tap(where.with(board.withChannels(
+                board.channels().stream().map(each -> each.equals(now) ? edited : each).toList())), edited);
     }
 
     @Override
