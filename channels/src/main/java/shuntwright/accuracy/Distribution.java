@@ -1,5 +1,6 @@
 package shuntwright.accuracy;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /** The probability distribution assigned to an input's limits (JCGM 100:2008, 4.3). */
@@ -12,7 +13,7 @@ public sealed interface Distribution {
     record Normal(double k) implements Distribution {
         /** @throws IllegalArgumentException unless k &gt; 0 */
         public Normal {
-            if (!(k > 0)) {
+            if (!Finite.positive(k)) {
                 throw new IllegalArgumentException("k must be > 0, got " + k);
             }
         }

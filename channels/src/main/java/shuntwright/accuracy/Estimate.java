@@ -1,5 +1,7 @@
 package shuntwright.accuracy;
 
+import shuntwright.quantity.Finite;
+
 /**
  * What JCGM 100 needs to know of an input.
  *
@@ -11,7 +13,7 @@ public record Estimate(double value, double standard, double degreesOfFreedom) {
 
     /** @throws IllegalArgumentException unless standard ≥ 0 and degreesOfFreedom &gt; 0 */
     public Estimate {
-        if (!(standard >= 0) || !(degreesOfFreedom > 0) || !Double.isFinite(value)) {
+        if (!Finite.notNegative(standard) || !(degreesOfFreedom > 0) || !Double.isFinite(value)) {
             throw new IllegalArgumentException("an estimate needs a finite value, standard uncertainty ≥ 0 and degrees "
                     + "of freedom > 0, got " + value + ", " + standard + ", " + degreesOfFreedom);
         }

@@ -1,5 +1,7 @@
 package shuntwright.board;
 
+import shuntwright.quantity.Finite;
+
 /**
  * The converter that reads the amplifier outputs; its full scale is its source's voltage.
  *
@@ -13,7 +15,8 @@ public record Adc(Source source, int bits, double gainError, double offset, doub
 
     /** @throws IllegalArgumentException unless 6 ≤ bits ≤ 24 and the limits are ≥ 0 */
     public Adc {
-        if (bits < 6 || bits > 24 || !(gainError >= 0 && gainError < 1) || !(offset >= 0) || !(nonlinearity >= 0)) {
+        if (bits < 6 || bits > 24 || !(gainError >= 0 && gainError < 1) || !Finite.notNegative(offset)
+                || !Finite.notNegative(nonlinearity)) {
             throw new IllegalArgumentException("an ADC needs 6 to 24 bits and error limits ≥ 0, got " + bits + ", "
                     + gainError + ", " + offset + ", " + nonlinearity);
         }

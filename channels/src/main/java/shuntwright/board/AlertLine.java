@@ -3,6 +3,7 @@ package shuntwright.board;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Toleranced;
 
 /**
@@ -22,8 +23,10 @@ public record AlertLine(String name, Optional<Toleranced> voltage, OptionalDoubl
 
     /** @throws IllegalArgumentException unless resistance and rise time are &gt; 0 and the others ≥ 0 */
     public AlertLine {
-        if (!(pullUp.orElse(1) > 0) || !(inputHigh.orElse(0) >= 0) || !(inputLow.orElse(0) >= 0)
-                || !(inputLeakage >= 0) || !(capacitance >= 0) || !(riseTime.orElse(1) > 0)) {
+        if (!Finite.positive(pullUp.orElse(1)) || !Finite.notNegative(inputHigh.orElse(0))
+                || !Finite.notNegative(inputLow.orElse(0))
+                || !Finite.notNegative(inputLeakage) || !Finite.notNegative(capacitance)
+                || !Finite.positive(riseTime.orElse(1))) {
             throw new IllegalArgumentException("alert line " + name + " needs a pull-up and rise time > 0, levels, "
                     + "leakage and capacitance ≥ 0");
         }

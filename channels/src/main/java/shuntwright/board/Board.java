@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -33,10 +34,13 @@ public record Board(String name, String description, List<String> partsFiles, in
     /** Common practice for equipment in a housing. */
     public static final Range DEFAULT_AMBIENT = Range.of(-20, 60);
 
-    /** @throws IllegalArgumentException unless buildQuantity ≥ 1 */
+    /** @throws IllegalArgumentException unless buildQuantity ≥ 1 and the heat limit is &gt; 0 */
     public Board {
         if (buildQuantity < 1) {
             throw new IllegalArgumentException("build quantity must be at least 1, got " + buildQuantity);
+        }
+        if (!Finite.positive(heatLimit.orElse(1))) {
+            throw new IllegalArgumentException("the board's heat limit must be > 0 W, got " + heatLimit);
         }
         partsFiles = List.copyOf(partsFiles);
         references = List.copyOf(references);

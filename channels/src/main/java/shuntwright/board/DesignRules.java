@@ -2,6 +2,8 @@ package shuntwright.board;
 
 import java.util.Optional;
 
+import shuntwright.quantity.Finite;
+
 /**
  * Rules that hold for every channel of the board.
  *
@@ -26,9 +28,10 @@ public record DesignRules(int parallelShunts, double powerMargin, double divider
     /** @throws IllegalArgumentException unless each is within the range stated above */
     public DesignRules {
         if (parallelShunts < 1 || parallelShunts > 8 || !(powerMargin > 0 && powerMargin <= 1)
-                || !(dividerCurrent > 0) || !(biasShare > 0 && biasShare < 1) || !(heatStep >= 0)
-                || !(shuntGradient >= 0)
-                || !(inputResistance >= 0) || !(inputMismatch >= 0 && inputMismatch < 1)) {
+                || !Finite.positive(dividerCurrent) || !(biasShare > 0 && biasShare < 1)
+                || !Finite.notNegative(heatStep)
+                || !Finite.notNegative(shuntGradient)
+                || !Finite.notNegative(inputResistance) || !(inputMismatch >= 0 && inputMismatch < 1)) {
             throw new IllegalArgumentException("design rules out of range: 1 to 8 shunts in parallel, power margin "
                     + "above 0 to 1, divider current > 0, bias share between 0 and 1, heat step, gradient and input resistance ≥ 0");
         }

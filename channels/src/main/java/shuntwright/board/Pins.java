@@ -4,6 +4,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
+import shuntwright.quantity.Finite;
+
 /**
  * Parts and values the user has fixed; empty ones are free.
  *
@@ -26,8 +28,9 @@ public record Pins(Optional<String> shunt, OptionalInt shuntCount, Optional<Stri
 
     /** @throws IllegalArgumentException unless counts are ≥ 1 and resistances &gt; 0 */
     public Pins {
-        if (shuntCount.orElse(1) < 1 || !(dividerTop.orElse(1) > 0) || !(dividerBottom.orElse(1) > 0)
-                || !(hysteresisResistor.orElse(1) > 0)) {
+        if (shuntCount.orElse(1) < 1 || !Finite.positive(dividerTop.orElse(1))
+                || !Finite.positive(dividerBottom.orElse(1))
+                || !Finite.positive(hysteresisResistor.orElse(1))) {
             throw new IllegalArgumentException("pinned counts must be at least 1 and resistances > 0");
         }
     }

@@ -1,5 +1,6 @@
 package shuntwright.board;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Tolerance;
 import shuntwright.quantity.Toleranced;
 
@@ -16,7 +17,7 @@ public record SenseSupply(Toleranced voltage, double availableCurrent) {
 
     /** @throws IllegalArgumentException unless voltage and current are &gt; 0 */
     public SenseSupply {
-        if (!(voltage.min() > 0) || !(availableCurrent > 0)) {
+        if (!(voltage.min() > 0) || !Finite.positive(availableCurrent)) {
             throw new IllegalArgumentException("the sense supply needs voltage and available current > 0");
         }
     }

@@ -2,6 +2,8 @@ package shuntwright.board;
 
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
+
 /**
  * A threshold that several channels share, so that all of them trip at one voltage.
  *
@@ -24,7 +26,7 @@ public record Tap(String name, Source source, Kind kind, OptionalDouble voltage)
         record Divider(OptionalDouble top, OptionalDouble bottom) implements Kind {
             /** @throws IllegalArgumentException unless both are &gt; 0 */
             public Divider {
-                if (!(top.orElse(1) > 0) || !(bottom.orElse(1) > 0)) {
+                if (!Finite.positive(top.orElse(1)) || !Finite.positive(bottom.orElse(1))) {
                     throw new IllegalArgumentException("divider resistances must be > 0");
                 }
             }
@@ -41,8 +43,8 @@ public record Tap(String name, Source source, Kind kind, OptionalDouble voltage)
         record Dac(int bits, double gainError, double offset, double nonlinearity) implements Kind {
             /** @throws IllegalArgumentException unless 4 ≤ bits ≤ 20 and the limits are ≥ 0 */
             public Dac {
-                if (bits < 4 || bits > 20 || !(gainError >= 0 && gainError < 1) || !(offset >= 0)
-                        || !(nonlinearity >= 0)) {
+                if (bits < 4 || bits > 20 || !(gainError >= 0 && gainError < 1) || !Finite.notNegative(offset)
+                        || !Finite.notNegative(nonlinearity)) {
                     throw new IllegalArgumentException("a DAC needs 4 to 20 bits and error limits ≥ 0");
                 }
             }
@@ -51,7 +53,7 @@ public record Tap(String name, Source source, Kind kind, OptionalDouble voltage)
 
     /** @throws IllegalArgumentException unless the wanted voltage is &gt; 0 */
     public Tap {
-        if (!(voltage.orElse(1) > 0)) {
+        if (!Finite.positive(voltage.orElse(1))) {
             throw new IllegalArgumentException("tap " + name + " needs a voltage > 0, got " + voltage);
         }
     }

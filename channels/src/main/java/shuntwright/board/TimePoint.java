@@ -1,5 +1,7 @@
 package shuntwright.board;
 
+import shuntwright.quantity.Finite;
+
 /**
  * A point of a current over time.
  *
@@ -10,7 +12,7 @@ public record TimePoint(double time, double current) {
 
     /** @throws IllegalArgumentException unless both are finite and ≥ 0 */
     public TimePoint {
-        if (!(time >= 0) || !(current >= 0) || Double.isInfinite(time) || Double.isInfinite(current)) {
+        if (!Finite.notNegative(time) || !Finite.notNegative(current)) {
             throw new IllegalArgumentException("a point needs time and current ≥ 0, got " + time + ", " + current);
         }
     }

@@ -2,6 +2,8 @@ package shuntwright.board;
 
 import java.util.List;
 
+import shuntwright.quantity.Finite;
+
 /** How long an output survives a current. */
 public sealed interface Withstand {
 
@@ -9,7 +11,7 @@ public sealed interface Withstand {
     record Energy(double value) implements Withstand {
         /** @throws IllegalArgumentException unless value &gt; 0 */
         public Energy {
-            if (!(value > 0) || Double.isInfinite(value)) {
+            if (!Finite.positive(value)) {
                 throw new IllegalArgumentException("an I²t value must be > 0, got " + value);
             }
         }
@@ -31,7 +33,7 @@ public sealed interface Withstand {
     record Conductor(double area, double constant) implements Withstand {
         /** @throws IllegalArgumentException unless both are &gt; 0 */
         public Conductor {
-            if (!(area > 0) || !(constant > 0)) {
+            if (!Finite.positive(area) || !Finite.positive(constant)) {
                 throw new IllegalArgumentException("a conductor needs area and k > 0, got " + area + ", " + constant);
             }
         }

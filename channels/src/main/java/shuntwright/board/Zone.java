@@ -2,6 +2,8 @@ package shuntwright.board;
 
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
+
 /**
  * An area of the board.
  *
@@ -12,7 +14,7 @@ public record Zone(String name, OptionalDouble heatLimit) {
 
     /** @throws IllegalArgumentException unless the limit is &gt; 0 */
     public Zone {
-        if (!(heatLimit.orElse(1) > 0)) {
+        if (!Finite.positive(heatLimit.orElse(1))) {
             throw new IllegalArgumentException("zone " + name + " needs a heat limit > 0, got " + heatLimit);
         }
     }

@@ -1,5 +1,6 @@
 package shuntwright.circuit;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Toleranced;
 
 /** The parts around the comparator that make its hysteresis. */
@@ -12,7 +13,7 @@ public sealed interface HysteresisNetwork {
     record SenseResistor(double resistance) implements HysteresisNetwork {
         /** @throws IllegalArgumentException unless resistance &gt; 0 */
         public SenseResistor {
-            if (!(resistance > 0)) {
+            if (!Finite.positive(resistance)) {
                 throw new IllegalArgumentException("R_H must be > 0, got " + resistance);
             }
         }
@@ -31,7 +32,7 @@ public sealed interface HysteresisNetwork {
                 HysteresisNetwork {
         /** @throws IllegalArgumentException unless resistances are &gt; 0 */
         public Feedback {
-            if (!(resistance > 0) || !(pullUp > 0)) {
+            if (!Finite.positive(resistance) || !Finite.positive(pullUp)) {
                 throw new IllegalArgumentException("R_F and R_PU must be > 0, got " + resistance + ", " + pullUp);
             }
         }

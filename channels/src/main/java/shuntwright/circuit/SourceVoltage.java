@@ -1,6 +1,7 @@
 package shuntwright.circuit;
 
 import shuntwright.board.Source;
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Toleranced;
 
 /**
@@ -16,7 +17,8 @@ public record SourceVoltage(Source source, Toleranced voltage, double drift, dou
 
     /** @throws IllegalArgumentException unless the voltage is &gt; 0 and the limits ≥ 0 */
     public SourceVoltage {
-        if (!(voltage.min() > 0) || !(drift >= 0) || !(ageing >= 0) || !(loadDrop >= 0)) {
+        if (!(voltage.min() > 0) || !Finite.notNegative(drift) || !Finite.notNegative(ageing)
+                || !Finite.notNegative(loadDrop)) {
             throw new IllegalArgumentException("a source needs a voltage > 0 and limits ≥ 0, got " + voltage);
         }
     }

@@ -1,6 +1,7 @@
 package shuntwright.circuit;
 
 import shuntwright.board.Tap;
+import shuntwright.quantity.Finite;
 
 /** How a channel's threshold voltage is made. */
 public sealed interface Threshold {
@@ -19,7 +20,7 @@ public sealed interface Threshold {
     record Divider(SourceVoltage source, double top, double bottom, String tap, int users) implements Threshold {
         /** @throws IllegalArgumentException unless resistances are &gt; 0 and users ≥ 1 */
         public Divider {
-            if (!(top > 0) || !(bottom > 0) || users < 1) {
+            if (!Finite.positive(top) || !Finite.positive(bottom) || users < 1) {
                 throw new IllegalArgumentException("a divider needs resistances > 0 and at least one user, got " + top
                         + ", " + bottom + ", " + users);
             }
@@ -45,6 +46,14 @@ public sealed interface Threshold {
      * @param tap    name of the tap
      */
     record DacOutput(SourceVoltage source, Tap.Kind.Dac dac, int code, String tap) implements Threshold {
+        /** @throws IllegalArgumentException unless 0 ≤ code &lt; 2^bits */
+        public DacOutput {
+            if (code < 0 || code >= 1 << dac.bits()) {
+                throw new IllegalArgumentException("a DAC of " + dac.bits() + " bits needs a code from 0 to "
+                        + ((1 << dac.bits()) - 1) + ", got " + code);
+            }
+        }
+
         /** Nominal voltage, V. */
         public double openVoltage() {
             return source.voltage().nominal() * code / (double) (1 << dac.bits());

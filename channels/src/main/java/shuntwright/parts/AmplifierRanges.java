@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -17,7 +18,8 @@ public record AmplifierRanges(Range commonMode, double differential, double surv
 
     /** @throws IllegalArgumentException unless 0 &lt; differential ≤ survival and headrooms are ≥ 0 */
     public AmplifierRanges {
-        if (!(differential > 0) || !(survival >= differential) || !(outputHeadroom >= 0) || !(outputLow >= 0)) {
+        if (!Finite.positive(differential) || !(survival >= differential) || Double.isInfinite(survival)
+                || !Finite.notNegative(outputHeadroom) || !Finite.notNegative(outputLow)) {
             throw new IllegalArgumentException(
                     "amplifier ranges need 0 < differential ≤ survival and headrooms ≥ 0, got " + differential + ", "
                             + survival + ", " + outputHeadroom + ", " + outputLow);

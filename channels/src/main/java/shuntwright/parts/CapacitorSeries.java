@@ -1,6 +1,7 @@
 package shuntwright.parts;
 
 import shuntwright.quantity.ESeries;
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Tolerance;
 
@@ -21,7 +22,7 @@ public record CapacitorSeries(String partNumber, String description, ESeries ser
 
     /** @throws IllegalArgumentException unless values and voltage are &gt; 0 */
     public CapacitorSeries {
-        if (!(values.min() > 0) || !(voltage > 0)) {
+        if (!(values.min() > 0) || !Finite.positive(voltage)) {
             throw new IllegalArgumentException("capacitor series " + partNumber + " needs values and voltage > 0");
         }
     }

@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -23,7 +24,7 @@ public record Comparator(String partNumber, String description, ComparatorInputs
 
     /** @throws IllegalArgumentException unless supply current and delay are ≥ 0 and sections ≥ 1 */
     public Comparator {
-        if (!(supplyCurrent >= 0) || !(delay.min() >= 0) || sections < 1) {
+        if (!Finite.notNegative(supplyCurrent) || !(delay.min() >= 0) || sections < 1) {
             throw new IllegalArgumentException(
                     "comparator " + partNumber + " needs supply current and delay ≥ 0 and at least one section");
         }

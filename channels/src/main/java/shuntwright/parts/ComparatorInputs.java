@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -15,7 +16,8 @@ public record ComparatorInputs(double offset, double offsetDrift, Range biasCurr
 
     /** @throws IllegalArgumentException unless offset and drift are ≥ 0 and the others finite */
     public ComparatorInputs {
-        if (!(offset >= 0) || !(offsetDrift >= 0) || !Double.isFinite(lowest) || !Double.isFinite(headroom)) {
+        if (!Finite.notNegative(offset) || !Finite.notNegative(offsetDrift) || !Double.isFinite(lowest)
+                || !Double.isFinite(headroom)) {
             throw new IllegalArgumentException("comparator inputs need offset and drift ≥ 0, got " + offset + ", "
                     + offsetDrift + ", " + lowest + ", " + headroom);
         }

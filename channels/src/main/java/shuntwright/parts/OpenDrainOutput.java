@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -14,7 +15,8 @@ public record OpenDrainOutput(Range lowLevel, double sinkCurrent, double leakage
 
     /** @throws IllegalArgumentException unless levels and leakage are ≥ 0 and the others &gt; 0 */
     public OpenDrainOutput {
-        if (!(lowLevel.min() >= 0) || !(sinkCurrent > 0) || !(leakage >= 0) || !(maximumVoltage > 0)) {
+        if (!(lowLevel.min() >= 0) || !Finite.positive(sinkCurrent) || !Finite.notNegative(leakage)
+                || !Finite.positive(maximumVoltage)) {
             throw new IllegalArgumentException("an open-drain output needs low level and leakage ≥ 0, sink current and "
                     + "maximum voltage > 0, got " + lowLevel + ", " + leakage + ", " + sinkCurrent + ", "
                     + maximumVoltage);

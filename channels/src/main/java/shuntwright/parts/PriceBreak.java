@@ -1,5 +1,7 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
+
 /**
  * The price of one piece from an order quantity upwards.
  *
@@ -10,7 +12,7 @@ public record PriceBreak(int quantity, double unitPrice) {
 
     /** @throws IllegalArgumentException unless quantity ≥ 1 and unitPrice is finite and ≥ 0 */
     public PriceBreak {
-        if (quantity < 1 || !(unitPrice >= 0) || Double.isInfinite(unitPrice)) {
+        if (quantity < 1 || !Finite.notNegative(unitPrice)) {
             throw new IllegalArgumentException(
                     "a price break needs quantity ≥ 1 and a finite price ≥ 0, got " + quantity + " at " + unitPrice);
         }

@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Toleranced;
 
@@ -24,8 +25,9 @@ public record Reference(String partNumber, String description, Toleranced voltag
 
     /** @throws IllegalArgumentException unless the voltage and available current are &gt; 0 and the limits ≥ 0 */
     public Reference {
-        if (!(voltage.min() > 0) || !(drift >= 0) || !(ageing >= 0 && ageing < 1) || !(loadRegulation >= 0)
-                || !(availableCurrent > 0) || !(supplyCurrent >= 0)) {
+        if (!(voltage.min() > 0) || !Finite.notNegative(drift) || !(ageing >= 0 && ageing < 1)
+                || !Finite.notNegative(loadRegulation)
+                || !Finite.positive(availableCurrent) || !Finite.notNegative(supplyCurrent)) {
             throw new IllegalArgumentException(
                     "reference " + partNumber + " needs voltage and available current > 0 and limits ≥ 0");
         }

@@ -1,6 +1,7 @@
 package shuntwright.parts;
 
 import shuntwright.quantity.ESeries;
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 
 /**
@@ -24,8 +25,8 @@ public record ResistorSeries(String partNumber, String description, ESeries seri
 
     /** @throws IllegalArgumentException unless values and power are &gt; 0 and the limits within their ranges */
     public ResistorSeries {
-        if (!(values.min() > 0) || !(tolerance >= 0 && tolerance < 1) || !(temperatureCoefficient >= 0)
-                || !(ageing >= 0 && ageing < 1) || !(correlation >= 0 && correlation <= 1) || !(power > 0)) {
+        if (!(values.min() > 0) || !(tolerance >= 0 && tolerance < 1) || !Finite.notNegative(temperatureCoefficient)
+                || !(ageing >= 0 && ageing < 1) || !(correlation >= 0 && correlation <= 1) || !Finite.positive(power)) {
             throw new IllegalArgumentException("resistor series " + partNumber
                     + " needs values and power > 0, tolerance and ageing below 1, correlation 0 to 1");
         }

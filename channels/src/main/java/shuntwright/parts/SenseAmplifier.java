@@ -1,5 +1,7 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
+
 /**
  * A current sense amplifier of fixed gain.
  *
@@ -22,8 +24,9 @@ public record SenseAmplifier(String partNumber, String description, double gain,
 
     /** @throws IllegalArgumentException unless gain, bandwidth, slew rate are &gt; 0, limits ≥ 0 and sections ≥ 1 */
     public SenseAmplifier {
-        if (!(gain > 0) || !(gainError >= 0 && gainError < 1) || !(gainDrift >= 0) || !(bandwidth > 0)
-                || !(slewRate > 0) || !(supplyCurrent >= 0) || sections < 1) {
+        if (!Finite.positive(gain) || !(gainError >= 0 && gainError < 1) || !Finite.notNegative(gainDrift)
+                || !Finite.positive(bandwidth)
+                || !Finite.positive(slewRate) || !Finite.notNegative(supplyCurrent) || sections < 1) {
             throw new IllegalArgumentException("amplifier " + partNumber
                     + " needs gain, bandwidth and slew rate > 0, error limits ≥ 0 and at least one section");
         }

@@ -1,5 +1,6 @@
 package shuntwright.parts;
 
+import shuntwright.quantity.Finite;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Tolerance;
 
@@ -24,8 +25,8 @@ public record Shunt(String partNumber, String description, double resistance, To
 
     /** @throws IllegalArgumentException unless resistance &gt; 0 and the limits are ≥ 0 */
     public Shunt {
-        if (!(resistance > 0) || Double.isInfinite(resistance) || !(temperatureCoefficient >= 0) || !(ageing >= 0)
-                || !(ageing < 1) || !(mountingResistance.min() >= 0) || !(thermalEmf >= 0)) {
+        if (!Finite.positive(resistance) || !Finite.notNegative(temperatureCoefficient) || !Finite.notNegative(ageing)
+                || !(ageing < 1) || !(mountingResistance.min() >= 0) || !Finite.notNegative(thermalEmf)) {
             throw new IllegalArgumentException("shunt " + partNumber + " needs resistance > 0 and limits ≥ 0");
         }
     }

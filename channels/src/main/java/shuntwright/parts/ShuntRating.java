@@ -2,6 +2,8 @@ package shuntwright.parts;
 
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
+
 /**
  * What a shunt endures. The rated power holds to the rated temperature and then falls linearly to zero at the maximum
  * temperature (the convention of IEC 60115-1).
@@ -17,8 +19,10 @@ public record ShuntRating(double power, double ratedTemperature, double maximumT
 
     /** @throws IllegalArgumentException unless power &gt; 0, rated &lt; maximum temperature, resistance ≥ 0, energy &gt; 0 */
     public ShuntRating {
-        if (!(power > 0) || !(ratedTemperature < maximumTemperature) || !(thermalResistance >= 0)
-                || !(pulseEnergy.orElse(1) > 0)) {
+        if (!Finite.positive(power) || !(ratedTemperature < maximumTemperature)
+                || Double.isInfinite(ratedTemperature) || Double.isInfinite(maximumTemperature)
+                || !Finite.notNegative(thermalResistance)
+                || !Finite.positive(pulseEnergy.orElse(1))) {
             throw new IllegalArgumentException("a shunt rating needs power > 0, rated temperature below maximum, "
                     + "thermal resistance ≥ 0 and pulse energy > 0, got " + power + ", " + ratedTemperature + ", "
                     + maximumTemperature + ", " + thermalResistance + ", " + pulseEnergy);
