@@ -64,6 +64,14 @@ final class LimitsReader {
         }
     }
 
+    Corner lowest() {
+        return extremes().get(0);
+    }
+
+    Corner highest() {
+        return extremes().get(1);
+    }
+
     /** The lowest and the highest corner. */
     List<Corner> extremes() {
         while (true) {

@@ -37,8 +37,8 @@ class LimitsAgainstSamplesTest {
         InputDescription description = RandomPoints.describe(drawn);
         for (Outcomes.Named outcome : Outcomes.of(drawn)) {
             LimitsReader reader = new LimitsReader(outcome.equation(), description);
-            LimitsReader.Corner lowest = reader.extremes().get(0);
-            LimitsReader.Corner highest = reader.extremes().get(1);
+            LimitsReader.Corner lowest = reader.lowest();
+            LimitsReader.Corner highest = reader.highest();
             double slack = 1e-12 * highest.value();
             Range limits = Range.of(lowest.value() - slack, highest.value() + slack);
             double[] x = description.nominal();

@@ -30,8 +30,10 @@ class DividerTableTest {
             assertThat(table.ratio(i)).isEqualTo(table.bottom(i) / (table.top(i) + table.bottom(i)));
         }
         Set<List<Double>> expected = new HashSet<>();
-        for (double top : series.within(Range.of(Math.max(47, least), Math.min(1e6, most)))) {
-            for (double bottom : series.within(Range.of(Math.max(47, least), Math.min(1e6, most)))) {
+        double smallest = Math.max(47, least);
+        double largest = Math.min(1e6, most);
+        for (double top : series.within(Range.of(smallest, largest))) {
+            for (double bottom : series.within(Range.of(smallest, largest))) {
                 if (top + bottom >= 500 && top + bottom <= 1e6) {
                     expected.add(List.of(top, bottom));
                 }
