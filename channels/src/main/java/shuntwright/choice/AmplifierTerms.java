@@ -64,7 +64,6 @@ final class AmplifierTerms {
         mostAtFault[j] = amplifier.ranges().survival();
         cost[j] = amplifier.purchase().unitPriceAt(problem.buildQuantity()) / amplifier.sections();
         InputErrors input = amplifier.input();
-        double widest = 0;
         for (int end = 0; end < 2; end++) {
             double ta = (end == 0 ? around.ambient().min() : around.ambient().max()) - REFERENCE_TEMPERATURE;
             double relative = amplifier.gainError() + amplifier.gainDrift() * Math.abs(ta);
@@ -77,9 +76,8 @@ final class AmplifierTerms {
                     * Math.pow(10, -input.supplyRejection() / 20);
             error[end][j] = input.offset() + input.offsetDrift() * Math.abs(ta) + common + supply
                     + input.biasCurrent() * around.rules().inputResistance() * around.rules().inputMismatch();
-            widest = Math.max(widest, Math.abs(ta));
         }
-        double drift = amplifier.gainDrift() * widest / Math.sqrt(3);
+        double drift = amplifier.gainDrift() * ShuntTerms.spread(around.ambient());
         gainVariance[j] = (amplifier.gainError() * amplifier.gainError() + drift * drift) / 3;
         errorVariance[j] = input.offset() * input.offset() / 3;
     }

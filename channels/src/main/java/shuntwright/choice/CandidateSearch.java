@@ -28,6 +28,7 @@ final class CandidateSearch {
     private final AmplifierTerms amplifiers;
     private final Readings readings;
     private final ThresholdTerms thresholds;
+    private final double coverageFactor;
 
     CandidateSearch(ChannelProblem problem) {
         this.problem = problem;
@@ -35,6 +36,7 @@ final class CandidateSearch {
         this.amplifiers = new AmplifierTerms(amplifiers(problem), problem);
         this.readings = new Readings(problem, amplifiers);
         this.thresholds = new ThresholdTerms(problem);
+        this.coverageFactor = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
     }
 
     private static ShuntTerms[] shunts(ChannelProblem problem) {
@@ -141,18 +143,34 @@ final class CandidateSearch {
         return found;
     }
 
+    /** Adds the pair with the window that uncertainties leave, when there is one. */
     private void addLikely(int i, int j, Candidates found) {
         ShuntTerms s = shunts[i];
         Range window = problem.demand().tripWindow();
-        double k = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
-        double shuntVoltage = window.max() * s.resistance;
-        double relative = 0.98 * k * Math.sqrt(s.variance + amplifiers.gainVariance[j]
-                + amplifiers.errorVariance[j] / (shuntVoltage * shuntVoltage));
+        double relative = 0.98 * coverageFactor * Math.sqrt(variance(i, j));
         double low = amplifiers.gain[j] * window.min() / (1 - relative) * s.resistance;
         double high = amplifiers.gain[j] * window.max() / (1 + relative) * s.resistance;
         if (relative < 1 && low <= high) {
             found.add(i, j, low, high, low, high);
         }
+    }
+
+    /** Relative variance of the trip current without the threshold's part, about. */
+    private double variance(int shunt, int amplifier) {
+        double shuntVoltage = problem.demand().tripWindow().max() * shunts[shunt].resistance;
+        return shunts[shunt].variance + amplifiers.gainVariance[amplifier]
+                + amplifiers.errorVariance[amplifier] / (shuntVoltage * shuntVoltage);
+    }
+
+    /**
+     * True when a coverage interval of the trip current may fit its window.
+     *
+     * @param thresholdVariance relative variance of the threshold
+     */
+    boolean mayBeLikely(Candidates found, int candidate, double thresholdVariance) {
+        Range window = problem.demand().tripWindow();
+        double u = Math.sqrt(variance(found.shunt(candidate), found.amplifier(candidate)) + thresholdVariance);
+        return 2 * 0.95 * coverageFactor * u * window.min() <= window.width();
     }
 
     /** Candidates that respect the limits, whatever their errors, best room first, at most {@code most}. */

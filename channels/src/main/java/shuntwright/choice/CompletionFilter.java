@@ -90,18 +90,15 @@ final class CompletionFilter {
     }
 
     /** False only when no pair of this series can serve from this source. */
-    boolean mayServe(Window window, SourceVoltage source, ResistorSeries resistors,
+    boolean mayServe(int candidate, Window window, SourceVoltage source, ResistorSeries resistors,
             double[] ratios) {
+        if (coverage && search.mayBeLikely(found, candidate, variance(window, source, resistors))) {
+            return true;
+        }
         if (feedsBack(window.comparator)) {
             return feedbackMayServe(window, source);
         }
         double nominal = source.voltage().nominal();
-        if (coverage) {
-            // Uncertainties do not add up as limits do: the threshold's own spread is not counted here.
-            double own = ownShift(window, resistors, ratios[1] * nominal) / nominal;
-            double spread = 1.2 * narrowest(window, source, resistors, new double[]{ratios[0], ratios[0]}) / nominal;
-            return ratios[0] <= ratios[1] + spread + 2 * own;
-        }
         double shift = ownShift(window, resistors, ratios[1] * nominal) / nominal;
         ratios[0] -= shift;
         ratios[1] += shift;
@@ -116,9 +113,6 @@ final class CompletionFilter {
      * swing; the source's spread counts by 1 − w, the divider's resistors are left out.
      */
     private boolean feedbackMayServe(Window window, SourceVoltage source) {
-        if (coverage) {
-            return true;
-        }
         double swing = problem.pullUp().voltage().nominal() - window.comparator.output().lowLevel().mid();
         boolean may = true;
         for (int end = 0; end < 2; end++) {
@@ -132,6 +126,20 @@ final class CompletionFilter {
                     && window.releaseHigh[end] - window.releaseLow[end] >= 2 * window.offset[end];
         }
         return may;
+    }
+
+    /** Relative variance of a threshold in the middle of the window, rather too small than too large. */
+    private double variance(Window window, SourceVoltage source, ResistorSeries resistors) {
+        if (feedsBack(window.comparator)) {
+            return 0;
+        }
+        double middle = (window.low[0] + window.high[0]) / 2;
+        double nominal = source.voltage().nominal();
+        double tolerance = (source.voltage().tolerance().below() + source.voltage().tolerance().above()) / 2;
+        double rest = 1 - Math.min(1, Math.max(0, window.high[0] / nominal));
+        double pair = rest * (resistors.tolerance() + resistors.ageing());
+        double offset = window.comparator.inputs().offset() / Math.max(middle, window.high[0]);
+        return (tolerance * tolerance + source.ageing() * source.ageing() + 2 * pair * pair + offset * offset) / 3;
     }
 
     private static boolean feedsBack(Comparator comparator) {

@@ -101,7 +101,7 @@ final class Completions {
         for (SourceVoltage source : problem.sources()) {
             window.ratios(source, tail.resistors(), ratios);
             double room = ratios[1] / ratios[0] - 1;
-            if (!strict || filter.mayServe(window, source, tail.resistors(), ratios)) {
+            if (!strict || filter.mayServe(candidate, window, source, tail.resistors(), ratios)) {
                 options.add(new Option(candidate, tail.comparator(), Optional.of(source), tail.resistors(), cost,
                         room));
             }

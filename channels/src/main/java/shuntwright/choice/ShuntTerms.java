@@ -57,9 +57,14 @@ final class ShuntTerms {
             }
         }
         double a = (shunt.tolerance().above() + shunt.tolerance().below()) / 2;
-        double swing = Math.max(ambient.max() - REFERENCE_TEMPERATURE, REFERENCE_TEMPERATURE - ambient.min());
-        double tcr = shunt.temperatureCoefficient() * swing / Math.sqrt(3);
+        double tcr = shunt.temperatureCoefficient() * spread(ambient);
         this.variance = (a * a + shunt.ageing() * shunt.ageing() + tcr * tcr) / 3 / count;
+    }
+
+    /** Root mean square distance of a uniform ambient temperature from 25 °C, K. */
+    static double spread(Range ambient) {
+        double away = ambient.mid() - REFERENCE_TEMPERATURE;
+        return Math.sqrt(away * away + ambient.width() * ambient.width() / 12);
     }
 
     private static int saturated(int count, int boards) {

@@ -155,8 +155,7 @@ public final class TapPicker {
                 Window window = search.window(found, candidate, comparator);
                 switch (kind) {
                     case Tap.Kind.Divider _ -> window.ratios(source, resistors, ratios);
-                    case Tap.Kind.Dac dac -> window.dacRatios(source, dac.gainError(),
-                            dac.offset() + dac.nonlinearity() * source.voltage().nominal() / (1 << dac.bits()), ratios);
+                    case Tap.Kind.Dac dac -> window.dacRatios(source, dac, resistors, ratios);
                 }
                 double low = none ? Math.min(ratios[0], ratios[1]) : ratios[0];
                 double high = none ? Math.max(ratios[0], ratios[1]) : ratios[1];

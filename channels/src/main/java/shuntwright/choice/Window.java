@@ -1,5 +1,9 @@
 package shuntwright.choice;
 
+import java.util.OptionalDouble;
+
+import shuntwright.board.Acceptance;
+import shuntwright.board.Tap;
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Surroundings;
@@ -30,11 +34,15 @@ final class Window {
 
     private final ThresholdTerms terms;
     private final double ceiling;
+    private final boolean byLimits;
+    private final OptionalDouble pinned;
 
     Window(Candidates candidates, int candidate, ShuntTerms s, AmplifierTerms a, Comparator comparator,
             ThresholdTerms terms, ChannelProblem problem) {
         this.comparator = comparator;
         this.terms = terms;
+        this.byLimits = problem.acceptance().basis() == Acceptance.Basis.LIMITS;
+        this.pinned = problem.demand().channel().pins().hysteresisResistor();
         this.rearms = problem.demand().rearm().isPresent();
         Surroundings around = problem.around();
         int j = candidates.amplifier(candidate);
@@ -98,6 +106,17 @@ final class Window {
         };
     }
 
+    /** Lowest threshold from which the least hysteresis that R_H can make still leaves the release in its window, V. */
+    private double floor(ResistorSeries resistors, int end) {
+        double least = Math.max(low[end], comparator.inputs().lowest());
+        if (rearms && byLimits && comparator.hysteresis() instanceof Hysteresis.InjectedCurrent injected) {
+            double smallest = pinned.orElse(resistors.values().min());
+            return Math.max(least, releaseLow[end] + injected.builtIn().max()
+                    + injected.current().max() * smallest * (1 + movement(resistors, end)));
+        }
+        return least;
+    }
+
     /**
      * Ratios k of a divider whose threshold stays within the window at both ends, without bias current; min &gt; max when
      * there is none. Written to {@code into}.
@@ -109,7 +128,7 @@ final class Window {
             double t = movement(resistors, end);
             Range vx = source(source, end);
             double upper = (Math.min(high[end], ceiling) - offset[end]) / vx.max();
-            double lower = (Math.max(low[end], comparator.inputs().lowest()) + offset[end]) / vx.min();
+            double lower = (floor(resistors, end) + offset[end]) / vx.min();
             most = Math.min(most, upper >= 1 ? 1 : upper <= 0 ? 0 : SourceTerms.moved(upper, -t));
             least = Math.max(least, lower >= 1 ? 1 : lower <= 0 ? 0 : SourceTerms.moved(lower, t));
         }
@@ -117,8 +136,10 @@ final class Window {
         into[1] = most;
     }
 
-    /** The same for a DAC output whose full scale is the source; error is its offset and non-linearity, V. */
-    void dacRatios(SourceVoltage source, double gainError, double error, double[] into) {
+    /** The same for a DAC output whose full scale is the source. */
+    void dacRatios(SourceVoltage source, Tap.Kind.Dac dac, ResistorSeries resistors, double[] into) {
+        double gainError = dac.gainError();
+        double error = dac.offset() + dac.nonlinearity() * source.voltage().nominal() / (1 << dac.bits());
         double least = 0;
         double most = 1;
         for (int end = 0; end < 2; end++) {
@@ -126,7 +147,7 @@ final class Window {
             double slip = offset[end] + error;
             most = Math.min(most, (Math.min(high[end], ceiling) - slip) / (vx.max() * (1 + gainError)));
             least = Math.max(least,
-                    (Math.max(low[end], comparator.inputs().lowest()) + slip) / (vx.min() * (1 - gainError)));
+                    (floor(resistors, end) + slip) / (vx.min() * (1 - gainError)));
         }
         into[0] = least;
         into[1] = most;
