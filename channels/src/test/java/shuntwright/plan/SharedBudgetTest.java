@@ -113,6 +113,8 @@ class SharedBudgetTest {
     @Test
     void packagesServeTheirZoneAndDesignatorsAreUnique() {
         Plan plan = check(board(OptionalDouble.empty(), OptionalDouble.empty()));
+        assertThat(plan.parts()).extracting(PartUse::partNumber).containsExactlyInAnyOrder("R2", "TWIN", "QUAD",
+                "REF25", "RES-10K", "RES-2K0");
         assertThat(part(plan, "R2").quantity()).isEqualTo(3);
         assertThat(part(plan, "R2").users()).containsExactly("a", "b", "c");
         assertThat(part(plan, "TWIN").quantity()).isEqualTo(2);
@@ -122,7 +124,7 @@ class SharedBudgetTest {
         // Three dividers of two and the pull-up share one value.
         assertThat(part(plan, "RES-10K").quantity()).isEqualTo(7);
         assertThat(part(plan, "RES-10K").users()).endsWith("alert line alert");
-        assertThat(part(plan, "RES-2K").quantity()).isEqualTo(3);
+        assertThat(part(plan, "RES-2K0").quantity()).isEqualTo(3);
         List<String> designators = plan.parts().stream().flatMap(each -> each.designators().stream()).toList();
         assertThat(designators).doesNotHaveDuplicates().hasSize(3 + 2 + 2 + 1 + 7 + 3)
                 .allMatch(each -> each.matches("[RU][0-9]+"));
