@@ -130,18 +130,6 @@ public final class TapPicker {
         }
     }
 
-    /** Raises the window so far that the smallest R_H made does not bring the release too low. */
-    private static void keepReleaseInReach(Window window, ChannelProblem problem, ResistorSeries resistors) {
-        if (!window.rearms || !(window.comparator.hysteresis() instanceof Hysteresis.InjectedCurrent injected)) {
-            return;
-        }
-        double smallest = problem.demand().channel().pins().hysteresisResistor().orElse(resistors.values().min());
-        for (int end = 0; end < 2; end++) {
-            window.low[end] = Math.max(window.low[end], window.releaseLow[end] + injected.builtIn().max()
-                    + injected.current().max() * smallest * (1 + window.movement(resistors, end)));
-        }
-    }
-
     /** Least heat of a channel's candidates for each step of the ratio; infinite where there is none. */
     private static double[] leastHeat(Tap.Kind kind, SourceVoltage source, ChannelProblem problem) {
         CandidateSearch search = new CandidateSearch(problem);
@@ -165,7 +153,6 @@ public final class TapPicker {
             }
             for (Comparator comparator : comparators) {
                 Window window = search.window(found, candidate, comparator);
-                keepReleaseInReach(window, problem, resistors);
                 switch (kind) {
                     case Tap.Kind.Divider _ -> window.ratios(source, resistors, ratios);
                     case Tap.Kind.Dac dac -> window.dacRatios(source, dac, resistors, ratios);

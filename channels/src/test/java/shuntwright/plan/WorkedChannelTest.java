@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
@@ -193,7 +194,8 @@ class WorkedChannelTest {
             if (key != null) {
                 assertThat(results).as(line).containsKey(key);
                 assertThat(UNITS).as(line).containsKey(matcher.group("unit"));
-                compare(line, "by the program", results.get(key) / UNITS.get(matcher.group("unit")), printed, wrong);
+                compare(line, "by the program", Objects.requireNonNull(results.get(key))
+                        / Objects.requireNonNull(UNITS.get(matcher.group("unit"))), printed, wrong);
                 left.remove(key);
             }
         }
@@ -201,7 +203,7 @@ class WorkedChannelTest {
         assertThat(sums).isGreaterThan(60);
         assertThat(left).as("inputs, contributions and outcomes that the text leaves out")
                 .noneMatch(each -> each.startsWith("in.")
-                        || (each.startsWith("low.") && results.get(each) != 0)
+                        || (each.startsWith("low.") && Objects.requireNonNull(results.get(each)) != 0)
                         || each.matches("(trip|release)\\.(nominal|least|most)"));
     }
 
