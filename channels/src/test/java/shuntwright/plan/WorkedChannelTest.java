@@ -10,7 +10,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
@@ -192,10 +191,8 @@ class WorkedChannelTest {
             }
             String key = matcher.group("key");
             if (key != null) {
-                assertThat(results).as(line).containsKey(key);
-                assertThat(UNITS).as(line).containsKey(matcher.group("unit"));
-                compare(line, "by the program", Objects.requireNonNull(results.get(key))
-                        / Objects.requireNonNull(UNITS.get(matcher.group("unit"))), printed, wrong);
+                compare(line, "by the program", number(results, key) / number(UNITS, matcher.group("unit")), printed,
+                        wrong);
                 left.remove(key);
             }
         }
@@ -203,8 +200,16 @@ class WorkedChannelTest {
         assertThat(sums).isGreaterThan(60);
         assertThat(left).as("inputs, contributions and outcomes that the text leaves out")
                 .noneMatch(each -> each.startsWith("in.")
-                        || (each.startsWith("low.") && Objects.requireNonNull(results.get(each)) != 0)
+                        || (each.startsWith("low.") && number(results, each) != 0)
                         || each.matches("(trip|release)\\.(nominal|least|most)"));
+    }
+
+    private static double number(Map<String, Double> of, String key) {
+        Double value = of.get(key);
+        if (value == null) {
+            throw new AssertionError("the text names \"" + key + "\", known are " + of.keySet());
+        }
+        return value;
     }
 
     private static void compare(String line, String how, double value, BigDecimal printed, List<String> wrong) {
