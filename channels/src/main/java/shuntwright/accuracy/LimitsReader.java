@@ -4,7 +4,10 @@ import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
+
+import shuntwright.quantity.Range;
 
 /**
  * Exact extremes of an equation over the box of its inputs.
@@ -13,21 +16,29 @@ import java.util.Set;
  * enumerated. With those fixed the equation is monotone in each remaining input, and its extreme is at the corner that
  * the signs of the partial derivatives pick. The derivatives are looked at again in that corner (in the middle of the box
  * one may be 0): inputs that point the other way there change ends, and if that does not settle, they are enumerated too.
+ *
+ * <p>Where drifts and the copper of the joints nearly cancel, the extreme may lie between the ends of the ambient range,
+ * beyond them by some millionths; the derivative by the temperature then points inward and is followed to its zero.
  */
 final class LimitsReader {
 
     private static final Set<Slot> ALWAYS = EnumSet.of(Slot.AMBIENT, Slot.SUPPLY, Slot.RAIL, Slot.SHUNT_DRIFT);
     private static final int MOST_TURNS = 4;
+    /** Halvings of the ambient range that leave less than a nanokelvin of it. */
+    private static final int HALVINGS = 40;
     private static final int MOST_ENUMERATED = 12;
 
     private final Equation equation;
     private final double[] nominal;
+    private final Optional<Range> ambient;
     private final List<Input> monotone = new ArrayList<>();
     private final List<List<Input>> enumerated = new ArrayList<>();
 
     LimitsReader(Equation equation, InputDescription description) {
         this.equation = equation;
         this.nominal = description.nominal();
+        this.ambient = description.inputs().stream().filter(input -> input.slot() == Slot.AMBIENT).map(Input::limits)
+                .findFirst();
         List<Input> drifts = new ArrayList<>();
         // A bias current flows through R_H and the divider in opposite senses, so with R_H its tolerance may favour either.
         boolean twoWays = description.inputs().stream().anyMatch(each -> each.slot() == Slot.SENSE_RESISTOR_TOLERANCE);
@@ -101,12 +112,15 @@ final class LimitsReader {
             settle(x, gradient, highest);
             double value = equation.gradient(x, gradient);
             int turns = 0;
-            while (settle(x, gradient, highest) && turns < MOST_TURNS) {
+            while (turns < MOST_TURNS && settle(x, gradient, highest)) {
                 value = equation.gradient(x, gradient);
                 turns++;
             }
             if (turns == MOST_TURNS) {
                 turning.addAll(unsettled(x, gradient, highest));
+            }
+            if (ambient.isPresent() && inward(ambient.get(), x, gradient, highest)) {
+                value = within(ambient.get(), x, gradient, highest, value);
             }
             if ((highest ? value > bestValue : value < bestValue) || scenario == 0) {
                 bestValue = value;
@@ -114,6 +128,38 @@ final class LimitsReader {
             }
         }
         return new Corner(best, bestValue);
+    }
+
+    /** True when moving the ambient temperature away from its end makes the value more extreme. */
+    private static boolean inward(Range ambient, double[] x, double[] gradient, boolean highest) {
+        double slope = gradient[Slot.AMBIENT.place()];
+        boolean rising = slope > 0 == highest;
+        return slope != 0 && (x[Slot.AMBIENT.place()] == ambient.min() ? rising : !rising);
+    }
+
+    /** Moves the ambient temperature to where the derivative by it changes sign, if that makes the value more extreme. */
+    private double within(Range ambient, double[] x, double[] gradient, boolean highest, double atEnd) {
+        int at = Slot.AMBIENT.place();
+        double near = x[at];
+        double far = near == ambient.min() ? ambient.max() : ambient.min();
+        boolean rising = gradient[at] > 0;
+        double[] inner = x.clone();
+        for (int step = 0; step < HALVINGS; step++) {
+            inner[at] = (near + far) / 2;
+            equation.gradient(inner, gradient);
+            if (gradient[at] > 0 == rising) {
+                near = inner[at];
+            } else {
+                far = inner[at];
+            }
+        }
+        settle(inner, gradient, highest);
+        double found = equation.value(inner);
+        if (!(highest ? found > atEnd : found < atEnd)) {
+            return atEnd;
+        }
+        System.arraycopy(inner, 0, x, 0, x.length);
+        return found;
     }
 
     private void start(int scenario, double[] x) {
