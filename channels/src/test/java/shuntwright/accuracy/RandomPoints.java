@@ -43,7 +43,8 @@ final class RandomPoints {
         if (random.nextBoolean()) {
             ambient(description, x, random);
         }
-        for (int moved = random.nextInt(3); moved > 0; moved--) {
+        int most = Math.min(3, description.inputs().size() + 1);
+        for (int moved = random.nextInt(most); moved > 0; moved--) {
             Input input = description.inputs().get(random.nextInt(description.inputs().size()));
             double share = random.nextBoolean() ? random.nextDouble() : random.nextInt(2);
             x[Layout.index(input)] = input.limits().min() + share * input.limits().width();
