@@ -57,7 +57,8 @@ final class ShuntTerms {
             }
         }
         double a = (shunt.tolerance().above() + shunt.tolerance().below()) / 2;
-        double tcr = shunt.temperatureCoefficient() * spread(ambient);
+        // Self-heating may bring the middle to 25 °C; what ambient spreads by remains.
+        double tcr = shunt.temperatureCoefficient() * ambient.width() / Math.sqrt(12);
         this.variance = (a * a + shunt.ageing() * shunt.ageing() + tcr * tcr) / 3 / count;
     }
 

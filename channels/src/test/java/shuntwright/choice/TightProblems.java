@@ -33,8 +33,8 @@ final class TightProblems {
         }
         SenseCircuit circuit = all.get(random.nextInt(all.size())).circuit();
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, loose.around(), loose.demand());
-        List<Assessment> reached = accuracy.assess(0.95);
-        Range trip = reached.getFirst().limits();
+        List<Assessment> reached = accuracy.assess(loose.acceptance().coverage());
+        Range trip = interval(loose, reached.getFirst());
         if (!(trip.min() > 0 && trip.max() < 1e6)) {
             return Optional.empty();
         }
@@ -45,7 +45,7 @@ final class TightProblems {
                 OptionalDouble.of(trip.max() * (1 + SPARE)), OptionalDouble.empty(),
                 OptionalDouble.empty(), OptionalDouble.empty())).withReading(Channel.ReadingDemand.NONE);
         Optional<Range> release = reached.stream().filter(each -> each.outcome() == Outcome.RELEASE).findFirst()
-                .map(Assessment::limits);
+                .map(each -> interval(loose, each));
         if (release.isPresent() && !(release.get().min() > 0 && release.get().max() < 1e6)) {
             return Optional.empty();
         }
@@ -62,6 +62,13 @@ final class TightProblems {
                         loose.tap(), pinned ? List.of(circuit.resistors()) : loose.resistors(), loose.pullUp(),
                         loose.acceptance(), loose.buildQuantity()))
                 : Optional.empty();
+    }
+
+    private static Range interval(ChannelProblem loose, Assessment assessment) {
+        return switch (loose.acceptance().basis()) {
+            case LIMITS -> assessment.limits();
+            case COVERAGE -> assessment.combined().interval();
+        };
     }
 
     private static Pins pins(SenseCircuit circuit) {
