@@ -39,22 +39,35 @@ final class CandidateSearch {
         this.coverageFactor = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
     }
 
+    /** Shunts within their limits by ascending resistance, and so by ascending heat. */
     private static ShuntTerms[] shunts(ChannelProblem problem) {
         Demand demand = problem.demand();
         Optional<String> pinned = demand.channel().pins().shunt();
+        List<Shunt> sorted = problem.catalogue().shuntsByResistance();
+        int[] counts = counts(problem);
+        int[] next = new int[counts.length];
         List<ShuntTerms> terms = new ArrayList<>();
-        for (Shunt shunt : problem.catalogue().shunts()) {
-            if (pinned.isPresent() && !pinned.get().equals(shunt.partNumber())) {
-                continue;
-            }
-            for (int count : counts(problem)) {
-                if (holds(LimitRules.ofShunt(shunt, count, demand, problem.around()))) {
-                    terms.add(new ShuntTerms(shunt, count, problem));
+        while (true) {
+            int least = -1;
+            for (int i = 0; i < counts.length; i++) {
+                if (next[i] < sorted.size() && (least < 0 || resistance(sorted.get(next[i]), counts[i]) < resistance(
+                        sorted.get(next[least]), counts[least]))) {
+                    least = i;
                 }
             }
+            if (least < 0) {
+                return terms.toArray(new ShuntTerms[0]);
+            }
+            Shunt shunt = sorted.get(next[least]++);
+            if ((pinned.isEmpty() || pinned.get().equals(shunt.partNumber()))
+                    && holds(LimitRules.ofShunt(shunt, counts[least], demand, problem.around()))) {
+                terms.add(new ShuntTerms(shunt, counts[least], problem));
+            }
         }
-        terms.sort(Comparator.comparingDouble((ShuntTerms t) -> t.heat).thenComparingDouble(t -> t.cost));
-        return terms.toArray(new ShuntTerms[0]);
+    }
+
+    private static double resistance(Shunt shunt, int count) {
+        return (shunt.resistance() + shunt.mountingResistance().mid()) / count;
     }
 
     /** The numbers of shunts in parallel that may be tried. */
@@ -108,9 +121,20 @@ final class CandidateSearch {
         return shunts.length * amplifiers.size();
     }
 
-    /** Candidates that may be inside (or likely, where the board accepts that). */
+    /** How many shunts and numbers in parallel there are. */
+    int shunts() {
+        return shunts.length;
+    }
+
+    /** All candidates that may be inside (or likely, where the board accepts that), by ascending heat. */
     Candidates promising() {
         Candidates found = new Candidates();
+        promising(0, shunts.length, found);
+        return found;
+    }
+
+    /** Adds those of the shunts from {@code from} to before {@code to}. */
+    void promising(int from, int to, Candidates found) {
         Demand demand = problem.demand();
         Channel.Stress stress = demand.channel().stress();
         double fullScale = demand.fullScale();
@@ -118,7 +142,7 @@ final class CandidateSearch {
         double fault = stress.fault().orElse(0);
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
         AmplifierTerms a = amplifiers;
-        for (int i = 0; i < shunts.length; i++) {
+        for (int i = from; i < to; i++) {
             ShuntTerms s = shunts[i];
             double full = fullScale * s.resistance;
             double small = least * s.resistance;
@@ -140,7 +164,6 @@ final class CandidateSearch {
                 }
             }
         }
-        return found;
     }
 
     /** Adds the pair with the window that uncertainties leave, when there is one. */

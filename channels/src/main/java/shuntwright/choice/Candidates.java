@@ -8,10 +8,12 @@ import java.util.Arrays;
  */
 final class Candidates {
 
+    private static final int START = 4096;
+
     private int size;
-    private int[] shunt = new int[256];
-    private int[] amplifier = new int[256];
-    private double[] edges = new double[4 * 256];
+    private int[] shunt = new int[START];
+    private int[] amplifier = new int[START];
+    private double[] edges = new double[4 * START];
 
     void add(int shuntTerm, int amplifierTerm, double low0, double high0, double low1, double high1) {
         if (size == shunt.length) {
@@ -26,6 +28,11 @@ final class Candidates {
         edges[4 * size + 2] = low1;
         edges[4 * size + 3] = high1;
         size++;
+    }
+
+    /** Forgets all of them. */
+    void clear() {
+        size = 0;
     }
 
     int size() {

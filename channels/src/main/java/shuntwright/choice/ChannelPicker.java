@@ -31,7 +31,7 @@ public final class ChannelPicker {
     public record Count(int combinations, int promising) {}
 
     /** Runs only the search for candidates. */
-    public Count count(ChannelProblem problem) {
+    public static Count count(ChannelProblem problem) {
         CandidateSearch search = new CandidateSearch(problem);
         return new Count(search.combinations(), search.promising().size());
     }
@@ -41,7 +41,7 @@ public final class ChannelPicker {
         CandidateSearch search = new CandidateSearch(problem);
         List<shuntwright.parts.Comparator> comparators = comparators(problem);
         Judge judge = new Judge(problem);
-        Optional<ChannelChoice> accepted = accepted(problem, search, search.promising(), comparators, judge);
+        Optional<ChannelChoice> accepted = accepted(problem, search, comparators, judge);
         if (accepted.isPresent()) {
             return accepted.get();
         }
@@ -53,7 +53,7 @@ public final class ChannelPicker {
     /** True when some circuit is accepted; cheaper than {@link #pick} when none is. */
     public boolean accepts(ChannelProblem problem) {
         CandidateSearch search = new CandidateSearch(problem);
-        return accepted(problem, search, search.promising(), comparators(problem), new Judge(problem)).isPresent();
+        return accepted(problem, search, comparators(problem), new Judge(problem)).isPresent();
     }
 
     /** The comparators that respect their own limits and suit the demanded release. */
@@ -78,18 +78,21 @@ public final class ChannelPicker {
         };
     }
 
-    private Optional<ChannelChoice> accepted(ChannelProblem problem, CandidateSearch search, Candidates found,
+    private Optional<ChannelChoice> accepted(ChannelProblem problem, CandidateSearch search,
             List<shuntwright.parts.Comparator> comparators, Judge judge) {
+        Candidates found = new Candidates();
         Completions completions = new Completions(problem, search, found, comparators, tables);
         double step = problem.around().rules().heatStep();
         int from = 0;
-        while (from < found.size()) {
-            double heat = search.shunt(found.shunt(from)).heat;
+        while (from < search.shunts()) {
+            double heat = search.shunt(from).heat;
             int to = from;
-            while (to < found.size() && search.shunt(found.shunt(to)).heat <= heat * (1 + SAME) + step) {
+            while (to < search.shunts() && search.shunt(to).heat <= heat * (1 + SAME) + step) {
                 to++;
             }
-            List<SenseCircuit> circuits = firstAccepted(completions, from, to, judge);
+            found.clear();
+            search.promising(from, to, found);
+            List<SenseCircuit> circuits = firstAccepted(completions.cheapestFirst(), completions, judge);
             if (!circuits.isEmpty()) {
                 return Optional.of(new ChannelChoice.Accepted(circuits));
             }
@@ -98,9 +101,9 @@ public final class ChannelPicker {
         return Optional.empty();
     }
 
-    private static List<SenseCircuit> firstAccepted(Completions completions, int from, int to, Judge judge) {
+    private static List<SenseCircuit> firstAccepted(Completions.CheapestFirst options, Completions completions,
+            Judge judge) {
         List<SenseCircuit> circuits = new ArrayList<>();
-        Completions.CheapestFirst options = completions.cheapestFirst(from, to);
         double cost = Double.POSITIVE_INFINITY;
         while (options.hasNext() && circuits.size() < MOST_TIES) {
             Completions.Option option = options.next();

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 
 import shuntwright.board.Acceptance;
+import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Surroundings;
@@ -31,5 +32,18 @@ public record ChannelProblem(Demand demand, Surroundings around, Catalogue catal
     public ChannelProblem {
         sources = List.copyOf(sources);
         resistors = List.copyOf(resistors);
+    }
+
+    /**
+     * The same problem without what the choice does not depend on: name, note, zone and alert line of the channel. Channels
+     * with the same demand have one anonymous problem, and so one choice.
+     */
+    public ChannelProblem anonymous() {
+        Channel c = demand.channel();
+        Channel bare = new Channel("", "", c.rail(), c.side(), c.currents(), c.release(), c.reading(), c.threshold(),
+                Optional.empty(), Optional.empty(), c.diversity(), c.stress(), c.pins());
+        Demand same = new Demand(bare, demand.commonMode(), demand.load(), demand.tripWindow(), demand.tripTarget(),
+                demand.rearm(), demand.fullScale());
+        return new ChannelProblem(same, around, catalogue, sources, tap, resistors, pullUp, acceptance, buildQuantity);
     }
 }

@@ -82,9 +82,9 @@ final class Completions {
         return options;
     }
 
-    /** The options of the candidates from {@code from} to before {@code to} that may serve. */
-    CheapestFirst cheapestFirst(int from, int to) {
-        return new CheapestFirst(from, to);
+    /** The options of the candidates that may serve; valid until the candidates change. */
+    CheapestFirst cheapestFirst() {
+        return new CheapestFirst();
     }
 
     private List<Option> options(int candidate, Tail tail, Window window, boolean strict) {
@@ -124,11 +124,11 @@ final class Completions {
                 .thenComparingInt(Node::candidate).thenComparingInt(Node::tail));
         private final List<Option> ready = new ArrayList<>();
 
-        private CheapestFirst(int from, int to) {
+        private CheapestFirst() {
             if (tails.isEmpty()) {
                 return;
             }
-            for (int candidate = from; candidate < to; candidate++) {
+            for (int candidate = 0; candidate < found.size(); candidate++) {
                 if (filter.roomForAny(candidate)) {
                     queue.add(new Node(base(candidate) + tails.getFirst().cost(), candidate, 0));
                 }

@@ -1,6 +1,7 @@
 package shuntwright.parts;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -15,8 +16,9 @@ public final class Catalogue {
     private final String currency;
     private final Map<String, Part> parts;
     private final List<Shunt> shunts;
+    private final List<Shunt> byResistance;
     private final List<SenseAmplifier> amplifiers;
-    private final List<Comparator> comparators;
+    private final List<shuntwright.parts.Comparator> comparators;
     private final List<Reference> references;
     private final List<ResistorSeries> resistors;
     private final List<CapacitorSeries> capacitors;
@@ -30,8 +32,11 @@ public final class Catalogue {
             }
         }
         shunts = only(Shunt.class);
+        byResistance = shunts.stream()
+                .sorted(Comparator.comparingDouble(each -> each.resistance() + each.mountingResistance().mid()))
+                .toList();
         amplifiers = only(SenseAmplifier.class);
-        comparators = only(Comparator.class);
+        comparators = only(shuntwright.parts.Comparator.class);
         references = only(Reference.class);
         resistors = only(ResistorSeries.class);
         capacitors = only(CapacitorSeries.class);
@@ -69,11 +74,16 @@ public final class Catalogue {
         return shunts;
     }
 
+    /** The shunts by ascending resistance with their mounting. */
+    public List<Shunt> shuntsByResistance() {
+        return byResistance;
+    }
+
     public List<SenseAmplifier> amplifiers() {
         return amplifiers;
     }
 
-    public List<Comparator> comparators() {
+    public List<shuntwright.parts.Comparator> comparators() {
         return comparators;
     }
 

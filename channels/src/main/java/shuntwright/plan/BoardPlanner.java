@@ -158,21 +158,36 @@ public final class BoardPlanner {
         };
     }
 
+    /**
+     * Only the search: how many combinations of shunts and amplifier the channels have, and how many of them leave room for
+     * a threshold within every limit.
+     */
+    public static ChannelPicker.Count candidates(Board board, Catalogue catalogue) {
+        BoardContext context = new BoardContext(board, catalogue, Map.of());
+        int combinations = 0;
+        int promising = 0;
+        for (Channel channel : board.channels()) {
+            if (Demand.of(channel) instanceof Demand.Reading.Complete(Demand demand)) {
+                ChannelPicker.Count count = ChannelPicker.count(context.problem(demand, Optional.empty()));
+                combinations += count.combinations();
+                promising += count.promising();
+            }
+        }
+        return new ChannelPicker.Count(combinations, promising);
+    }
+
     /** True when some circuit is accepted for this channel by itself. */
     boolean accepts(ChannelProblem problem) {
-        ChannelChoice choice = choices.get(problem);
+        ChannelProblem key = problem.anonymous();
+        ChannelChoice choice = choices.get(key);
         return choice != null
                 ? choice instanceof ChannelChoice.Accepted
-                : acceptances.computeIfAbsent(problem, picker::accepts);
+                : acceptances.computeIfAbsent(key, picker::accepts);
     }
 
     /** One channel by itself, without cures. */
     ChannelPlan solve(ChannelProblem problem, Set<String> used) {
-        ChannelChoice choice = choices.get(problem);
-        if (choice == null) {
-            choice = picker.pick(problem);
-            choices.put(problem, choice);
-        }
+        ChannelChoice choice = choices.computeIfAbsent(problem.anonymous(), picker::pick);
         return switch (choice) {
             case ChannelChoice.Accepted(List<SenseCircuit> circuits) -> judged(problem, preferred(circuits, used));
             case ChannelChoice.Nearest(SenseCircuit circuit) -> judged(problem, circuit);

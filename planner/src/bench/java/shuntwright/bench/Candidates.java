@@ -36,4 +36,19 @@ final class Candidates {
         }
         return sum;
     }
+
+    /** The same for every combination of shunts and amplifier; A. */
+    static double nominalTripsOfPairs(Board board, Catalogue catalogue) {
+        double sum = 0;
+        for (int channel = 0; channel < board.channels().size(); channel++) {
+            for (SenseAmplifier amplifier : catalogue.amplifiers()) {
+                for (Shunt shunt : catalogue.shunts()) {
+                    for (int n = 1; n <= board.rules().parallelShunts(); n++) {
+                        sum += THRESHOLD * n / (amplifier.gain() * shunt.resistance());
+                    }
+                }
+            }
+        }
+        return sum;
+    }
 }
