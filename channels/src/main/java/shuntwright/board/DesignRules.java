@@ -14,7 +14,7 @@ import shuntwright.quantity.Finite;
  *                         divider's resistance from above
  * @param resistors        part number of the resistor series for dividers and hysteresis; empty for any series of 1 % or
  *                         better, whichever serves at least cost
- * @param heatStep         heats that differ by less count as equal when parts are chosen, W; 0 for an exact comparison
+ * @param heatStep         heats within this much of the least count as equal when parts are chosen, W; 0 for the least itself
  * @param inputResistance  resistor in each amplifier input lead, Ω (0 for none)
  * @param inputMismatch    relative mismatch of those two resistors, a fraction
  */

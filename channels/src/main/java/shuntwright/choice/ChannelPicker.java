@@ -82,23 +82,36 @@ public final class ChannelPicker {
             List<shuntwright.parts.Comparator> comparators, Judge judge) {
         Candidates found = new Candidates();
         Completions completions = new Completions(problem, search, found, comparators, tables);
-        double step = problem.around().rules().heatStep();
         int from = 0;
         while (from < search.shunts()) {
-            double heat = search.shunt(from).heat;
-            int to = from;
-            while (to < search.shunts() && search.shunt(to).heat <= heat * (1 + SAME) + step) {
-                to++;
-            }
-            found.clear();
-            search.promising(from, to, found);
-            List<SenseCircuit> circuits = firstAccepted(completions.cheapestFirst(), completions, judge);
+            int to = within(search, from, search.shunt(from).heat);
+            List<SenseCircuit> circuits = cheapest(search, from, to, found, completions, judge);
             if (!circuits.isEmpty()) {
-                return Optional.of(new ChannelChoice.Accepted(circuits));
+                double step = problem.around().rules().heatStep();
+                return Optional.of(new ChannelChoice.Accepted(step == 0
+                        ? circuits
+                        : cheapest(search, from, within(search, from, search.shunt(from).heat + step), found,
+                                completions, judge)));
             }
             from = to;
         }
         return Optional.empty();
+    }
+
+    /** The first of the shunts from {@code from} on whose heat exceeds {@code heat}. */
+    private static int within(CandidateSearch search, int from, double heat) {
+        int to = from;
+        while (to < search.shunts() && search.shunt(to).heat <= heat * (1 + SAME)) {
+            to++;
+        }
+        return to;
+    }
+
+    private static List<SenseCircuit> cheapest(CandidateSearch search, int from, int to, Candidates found,
+            Completions completions, Judge judge) {
+        found.clear();
+        search.promising(from, to, found);
+        return found.size() == 0 ? List.of() : firstAccepted(completions.cheapestFirst(), completions, judge);
     }
 
     private static List<SenseCircuit> firstAccepted(Completions.CheapestFirst options, Completions completions,

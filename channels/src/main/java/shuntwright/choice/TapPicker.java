@@ -14,7 +14,7 @@ import shuntwright.parts.ResistorSeries;
 
 /**
  * Chooses the voltage of a tap: the one at which most of its channels find a candidate, then the one with least heat of
- * them all, in the middle of the widest stretch of equally good voltages.
+ * them all (within the design rules' heat step for each), in the middle of the widest stretch of such voltages.
  */
 public final class TapPicker {
 
@@ -70,17 +70,35 @@ public final class TapPicker {
                 }
             }
         }
-        int best = 0;
-        for (int i = 1; i < STEPS; i++) {
-            if (served[i] > served[best] || (served[i] == served[best] && heat[i] < heat[best] * (1 - 1e-9))) {
-                best = i;
+        int most = Arrays.stream(served).max().orElse(0);
+        double least = Double.POSITIVE_INFINITY;
+        double step = 0;
+        for (ChannelProblem problem : problems) {
+            step += problem.around().rules().heatStep();
+        }
+        for (int i = 0; i < STEPS; i++) {
+            if (served[i] == most) {
+                least = Math.min(least, heat[i]);
             }
         }
-        int end = best;
-        while (end + 1 < STEPS && served[end + 1] == served[best] && heat[end + 1] <= heat[best] * (1 + 1e-9)) {
-            end++;
+        return ratio(middleOfWidest(served, heat, most, least * (1 + 1e-9) + step));
+    }
+
+    /** Middle of the widest run of steps that serve {@code most} channels with no more than {@code allowed} heat. */
+    private static double middleOfWidest(int[] served, double[] heat, int most, double allowed) {
+        double middle = 0;
+        int widest = 0;
+        int from = 0;
+        for (int i = 0; i <= STEPS; i++) {
+            if (i == STEPS || served[i] != most || heat[i] > allowed) {
+                if (i - from > widest) {
+                    widest = i - from;
+                    middle = (from + i - 1) / 2.0;
+                }
+                from = i + 1;
+            }
         }
-        return ratio((best + end) / 2.0);
+        return middle;
     }
 
     private static double ratio(double step) {

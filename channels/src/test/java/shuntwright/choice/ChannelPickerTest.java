@@ -90,7 +90,8 @@ class ChannelPickerTest {
         expect(heat <= (least + problem.around().rules().heatStep()) * (1 + SAME), which,
                 "heat " + heat + " of " + words(circuit) + ", least " + least + " of " + good.stream()
                         .filter(each -> each.heat() <= least).map(each -> words(each.circuit())).toList());
-        double cheapest = good.stream().filter(each -> each.heat() <= least * (1 + 1e-9))
+        double cheapest = good.stream()
+                .filter(each -> each.heat() <= (least + problem.around().rules().heatStep()) * (1 + 1e-9))
                 .mapToDouble(BruteForce.Tried::cost).min().orElse(0);
         double cost = BruteForce.cost(problem, circuit);
         expect(cost <= cheapest * (1 + SAME), which, "cost " + cost + " of " + words(circuit) + ", least " + cheapest);

@@ -28,7 +28,7 @@ final class RulesForm extends Form<DesignRules> {
             "part number of the resistor series for dividers and hysteresis");
     private final Key<Double> heatStep = withDefault("heatStep",
             Quantities.number(Dimension.POWER, Bounds.NOT_NEGATIVE), DEFAULT.heatStep(),
-            "heats that differ by less count as equal when parts are chosen; 0 W compares exactly");
+            "heats within this much of the least count as equal when parts are chosen");
     private final Key<Double> shuntGradient = withDefault("shuntGradient",
             Quantities.number(Dimension.TEMPERATURE_DIFFERENCE, Bounds.NOT_NEGATIVE), DEFAULT.shuntGradient(),
             "temperature difference along a shunt that its thermal EMF sees");

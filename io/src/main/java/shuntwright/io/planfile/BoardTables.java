@@ -96,7 +96,7 @@ final class BoardTables {
             .number("biasShare", Unit.FRACTION, "largest share of the threshold by which bias current may shift it",
                     DesignRules::biasShare)
             .maybeText("resistors", "resistor series to use; without it the program chooses", DesignRules::resistors)
-            .number("heatStep", Unit.WATT, "heats that differ by less count as equal when parts are chosen",
+            .number("heatStep", Unit.WATT, "heats within this much of the least count as equal when parts are chosen",
                     DesignRules::heatStep)
             .number("shuntGradient", Unit.KELVIN, "temperature difference along a shunt that its thermal EMF sees",
                     DesignRules::shuntGradient)

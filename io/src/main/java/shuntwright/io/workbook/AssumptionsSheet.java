@@ -110,7 +110,7 @@ final class AssumptionsSheet {
         lines.add(Line.number("Current of one divider, at most", 1000 * rules.dividerCurrent(), "mA"));
         lines.add(Line.number("Shift of a threshold by bias current, at most", 100 * rules.biasShare(), "%"));
         rules.resistors().ifPresent(each -> lines.add(Line.text("Resistor series", each)));
-        lines.add(Line.number("Heats that differ by less count as equal", rules.heatStep(), "W"));
+        lines.add(Line.number("Heats within this much of the least count as equal", rules.heatStep(), "W"));
         lines.add(Line.number("Temperature difference along a shunt", rules.shuntGradient(), "K"));
         lines.add(Line.number("Resistor in each amplifier input", rules.inputResistance(), "Ω"));
         lines.add(Line.number("Mismatch of the input resistors", 100 * rules.inputMismatch(), "±%"));
