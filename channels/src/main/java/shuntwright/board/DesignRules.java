@@ -22,8 +22,9 @@ public record DesignRules(int parallelShunts, double powerMargin, double divider
         Optional<String> resistors, double heatStep, double shuntGradient, double inputResistance,
         double inputMismatch) {
 
-    /** Common practice: up to 3 in parallel, 70 % of rated power, 0.5 mA, 0.1 %, 1 K, no input resistors. */
-    public static final DesignRules DEFAULT = new DesignRules(3, 0.7, 0.5e-3, 1e-3, Optional.empty(), 0, 1, 0, 0.02);
+    /** Common practice: up to 3 in parallel, 70 % of rated power, 0.5 mA, 0.1 %, 20 mW, 1 K, no input resistors. */
+    public static final DesignRules DEFAULT = new DesignRules(3, 0.7, 0.5e-3, 1e-3, Optional.empty(), 20e-3, 1, 0,
+            0.02);
 
     /** @throws IllegalArgumentException unless each is within the range stated above */
     public DesignRules {

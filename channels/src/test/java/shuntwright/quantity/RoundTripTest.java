@@ -27,7 +27,7 @@ class RoundTripTest {
         for (double value : EXTREMES) {
             check(value, dimension);
         }
-        for (int i = 0; i < 12_000; i++) {
+        for (int i = 0; i < 6_000; i++) {
             check(anyBits(), dimension);
             check(everyday(), dimension);
         }
@@ -61,7 +61,7 @@ class RoundTripTest {
 
     @Test
     void tolerances() {
-        for (int i = 0; i < 20_000; i++) {
+        for (int i = 0; i < 8_000; i++) {
             double below = i % 3 == 0 ? Math.abs(anyBits()) % 1 : random.nextDouble();
             double above = i % 4 == 0 ? below : i % 5 == 0 ? Math.abs(anyBits()) : random.nextDouble() * 1e-4;
             Tolerance tolerance = new Tolerance(below, above);
@@ -76,7 +76,7 @@ class RoundTripTest {
 
     @Test
     void largerValuesNeverGetASmallerPrefix() {
-        for (int i = 0; i < 20_000; i++) {
+        for (int i = 0; i < 8_000; i++) {
             double one = Math.pow(10, random.nextDouble(-15, 15));
             double two = Math.pow(10, random.nextDouble(-15, 15));
             assertThat(prefixOf(Math.min(one, two))).isLessThanOrEqualTo(prefixOf(Math.max(one, two)));
