@@ -6,6 +6,8 @@ import shuntwright.quantity.Dimension;
 public enum Limit {
     SWING_AT_TRIP(Family.AMPLIFIER, Dimension.VOLTAGE, "largest threshold within the amplifier's output swing"),
     SWING_AT_FULL_SCALE(Family.AMPLIFIER, Dimension.VOLTAGE, "output at full scale within the amplifier's swing"),
+    TRIP_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "smallest threshold above the amplifier's lowest level"),
+    RELEASE_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "smallest release voltage above the amplifier's lowest level"),
     OUTPUT_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "output at the least current above the amplifier's lowest level"),
     DIFFERENTIAL_RANGE(Family.AMPLIFIER, Dimension.VOLTAGE, "shunt voltage at full scale within the input range"),
     DIFFERENTIAL_SURVIVAL(Family.AMPLIFIER, Dimension.VOLTAGE, "shunt voltage at the fault current survived"),

@@ -81,7 +81,8 @@ final class ChannelSolver {
                 releases ? OptionalDouble.of(accuracy.outputVoltage(true)) : OptionalDouble.empty(),
                 assessments.getFirst().nominal() * resistance, gain * demand.load() * resistance,
                 gain * demand.fullScale() * resistance);
-        List<LimitCheck> limits = LimitRules.all(circuit, threshold, problem.pullUp().voltage().max(), demand,
+        List<LimitCheck> limits = LimitRules.all(circuit, accuracy.changeover(), problem.pullUp().voltage().max(),
+                demand,
                 problem.around());
         double heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
         return new SolvedChannel(demand, circuit, settings, accuracy.inputs(), assessments, limits, heat,
