@@ -27,6 +27,13 @@ final class Judge {
                 problem.around());
     }
 
+    /** The limits of its threshold with their numbers. */
+    List<LimitCheck> thresholdLimits(SenseCircuit circuit) {
+        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        return LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(), circuit.comparator(),
+                problem.around());
+    }
+
     /** True when the circuit respects every limit and its outcomes are accepted. */
     boolean accepts(SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());

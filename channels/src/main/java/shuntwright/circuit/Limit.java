@@ -56,6 +56,18 @@ public enum Limit {
         return dimension;
     }
 
+    /** What is counted where this limit excludes something, in words. */
+    public String counted() {
+        return switch (this) {
+            case SHUNT_POWER, SHUNT_PULSE, COMMON_MODE_HIGH, COMMON_MODE_LOW, AMPLIFIER_SUPPLY, COMPARATOR_SUPPLY,
+                    OUTPUT_VOLTAGE ->
+                family.word();
+            case SWING_AT_FULL_SCALE, OUTPUT_FLOOR, DIFFERENTIAL_RANGE, DIFFERENTIAL_SURVIVAL, ADC_FULL_SCALE ->
+                "pairs of shunt and amplifier";
+            case SWING_AT_TRIP, TRIP_FLOOR, RELEASE_FLOOR, COMPARATOR_HEADROOM, COMPARATOR_FLOOR -> "circuits tried";
+        };
+    }
+
     /** What must hold, in words. */
     public String words() {
         return words;
