@@ -2,10 +2,12 @@ package shuntwright.accuracy;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
+import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.Surroundings;
 import shuntwright.quantity.Range;
@@ -118,7 +120,22 @@ public final class ChannelAccuracy {
 
     /** Exact extremes of the amplifier output voltage at which the comparator trips, V. */
     public Range thresholdLimits() {
-        List<LimitsReader.Corner> extremes = new LimitsReader(new ThresholdVoltage(equations), description).extremes();
+        return outputLimits(false);
+    }
+
+    /** Exact extremes of the amplifier output voltage at which the comparator releases, V; empty where it latches. */
+    public Optional<Range> releaseLimits() {
+        return demand.rearm().isPresent() ? Optional.of(outputLimits(true)) : Optional.empty();
+    }
+
+    /** Both, for {@link LimitRules}. */
+    public LimitRules.Changeover changeover() {
+        return new LimitRules.Changeover(thresholdLimits(), releaseLimits());
+    }
+
+    private Range outputLimits(boolean tripped) {
+        List<LimitsReader.Corner> extremes = new LimitsReader(new ThresholdVoltage(equations, tripped), description)
+                .extremes();
         return Range.of(extremes.get(0).value(), extremes.get(1).value());
     }
 

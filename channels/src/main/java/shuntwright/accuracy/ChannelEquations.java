@@ -87,9 +87,9 @@ final class ChannelEquations {
         return output(tripped, x, 0, new double[0]);
     }
 
-    /** The same at trip, adding its partial derivatives to g. */
-    double outputSlopes(double[] x, double[] g) {
-        return output(false, x, 1, g);
+    /** The same, adding its partial derivatives to g. */
+    double outputSlopes(boolean tripped, double[] x, double[] g) {
+        return output(tripped, x, 1, g);
     }
 
     private double cross(boolean tripped, double[] x, double[] g) {

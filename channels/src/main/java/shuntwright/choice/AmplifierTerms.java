@@ -5,6 +5,7 @@ import static shuntwright.circuit.Surroundings.REFERENCE_TEMPERATURE;
 import java.util.List;
 
 import shuntwright.board.Demand;
+import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.Surroundings;
 import shuntwright.parts.InputErrors;
@@ -57,11 +58,11 @@ final class AmplifierTerms {
         Surroundings around = problem.around();
         Demand demand = problem.demand();
         gain[j] = amplifier.gain();
-        mostAtFull[j] = LimitRules.largestAtFullScale(amplifier, around);
+        mostAtFull[j] = LimitRules.largestAtFullScale(amplifier, around) * (1 + LimitCheck.ROUNDING);
         leastAtLeast[j] = demand.channel().currents().least().isPresent()
-                ? amplifier.ranges().outputLow() / amplifier.gain()
+                ? amplifier.ranges().outputLow() / amplifier.gain() * (1 - LimitCheck.ROUNDING)
                 : 0;
-        mostAtFault[j] = amplifier.ranges().survival();
+        mostAtFault[j] = amplifier.ranges().survival() * (1 + LimitCheck.ROUNDING);
         cost[j] = amplifier.purchase().unitPriceAt(problem.buildQuantity()) / amplifier.sections();
         InputErrors input = amplifier.input();
         for (int end = 0; end < 2; end++) {

@@ -152,6 +152,9 @@ final class CandidateSearch {
                 if (full > a.mostAtFull[j] || small < a.leastAtLeast[j] || surge > a.mostAtFault[j]) {
                     continue;
                 }
+                if (coverage && !readings.mayBeLikely(s, j, coverageFactor)) {
+                    continue;
+                }
                 double low0 = a.gainHigh[0][j] * (s.noTripHigh[0] + a.error[0][j] + emf);
                 double high0 = a.gainLow[0][j] * (s.mustTripLow[0] - a.error[0][j] - emf);
                 double low1 = a.gainHigh[1][j] * (s.noTripHigh[1] + a.error[1][j] + emf);

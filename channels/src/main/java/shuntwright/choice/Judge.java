@@ -23,7 +23,14 @@ final class Judge {
     /** Every limit with its numbers. */
     List<LimitCheck> limits(SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
-        return LimitRules.all(circuit, accuracy.thresholdLimits(), problem.pullUp().voltage().max(), problem.demand(),
+        return LimitRules.all(circuit, accuracy.changeover(), problem.pullUp().voltage().max(), problem.demand(),
+                problem.around());
+    }
+
+    /** The limits of its threshold with their numbers. */
+    List<LimitCheck> thresholdLimits(SenseCircuit circuit) {
+        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        return LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(), circuit.comparator(),
                 problem.around());
     }
 
@@ -37,7 +44,7 @@ final class Judge {
                 return false;
             }
         }
-        return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.thresholdLimits(), circuit.amplifier(),
+        return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(),
                 circuit.comparator(), problem.around()));
     }
 

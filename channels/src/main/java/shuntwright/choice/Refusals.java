@@ -18,6 +18,7 @@ final class Refusals {
 
     /** What one limit has excluded so far. */
     private static final class Tally {
+        private int examined;
         private int refused;
         private String nearest = "";
         private Optional<LimitCheck> miss = Optional.empty();
@@ -36,7 +37,6 @@ final class Refusals {
     }
 
     private final Map<Limit, Tally> tallies = new EnumMap<>(Limit.class);
-    private final Map<Limit.Family, Integer> examined = new EnumMap<>(Limit.Family.class);
 
     private Refusals() {
     }
@@ -69,64 +69,52 @@ final class Refusals {
     private List<ShuntChoice> shunts(ChannelProblem problem) {
         Optional<String> pinned = problem.demand().channel().pins().shunt();
         List<ShuntChoice> left = new ArrayList<>();
-        int looked = 0;
         for (Shunt shunt : problem.catalogue().shunts()) {
             if (pinned.isPresent() && !pinned.get().equals(shunt.partNumber())) {
                 continue;
             }
             for (int count : CandidateSearch.counts(problem)) {
-                looked++;
                 ShuntChoice choice = new ShuntChoice(shunt, count);
                 if (take(choice.words(), LimitRules.ofShunt(shunt, count, problem.demand(), problem.around()))) {
                     left.add(choice);
                 }
             }
         }
-        examined.merge(Limit.Family.SHUNT, looked, Integer::sum);
         return left;
     }
 
     private List<SenseAmplifier> amplifiers(ChannelProblem problem) {
         Optional<String> pinned = problem.demand().channel().pins().amplifier();
         List<SenseAmplifier> left = new ArrayList<>();
-        int looked = 0;
         for (SenseAmplifier amplifier : problem.catalogue().amplifiers()) {
             if (pinned.isEmpty() || pinned.get().equals(amplifier.partNumber())) {
-                looked++;
                 if (take(amplifier.partNumber(),
                         LimitRules.ofAmplifier(amplifier, problem.demand(), problem.around()))) {
                     left.add(amplifier);
                 }
             }
         }
-        examined.merge(Limit.Family.AMPLIFIER, looked, Integer::sum);
         return left;
     }
 
     private List<Comparator> comparators(ChannelProblem problem) {
         Optional<String> pinned = problem.demand().channel().pins().comparator();
-        int looked = 0;
         for (Comparator comparator : problem.catalogue().comparators()) {
             if (pinned.isEmpty() || pinned.get().equals(comparator.partNumber())) {
-                looked++;
                 take(comparator.partNumber(), LimitRules.ofComparator(comparator,
                         problem.pullUp().voltage().max(), problem.around()));
             }
         }
-        examined.merge(Limit.Family.COMPARATOR, looked, Integer::sum);
         return ChannelPicker.comparators(problem);
     }
 
     private void pairs(ChannelProblem problem, List<ShuntChoice> shunts, List<SenseAmplifier> amplifiers) {
-        int looked = 0;
         for (ShuntChoice shunt : shunts) {
             for (SenseAmplifier amplifier : amplifiers) {
-                looked++;
                 take(shunt.words() + " with " + amplifier.partNumber(), LimitRules.ofPair(amplifier,
                         shunt.resistance(), problem.demand(), problem.around()));
             }
         }
-        examined.merge(Limit.Family.AMPLIFIER, looked, Integer::sum);
     }
 
     private void thresholds(ChannelProblem problem, DividerTables tables, List<Comparator> comparators) {
@@ -134,7 +122,6 @@ final class Refusals {
         Candidates found = search.nearest(20);
         CircuitBuilder builder = new CircuitBuilder(problem, tables);
         Judge judge = new Judge(problem);
-        int looked = 0;
         for (int candidate = 0; candidate < found.size(); candidate++) {
             ShuntTerms shunt = search.shunt(found.shunt(candidate));
             int amplifier = found.amplifier(candidate);
@@ -145,18 +132,19 @@ final class Refusals {
                         : problem.sources()) {
                     for (var circuit : builder.build(shunt, search.amplifiers(), amplifier, window,
                             Optional.of(source), problem.resistors().getFirst())) {
-                        looked++;
                         take(search.amplifiers().amplifiers[amplifier].partNumber() + " with "
-                                + comparator.partNumber(), judge.limits(circuit));
+                                + comparator.partNumber(), judge.thresholdLimits(circuit));
                     }
                 }
             }
         }
-        examined.merge(Limit.Family.THRESHOLD, looked, Integer::sum);
     }
 
     private boolean take(String part, List<LimitCheck> checks) {
         boolean holds = true;
+        for (Limit limit : checks.stream().map(LimitCheck::limit).distinct().toList()) {
+            tallies.computeIfAbsent(limit, _ -> new Tally()).examined++;
+        }
         for (LimitCheck check : checks) {
             if (!check.holds()) {
                 tallies.computeIfAbsent(check.limit(), _ -> new Tally()).add(part, check);
@@ -170,10 +158,10 @@ final class Refusals {
         List<ChannelChoice.Refusal> list = new ArrayList<>();
         for (Map.Entry<Limit, Tally> entry : tallies.entrySet()) {
             Tally tally = entry.getValue();
-            Limit.Family family = entry.getKey().family();
-            int looked = Math.max(examined.getOrDefault(family, 0), tally.refused);
-            list.add(new ChannelChoice.Refusal(family, looked, tally.refused, tally.nearest,
-                    tally.miss.orElseThrow()));
+            if (tally.refused > 0) {
+                list.add(new ChannelChoice.Refusal(entry.getKey().family(), Math.max(tally.examined, tally.refused),
+                        tally.refused, tally.nearest, tally.miss.orElseThrow()));
+            }
         }
         return list;
     }

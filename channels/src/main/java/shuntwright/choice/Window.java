@@ -46,12 +46,14 @@ final class Window {
         this.rearms = problem.demand().rearm().isPresent();
         Surroundings around = problem.around();
         int j = candidates.amplifier(candidate);
+        double bottom = a.amplifiers[j].ranges().outputLow();
         for (int end = 0; end < 2; end++) {
             offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * terms.distance[end];
-            low[end] = candidates.low(candidate, end);
+            low[end] = Math.max(candidates.low(candidate, end), bottom);
             high[end] = candidates.high(candidate, end);
             if (rearms) {
-                releaseLow[end] = a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf);
+                releaseLow[end] = Math.max(bottom,
+                        a.gainHigh[end][j] * (s.rearmLowHigh[end] + a.error[end][j] + s.emf));
                 releaseHigh[end] = a.gainLow[end][j] * (s.rearmHighLow[end] - a.error[end][j] - s.emf);
             }
             if (rearms && comparator.hysteresis() instanceof Hysteresis.BuiltIn(Range builtIn)) {

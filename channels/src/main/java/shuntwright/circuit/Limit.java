@@ -6,6 +6,8 @@ import shuntwright.quantity.Dimension;
 public enum Limit {
     SWING_AT_TRIP(Family.AMPLIFIER, Dimension.VOLTAGE, "largest threshold within the amplifier's output swing"),
     SWING_AT_FULL_SCALE(Family.AMPLIFIER, Dimension.VOLTAGE, "output at full scale within the amplifier's swing"),
+    TRIP_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "smallest threshold above the amplifier's lowest level"),
+    RELEASE_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "smallest release voltage above the amplifier's lowest level"),
     OUTPUT_FLOOR(Family.AMPLIFIER, Dimension.VOLTAGE, "output at the least current above the amplifier's lowest level"),
     DIFFERENTIAL_RANGE(Family.AMPLIFIER, Dimension.VOLTAGE, "shunt voltage at full scale within the input range"),
     DIFFERENTIAL_SURVIVAL(Family.AMPLIFIER, Dimension.VOLTAGE, "shunt voltage at the fault current survived"),
@@ -52,6 +54,18 @@ public enum Limit {
 
     public Dimension dimension() {
         return dimension;
+    }
+
+    /** What is counted where this limit excludes something, in words. */
+    public String counted() {
+        return switch (this) {
+            case SHUNT_POWER, SHUNT_PULSE, COMMON_MODE_HIGH, COMMON_MODE_LOW, AMPLIFIER_SUPPLY, COMPARATOR_SUPPLY,
+                    OUTPUT_VOLTAGE ->
+                family.word();
+            case SWING_AT_FULL_SCALE, OUTPUT_FLOOR, DIFFERENTIAL_RANGE, DIFFERENTIAL_SURVIVAL, ADC_FULL_SCALE ->
+                "pairs of shunt and amplifier";
+            case SWING_AT_TRIP, TRIP_FLOOR, RELEASE_FLOOR, COMPARATOR_HEADROOM, COMPARATOR_FLOOR -> "circuits tried";
+        };
     }
 
     /** What must hold, in words. */

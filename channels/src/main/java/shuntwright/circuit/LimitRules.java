@@ -2,6 +2,7 @@ package shuntwright.circuit;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 import shuntwright.board.Channel;
@@ -89,13 +90,30 @@ public final class LimitRules {
         return checks;
     }
 
-    /** What amplifier and comparator must keep to with a threshold between these extremes, V. */
-    public static List<LimitCheck> ofThreshold(Range threshold, SenseAmplifier amplifier, Comparator comparator,
+    /**
+     * What amplifier and comparator must keep to with these voltages at the amplifier's output. An amplifier whose lowest
+     * level is above the threshold trips without current; one whose lowest level is above the release never re-arms.
+     */
+    public static List<LimitCheck> ofThreshold(Changeover at, SenseAmplifier amplifier, Comparator comparator,
             Surroundings around) {
-        return List.of(atMost(Limit.SWING_AT_TRIP, threshold.max(), highestOutput(amplifier, around)),
-                atMost(Limit.COMPARATOR_HEADROOM, threshold.max(), highestThreshold(comparator, around)),
-                atLeast(Limit.COMPARATOR_FLOOR, threshold.min(), comparator.inputs().lowest()));
+        Range threshold = at.threshold();
+        double floor = amplifier.ranges().outputLow();
+        List<LimitCheck> checks = new ArrayList<>();
+        checks.add(atMost(Limit.SWING_AT_TRIP, threshold.max(), highestOutput(amplifier, around)));
+        checks.add(atLeast(Limit.TRIP_FLOOR, threshold.min(), floor));
+        at.release().ifPresent(release -> checks.add(atLeast(Limit.RELEASE_FLOOR, release.min(), floor)));
+        checks.add(atMost(Limit.COMPARATOR_HEADROOM, threshold.max(), highestThreshold(comparator, around)));
+        checks.add(atLeast(Limit.COMPARATOR_FLOOR, threshold.min(), comparator.inputs().lowest()));
+        return checks;
     }
+
+    /**
+     * Extremes of the amplifier output voltage at which the comparator changes over, V.
+     *
+     * @param threshold at trip
+     * @param release   at release; empty where it latches
+     */
+    public record Changeover(Range threshold, Optional<Range> release) {}
 
     /** Highest threshold the comparator's inputs take at the lowest supply, V. */
     public static double highestThreshold(Comparator comparator, Surroundings around) {
@@ -103,14 +121,14 @@ public final class LimitRules {
     }
 
     /** Every limit of a circuit. */
-    public static List<LimitCheck> all(SenseCircuit circuit, Range threshold, double pulledTo, Demand demand,
+    public static List<LimitCheck> all(SenseCircuit circuit, Changeover at, double pulledTo, Demand demand,
             Surroundings around) {
         List<LimitCheck> checks = new ArrayList<>();
         checks.addAll(ofShunt(circuit.shunt(), circuit.shuntCount(), demand, around));
         checks.addAll(ofAmplifier(circuit.amplifier(), demand, around));
         checks.addAll(ofPair(circuit.amplifier(), circuit.resistance(), demand, around));
         checks.addAll(ofComparator(circuit.comparator(), pulledTo, around));
-        checks.addAll(ofThreshold(threshold, circuit.amplifier(), circuit.comparator(), around));
+        checks.addAll(ofThreshold(at, circuit.amplifier(), circuit.comparator(), around));
         return checks;
     }
 

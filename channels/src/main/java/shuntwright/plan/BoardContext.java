@@ -1,5 +1,7 @@
 package shuntwright.plan;
 
+import static shuntwright.quantity.QuantityWriter.show;
+
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -22,6 +24,7 @@ import shuntwright.circuit.Threshold;
 import shuntwright.parts.Catalogue;
 import shuntwright.parts.Reference;
 import shuntwright.parts.ResistorSeries;
+import shuntwright.quantity.Dimension;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Toleranced;
 
@@ -53,6 +56,7 @@ final class BoardContext {
             if (part.isPresent()) {
                 parts.put(reference.name(), part.get());
                 references.put(reference.name(), voltage(reference, part.get()));
+                fed(reference, part.get());
             } else {
                 findings.add(Findings.board(Finding.Key.UNKNOWN_PART, "Reference \"" + reference.name()
                         + "\" names the part \"" + reference.part() + "\", which no parts file holds. Choose one of "
@@ -63,6 +67,21 @@ final class BoardContext {
                 board.adc().flatMap(adc -> source(adc.source())
                         .map(voltage -> new Surroundings.Converter(adc, voltage))));
         this.resistors = resistors();
+    }
+
+    /** Says so where the sense supply, at both ends of its tolerance, does not feed a reference. */
+    private void fed(BoardReference reference, Reference part) {
+        Range supply = board.supply().voltage().range();
+        if (!part.supply().contains(supply)) {
+            findings.add(Findings.board(Finding.Key.REFERENCE_SUPPLY, "Reference \"" + reference.name() + "\", part "
+                    + part.partNumber() + ", needs a supply of " + show(part.supply(), Dimension.VOLTAGE, 4)
+                    + ", but the sense supply is " + show(supply, Dimension.VOLTAGE, 4)
+                    + ". Its voltage is not assured. Choose another part, or change the supply.",
+                    List.of(new Measure("supply least", supply.min(), Dimension.VOLTAGE),
+                            new Measure("supply most", supply.max(), Dimension.VOLTAGE),
+                            new Measure("needed least", part.supply().min(), Dimension.VOLTAGE),
+                            new Measure("needed most", part.supply().max(), Dimension.VOLTAGE))));
+        }
     }
 
     private static String names(List<Reference> references) {

@@ -191,7 +191,7 @@ public final class BoardPlanner {
         return switch (choice) {
             case ChannelChoice.Accepted(List<SenseCircuit> circuits) -> judged(problem, preferred(circuits, used));
             case ChannelChoice.Nearest(SenseCircuit circuit) -> judged(problem, circuit);
-            case ChannelChoice.NoFit none -> ChannelSolver.noFit(problem.demand().channel(), none);
+            case ChannelChoice.NoFit none -> ChannelSolver.noFit(problem, none);
         };
     }
 

@@ -81,7 +81,8 @@ final class ChannelSolver {
                 releases ? OptionalDouble.of(accuracy.outputVoltage(true)) : OptionalDouble.empty(),
                 assessments.getFirst().nominal() * resistance, gain * demand.load() * resistance,
                 gain * demand.fullScale() * resistance);
-        List<LimitCheck> limits = LimitRules.all(circuit, threshold, problem.pullUp().voltage().max(), demand,
+        List<LimitCheck> limits = LimitRules.all(circuit, accuracy.changeover(), problem.pullUp().voltage().max(),
+                demand,
                 problem.around());
         double heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
         return new SolvedChannel(demand, circuit, settings, accuracy.inputs(), assessments, limits, heat,
@@ -111,21 +112,26 @@ final class ChannelSolver {
     }
 
     /** A channel for which no circuit respects the limits. */
-    static ChannelPlan noFit(Channel channel, ChannelChoice.NoFit none) {
+    static ChannelPlan noFit(ChannelProblem problem, ChannelChoice.NoFit none) {
+        Channel channel = problem.demand().channel();
         List<FamilyRefusal> refusals = none.refusals().stream().map(each -> new FamilyRefusal(each.family(),
                 each.examined(), each.refused(), each.nearest(), each.miss())).toList();
         List<Finding> findings = new ArrayList<>();
-        if (refusals.isEmpty()) {
+        List<String> lacks = Lacks.of(problem);
+        if (!lacks.isEmpty()) {
             findings.add(Findings.channel(Finding.Key.NO_FIT, channel,
-                    "No combination of parts can be tried: the catalogue lacks a shunt, amplifier, comparator that suits "
-                            + "the release asked for, resistor series, or the threshold's source. Add a parts file or "
-                            + "free what is pinned."));
+                    "No circuit can be tried: " + String.join("; ", lacks)
+                            + ". Add a parts file, free what is pinned, or ask for something else."));
+        } else if (refusals.isEmpty()) {
+            findings.add(Findings.channel(Finding.Key.NO_FIT, channel,
+                    "Every part respects its limits, but no values of divider and hysteresis resistors bring threshold "
+                            + "and release together. Free what is pinned, or widen the release window."));
         }
         for (FamilyRefusal each : refusals) {
             LimitCheck miss = each.nearMiss();
             var dimension = miss.limit().dimension();
             findings.add(Findings.channel(Finding.Key.NO_FIT, channel,
-                    Findings.capital(each.family().word()) + ": " + each.refused() + " of " + each.examined()
+                    Findings.capital(miss.limit().counted()) + ": " + each.refused() + " of " + each.examined()
                             + " excluded, because they break: " + miss.limit().words() + ". Nearest: " + each.nearest()
                             + " with " + show(miss.reached(), dimension) + ", allowed "
                             + (miss.atMost() ? "at most " : "at least ") + show(miss.bound(), dimension)

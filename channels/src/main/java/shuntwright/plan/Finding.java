@@ -46,6 +46,7 @@ public record Finding(Key key, Optional<String> channel, String text, List<Measu
         TAP_UNUSED(Severity.NOTE, "tap unused"),
         ALERT_LEVELS(Severity.FAULT, "alert line levels"),
         SUPPLY_OVERLOADED(Severity.FAULT, "supply overloaded"),
+        REFERENCE_SUPPLY(Severity.FAULT, "reference outside its supply range"),
         REFERENCE_OVERLOADED(Severity.FAULT, "reference overloaded"),
         HEAT_OVER_LIMIT(Severity.FAULT, "heat over limit"),
         TIME_NOT_JUDGED(Severity.NOTE, "time not judged"),

@@ -129,13 +129,24 @@ final class SharedBudget {
                         Findings.capital(use.name()) + ": " + show(use.used(), use.dimension()) + " of "
                                 + show(limit, use.dimension()) + ", over by "
                                 + show(use.used() - limit, use.dimension())
-                                + ". Each channel alone has the least heat it can have; a higher limit, fewer channels or "
-                                + "wider windows would cure it.",
+                                + ". " + advice(use.kind()),
                         List.of(new Measure("used", use.used(), use.dimension()),
                                 new Measure("limit", limit, use.dimension()))));
             }
         }
         return findings;
+    }
+
+    private static String advice(SharedUse.Kind kind) {
+        return switch (kind) {
+            case SUPPLY -> "A stronger supply, a smaller divider current in the design rules, higher pull-ups or fewer "
+                    + "channels would cure it.";
+            case REFERENCE -> "A smaller divider current in the design rules, a shared tap, a second reference or a "
+                    + "reference for more current would cure it.";
+            case BOARD_HEAT, ZONE_HEAT ->
+                "Each channel alone has about the least heat it can have; a higher limit, fewer "
+                        + "channels or wider windows would cure it.";
+        };
     }
 
     private static Finding.Key key(SharedUse.Kind kind) {

@@ -42,8 +42,8 @@ final class TapFindings {
         return Findings.channel(Finding.Key.TAP_CONFLICT, plan.channel(),
                 "It shares tap \"" + tap.tap().name() + "\" " + voltage + " with " + others
                         + (others == 1 ? " other channel" : " other channels")
-                        + "; no shunt and gain of the catalogue bring its trip window there. A divider of its own, or "
-                        + "another voltage of the tap, may serve: see the cures.");
+                        + " and does not meet its demand there. A divider of its own, or another voltage of the tap, "
+                        + "may serve: see the cures.");
     }
 
     private static ChannelPlan with(ChannelPlan plan, Finding finding) {

@@ -24,7 +24,8 @@ final class Outcomes {
         List<Named> all = new ArrayList<>();
         all.add(new Named("trip", equations.trip()));
         all.add(new Named("release", equations.release()));
-        all.add(new Named("threshold voltage", new ThresholdVoltage(equations)));
+        all.add(new Named("threshold voltage", new ThresholdVoltage(equations, false)));
+        all.add(new Named("release voltage", new ThresholdVoltage(equations, true)));
         if (drawn.around().adc().isPresent()) {
             double load = drawn.demand().load();
             all.add(new Named("reading at least current", equations.reading(load / 10)));

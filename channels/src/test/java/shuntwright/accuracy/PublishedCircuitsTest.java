@@ -51,7 +51,7 @@ class PublishedCircuitsTest {
         }
         double sum = 0;
         double[] gradient = new double[estimates.size()];
-        Equation threshold = new ThresholdVoltage(new ChannelEquations(circuit, around));
+        Equation threshold = new ThresholdVoltage(new ChannelEquations(circuit, around), false);
         threshold.gradient(description.nominal(), gradient);
         for (Input input : description.inputs()) {
             estimates.set(Layout.index(input), Estimate.of(input.nominal(), input.standardUncertainty()));

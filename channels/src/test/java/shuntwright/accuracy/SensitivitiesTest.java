@@ -29,7 +29,8 @@ class SensitivitiesTest {
             IndependentEquations independent = new IndependentEquations(drawn, x);
             compare("trip", equations.trip(), independent.crossing(false), x);
             compare("release", equations.release(), independent.crossing(true), x);
-            compare("threshold", new ThresholdVoltage(equations), independent.threshold(false), x);
+            compare("threshold", new ThresholdVoltage(equations, false), independent.threshold(false), x);
+            compare("release voltage", new ThresholdVoltage(equations, true), independent.threshold(true), x);
             if (drawn.around().adc().isPresent()) {
                 read++;
                 double load = drawn.demand().load();

@@ -122,7 +122,7 @@ final class BruteForce {
     /** Judges one circuit, whoever chose it. */
     static Tried tried(ChannelProblem problem, SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
-        boolean respects = CandidateSearch.holds(LimitRules.all(circuit, accuracy.thresholdLimits(),
+        boolean respects = CandidateSearch.holds(LimitRules.all(circuit, accuracy.changeover(),
                 problem.pullUp().voltage().max(), problem.demand(), problem.around()));
         return new Tried(circuit, heat(problem, circuit), cost(problem, circuit), respects,
                 respects && accepted(problem, accuracy));

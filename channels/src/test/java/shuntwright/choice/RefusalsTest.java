@@ -98,7 +98,8 @@ class RefusalsTest {
     }
 
     private static boolean ofThreshold(Limit limit) {
-        return limit == Limit.SWING_AT_TRIP || limit == Limit.COMPARATOR_HEADROOM || limit == Limit.COMPARATOR_FLOOR;
+        return limit == Limit.SWING_AT_TRIP || limit == Limit.TRIP_FLOOR || limit == Limit.RELEASE_FLOOR
+                || limit == Limit.COMPARATOR_HEADROOM || limit == Limit.COMPARATOR_FLOOR;
     }
 
     @Test

@@ -126,7 +126,7 @@ final class PlanText {
     private static String words(FamilyRefusal refusal) {
         LimitCheck miss = refusal.nearMiss();
         Dimension dimension = miss.limit().dimension();
-        return refusal.refused() + " of " + refusal.examined() + " " + refusal.family().word() + ": "
+        return refusal.refused() + " of " + refusal.examined() + " " + miss.limit().counted() + ": "
                 + miss.limit().words() + "; nearest is " + refusal.nearest() + " with "
                 + show(miss.reached(), dimension)
                 + ", " + (miss.atMost() ? "at most " : "at least ") + show(miss.bound(), dimension);

@@ -75,7 +75,8 @@ public final class FindingsModel {
         plan.refusals().forEach(each -> {
             var miss = each.nearMiss();
             var dimension = miss.limit().dimension();
-            lines.add(each.refused() + " of " + each.examined() + " " + each.family().word() + " break the limit \""
+            lines.add(each.refused() + " of " + each.examined() + " " + each.nearMiss().limit().counted()
+                    + " break the limit \""
                     + miss.limit().words() + "\". Nearest: " + each.nearest() + " reaches "
                     + shuntwright.quantity.QuantityWriter.show(miss.reached(), dimension) + ", "
                     + (miss.atMost() ? "at most " : "at least ")
