@@ -81,7 +81,7 @@ final class CircuitBuilder {
         if (problem.tap().isPresent() || source.isEmpty()) {
             return List.of();
         }
-        double trip = middle(window.low, window.high);
+        double trip = window.target();
         double release = middle(window.releaseLow, window.releaseHigh) + positive.builtIn().mid();
         if (!(release < trip)) {
             return List.of();

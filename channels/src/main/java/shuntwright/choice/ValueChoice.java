@@ -14,11 +14,12 @@ import shuntwright.quantity.Range;
 
 /**
  * Chooses the pair of a divider: of all pairs of the series whose total keeps to the source's current and whose parallel
- * resistance keeps to the comparator's bias current, the one that leaves the threshold most room within its window.
+ * resistance keeps to the comparator's bias current, the one that leaves the threshold most room within its window, counted
+ * from the trip target: the smaller share of the room above and below it that the threshold's spread leaves.
  */
 final class ValueChoice {
 
-    /** Rooms closer than this, relative to the window, count as equal. */
+    /** Rooms closer than this, as shares of the window, count as equal. */
     private static final double SAME = 1e-9;
     private static final int MOST_TIES = 3;
 
@@ -36,9 +37,7 @@ final class ValueChoice {
                     pins.dividerBottom().getAsDouble(), "", 1));
         }
         DividerTable table = tables.of(resistors);
-        double[] ratios = new double[2];
-        window.ratios(source, resistors, ratios);
-        int start = table.from((ratios[0] + ratios[1]) / 2);
+        int start = table.from(window.target() / source.voltage().nominal());
         Search search = new Search(window, source, resistors, rules, pins, table);
         for (int at = start; at < table.size() && search.mayImproveUp(at); at++) {
             search.look(at);
@@ -89,7 +88,6 @@ final class ValueChoice {
         private final double leastTotal;
         private final double biasShare;
         private final Range bias;
-        private final double width;
         private double bestRoom = Double.NEGATIVE_INFINITY;
         private final List<Integer> best = new ArrayList<>();
 
@@ -103,25 +101,24 @@ final class ValueChoice {
             this.leastTotal = source.voltage().max() / rules.dividerCurrent();
             this.biasShare = rules.biasShare();
             this.bias = window.comparator.inputs().biasCurrent();
-            this.width = Math.abs(window.high[0]) + Math.abs(window.low[0]);
         }
 
         boolean mayImproveUp(int at) {
             double room = Double.POSITIVE_INFINITY;
             for (int end = 0; end < 2; end++) {
-                room = Math.min(room, Math.min(window.high[end], window.ceiling())
-                        - window.highest(source, resistors, table.ratio(at), end) + biasHelp(at));
+                double highest = window.highest(source, resistors, table.ratio(at), end);
+                room = Math.min(room, window.roomAbove(highest - biasHelp(at), end));
             }
-            return room >= bestRoom - SAME * width;
+            return room >= bestRoom - SAME;
         }
 
         boolean mayImproveDown(int at) {
             double room = Double.POSITIVE_INFINITY;
             for (int end = 0; end < 2; end++) {
-                room = Math.min(room, window.lowest(source, resistors, table.ratio(at), end) - window.low[end]
-                        + biasHelp(at));
+                double lowest = window.lowest(source, resistors, table.ratio(at), end);
+                room = Math.min(room, window.roomBelow(lowest + biasHelp(at), end));
             }
-            return room >= bestRoom - SAME * width;
+            return room >= bestRoom - SAME;
         }
 
         /** The most by which a bias current within its allowed share can shift the threshold, V. */
@@ -144,15 +141,15 @@ final class ValueChoice {
             }
             double room = Double.POSITIVE_INFINITY;
             for (int end = 0; end < 2; end++) {
-                room = Math.min(room,
-                        window.slack(window.lowest(source, resistors, k, end) - bias.max() * parallel,
-                                window.highest(source, resistors, k, end) - bias.min() * parallel, end));
+                double least = window.lowest(source, resistors, k, end) - bias.max() * parallel;
+                double most = window.highest(source, resistors, k, end) - bias.min() * parallel;
+                room = Math.min(room, Math.min(window.roomAbove(most, end), window.roomBelow(least, end)));
             }
-            if (room > bestRoom + SAME * width) {
+            if (room > bestRoom + SAME) {
                 bestRoom = room;
                 best.clear();
                 best.add(at);
-            } else if (room >= bestRoom - SAME * width) {
+            } else if (room >= bestRoom - SAME) {
                 best.add(at);
             }
         }

@@ -19,6 +19,9 @@ import shuntwright.quantity.Range;
  */
 final class Window {
 
+    /** A target is kept this share of the window away from its ends. */
+    private static final double EDGE = 0.02;
+
     /** The threshold must stay at or above, by end of ambient, V. */
     final double[] low = new double[2];
     /** The threshold must stay at or below, V. */
@@ -34,6 +37,9 @@ final class Window {
 
     private final ThresholdTerms terms;
     private final double ceiling;
+    private final double target;
+    private final double above;
+    private final double below;
     private final boolean byLimits;
     private final OptionalDouble pinned;
 
@@ -63,6 +69,29 @@ final class Window {
         }
         ceiling = Math.min(LimitRules.highestOutput(a.amplifiers[j], around),
                 LimitRules.highestThreshold(comparator, around));
+        double top = Math.min(ceiling, Math.min(high[0], high[1]));
+        double base = Math.max(low[0], low[1]);
+        boolean open = base < top;
+        double edge = EDGE * (top - base);
+        double wanted = a.gain[j] * s.resistance * problem.demand().tripTarget();
+        target = open ? Math.min(top - edge, Math.max(base + edge, wanted)) : (base + top) / 2;
+        above = open ? top - target : 1;
+        below = open ? target - base : 1;
+    }
+
+    /** The threshold that corresponds to the trip target, kept a little inside the window, V. */
+    double target() {
+        return target;
+    }
+
+    /** Room left above a threshold's highest value at an end, as a share of the room above the target. */
+    double roomAbove(double most, int end) {
+        return (Math.min(high[end], ceiling) - most) / above;
+    }
+
+    /** Room left below a threshold's lowest value at an end, as a share of the room below the target. */
+    double roomBelow(double least, int end) {
+        return (least - low[end]) / below;
     }
 
     /** Relative movement of a resistor at an end of ambient. */

@@ -210,7 +210,7 @@ final class BoardContext {
         Optional<ResistorSeries> pinned = channel.pins().resistors()
                 .flatMap(number -> catalogue.find(number, ResistorSeries.class));
         boolean onTap = channel.threshold() instanceof ThresholdDemand.SharedTap;
-        List<ResistorSeries> series = pinned.map(List::of).orElse(onTap ? tapResistors() : resistors);
+        List<ResistorSeries> series = onTap ? tapResistors() : pinned.map(List::of).orElse(resistors);
         return new ChannelProblem(demand, around, catalogue, sources, tap, series, pullUp(channel),
                 board.acceptance(), board.buildQuantity());
     }

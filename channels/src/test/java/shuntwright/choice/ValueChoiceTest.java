@@ -73,9 +73,13 @@ class ValueChoiceTest {
             double down = least * bottom * (1 - moves) / (bottom * (1 - moves) + top * (1 + moves));
             double up = most * bottom * (1 + moves) / (bottom * (1 + moves) + top * (1 - moves));
             double offset = window.comparator.inputs().offset() + window.comparator.inputs().offsetDrift() * kelvin;
-            room = Math.min(room, down - offset - bias.max() * parallel - window.low[end]);
+            double base = Math.max(window.low[0], window.low[1]);
+            double lid = Math.min(window.ceiling(), Math.min(window.high[0], window.high[1]));
+            double below = base < lid ? window.target() - base : 1;
+            double above = base < lid ? lid - window.target() : 1;
+            room = Math.min(room, (down - offset - bias.max() * parallel - window.low[end]) / below);
             room = Math.min(room,
-                    Math.min(window.high[end], window.ceiling()) - (up + offset - bias.min() * parallel));
+                    (Math.min(window.high[end], window.ceiling()) - (up + offset - bias.min() * parallel)) / above);
         }
         return room;
     }
@@ -108,14 +112,14 @@ class ValueChoiceTest {
             return;
         }
         double best = all.stream().mapToDouble(Pair::room).max().orElseThrow();
-        double same = 1e-8 * (Math.abs(window.low[0]) + Math.abs(window.high[0]));
+        double same = 1e-7;
         assertThat(chosen).isNotEmpty().allSatisfy(each -> {
             assertThat(respects(problem, window, source, each.top(), each.bottom())).isTrue();
             assertThat(room(problem, window, source, series, each.top(), each.bottom())).isEqualTo(best, within(same));
             assertThat(each.source()).isEqualTo(source);
             assertThat(each.users()).isEqualTo(1);
         });
-        long ties = all.stream().filter(each -> each.room() >= best - same / 100).count();
+        long ties = all.stream().filter(each -> each.room() >= best - 1e-10).count();
         assertThat(chosen).hasSizeGreaterThanOrEqualTo((int) Math.min(3, ties)).doesNotHaveDuplicates();
     }
 

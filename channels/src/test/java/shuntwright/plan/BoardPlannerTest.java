@@ -277,4 +277,21 @@ class BoardPlannerTest {
         }
         assertThat(planner.plan(board, CATALOGUE, Progress.SILENT)).isEqualTo(plan(board));
     }
+
+    @Test
+    void theTripTargetIsAimedAt() {
+        for (double target : new double[]{0, 9, 11.3, 13}) {
+            Channel c = channel("aimed", 5, 8, 16);
+            Channel.Currents i = c.currents();
+            OptionalDouble wanted = target == 0 ? OptionalDouble.empty() : OptionalDouble.of(target);
+            Plan plan = plan(board(c.withCurrents(new Channel.Currents(i.load(), i.noTrip(), i.mustTrip(), wanted,
+                    i.least(), i.fullScale()))));
+            ChannelPlan solved = plan.channels().getFirst();
+            assertThat(solved.verdict()).isEqualTo(Verdict.INSIDE);
+            // Without a target the geometric mean of no-trip and must-trip is aimed at.
+            double aim = target == 0 ? Math.sqrt(8 * 16) : target;
+            assertThat(solved.solved().orElseThrow().trip().nominal()).as("target " + target)
+                    .isCloseTo(aim, within(0.03 * aim));
+        }
+    }
 }
