@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Dimension;
+import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Spread;
 
@@ -52,32 +54,39 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
         double noTrip = currents.noTrip().getAsDouble();
         double mustTrip = currents.mustTrip().getAsDouble();
         if (!(load <= noTrip)) {
-            missing.add("the no-trip current must not be below the load current");
+            missing.add("the no-trip current " + amperes(noTrip) + " must not be below the load current "
+                    + amperes(load));
         }
         if (!(noTrip < mustTrip)) {
-            missing.add("the no-trip current must be below the must-trip current");
+            missing.add("the no-trip current " + amperes(noTrip) + " must be below the must-trip current "
+                    + amperes(mustTrip));
         }
         double target = currents.tripTarget().orElse(Math.sqrt(noTrip * mustTrip));
         if (!(noTrip < target && target < mustTrip)) {
-            missing.add("the trip target must lie between no-trip and must-trip current");
+            missing.add("the trip target " + amperes(target) + " must lie between no-trip current " + amperes(noTrip)
+                    + " and must-trip current " + amperes(mustTrip));
         }
         double least = currents.least().orElse(load);
         if (!(least > 0 && least <= load)) {
-            missing.add("the least current must be above 0 and not above the load current");
+            missing.add("the least current " + amperes(least) + " must be above 0 A and not above the load current "
+                    + amperes(load));
         }
         double fullScale = currents.fullScale().orElse(mustTrip);
         if (!(fullScale >= load)) {
-            missing.add("the full-scale current must not be below the load current");
+            missing.add("the full-scale current " + amperes(fullScale) + " must not be below the load current "
+                    + amperes(load));
         }
         if (channel.reading().atLeast().isPresent() && currents.least().isEmpty()) {
             missing.add("a reading accuracy at the least current is asked for, but the least current is missing");
         }
         OptionalDouble fault = channel.stress().fault();
         if (fault.isPresent() && !(fault.getAsDouble() >= mustTrip)) {
-            missing.add("the fault current must not be below the must-trip current");
+            missing.add("the fault current " + amperes(fault.getAsDouble())
+                    + " must not be below the must-trip current " + amperes(mustTrip));
         }
         if (channel.release() instanceof ReleaseDemand.Between && !(load < noTrip)) {
-            missing.add("the release window between load and no-trip current is empty");
+            missing.add("the release window between load current " + amperes(load) + " and no-trip current "
+                    + amperes(noTrip) + " is empty");
         }
         if (channel.release() instanceof ReleaseDemand.Window(Range window) && !(window.min() < window.max())) {
             missing.add("the release window is empty");
@@ -96,6 +105,10 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
         };
         return new Reading.Complete(new Demand(channel, commonMode, load, Range.of(noTrip, mustTrip), target, rearm,
                 fullScale));
+    }
+
+    private static String amperes(double current) {
+        return QuantityWriter.show(current, Dimension.CURRENT);
     }
 
     private static void positive(OptionalDouble value, String what, List<String> missing) {

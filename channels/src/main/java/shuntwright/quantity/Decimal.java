@@ -49,7 +49,7 @@ record Decimal(boolean minus, BigDecimal size) {
 
     /** Without exponent, in units of 10^shift. */
     String plain(int shift) {
-        return sign() + size.scaleByPowerOfTen(-shift).toPlainString();
+        return sign() + (isZero() ? "0" : size.scaleByPowerOfTen(-shift).toPlainString());
     }
 
     /** With exponent, "1.5e-20", in units of 10^shift. */

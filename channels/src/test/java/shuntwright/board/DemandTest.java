@@ -75,8 +75,10 @@ class DemandTest {
 
     @Test
     void saysWhatContradicts() {
-        assertThat(missing(channel(currents(26, 25, 36)))).anyMatch(each -> each.contains("no-trip current must not"));
-        assertThat(missing(channel(currents(20, 36, 36)))).anyMatch(each -> each.contains("below the must-trip"));
+        assertThat(missing(channel(currents(26, 25, 36))))
+                .anyMatch(each -> each.contains("no-trip current 25 A must not be below the load current 26 A"));
+        assertThat(missing(channel(currents(20, 36, 36))))
+                .anyMatch(each -> each.contains("below the must-trip current 36 A"));
         assertThat(missing(channel(currents(25, 25, 36)))).anyMatch(each -> each.contains("release window between"));
         assertThat(missing(channel(currents(20, 25, 36))
                 .withRelease(new ReleaseDemand.Window(Range.exactly(22))))).containsExactly(

@@ -8,6 +8,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class QuantityWriterTest {
@@ -47,6 +48,12 @@ class QuantityWriterTest {
             """)
     void writesEngineeringNotation(double value, Dimension dimension, String expected) {
         assertThat(QuantityWriter.write(value, dimension)).isEqualTo(expected);
+    }
+
+    @ParameterizedTest
+    @EnumSource(Dimension.class)
+    void zeroIsOneDigitInEveryUnit(Dimension dimension) {
+        assertThat(QuantityWriter.show(0, dimension)).matches("0(\\D.*)?");
     }
 
     @Test

@@ -10,6 +10,7 @@ import shuntwright.io.json.Json;
 import shuntwright.io.json.LocatedJson;
 import shuntwright.io.json.Problems;
 import shuntwright.quantity.Dimension;
+import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Range;
 
 /** What happens after a trip, in a file: "between", "latch" or a window of currents. */
@@ -35,12 +36,18 @@ final class ReleaseKind implements Kind<ReleaseDemand> {
             }
         }
         return window.read(value, problems).flatMap(range -> {
-            if (range.max() > 0) {
-                return Optional.of(new ReleaseDemand.Window(range));
+            if (!(range.max() > 0)) {
+                problems.add(value, "a release window that ends at 0 A can never be reached; give a window above 0 A, "
+                        + "or \"latch\"");
+                return Optional.empty();
             }
-            problems.add(value, "a release window that ends at 0 A can never be reached; give a window above 0 A, "
-                    + "or \"latch\"");
-            return Optional.empty();
+            if (!(range.min() < range.max())) {
+                problems.add(value, "the release window is empty, from and to are both "
+                        + QuantityWriter.show(range.min(), Dimension.CURRENT)
+                        + "; give two currents such as \"30 .. 34 A\"");
+                return Optional.empty();
+            }
+            return Optional.of(new ReleaseDemand.Window(range));
         });
     }
 

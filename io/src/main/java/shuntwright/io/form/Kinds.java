@@ -21,10 +21,13 @@ public final class Kinds {
         return new TextKind<>("text", "a text in double quotes", Optional::of, text -> text);
     }
 
-    /** A text by which something is found again: not empty, no blanks at its ends. */
+    /** A text by which something is found again: not empty, no blanks at its ends, no control characters. */
     public static Kind<String> name() {
-        return new TextKind<>("text", "a name that is not empty and has no blanks at its ends",
-                text -> text.isEmpty() || !text.equals(text.strip()) ? Optional.empty() : Optional.of(text),
+        return new TextKind<>("text",
+                "a name that is not empty and has no blanks at its ends and no control characters",
+                text -> text.isEmpty() || !text.equals(text.strip()) || text.chars().anyMatch(Character::isISOControl)
+                        ? Optional.empty()
+                        : Optional.of(text),
                 text -> text);
     }
 

@@ -37,6 +37,11 @@ record QuantityKind<V>(Dimension dimension, Bounds bounds, String shape, Functio
                 case Reading.Value<V>(V read) -> within(read, "\"" + text.value() + "\"", value, problems);
                 case Reading.Misread<V>(String problem) -> refuse(value, problem, problems);
             };
+            case LocatedJson.Num num when Double.isNaN(num.value()) ->
+                refuse(value,
+                        num.written() + " is not a number; write a " + dimension.word() + " such as \"" + example()
+                                + "\"",
+                        problems);
             case LocatedJson.Num num when Double.isInfinite(num.value()) ->
                 refuse(value, num.written() + " is larger than this program can count", problems);
             case LocatedJson.Num num -> bareNumber(num, problems);

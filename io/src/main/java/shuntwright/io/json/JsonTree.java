@@ -10,15 +10,22 @@ import tools.jackson.core.JacksonException;
 import tools.jackson.core.JsonParser;
 import tools.jackson.core.JsonToken;
 import tools.jackson.core.ObjectReadContext;
+import tools.jackson.core.StreamReadConstraints;
 import tools.jackson.core.TokenStreamLocation;
 import tools.jackson.core.json.JsonFactory;
+import tools.jackson.core.json.JsonReadFeature;
 
 /** Builds the tree of located values from JSON text. */
 public final class JsonTree {
     /** Deepest nesting of objects and lists that is read; the files of this program need fewer than ten. */
     static final int DEEPEST = 64;
 
-    private static final JsonFactory FACTORY = JsonFactory.builder().build();
+    /** Of a number's digits, as messages show them. */
+    private static final int LONGEST_SHOWN = 40;
+
+    private static final JsonFactory FACTORY = JsonFactory.builder()
+            .streamReadConstraints(StreamReadConstraints.builder().maxNumberLength(Integer.MAX_VALUE).build())
+            .enable(JsonReadFeature.ALLOW_NON_NUMERIC_NUMBERS).build();
 
     private final JsonParser parser;
     private final Problems problems;
@@ -81,7 +88,9 @@ public final class JsonTree {
         }
         if (token.isNumeric()) {
             String written = parser.getString();
-            return new LocatedJson.Num(place, Double.parseDouble(written), written);
+            double value = parser.isNaN() ? Double.NaN : Double.parseDouble(written);
+            return new LocatedJson.Num(place, value,
+                    written.length() > LONGEST_SHOWN ? written.substring(0, LONGEST_SHOWN) + "…" : written);
         }
         return token.isBoolean()
                 ? new LocatedJson.Bool(place, token == JsonToken.VALUE_TRUE)

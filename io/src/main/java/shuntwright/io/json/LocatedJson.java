@@ -54,8 +54,9 @@ public sealed interface LocatedJson {
     record Text(Place place, String value) implements LocatedJson {}
 
     /**
-     * @param value   infinite where the written number is beyond a double
-     * @param written as in the file
+     * @param value   infinite where the written number is beyond a double; NaN where no number is written, but NaN or
+     *                Infinity
+     * @param written as in the file, shortened where it is very long
      */
     record Num(Place place, double value, String written) implements LocatedJson {}
 

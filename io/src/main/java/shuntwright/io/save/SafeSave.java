@@ -34,6 +34,9 @@ public final class SafeSave {
             if (Files.isDirectory(target)) {
                 return failed(file, "a folder has this name; choose another name");
             }
+            if (Files.exists(target) && !Files.isRegularFile(target)) {
+                return failed(file, "this is a device or pipe, which a file would replace; choose another name");
+            }
             Path folder = target.getParent();
             if (folder == null || !Files.isDirectory(folder)) {
                 return failed(file, "there is no folder " + folder + "; create it or choose another one");

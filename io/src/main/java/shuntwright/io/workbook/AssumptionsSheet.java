@@ -22,7 +22,8 @@ final class AssumptionsSheet {
     private static final List<String> MODEL = List.of(
             "A shunt turns the current into a voltage, a sense amplifier multiplies it by its gain, a comparator "
                     + "compares the product with a threshold. Nominal trip current: threshold ÷ gain ÷ R_s, where R_s is "
-                    + "all shunts of the channel in parallel with their mounting resistance.",
+                    + "all shunts of the channel in parallel with their mounting resistance, whose copper takes more as it "
+                    + "warms.",
             "Lowest and highest are exact extremes: every input at the worse of its limits, all at once, both ends of "
                     + "ambient temperature, supply and rail voltage included. Inside means that these extremes keep to "
                     + "the demand.",

@@ -1,6 +1,7 @@
 package shuntwright.io.save;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assumptions.assumeThat;
 
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -106,6 +107,17 @@ class SafeSaveTest {
         assertThat(message(SafeSave.save(inTheWay, NEW))).contains("a folder has this name");
         assertThat(message(SafeSave.save(folder.resolve("none/a.json"), NEW))).contains("there is no folder");
         assertThat(files()).isEqualTo(1);
+    }
+
+    @Test
+    void aDeviceIsNotReplacedByAFile() {
+        Path device = Path.of("/dev/null");
+        assumeThat(device).exists();
+
+        assertThat(message(SafeSave.save(device, _ -> {
+            throw new IllegalStateException("nothing may be written beside it");
+        }))).contains("a device or pipe");
+        assertThat(Files.isRegularFile(device)).isFalse();
     }
 
     @Test

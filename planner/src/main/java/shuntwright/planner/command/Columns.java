@@ -25,9 +25,10 @@ final class Columns {
 
     /** Adds a row whose painted column goes through {@code paint} once it has its width. */
     void add(List<String> cells, UnaryOperator<String> paint) {
-        rows.add(new Row(List.copyOf(cells), paint));
-        for (int i = 0; i < cells.size(); i++) {
-            int width = width(cells.get(i));
+        List<String> tame = cells.stream().map(Spelling::harmless).toList();
+        rows.add(new Row(tame, paint));
+        for (int i = 0; i < tame.size(); i++) {
+            int width = width(tame.get(i));
             if (i == widths.size()) {
                 widths.add(width);
             } else {

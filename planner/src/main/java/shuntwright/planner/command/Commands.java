@@ -35,7 +35,7 @@ public final class Commands {
         line.setOut(new PrintWriter(terminal.out(), true, terminal.charset()))
                 .setErr(new PrintWriter(terminal.err(), true, terminal.charset()));
         line.setColorScheme(Help.defaultColorScheme(terminal.colour() ? Help.Ansi.ON : Help.Ansi.OFF));
-        line.setUsageHelpWidth(100).setUsageHelpLongOptionsMaxWidth(30);
+        line.setUsageHelpWidth(120).setUsageHelpLongOptionsMaxWidth(30);
         line.setParameterExceptionHandler((wrong, _) -> Failures.ofOptions(terminal, wrong));
         line.setExecutionExceptionHandler((failure, _, _) -> Failures.of(terminal, failure, top.trace()));
         try {

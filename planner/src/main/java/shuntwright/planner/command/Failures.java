@@ -34,7 +34,7 @@ final class Failures {
 
     static int of(Terminal terminal, Throwable failure, boolean trace) {
         if (failure instanceof BadInput bad) {
-            bad.problems().forEach(terminal::complain);
+            bad.problems().forEach(each -> terminal.complain(Spelling.harmless(each)));
             return ExitCode.BAD_INPUT.number();
         }
         String message = Optional.ofNullable(failure.getMessage()).map(text -> ": " + text).orElse("");

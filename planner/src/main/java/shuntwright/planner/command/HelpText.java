@@ -1,13 +1,17 @@
 package shuntwright.planner.command;
 
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.stream.Stream;
 
 import picocli.CommandLine;
 import picocli.CommandLine.Model.UsageMessageSpec;
+import shuntwright.io.planfile.Cautions;
 
 /** What the help says besides the options: examples and exit codes. */
 final class HelpText {
+    private static final String START = "  java -jar planner/target/shuntwright.jar ";
     private static final String DEMO = "demo-boards/sledge-wren.board.json";
 
     private HelpText() {
@@ -18,7 +22,8 @@ final class HelpText {
         line.getCommandSpec().usageMessage().synopsisSubcommandLabel("[COMMAND]").description(
                 "Plans the overcurrent protection of every output of a power distribution board.",
                 "Without a command: opens the window; where there is no display, plans a demo board.");
-        examples(line, "window " + DEMO, "plan " + DEMO + " --workbook wren.xlsx", "check wren-chosen.board.json");
+        examples(line, "window " + DEMO, "plan " + DEMO + " --workbook wren.xlsx",
+                "plan " + DEMO + " --pinned wren-chosen.board.json", "check wren-chosen.board.json");
         for (Map.Entry<String, CommandLine> each : line.getSubcommands().entrySet()) {
             switch (each.getKey()) {
                 case "plan" -> {
@@ -28,8 +33,8 @@ final class HelpText {
                     exitCodes(each.getValue());
                 }
                 case "check" -> {
-                    examples(each.getValue(), "check wren-chosen.board.json",
-                            "check wren-chosen.board.json --parts bought.parts.json",
+                    examples(each.getValue(), "plan " + DEMO + " --pinned wren-chosen.board.json",
+                            "check wren-chosen.board.json", "check wren-chosen.board.json --workbook wren.xlsx",
                             "check wren-chosen.board.json --json");
                     exitCodes(each.getValue());
                 }
@@ -40,9 +45,11 @@ final class HelpText {
 
     private static void examples(CommandLine line, String... examples) {
         UsageMessageSpec usage = line.getCommandSpec().usageMessage();
+        usage.description(Stream.concat(Arrays.stream(usage.description()), Stream.of(Cautions.LINE))
+                .toArray(String[]::new));
         String[] lines = new String[examples.length];
         for (int i = 0; i < examples.length; i++) {
-            lines[i] = "  shuntwright " + examples[i];
+            lines[i] = START + examples[i];
         }
         usage.footerHeading("%nExamples:%n").footer(lines);
     }

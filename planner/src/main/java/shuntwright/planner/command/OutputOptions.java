@@ -8,7 +8,7 @@ import picocli.CommandLine.Option;
 /** What to make of a plan. */
 final class OutputOptions {
 
-    @Option(names = "--workbook", paramLabel = "FILE", description = "Write the workbook (.xlsx): parts list with prices, settings, findings, bench check.")
+    @Option(names = "--workbook", paramLabel = "FILE", description = "Write the workbook (.xlsx): parts list with prices, settings, findings, assumptions, cautions.")
     private Optional<Path> workbook = Optional.empty();
 
     @Option(names = "--plan", paramLabel = "FILE", description = "Write the plan file (.json): everything computed.")

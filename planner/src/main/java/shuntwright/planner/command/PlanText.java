@@ -49,7 +49,8 @@ final class PlanText {
 
     private void summary() {
         long accepted = plan.channels().stream().filter(ChannelPlan::accepted).count();
-        lines.add(plan.board().name() + ": " + accepted + " of " + plan.channels().size() + " channels accepted, parts "
+        lines.add(Spelling.harmless(plan.board().name()) + ": " + accepted + " of " + plan.channels().size()
+                + " channels accepted, parts "
                 + String.format(Locale.ROOT, "%.2f %s", plan.costPerBoard(), plan.currency())
                 + " for each board of a build of " + plan.board().buildQuantity());
         lines.add("");
@@ -118,7 +119,7 @@ final class PlanText {
         List<String> body = about.lines();
         if (!body.isEmpty()) {
             lines.add("");
-            lines.add(title);
+            lines.add(Spelling.harmless(title));
             lines.addAll(body);
         }
     }

@@ -15,6 +15,22 @@ final class Spelling {
     private Spelling() {
     }
 
+    /**
+     * The text without what would steer a terminal or turn its line around: control characters and marks of writing
+     * direction. For words from files, which may be by others.
+     */
+    static String harmless(String text) {
+        StringBuilder tame = new StringBuilder(text.length());
+        text.codePoints().forEach(each -> tame.appendCodePoint(steers(each) ? '\uFFFD' : each));
+        return tame.toString();
+    }
+
+    private static boolean steers(int sign) {
+        int type = Character.getType(sign);
+        return type == Character.CONTROL || type == Character.FORMAT || type == Character.LINE_SEPARATOR
+                || type == Character.PARAGRAPH_SEPARATOR;
+    }
+
     /** The text, with every character that the charset cannot encode written in ones it can. */
     static String in(Charset charset, String text) {
         if (!charset.canEncode()) {

@@ -8,6 +8,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
+import shuntwright.io.planfile.Cautions;
+
 /** Help, version, and what is said to wrong options. */
 class OptionsTest {
 
@@ -20,7 +22,9 @@ class OptionsTest {
         assertThat(run.err()).isEmpty();
         assertThat(run.out()).startsWith(("Usage: shuntwright " + command).strip());
         assertThat(run.out().lines().dropWhile(line -> !line.equals("Examples:")).skip(1)).isNotEmpty()
-                .allSatisfy(line -> assertThat(line).startsWith("  shuntwright " + command));
+                .allSatisfy(line -> assertThat(line).startsWith("  java -jar planner/target/shuntwright.jar "))
+                .anySatisfy(line -> assertThat(line).contains("shuntwright.jar " + command));
+        assertThat(run.out()).contains(Cautions.LINE);
     }
 
     @ParameterizedTest

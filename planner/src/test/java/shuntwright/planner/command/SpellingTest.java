@@ -24,6 +24,12 @@ class SpellingTest {
     }
 
     @Test
+    void words_from_files_do_not_steer_the_terminal() {
+        assertThat(Spelling.harmless("4 mΩ\u001b[31m\nred\u202e\u2028🔌"))
+                .isEqualTo("4 mΩ\uFFFD[31m\uFFFDred\uFFFD\uFFFD🔌");
+    }
+
+    @Test
     void whatever_has_no_words_becomes_a_question_mark() {
         assertThat(Spelling.in(StandardCharsets.US_ASCII, "Küche 🔌")).isEqualTo("K?che ?");
     }
