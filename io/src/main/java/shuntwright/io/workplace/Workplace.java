@@ -57,7 +57,9 @@ public record Workplace(Board board, Catalogue catalogue) {
         List<Path> files = new ArrayList<>();
         List<LocatedJson> names = root instanceof LocatedJson.Obj board ? board.elements("parts") : List.of();
         for (LocatedJson each : names) {
-            if (each instanceof LocatedJson.Text(var _, String name) && !name.isBlank()) {
+            // A name with control characters is a problem that the board's form has told of already.
+            if (each instanceof LocatedJson.Text(var _, String name) && !name.isBlank()
+                    && name.chars().noneMatch(Character::isISOControl)) {
                 try {
                     Path file = boardFile.resolveSibling(name);
                     if (Files.exists(file)) {
