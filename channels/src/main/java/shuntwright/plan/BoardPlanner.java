@@ -276,6 +276,10 @@ public final class BoardPlanner {
     private static Plan assembled(BoardContext context, List<ChannelPlan> planned, List<TapPlan> taps) {
         Board board = context.board();
         List<Finding> findings = new ArrayList<>(context.findings());
+        if (planned.isEmpty()) {
+            findings.add(Findings.board(Finding.Key.NO_CHANNELS,
+                    "The board has no channels yet: add one for each output rail.", List.of()));
+        }
         List<ChannelPlan> channels = TapFindings.added(planned, taps, findings);
         List<AlertPlan> alerts = new ArrayList<>();
         for (var line : board.alertLines()) {
@@ -288,11 +292,13 @@ public final class BoardPlanner {
             alerts.add(alert);
             findings.addAll(AlertJudge.findings(alert, context.lineVoltage(line), outputs));
         }
-        List<SharedUse> uses = new SharedBudget(context, channels, taps, alerts).uses();
+        SharedBudget budget = new SharedBudget(context, channels, taps, alerts);
+        List<SharedUse> uses = budget.uses();
         findings.addAll(SharedBudget.findings(uses));
         List<PartUse> parts = PartsList.of(channels, new LinkedHashMap<>(context.referenceParts()), taps, alerts,
                 context.tapResistors(), context.pullUpResistors());
-        return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps, parts,
+        return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,
+                budget.references(), parts,
                 Findings.sorted(findings));
     }
 

@@ -107,8 +107,11 @@ final class ChannelSolver {
     /** A channel that cannot be planned because data are missing. */
     static ChannelPlan incomplete(Channel channel, List<String> missing) {
         String text = "Not planned: " + String.join("; ", missing) + ".";
+        Finding.Key key = missing.stream().anyMatch(each -> each.contains("missing"))
+                ? Finding.Key.DATA_MISSING
+                : Finding.Key.DEMAND_CONTRADICTS;
         return new ChannelPlan(channel, Verdict.INCOMPLETE, false, Optional.empty(),
-                List.of(Findings.channel(Finding.Key.DATA_MISSING, channel, text)), List.of(), List.of());
+                List.of(Findings.channel(key, channel, text)), List.of(), List.of());
     }
 
     /** A channel for which no circuit respects the limits. */

@@ -111,12 +111,12 @@ final class Cures {
             }
             case ThresholdDemand.SharedTap(String tap) ->
                 add(Cure.Lever.SOURCE, "a divider of its own instead of tap " + tap, SOURCE_EFFORT,
-                        channel.withThreshold(new ThresholdDemand.Free()));
+                        freeValues(channel.withThreshold(new ThresholdDemand.Free())));
             case ThresholdDemand.OwnDivider(Source source) -> {
                 for (Source other : trials.sources()) {
                     if (!other.equals(source)) {
                         add(Cure.Lever.SOURCE, words(other) + " instead of " + words(source), SOURCE_EFFORT,
-                                channel.withThreshold(new ThresholdDemand.OwnDivider(other)));
+                                freeValues(channel.withThreshold(new ThresholdDemand.OwnDivider(other))));
                     }
                 }
             }
@@ -124,6 +124,13 @@ final class Cures {
         trials.withBestReference(channel).ifPresent(reached -> add(Cure.Lever.SOURCE,
                 "a precision reference on the board, part " + trials.bestReference(), 2 * SOURCE_EFFORT, reached,
                 Optional.empty()));
+    }
+
+    /** Another source needs other values: a pinned divider would only carry the old ratio over. */
+    private static Channel freeValues(Channel edited) {
+        Pins p = edited.pins();
+        return edited.withPins(new Pins(p.shunt(), p.shuntCount(), p.amplifier(), p.comparator(), p.resistors(),
+                OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty()));
     }
 
     private static String words(Source source) {
@@ -200,8 +207,7 @@ final class Cures {
                 continue;
             }
             switch (each.outcome()) {
-                case TRIP -> {
-                }
+                case TRIP -> bothEnds(each);
                 case RELEASE -> {
                     Range allowed = each.allowed();
                     Range wide = Range.of(rounded(Math.min(allowed.min(), Math.max(0, each.limits().min())), false),
@@ -216,6 +222,20 @@ final class Cures {
                 }
                 case READING_AT_LEAST, READING_AT_LOAD -> reading(each);
             }
+        }
+    }
+
+    /** Where the values are pinned the interval cannot shift, so both ends of the window may have to move. */
+    private void bothEnds(Assessment trip) {
+        Range allowed = trip.allowed();
+        Range reached = trip.limits();
+        if (reached.min() < allowed.min() && reached.max() > allowed.max()) {
+            double noTrip = rounded(reached.min(), false);
+            double mustTrip = rounded(reached.max(), true);
+            add(Cure.Lever.WINDOW,
+                    "no-trip " + ampere(allowed.min()) + " → " + ampere(noTrip) + " and must-trip "
+                            + ampere(allowed.max()) + " → " + ampere(mustTrip),
+                    mustTrip / allowed.max() - noTrip / allowed.min(), withWindow(noTrip, mustTrip));
         }
     }
 

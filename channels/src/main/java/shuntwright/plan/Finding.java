@@ -31,6 +31,7 @@ public record Finding(Key key, Optional<String> channel, String text, List<Measu
     /** Kinds of findings. */
     public enum Key {
         DATA_MISSING(Severity.FAULT, "data missing"),
+        DEMAND_CONTRADICTS(Severity.FAULT, "contradictory demand"), NO_CHANNELS(Severity.WARNING, "no channels"),
         NOT_PINNED(Severity.FAULT, "not pinned"),
         UNKNOWN_PART(Severity.FAULT, "unknown part"),
         OUTSIDE_WINDOW(Severity.FAULT, "outside its window"),

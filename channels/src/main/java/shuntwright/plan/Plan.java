@@ -14,17 +14,20 @@ import shuntwright.board.Board;
  * @param shared   supply, references, heat
  * @param alerts   alert lines
  * @param taps     shared thresholds
+ * @param references with their parts
  * @param parts    the consolidated parts list, by designator letter and part number
  * @param findings about the board as a whole
  */
 public record Plan(Board board, String currency, List<ChannelPlan> channels, List<SharedUse> shared,
-        List<AlertPlan> alerts, List<TapPlan> taps, List<PartUse> parts, List<Finding> findings) {
+        List<AlertPlan> alerts, List<TapPlan> taps,
+        List<ReferencePlan> references, List<PartUse> parts, List<Finding> findings) {
 
     public Plan {
         channels = List.copyOf(channels);
         shared = List.copyOf(shared);
         alerts = List.copyOf(alerts);
         taps = List.copyOf(taps);
+        references = List.copyOf(references);
         parts = List.copyOf(parts);
         findings = List.copyOf(findings);
     }

@@ -49,6 +49,12 @@ final class SharedBudget {
         return uses;
     }
 
+    List<ReferencePlan> references() {
+        List<ReferencePlan> references = new ArrayList<>();
+        context.referenceParts().forEach((name, part) -> references.add(new ReferencePlan(name, part, loadOf(name))));
+        return references;
+    }
+
     private double heat(String zone) {
         return channels.stream().filter(each -> zone.isEmpty() || each.channel().zone().orElse("").equals(zone))
                 .flatMap(each -> each.solved().stream()).mapToDouble(SolvedChannel::heat).sum();

@@ -71,7 +71,7 @@ public final class HandMadePlans {
                 : List.of(new PartUse(HandMadeParts.SHUNT.partNumber(), HandMadeParts.SHUNT.description(),
                         channels.size(), designators(channels.size()),
                         channels.stream().map(each -> each.channel().name()).toList(), HandMadeParts.PURCHASE));
-        return new Plan(board, "EUR", channels, shared, alerts, List.of(), parts, List.of());
+        return new Plan(board, "EUR", channels, shared, alerts, List.of(), List.of(), parts, List.of());
     }
 
     private static List<String> designators(int count) {

@@ -10,6 +10,7 @@ import shuntwright.parts.InputErrors;
 import shuntwright.parts.OpenDrainOutput;
 import shuntwright.parts.PriceBreak;
 import shuntwright.parts.Purchase;
+import shuntwright.parts.Reference;
 import shuntwright.parts.ResistorSeries;
 import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
@@ -147,6 +148,17 @@ final class PartTables {
             .number("supplyCurrent", Unit.AMPERE, "largest of the whole package", Comparator::supplyCurrent)
             .range("delay", Unit.SECOND, "input to output", Comparator::delay)
             .count("sections", "comparators in one package", Comparator::sections).form();
+
+    static final Form<Reference> REFERENCE = ObjectTable.<Reference>named("reference", "A precision voltage reference.")
+            .text("partNumber", PART_NUMBER, Reference::partNumber)
+            .text("description", "free text", Reference::description)
+            .object("voltage", CommonTables.TOLERANCED_VOLTAGE, "at 25 °C without load", Reference::voltage)
+            .number("drift", Unit.PER_KELVIN, MAGNITUDE, Reference::drift)
+            .number("ageing", Unit.FRACTION, "largest relative change over life", Reference::ageing)
+            .number("loadRegulation", Unit.OHM, "largest fall per load current (V/A)", Reference::loadRegulation)
+            .number("availableCurrent", Unit.AMPERE, "largest load", Reference::availableCurrent)
+            .range("supply", Unit.VOLT, "supply voltage", Reference::supply)
+            .number("supplyCurrent", Unit.AMPERE, "own consumption without load", Reference::supplyCurrent).form();
 
     static final Form<ResistorSeries> RESISTORS = ObjectTable.<ResistorSeries>named("resistor series",
             "A family of resistors in the values of an E-series.")

@@ -11,6 +11,7 @@ import shuntwright.plan.Finding;
 import shuntwright.plan.Measure;
 import shuntwright.plan.PartUse;
 import shuntwright.plan.Plan;
+import shuntwright.plan.ReferencePlan;
 import shuntwright.plan.Settings;
 import shuntwright.plan.SharedUse;
 import shuntwright.plan.SolvedChannel;
@@ -119,6 +120,12 @@ final class PlanTables {
             .number("most", Unit.OHM, "largest that high level and rise time allow", AlertPlan::most)
             .number("current", Unit.AMPERE, "largest through it while pulled low", AlertPlan::current).form();
 
+    private static final Form<ReferencePlan> REFERENCE = ObjectTable.<ReferencePlan>named("reference plan",
+            "A reference of the board with its part.")
+            .text("name", "what channels, taps and the ADC call it", ReferencePlan::name)
+            .object("part", PartTables.REFERENCE, "with its limits", ReferencePlan::part)
+            .number("load", Unit.AMPERE, "current of all dividers from it", ReferencePlan::load).form();
+
     private static final Form<TapPlan> TAP = ObjectTable.<TapPlan>named("tap plan", "A tap with its chosen voltage.")
             .object("tap", BoardTables.TAP, "as asked", TapPlan::tap)
             .texts("channels", "that use it", TapPlan::channels)
@@ -146,6 +153,7 @@ final class PlanTables {
             .list("channels", CHANNEL, "in the board's order", Plan::channels)
             .list("shared", SHARED, "supply, references, heat", Plan::shared)
             .list("alerts", ALERT, "alert lines", Plan::alerts).list("taps", TAP, "shared thresholds", Plan::taps)
+            .list("references", REFERENCE, "with their parts", Plan::references)
             .list("parts", PART, "the consolidated parts list", Plan::parts)
             .list("findings", FINDING, "about the board as a whole", Plan::findings);
 

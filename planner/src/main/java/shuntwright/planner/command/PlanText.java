@@ -91,7 +91,9 @@ final class PlanText {
         for (ChannelPlan each : plan.channels()) {
             Columns about = new Columns(1);
             each.findings().stream().filter(PlanText::worthALine).forEach(finding -> add(about, finding));
-            each.refusals().forEach(refusal -> about.add(List.of("", "refused", words(refusal))));
+            if (each.findings().stream().noneMatch(finding -> finding.key() == Finding.Key.NO_FIT)) {
+                each.refusals().forEach(refusal -> about.add(List.of("", "refused", words(refusal))));
+            }
             each.cures().forEach(cure -> about.add(List.of("", cure.cures() ? "cure" : "tried", words(cure))));
             section(each.channel().name(), about);
         }

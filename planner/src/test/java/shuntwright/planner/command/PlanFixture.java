@@ -70,7 +70,8 @@ final class PlanFixture {
                         Dimension.CURRENT),
                         new SharedUse(SharedUse.Kind.ZONE_HEAT, "zone rear edge", 0.25, OptionalDouble.of(0.2),
                                 Dimension.POWER)),
-                List.of(), List.of(), List.of(), List.of(new Finding(Finding.Key.HEAT_OVER_LIMIT, Optional.empty(),
+                List.of(), List.of(), List.of(), List.of(),
+                List.of(new Finding(Finding.Key.HEAT_OVER_LIMIT, Optional.empty(),
                         "zone rear edge is over its limit by 50 mW", List.of())));
     }
 
