@@ -218,7 +218,7 @@ final class ChannelEquations {
         double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
         double node = ThresholdNode.voltage(circuit, tripped, x, weight, g);
         double offset = x[Slot.COMPARATOR_OFFSET.place()] + x[Slot.COMPARATOR_DRIFT.place()] * dT;
-        double bias = x[Slot.COMPARATOR_BIAS.place()];
+        double bias = x[Slot.SENSE_BIAS.place()];
         double rh = circuit.network() instanceof HysteresisNetwork.SenseResistor(double nominal) ? nominal : 0;
         double tol = x[Slot.SENSE_RESISTOR_TOLERANCE.place()];
         double drift = x[Slot.SENSE_RESISTOR_DRIFT.place()];
@@ -229,7 +229,7 @@ final class ChannelEquations {
         if (g.length > 0) {
             g[Slot.COMPARATOR_OFFSET.place()] += weight;
             g[Slot.COMPARATOR_DRIFT.place()] += weight * dT;
-            g[Slot.COMPARATOR_BIAS.place()] += weight * resistance;
+            g[Slot.SENSE_BIAS.place()] += weight * resistance;
             g[Slot.SENSE_RESISTOR_TOLERANCE.place()] += weight * current * rh;
             g[Slot.SENSE_RESISTOR_DRIFT.place()] += weight * current * rh * dT;
             g[Slot.AMBIENT.place()] += weight * (x[Slot.COMPARATOR_DRIFT.place()] + current * rh * drift);

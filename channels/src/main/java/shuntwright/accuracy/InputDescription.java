@@ -164,6 +164,8 @@ final class InputDescription {
             add(Slot.INJECTED_CURRENT, 0, owner, injected.current().nominal(), injected.current().range());
         }
         if (circuit.network() instanceof HysteresisNetwork.SenseResistor) {
+            // The two inputs of a comparator need not draw alike.
+            add(Slot.SENSE_BIAS, 0, owner, bias.mid(), bias);
             resistor(Slot.SENSE_RESISTOR_TOLERANCE, Slot.SENSE_RESISTOR_DRIFT, new Owner.Own("hysteresis resistor"),
                     circuit.resistors());
         }

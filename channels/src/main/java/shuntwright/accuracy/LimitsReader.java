@@ -43,12 +43,10 @@ final class LimitsReader {
         this.ambient = description.inputs().stream().filter(input -> input.slot() == Slot.AMBIENT).map(Input::limits)
                 .findFirst();
         List<Input> drifts = new ArrayList<>();
-        // A bias current flows through R_H and the divider in opposite senses, so with R_H its tolerance may favour either.
-        boolean twoWays = description.inputs().stream().anyMatch(each -> each.slot() == Slot.SENSE_RESISTOR_TOLERANCE);
         for (Input input : description.inputs()) {
             if (input.slot() == Slot.SHUNT_DRIFT) {
                 drifts.add(input);
-            } else if (ALWAYS.contains(input.slot()) || (twoWays && input.slot() == Slot.COMPARATOR_BIAS)) {
+            } else if (ALWAYS.contains(input.slot())) {
                 enumerated.add(List.of(input));
             } else {
                 monotone.add(input);

@@ -46,7 +46,7 @@ final class IndependentEquations {
         if (drawn.circuit().network() instanceof HysteresisNetwork.SenseResistor(double nominal)) {
             Gradient resistance = varied(nominal, Slot.SENSE_RESISTOR_TOLERANCE, Slot.SENSE_RESISTOR_DRIFT);
             // The sense input draws its bias current, and drives out I_H while tripped.
-            node = node.add(resistance.multiply(x(Slot.COMPARATOR_BIAS)));
+            node = node.add(resistance.multiply(x(Slot.SENSE_BIAS)));
             if (tripped && drawn.circuit().comparator().hysteresis() instanceof Hysteresis.InjectedCurrent) {
                 node = node.subtract(resistance.multiply(x(Slot.INJECTED_CURRENT)));
             }
