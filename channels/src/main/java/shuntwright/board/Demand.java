@@ -58,7 +58,7 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
             missing.add("the no-trip current must be below the must-trip current");
         }
         double target = currents.tripTarget().orElse(Math.sqrt(noTrip * mustTrip));
-        if (!(noTrip < target && target < mustTrip)) {
+        if (noTrip < mustTrip && !(noTrip < target && target < mustTrip)) {
             missing.add("the trip target must lie between no-trip and must-trip current");
         }
         double least = currents.least().orElse(load);
