@@ -69,8 +69,10 @@ final class RowModel {
             change(wrapper(field), new CellEntry(state.text(place), state.wrong(place).map(WrongEntry::reason),
                     field.key(channel.get())));
         }
+        boolean wrong = entries.values().stream().anyMatch(entry -> entry.get().reason().isPresent());
         change(figures, planned.flatMap(plan -> plan.channel(id))
-                .map(plan -> RowFigures.of(plan, !plan.channel().equals(channel.get()))).orElse(RowFigures.NONE));
+                .map(plan -> RowFigures.of(plan, wrong || !plan.channel().equals(channel.get())))
+                .orElse(RowFigures.NONE));
     }
 
     /** Leaves equal values alone, so that only cells that change are drawn again. */
