@@ -22,6 +22,7 @@ import javafx.scene.control.TablePosition;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
 import javafx.scene.control.Tooltip;
+import javafx.scene.control.skin.VirtualFlow;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
@@ -227,9 +228,22 @@ public final class ChannelTable {
     private void select(int row, TableColumn<RowModel, ?> column) {
         table.getSelectionModel().clearAndSelect(row, column);
         table.getFocusModel().focus(row, column);
-        table.scrollTo(Math.max(0, row - 2));
+        scrollIntoSight(row);
         table.scrollToColumn(column);
         table.requestFocus();
+    }
+
+    /** Leaves the rows where they are when the row is in sight already. */
+    private void scrollIntoSight(int row) {
+        if (!(table.lookup(".virtual-flow") instanceof VirtualFlow<?> flow) || flow.getFirstVisibleCell() == null
+                || flow.getLastVisibleCell() == null) {
+            table.scrollTo(Math.max(0, row - 2));
+        } else if (row <= flow.getFirstVisibleCell().getIndex()) {
+            flow.scrollTo(row);
+        } else if (row >= flow.getLastVisibleCell().getIndex()) {
+            int shown = flow.getLastVisibleCell().getIndex() - flow.getFirstVisibleCell().getIndex();
+            flow.scrollTo(Math.max(0, row - Math.max(0, shown - 2)));
+        }
     }
 
     private List<Spot> selectedSpots() {
