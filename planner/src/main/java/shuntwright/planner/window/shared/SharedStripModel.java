@@ -160,7 +160,8 @@ public final class SharedStripModel {
         return switch (channels.size()) {
             case 0 -> "no channel";
             case 1 -> channels.getFirst();
-            default -> channels.size() + " channels: " + String.join(", ", channels);
+            default -> channels.size() + " channels: " + String.join(", ", channels.stream().limit(3).toList())
+                    + (channels.size() > 3 ? " …" : "");
         };
     }
 
