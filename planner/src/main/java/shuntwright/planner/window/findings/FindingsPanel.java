@@ -48,8 +48,7 @@ public final class FindingsPanel {
             list.getChildren().add(head(shown));
             shown.wrong().forEach(each -> list.getChildren().add(wrong(each)));
             shown.findings().forEach(each -> list.getChildren().add(finding(each)));
-            shown.refusals().forEach(each -> list.getChildren().add(text(each)));
-            if (shown.findings().isEmpty() && shown.refusals().isEmpty() && shown.verdict().isPresent()) {
+            if (shown.findings().isEmpty() && shown.verdict().isPresent()) {
                 list.getChildren().add(text("Nothing to report: everything asked of this channel is met."));
             }
             cures(shown);
@@ -85,7 +84,6 @@ public final class FindingsPanel {
         Label kind = new Label("wrong entry");
         kind.getStyleClass().add("severity");
         kind.pseudoClassStateChanged(PseudoClass.getPseudoClass("fault"), true);
-        kind.setMinWidth(Region.USE_PREF_SIZE);
         HBox row = new HBox(kind, text(words));
         row.getStyleClass().add("finding");
         return row;
@@ -111,7 +109,9 @@ public final class FindingsPanel {
         if (cures.isEmpty()) {
             return;
         }
-        list.getChildren().add(title("What would cure it, tried one at a time"));
+        list.getChildren().add(title(cures.stream().anyMatch(Cure::cures)
+                ? "What would cure it, tried one at a time"
+                : "No single change cures it; this was tried, one at a time"));
         for (Cure cure : cures) {
             Button apply = new Button("Apply");
             apply.setDisable(shown.stale() || cure.edit().isEmpty());
