@@ -97,6 +97,11 @@ public record Board(String name, String description, List<String> partsFiles, in
                 taps, zones, heatLimit, acceptance, rules, channels);
     }
 
+    public Board withTaps(List<Tap> newTaps) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                newTaps, zones, heatLimit, acceptance, rules, channels);
+    }
+
     public Board withZones(List<Zone> newZones) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
                 taps, newZones, heatLimit, acceptance, rules, channels);

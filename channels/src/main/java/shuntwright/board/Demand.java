@@ -62,7 +62,7 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
                     + amperes(mustTrip));
         }
         double target = currents.tripTarget().orElse(Math.sqrt(noTrip * mustTrip));
-        if (!(noTrip < target && target < mustTrip)) {
+        if (noTrip < mustTrip && !(noTrip < target && target < mustTrip)) {
             missing.add("the trip target " + amperes(target) + " must lie between no-trip current " + amperes(noTrip)
                     + " and must-trip current " + amperes(mustTrip));
         }

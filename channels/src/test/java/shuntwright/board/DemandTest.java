@@ -64,6 +64,12 @@ class DemandTest {
     }
 
     @Test
+    void aTurnedWindowIsNotBlamedOnATargetNobodyTyped() {
+        assertThat(missing(channel(currents(20, 50, 36))))
+                .containsExactly("the no-trip current must be below the must-trip current");
+    }
+
+    @Test
     void saysWhatIsMissing() {
         assertThat(missing(Channel.named("c"))).containsExactly("the rail voltage is missing",
                 "the load current is missing", "the no-trip current is missing", "the must-trip current is missing");

@@ -15,25 +15,26 @@ import shuntwright.quantity.Reading;
 /** Something all channels share that takes what is typed. */
 @SuppressWarnings("ImmutableEnumChecker") // the functions keep no state
 public enum BoardField {
-    NAME("Board name", "shown in titles and exports", Board::name,
+    NAME("Board name", "the name shown in titles and exports", Board::name,
             (text, board) -> text.isBlank()
                     ? Reading.misread("A board needs a name.")
                     : Reading.value(board.withName(text.strip()))),
-    SUPPLY_VOLTAGE("Sense supply", "3.3 V ±2 %",
+    SUPPLY_VOLTAGE("Sense supply", "a voltage with its tolerance, such as 3.3 V ±2 %",
             board -> QuantityWriter.write(board.supply().voltage(), Dimension.VOLTAGE),
             (text, board) -> QuantityReader.toleranced(text, Dimension.VOLTAGE).then(voltage -> voltage.min() > 0
                     ? Reading.value(board.withSupply(new SenseSupply(voltage, board.supply().availableCurrent())))
                     : Reading.misread("The sense supply must be above 0 V. Type it such as 3.3 V ±2 %."))),
-    SUPPLY_CURRENT("Current available", "for all sense circuits together, such as 100 mA",
+    SUPPLY_CURRENT("Current available", "the current for all sense circuits together, such as 100 mA",
             board -> QuantityWriter.write(board.supply().availableCurrent(), Dimension.CURRENT),
             (text, board) -> needed(text, "the available current", Dimension.CURRENT)
                     .then(value -> Reading.value(board.withSupply(new SenseSupply(board.supply().voltage(), value))))),
-    AMBIENT("Ambient", "-20 °C .. 60 °C", board -> QuantityWriter.write(board.ambient(), Dimension.TEMPERATURE),
+    AMBIENT("Ambient", "the coldest and the warmest air at the board, such as -20 °C .. 60 °C",
+            board -> QuantityWriter.write(board.ambient(), Dimension.TEMPERATURE),
             (text, board) -> QuantityReader.range(text, Dimension.TEMPERATURE)
                     .then(range -> range.min() > -273.15 && range.max() < 500
                             ? Reading.value(board.withAmbient(range))
                             : Reading.misread("The ambient must lie between -273 °C and 500 °C."))),
-    HEAT_LIMIT("Heat limit", "of all shunts together, such as 6 W; empty for none",
+    HEAT_LIMIT("Heat limit", "the limit of all shunts together, such as 6 W; empty for none",
             board -> Words.text(board.heatLimit(), Dimension.POWER),
             (text, board) -> Words.positive(text, "the heat limit", Dimension.POWER)
                     .then(limit -> Reading.value(board.withHeatLimit(limit)))),

@@ -9,6 +9,8 @@ import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyIntegerProperty;
+import javafx.beans.property.ReadOnlyIntegerWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
@@ -33,6 +35,7 @@ public final class BoardSession {
     private final ReadOnlyObjectWrapper<Catalogue> catalogue = new ReadOnlyObjectWrapper<>(Catalogue.EMPTY);
     private final ReadOnlyObjectWrapper<Optional<Planned>> planned = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyBooleanWrapper open = new ReadOnlyBooleanWrapper();
+    private final ReadOnlyIntegerWrapper starts = new ReadOnlyIntegerWrapper();
     private final ReadOnlyBooleanWrapper unsaved = new ReadOnlyBooleanWrapper();
     private final ReadOnlyStringWrapper undoName = new ReadOnlyStringWrapper("");
     private final ReadOnlyStringWrapper redoName = new ReadOnlyStringWrapper("");
@@ -65,6 +68,7 @@ public final class BoardSession {
         if (!board.channels().isEmpty()) {
             selection.set(List.of(history.now().rows().getFirst()));
         }
+        starts.set(starts.get() + 1);
         plan();
     }
 
@@ -226,6 +230,11 @@ public final class BoardSession {
     /** False until a board is opened or made. */
     public ReadOnlyBooleanProperty openProperty() {
         return open.getReadOnlyProperty();
+    }
+
+    /** How many boards were opened or made so far; changes when another one stands in the window. */
+    public ReadOnlyIntegerProperty startsProperty() {
+        return starts.getReadOnlyProperty();
     }
 
     public ReadOnlyBooleanProperty unsavedProperty() {

@@ -93,8 +93,9 @@ public final class Documents {
         switch (reading) {
             case FileReading.Opened<T>(T value) -> opened.accept(value);
             case FileReading.Refused<T>(List<Problem> problems) -> questions.tell("Not opened",
-                    "Nothing was opened, since " + what + " could not be understood. Mend the places below and open "
-                            + "it again; the board on show is as it was.",
+                    "Nothing was opened, because of "
+                            + (problems.size() == 1 ? "a problem" : problems.size() + " problems") + " in " + what
+                            + ". Mend what stands below and open it again; what is on show is as it was.",
                     problems.stream().map(Problem::toString).toList());
         }
     }

@@ -3,6 +3,7 @@ package shuntwright.planner.window;
 import java.nio.file.Path;
 import java.util.List;
 
+import javafx.application.Platform;
 import javafx.beans.binding.Bindings;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
@@ -87,6 +88,11 @@ final class MainWindow {
         root.setBottom(statusBar());
         root.getStyleClass().add("shuntwright");
         acceptFiles();
+        session.startsProperty().subscribe(count -> {
+            if (count.intValue() > 0) {
+                Platform.runLater(table::focus);
+            }
+        });
     }
 
     /**

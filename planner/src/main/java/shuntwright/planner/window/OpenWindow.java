@@ -49,8 +49,11 @@ final class OpenWindow {
         MainWindow.Start start = new MainWindow.Start(demos, Documents.partsBeside(demos));
         content = new MainWindow(session, documents, dialogs, status, themes, start, this::close);
         Rectangle2D screen = Screen.getPrimary().getVisualBounds();
-        Scene scene = content.scene(Math.min(1500, screen.getWidth()), Math.min(920, screen.getHeight()));
+        Scene scene = content.scene(Math.min(1500, screen.getWidth() * 0.96),
+                Math.min(920, screen.getHeight() * 0.9));
         stage.setScene(scene);
+        // on a small screen the table needs all of it; the frame needs room too
+        stage.setMaximized(screen.getWidth() < 1500 || screen.getHeight() < 940);
         stage.titleProperty().bind(new TitleModel(session, documents).titleBinding());
         stage.setOnCloseRequest(event -> {
             event.consume();

@@ -1,11 +1,19 @@
 package shuntwright.planner.window;
 
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Collectors;
+
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.StringBinding;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
 
 import shuntwright.plan.ChannelPlan;
+import shuntwright.plan.Finding;
+import shuntwright.plan.Plan;
+import shuntwright.plan.Verdict;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Planned;
 import shuntwright.planner.session.WrongEntry;
@@ -51,8 +59,29 @@ final class StatusModel {
         long accepted = planned.plan().channels().stream().filter(ChannelPlan::accepted).count();
         String words = all == 0
                 ? "No channels yet: type a name into the last row."
-                : accepted + " of " + all + " channels accepted";
+                : accepted + " of " + all + (all == 1 ? " channel accepted" : " channels accepted")
+                        + others(planned.plan()) + faults(planned.plan());
         return session.currentBinding().get() ? words : words + ", as of before the last edit";
+    }
+
+    /** How many there are of each verdict that is not inside, such as " (2 outside, 1 no fit)". */
+    private static String others(Plan plan) {
+        String counted = Arrays.stream(Verdict.values()).filter(verdict -> verdict != Verdict.INSIDE)
+                .map(verdict -> Map.entry(verdict.word(),
+                        plan.channels().stream().filter(each -> each.verdict() == verdict).count()))
+                .filter(each -> each.getValue() > 0).map(each -> each.getValue() + " " + each.getKey())
+                .collect(Collectors.joining(", "));
+        return counted.isEmpty() ? "" : " (" + counted + ")";
+    }
+
+    private static String faults(Plan plan) {
+        List<Finding> faults = plan.findings().stream()
+                .filter(each -> each.key().severity() == Finding.Severity.FAULT).toList();
+        return switch (faults.size()) {
+            case 0 -> "";
+            case 1 -> "; board: " + faults.getFirst().key().words();
+            default -> "; board: " + faults.getFirst().key().words() + " and " + (faults.size() - 1) + " more";
+        };
     }
 
     private static String capital(String words) {

@@ -2,17 +2,25 @@ package shuntwright.planner.window;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
+import java.util.Optional;
+
 import javafx.application.ColorScheme;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
 
 import org.junit.jupiter.api.Test;
 
+import shuntwright.parts.Catalogue;
+import shuntwright.plan.Finding;
+import shuntwright.plan.Plan;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.planner.HandMadePlans;
 import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Place;
+import shuntwright.planner.work.Planning;
 
 class StatusModelTest {
     private final BoardSession session = Sessions.of(HandMadeBoards.boat());
@@ -20,7 +28,21 @@ class StatusModelTest {
 
     @Test
     void countsTheAcceptedChannels() {
-        assertThat(status.textBinding().get()).isEqualTo("2 of 5 channels accepted");
+        assertThat(status.textBinding().get())
+                .isEqualTo("2 of 5 channels accepted (1 likely, 1 outside, 1 incomplete)");
+    }
+
+    @Test
+    void aFaultOfTheBoardIsNamed() {
+        Finding fault = new Finding(Finding.Key.SUPPLY_OVERLOADED, Optional.empty(), "120 mA of 100 mA.", List.of());
+        BoardSession overloaded = new BoardSession(new Planning((board, parts, progress) -> {
+            Plan plan = HandMadePlans.plan(board, parts, progress);
+            return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(), plan.taps(),
+                    plan.parts(), List.of(fault));
+        }, Runnable::run, Runnable::run));
+        StatusModel words = new StatusModel(overloaded);
+        overloaded.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
+        assertThat(words.textBinding().get()).endsWith("; board: supply overloaded");
     }
 
     @Test
@@ -28,7 +50,8 @@ class StatusModelTest {
         status.done("saved boat.board.json");
         assertThat(status.textBinding().get()).isEqualTo("Saved boat.board.json");
         session.enter(new Place.Cell(0, ChannelField.LOAD), "19");
-        assertThat(status.textBinding().get()).isEqualTo("2 of 5 channels accepted");
+        assertThat(status.textBinding().get())
+                .isEqualTo("2 of 5 channels accepted (1 likely, 1 outside, 1 incomplete)");
     }
 
     @Test

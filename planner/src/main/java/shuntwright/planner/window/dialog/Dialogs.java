@@ -62,7 +62,7 @@ public final class Dialogs implements Questions {
         TextArea text = new TextArea(String.join("\n", lines));
         text.setEditable(false);
         text.setWrapText(true);
-        text.setPrefRowCount(Math.clamp(lines.size() * 2L, 3, 16));
+        text.setPrefRowCount(Math.clamp(lines.size() * 2L, 3, 22));
         text.setPrefColumnCount(56);
         alert.getDialogPane().setContent(text);
         alert.setResizable(true);

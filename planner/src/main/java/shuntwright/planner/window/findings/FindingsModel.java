@@ -13,7 +13,9 @@ import shuntwright.plan.Cure;
 import shuntwright.plan.Finding;
 import shuntwright.plan.Verdict;
 import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.session.Place;
 import shuntwright.planner.session.Planned;
+import shuntwright.planner.window.circuit.CircuitWords;
 
 /** Findings of the selected channel and of the board, and the cures that can be applied. */
 public final class FindingsModel {
@@ -25,22 +27,24 @@ public final class FindingsModel {
      * @param stale    true when they belong to an earlier state of the channel; cures then cannot be applied
      * @param findings of the channel
      * @param cures    of the channel
-     * @param refusals why no part fits, in words
      * @param board    findings of the board
+     * @param chosen   the channel's circuit in words
+     * @param wrong    texts of the channel that could not be taken over, in words
      */
     record Shown(String title, Optional<Verdict> verdict, boolean stale, List<Finding> findings, List<Cure> cures,
-            List<String> refusals, List<Finding> board) {
+            List<Finding> board, List<CircuitWords.Line> chosen, List<String> wrong) {
         Shown {
             findings = List.copyOf(findings);
             cures = List.copyOf(cures);
-            refusals = List.copyOf(refusals);
             board = List.copyOf(board);
+            chosen = List.copyOf(chosen);
+            wrong = List.copyOf(wrong);
         }
     }
 
     private final BoardSession session;
     private final ReadOnlyObjectWrapper<Shown> shown = new ReadOnlyObjectWrapper<>(
-            new Shown("", Optional.empty(), false, List.of(), List.of(), List.of(), List.of()));
+            new Shown("", Optional.empty(), false, List.of(), List.of(), List.of(), List.of(), List.of()));
 
     public FindingsModel(BoardSession session) {
         this.session = session;
@@ -66,21 +70,19 @@ public final class FindingsModel {
         boolean stale = plan.isPresent() && channel.isPresent() && !plan.get().channel().equals(channel.get());
         shown.set(new Shown(channel.map(Channel::name).orElse(""), plan.map(ChannelPlan::verdict), stale,
                 plan.map(ChannelPlan::findings).orElse(List.of()), plan.map(ChannelPlan::cures).orElse(List.of()),
-                plan.map(FindingsModel::refusals).orElse(List.of()),
-                planned.map(each -> each.plan().findings()).orElse(List.of())));
+                planned.map(each -> each.plan().findings()).orElse(List.of()),
+                plan.flatMap(each -> planned.map(all -> CircuitWords.lines(each, all.plan()))).orElse(List.of()),
+                row().map(this::wrong).orElse(List.of())));
     }
 
-    private static List<String> refusals(ChannelPlan plan) {
+    private List<String> wrong(int row) {
         List<String> lines = new ArrayList<>();
-        plan.refusals().forEach(each -> {
-            var miss = each.nearMiss();
-            var dimension = miss.limit().dimension();
-            lines.add(each.refused() + " of " + each.examined() + " " + each.nearMiss().limit().counted()
-                    + " break the limit \""
-                    + miss.limit().words() + "\". Nearest: " + each.nearest() + " reaches "
-                    + shuntwright.quantity.QuantityWriter.show(miss.reached(), dimension) + ", "
-                    + (miss.atMost() ? "at most " : "at least ")
-                    + shuntwright.quantity.QuantityWriter.show(miss.bound(), dimension) + " is allowed.");
+        session.state().wrong().forEach((place, entry) -> {
+            if (place instanceof Place.Cell(int at, var field) && at == row) {
+                String good = session.state().channel(row).map(field::text).orElse("");
+                lines.add(field.title() + " \"" + entry.text() + "\": " + entry.reason() + " Until then "
+                        + (good.isEmpty() ? "it counts as not typed." : good + " counts."));
+            }
         });
         return lines;
     }

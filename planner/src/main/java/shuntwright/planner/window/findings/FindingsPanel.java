@@ -7,6 +7,7 @@ import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -14,17 +15,23 @@ import javafx.scene.layout.VBox;
 
 import shuntwright.plan.Cure;
 import shuntwright.plan.Finding;
+import shuntwright.planner.window.circuit.CircuitWords;
 import shuntwright.planner.window.table.VerdictMark;
 
 /** Findings with their numbers, and cures with a button each. */
 public final class FindingsPanel {
     private final FindingsModel model;
     private final VBox list = new VBox();
-    private final ScrollPane scroll = new ScrollPane(list);
+    private final GridPane chosen = new GridPane();
+    private final ScrollPane scroll = new ScrollPane(new HBox(list, chosen));
 
     public FindingsPanel(FindingsModel model) {
         this.model = model;
         list.getStyleClass().add("findings");
+        HBox.setHgrow(list, Priority.ALWAYS);
+        list.setMinWidth(0);
+        chosen.getStyleClass().add("chosen");
+        chosen.setId("chosen");
         scroll.setFitToWidth(true);
         scroll.setId("findings");
         model.shownProperty().subscribe(this::show);
@@ -39,9 +46,9 @@ public final class FindingsPanel {
         list.getChildren().clear();
         if (!shown.title().isEmpty()) {
             list.getChildren().add(head(shown));
+            shown.wrong().forEach(each -> list.getChildren().add(wrong(each)));
             shown.findings().forEach(each -> list.getChildren().add(finding(each)));
-            shown.refusals().forEach(each -> list.getChildren().add(text(each)));
-            if (shown.findings().isEmpty() && shown.refusals().isEmpty() && shown.verdict().isPresent()) {
+            if (shown.findings().isEmpty() && shown.verdict().isPresent()) {
                 list.getChildren().add(text("Nothing to report: everything asked of this channel is met."));
             }
             cures(shown);
@@ -53,13 +60,42 @@ public final class FindingsPanel {
         if (list.getChildren().isEmpty()) {
             list.getChildren().add(text("Select a channel to see what was found."));
         }
+        choice(shown.chosen());
+    }
+
+    private void choice(List<CircuitWords.Line> lines) {
+        chosen.getChildren().clear();
+        chosen.setVisible(!lines.isEmpty());
+        chosen.setManaged(!lines.isEmpty());
+        if (!lines.isEmpty()) {
+            chosen.add(title("Chosen"), 0, 0, 2, 1);
+        }
+        for (int at = 0; at < lines.size(); at++) {
+            Label what = new Label(lines.get(at).title());
+            what.getStyleClass().add("hint");
+            what.setMinWidth(Region.USE_PREF_SIZE);
+            Label words = text(lines.get(at).words());
+            what.setLabelFor(words);
+            chosen.addRow(at + 1, what, words);
+        }
+    }
+
+    private static Node wrong(String words) {
+        Label kind = new Label("wrong entry");
+        kind.getStyleClass().add("severity");
+        kind.pseudoClassStateChanged(PseudoClass.getPseudoClass("fault"), true);
+        HBox row = new HBox(kind, text(words));
+        row.getStyleClass().add("finding");
+        return row;
     }
 
     private static Node head(FindingsModel.Shown shown) {
         VerdictMark mark = new VerdictMark();
         mark.show(shown.verdict());
         String words = shown.verdict().map(verdict -> ": " + verdict.word()).orElse(": not planned yet")
-                + (shown.stale() ? " – as of before the last edit" : "");
+                + (shown.stale()
+                        ? " – as of before the last edit"
+                        : shown.wrong().isEmpty() ? "" : " – as of the last good entries");
         HBox head = new HBox(title(shown.title() + words));
         if (shown.verdict().isPresent()) {
             head.getChildren().addFirst(mark);
@@ -73,7 +109,9 @@ public final class FindingsPanel {
         if (cures.isEmpty()) {
             return;
         }
-        list.getChildren().add(title("What would cure it, tried one at a time"));
+        list.getChildren().add(title(cures.stream().anyMatch(Cure::cures)
+                ? "What would cure it, tried one at a time"
+                : "No single change cures it; this was tried, one at a time"));
         for (Cure cure : cures) {
             Button apply = new Button("Apply");
             apply.setDisable(shown.stale() || cure.edit().isEmpty());

@@ -6,7 +6,8 @@ import java.util.List;
 @SuppressWarnings("ImmutableEnumChecker") // the lists are never changed
 public enum HelpTopic {
     FIRST_STEPS("First steps", List.of(
-            "1. Open a demo board, or make a new board and add a parts file (File menu).",
+            "1. Open a demo board, or make a new board; it chooses from the demo parts where they are at hand, and from "
+                    + "parts files of your own (File menu, Add parts file).",
             "2. Type a channel's name into the last row of the table, then its rail voltage, load current, no-trip and "
                     + "must-trip current. Cells take 35, 35 A, 4m, 12 V ±10 % or 10.5 .. 12 .. 14.4 V.",
             "3. Each edit plans the board again. The verdict says whether the channel meets its demand; the drawing "
@@ -25,9 +26,11 @@ public enum HelpTopic {
                     + "power; the findings name the nearest miss.",
             "▫ incomplete – something needed is not typed yet; the findings say what.")),
     KEYBOARD("Keyboard",
-            List.of("Arrow keys, Tab, Shift+Tab: move between cells (Ctrl+Tab leaves the table)",
+            List.of("Arrow keys: move between cells",
+                    "Tab, Shift+Tab: move to the next, the last cell that can be typed into (Ctrl+Tab leaves the "
+                            + "table)",
                     "Typing, F2 or Enter: edit the cell",
-                    "Enter: take the text over and go down; Tab: and go right",
+                    "Enter: take the text over and go down; Tab: and go to the next cell that can be typed into",
                     "Ctrl+Enter: type the text into all selected cells of the column",
                     "Esc: leave the cell as it was; on a wrong entry: give it up",
                     "Delete: clear the selected cells", "Ctrl+C, Ctrl+V: copy and paste blocks of cells",

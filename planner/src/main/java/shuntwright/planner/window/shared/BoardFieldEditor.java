@@ -22,11 +22,26 @@ final class BoardFieldEditor {
     private final BoardSession session;
     private final GridPane grid = new GridPane();
 
-    BoardFieldEditor(BoardSession session, List<BoardField> fields) {
+    /**
+     * @param fields  to type into
+     * @param details lines that explain what they came to
+     */
+    BoardFieldEditor(BoardSession session, List<BoardField> fields, List<String> details) {
         this.session = session;
         grid.getStyleClass().add("board-editor");
         for (int at = 0; at < fields.size(); at++) {
             add(fields.get(at), at * 2);
+        }
+        for (int at = 0; at < details.size(); at++) {
+            Label line = new Label(details.get(at));
+            line.setWrapText(true);
+            line.setMaxWidth(560);
+            grid.add(line, 0, fields.size() * 2 + at, 2, 1);
+        }
+        if (fields.isEmpty()) {
+            Label where = new Label("These are made and changed in the board file.");
+            where.getStyleClass().add("hint");
+            grid.add(where, 0, details.size(), 2, 1);
         }
     }
 

@@ -8,6 +8,7 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ContentDisplay;
 import javafx.scene.control.Label;
 import javafx.scene.control.ProgressBar;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -63,7 +64,9 @@ public final class SharedStrip {
         button.getStyleClass().setAll("button", "shared-tile");
         Label title = new Label(tile.title());
         title.getStyleClass().add("tile-title");
-        Label value = new Label(tile.holds() ? tile.value() : "✕ " + tile.value());
+        Label value = new Label(tile.well()
+                ? tile.value()
+                : "✕ " + tile.value() + (tile.wrong().isPresent() ? " – wrong entry" : ""));
         value.getStyleClass().add("tile-value");
         VBox box = new VBox(title, value);
         box.setFillWidth(true);
@@ -78,10 +81,14 @@ public final class SharedStrip {
         button.setGraphic(box);
         button.setContentDisplay(ContentDisplay.GRAPHIC_ONLY);
         button.setAccessibleText(tile.words() + ". Opens its editor.");
-        button.pseudoClassStateChanged(OVER, !tile.holds());
+        button.pseudoClassStateChanged(OVER, !tile.well());
+        Tooltip tip = new Tooltip(tile.words());
+        tip.setWrapText(true);
+        tip.setMaxWidth(520);
+        button.setTooltip(tip);
         button.setOnAction(_ -> {
             popOver.setTitle(tile.title());
-            popOver.setContentNode(new BoardFieldEditor(model.session(), tile.fields()).node());
+            popOver.setContentNode(new BoardFieldEditor(model.session(), tile.fields(), tile.details()).node());
             popOver.getRoot().getStylesheets().setAll(strip.getScene().getStylesheets());
             popOver.show(button);
         });

@@ -12,9 +12,12 @@ import shuntwright.board.Board;
 import shuntwright.plan.AlertPlan;
 import shuntwright.plan.Plan;
 import shuntwright.plan.SharedUse;
+import shuntwright.plan.TapPlan;
 import shuntwright.planner.entry.BoardField;
 import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.session.Place;
 import shuntwright.planner.session.Planned;
+import shuntwright.planner.session.WrongEntry;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 
@@ -46,19 +49,23 @@ public final class SharedStripModel {
         all.addAll(references(board, plan));
         all.addAll(heat(board, plan));
         all.add(alerts(board, plan));
+        taps(board, plan).ifPresent(all::add);
         all.add(new SharedTile("Ambient", QuantityWriter.show(board.ambient(), Dimension.TEMPERATURE, 3),
                 OptionalDouble.empty(), true, List.of(BoardField.AMBIENT)));
         all.add(new SharedTile("Accepted", switch (board.acceptance().basis()) {
             case LIMITS -> "inside by limits";
             case COVERAGE -> "likely too, " + QuantityWriter.show(board.acceptance().coverage(), Dimension.RATIO);
         }, OptionalDouble.empty(), true, List.of(BoardField.BASIS, BoardField.COVERAGE)));
-        all.add(new SharedTile("Build", board.buildQuantity() == 1
+        all.add(new SharedTile("Board and build", board.buildQuantity() == 1
                 ? "1 board"
                 : board.buildQuantity() + " boards"
                         + plan.map(SharedStripModel::cost).orElse(""),
                 OptionalDouble.empty(), true,
                 List.of(BoardField.NAME, BoardField.BUILD_QUANTITY, BoardField.PARALLEL_SHUNTS,
                         BoardField.POWER_MARGIN, BoardField.HEAT_STEP)));
+        all.replaceAll(tile -> tile.withWrong(tile.fields().stream()
+                .flatMap(field -> session.state().wrong(new Place.OfBoard(field)).stream()).map(WrongEntry::reason)
+                .findFirst()));
         if (!all.equals(tiles)) {
             tiles.setAll(all);
         }
@@ -118,8 +125,44 @@ public final class SharedStripModel {
                 + (alerts.size() > 1 ? " and " + (alerts.size() - 1) + " more" : "");
         boolean holds = alerts.stream().allMatch(each -> each.allowed().isPresent());
         return new SharedTile("Alert pull-up", holds ? value : value + " – no value fits", OptionalDouble.empty(),
-                holds,
-                fields);
+                holds, fields).withDetails(alerts.stream().map(SharedStripModel::line).toList());
+    }
+
+    private static String line(AlertPlan alert) {
+        return alert.line().name() + ": pull-up " + QuantityWriter.show(alert.pullUp(), Dimension.RESISTANCE, 3)
+                + alert.allowed().map(range -> " (" + QuantityWriter.show(range, Dimension.RESISTANCE, 3) + " allowed)")
+                        .orElse(" (no value fits)")
+                + ", " + counted(alert.channels());
+    }
+
+    private static Optional<SharedTile> taps(Board board, Optional<Plan> plan) {
+        if (board.taps().isEmpty()) {
+            return Optional.empty();
+        }
+        List<TapPlan> taps = plan.map(Plan::taps).orElse(List.of());
+        String value = taps.isEmpty()
+                ? Integer.toString(board.taps().size())
+                : tap(taps.getFirst())
+                        + (taps.size() > 1 ? " and " + (taps.size() - 1) + " more" : "");
+        return Optional.of(new SharedTile("Taps", value, OptionalDouble.empty(),
+                taps.stream().allMatch(each -> each.threshold().isPresent() || each.channels().isEmpty()), List.of())
+                .withDetails(taps.stream().map(each -> tap(each) + " from " + each.tap().source().word() + ", "
+                        + counted(each.channels())).toList()));
+    }
+
+    private static String tap(TapPlan tap) {
+        return tap.tap().name() + tap.threshold()
+                .map(made -> " " + QuantityWriter.show(made.nominalVoltage(), Dimension.VOLTAGE, 4))
+                .orElse(tap.channels().isEmpty() ? " unused" : " – no voltage fits");
+    }
+
+    private static String counted(List<String> channels) {
+        return switch (channels.size()) {
+            case 0 -> "no channel";
+            case 1 -> channels.getFirst();
+            default -> channels.size() + " channels: " + String.join(", ", channels.stream().limit(3).toList())
+                    + (channels.size() > 3 ? " …" : "");
+        };
     }
 
     private static List<SharedUse> use(Optional<Plan> plan, SharedUse.Kind kind) {

@@ -3,7 +3,6 @@ package shuntwright.planner.window.table;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.function.Function;
 
 import javafx.application.Platform;
 import javafx.beans.InvalidationListener;
@@ -11,7 +10,6 @@ import javafx.beans.binding.Bindings;
 import javafx.beans.property.DoubleProperty;
 import javafx.beans.property.ReadOnlyDoubleProperty;
 import javafx.beans.property.SimpleDoubleProperty;
-import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.transformation.SortedList;
 import javafx.css.PseudoClass;
 import javafx.geometry.Orientation;
@@ -24,6 +22,7 @@ import javafx.scene.control.TablePosition;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
 import javafx.scene.control.Tooltip;
+import javafx.scene.control.skin.VirtualFlow;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
@@ -34,15 +33,11 @@ import shuntwright.planner.window.table.ChannelTableModel.Spot;
 
 /** The channel table. */
 public final class ChannelTable {
-    private static final String WORDS = "words";
     private static final PseudoClass ACTIVE = PseudoClass.getPseudoClass("active");
-    private static final List<ChannelField> ASKED = List.of(ChannelField.ZONE, ChannelField.SIDE, ChannelField.RAIL,
-            ChannelField.LOAD, ChannelField.NO_TRIP, ChannelField.MUST_TRIP, ChannelField.RELEASE,
-            ChannelField.SOURCE);
 
     private final ChannelTableModel model;
     private final TableView<RowModel> table = new TableView<>();
-    private final List<TableColumn<RowModel, ?>> columns = new ArrayList<>();
+    private final List<TableColumn<RowModel, ?>> columns;
     private String typed = "";
     private final DoubleProperty scrolled = new SimpleDoubleProperty();
     private boolean following;
@@ -65,7 +60,8 @@ public final class ChannelTable {
         }, table.comparatorProperty()));
         // the sorted list above sorts; the table's own policy asks for a comparator without the empty row
         table.setSortPolicy(_ -> true);
-        addColumns();
+        columns = ChannelColumns.all(field -> new EntryCell(field, this));
+        table.getColumns().setAll(columns);
         table.setItems(sorted);
         table.skinProperty().subscribe(skin -> {
             if (skin != null) {
@@ -77,86 +73,6 @@ public final class ChannelTable {
         table.addEventHandler(KeyEvent.KEY_TYPED, this::startTyping);
         table.getSelectionModel().getSelectedCells().addListener((InvalidationListener) _ -> tellSelection());
         model.session().selectionProperty().subscribe(_ -> followSelection());
-    }
-
-    private void addColumns() {
-        TableColumn<RowModel, ?> name = asked(ChannelField.NAME, 140);
-        columns.add(name);
-        columns.add(computed("Verdict", "whether the demand is met", 92, _ -> new VerdictCell(),
-                Comparator.comparing(figures -> figures.verdict().map(Enum::ordinal).orElse(-1))));
-        for (ChannelField field : ASKED) {
-            columns.add(asked(field, switch (field) {
-                case RAIL -> 128;
-                case RELEASE -> 84;
-                case SOURCE -> 84;
-                case ZONE -> 90;
-                case SIDE -> 46;
-                case MUST_TRIP -> 72;
-                default -> 64;
-            }));
-        }
-        columns.add(figure("Shunt", "chosen shunts in parallel × resistance of one", 84, RowFigures::shunt));
-        columns.add(figure("Gain", "of the chosen amplifier, V/V", 48, RowFigures::gain));
-        columns.add(figure("Threshold", "nominal voltage at which the comparator trips", 74, RowFigures::threshold));
-        columns.add(computed("Trip interval in its window",
-                "limits (wide bar) and coverage interval (inner bar) of the trip current; the frame is no-trip to must-trip",
-                220, _ -> new TripCell(), Comparator.comparing(
-                        figures -> figures.trip().map(trip -> trip.limits().width()).orElse(-1.0))));
-        columns.add(figure("Reading", "largest reading error at load current", 64, RowFigures::reading));
-        columns.add(figure("Heat", "of the shunts at load current", 64, RowFigures::heat));
-        columns.add(figure("Margin", "smallest distance of a limit from the end of its window, of the half-width", 66,
-                RowFigures::margin));
-        for (ChannelField field : ChannelField.values()) {
-            if (field != ChannelField.NAME && !ASKED.contains(field)) {
-                TableColumn<RowModel, ?> column = asked(field, 110);
-                column.setVisible(false);
-                columns.add(column);
-            }
-        }
-        table.getColumns().setAll(columns);
-        name.setReorderable(false);
-    }
-
-    private TableColumn<RowModel, CellEntry> asked(ChannelField field, double width) {
-        TableColumn<RowModel, CellEntry> column = new TableColumn<>();
-        head(column, field.title(), field.words() + ": " + field.hint(), width);
-        column.setUserData(field);
-        column.setEditable(true);
-        column.setCellValueFactory(row -> row.getValue().entryProperty(field));
-        column.setCellFactory(_ -> new EntryCell(field, this));
-        column.getStyleClass().add(field.isNumber() ? "number-column" : "word-column");
-        return column;
-    }
-
-    private TableColumn<RowModel, RowFigures> figure(String title, String words, double width,
-            Function<RowFigures, Figure> which) {
-        TableColumn<RowModel, RowFigures> column = computed(title, words, width, _ -> new FigureCell(which),
-                Comparator.comparing(which));
-        column.getStyleClass().add("number-column");
-        return column;
-    }
-
-    private TableColumn<RowModel, RowFigures> computed(String title, String words, double width,
-            javafx.util.Callback<TableColumn<RowModel, RowFigures>, javafx.scene.control.TableCell<RowModel, RowFigures>> cells,
-            Comparator<RowFigures> order) {
-        TableColumn<RowModel, RowFigures> column = new TableColumn<>();
-        head(column, title, words, width);
-        column.setEditable(false);
-        column.setCellValueFactory(row -> row.getValue().isEmptyRow()
-                ? new SimpleObjectProperty<>()
-                : row.getValue().figuresProperty());
-        column.setCellFactory(cells);
-        column.setComparator(Comparator.nullsLast(order));
-        column.getStyleClass().add("computed-column");
-        return column;
-    }
-
-    private static void head(TableColumn<RowModel, ?> column, String title, String words, double width) {
-        column.setText(title);
-        column.setPrefWidth(width);
-        column.setMinWidth(40);
-        column.setId("column-" + title.toLowerCase(java.util.Locale.ROOT).replaceAll("[^a-z]+", "-"));
-        column.getProperties().put(WORDS, words);
     }
 
     private TableRow<RowModel> row() {
@@ -188,7 +104,7 @@ public final class ChannelTable {
         for (Node header : table.lookupAll(".column-header")) {
             columns.stream().filter(column -> column.getId().equals(header.getId())).findFirst()
                     .ifPresent(column -> Tooltip.install(header,
-                            new Tooltip(String.valueOf(column.getProperties().get(WORDS)))));
+                            new Tooltip(ChannelColumns.words(column))));
             if (columns.getFirst().getId().equals(header.getId())) {
                 header.setViewOrder(-1);
                 header.translateXProperty().bind(scrolled);
@@ -247,7 +163,7 @@ public final class ChannelTable {
         }
         switch (event.getCode()) {
             case TAB -> {
-                if (move(0, event.isShiftDown() ? -1 : 1)) {
+                if (moveToEntry(event.isShiftDown() ? -1 : 1)) {
                     event.consume();
                 }
             }
@@ -267,6 +183,26 @@ public final class ChannelTable {
                 // the table's own keys
             }
         }
+    }
+
+    /** Moves the focus to the next cell that can be typed into, row by row; false where there is none. */
+    boolean moveToEntry(int step) {
+        TablePosition<?, ?> focus = table.getFocusModel().getFocusedCell();
+        List<TableColumn<RowModel, ?>> visible = table.getVisibleLeafColumns();
+        int at = Math.max(0, focus.getRow()) * visible.size() + Math.max(0, focus.getColumn()) + step;
+        for (; at >= 0 && at < table.getItems().size() * visible.size(); at += step) {
+            if (fieldOf(visible.get(at % visible.size())) != null) {
+                select(at / visible.size(), visible.get(at % visible.size()));
+                return true;
+            }
+        }
+        return false;
+    }
+
+    /** Puts the focus where typing can begin: on the selected channel, or on the empty row. */
+    public void focus() {
+        int row = table.getSelectionModel().getSelectedIndex();
+        select(row >= 0 ? row : Math.max(0, table.getItems().size() - 1), table.getVisibleLeafColumn(0));
     }
 
     /** Moves the focus by rows or columns, at the end of a row to the next; false where there is nothing further. */
@@ -292,9 +228,22 @@ public final class ChannelTable {
     private void select(int row, TableColumn<RowModel, ?> column) {
         table.getSelectionModel().clearAndSelect(row, column);
         table.getFocusModel().focus(row, column);
-        table.scrollTo(Math.max(0, row - 2));
+        scrollIntoSight(row);
         table.scrollToColumn(column);
         table.requestFocus();
+    }
+
+    /** Leaves the rows where they are when the row is in sight already. */
+    private void scrollIntoSight(int row) {
+        if (!(table.lookup(".virtual-flow") instanceof VirtualFlow<?> flow) || flow.getFirstVisibleCell() == null
+                || flow.getLastVisibleCell() == null) {
+            table.scrollTo(Math.max(0, row - 2));
+        } else if (row <= flow.getFirstVisibleCell().getIndex()) {
+            flow.scrollTo(row);
+        } else if (row >= flow.getLastVisibleCell().getIndex()) {
+            int shown = flow.getLastVisibleCell().getIndex() - flow.getFirstVisibleCell().getIndex();
+            flow.scrollTo(Math.max(0, row - Math.max(0, shown - 2)));
+        }
     }
 
     private List<Spot> selectedSpots() {

@@ -66,7 +66,9 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
             setGraphic(null);
             setContentDisplay(ContentDisplay.TEXT_ONLY);
             setText(invite ? "+ type a name" : entry.text());
-            tip.setText(entry.reason().orElse("Takes " + field.hint() + "."));
+            // the text too, since it may be longer than the cell
+            tip.setText((entry.text().isBlank() || invite ? "" : entry.text() + "\n")
+                    + entry.reason().orElse("Takes " + field.hint() + "."));
             setTooltip(tip);
             setAccessibleText(field.title() + " " + entry.text()
                     + entry.reason().map(reason -> ", wrong entry: " + reason).orElse(""));
@@ -129,7 +131,7 @@ final class EntryCell extends TableCell<RowModel, CellEntry> {
             case TAB -> {
                 event.consume();
                 finish(text);
-                view.move(0, event.isShiftDown() ? -1 : 1);
+                view.moveToEntry(event.isShiftDown() ? -1 : 1);
             }
             case ESCAPE -> {
                 event.consume();

@@ -11,6 +11,13 @@ final class FigureCell extends TableCell<RowModel, RowFigures> {
 
     private final java.util.function.Function<RowFigures, Figure> which;
 
+    /** A computed cell of words, which stand to the left and may be longer than the cell. */
+    static FigureCell ofWords(java.util.function.Function<RowFigures, Figure> which) {
+        FigureCell cell = new FigureCell(which);
+        cell.getStyleClass().remove("figure-cell");
+        return cell;
+    }
+
     FigureCell(java.util.function.Function<RowFigures, Figure> which) {
         this.which = which;
         getStyleClass().addAll("figure-cell", "computed");

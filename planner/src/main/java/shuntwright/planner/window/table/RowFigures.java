@@ -7,6 +7,7 @@ import shuntwright.accuracy.Outcome;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.SolvedChannel;
 import shuntwright.plan.Verdict;
+import shuntwright.planner.window.circuit.CircuitWords;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 
@@ -15,7 +16,7 @@ import shuntwright.quantity.QuantityWriter;
  *
  * @param verdict   empty until planned
  * @param accepted  whether the board's acceptance takes the verdict
- * @param stale     true when they belong to an earlier state of the channel
+ * @param stale     true when they belong to an earlier state of the channel, or something typed could not be taken over
  * @param first     the most serious finding; empty when there is none
  * @param shunt     "2 × 4 mΩ"
  * @param gain      of the amplifier
@@ -24,25 +25,26 @@ import shuntwright.quantity.QuantityWriter;
  * @param reading   largest reading error at load current
  * @param heat      of the shunts
  * @param margin    smallest margin of all outcomes
+ * @param chosen    parts in words
  */
 record RowFigures(Optional<Verdict> verdict, boolean accepted, boolean stale, String first, Figure shunt, Figure gain,
-        Figure threshold, Optional<TripDrawing> trip, Figure reading, Figure heat, Figure margin) {
+        Figure threshold, Optional<TripDrawing> trip, Figure reading, Figure heat, Figure margin,
+        Chosen chosen) {
     static final RowFigures NONE = new RowFigures(Optional.empty(), false, false, "", Figure.NONE, Figure.NONE,
-            Figure.NONE, Optional.empty(), Figure.NONE, Figure.NONE, Figure.NONE);
+            Figure.NONE, Optional.empty(), Figure.NONE, Figure.NONE, Figure.NONE, Chosen.NOTHING);
 
     static RowFigures of(ChannelPlan plan, boolean stale) {
         String first = plan.findings().isEmpty() ? "" : plan.findings().getFirst().text();
         return plan.solved().map(solved -> of(plan, solved, stale, first))
                 .orElseGet(() -> new RowFigures(Optional.of(plan.verdict()), plan.accepted(), stale, first, Figure.NONE,
-                        Figure.NONE, Figure.NONE, Optional.empty(), Figure.NONE, Figure.NONE, Figure.NONE));
+                        Figure.NONE, Figure.NONE, Optional.empty(), Figure.NONE, Figure.NONE, Figure.NONE,
+                        Chosen.NOTHING));
     }
 
     private static RowFigures of(ChannelPlan plan, SolvedChannel solved, boolean stale, String first) {
         var circuit = solved.circuit();
-        String piece = QuantityWriter.show(circuit.shunt().resistance(), Dimension.RESISTANCE);
         return new RowFigures(Optional.of(plan.verdict()), plan.accepted(), stale, first,
-                new Figure(circuit.shuntCount() > 1 ? circuit.shuntCount() + " × " + piece : piece,
-                        circuit.resistance()),
+                new Figure(CircuitWords.shunt(circuit), circuit.resistance()),
                 new Figure(plain(circuit.amplifier().gain()), circuit.amplifier().gain()),
                 new Figure(QuantityWriter.show(solved.settings().threshold(), Dimension.VOLTAGE),
                         solved.settings().threshold()),
@@ -50,7 +52,7 @@ record RowFigures(Optional<Verdict> verdict, boolean accepted, boolean stale, St
                 solved.assessment(Outcome.READING_AT_LOAD).map(each -> reading(each, solved.demand().load()))
                         .orElse(new Figure("–", Double.NaN)),
                 new Figure(QuantityWriter.show(solved.heat(), Dimension.POWER, 3), solved.heat()),
-                new Figure(percent(solved.margin()), solved.margin()));
+                new Figure(percent(solved.margin()), solved.margin()), Chosen.of(circuit));
     }
 
     private static Figure reading(Assessment reading, double load) {

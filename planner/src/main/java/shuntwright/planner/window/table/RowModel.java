@@ -7,6 +7,8 @@ import java.util.Optional;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 
+import org.jspecify.annotations.Nullable;
+
 import shuntwright.board.Channel;
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.session.BoardState;
@@ -22,6 +24,9 @@ final class RowModel {
     private final int id;
     private final Map<ChannelField, ReadOnlyObjectWrapper<CellEntry>> entries = new EnumMap<>(ChannelField.class);
     private final ReadOnlyObjectWrapper<RowFigures> figures = new ReadOnlyObjectWrapper<>(RowFigures.NONE);
+
+    private @Nullable Channel shownChannel;
+    private Map<Place, WrongEntry> shownWrong = Map.of();
 
     RowModel(int id) {
         this.id = id;
@@ -64,13 +69,25 @@ final class RowModel {
         if (channel.isEmpty()) {
             return;
         }
+        showEntries(state, channel.get());
+        boolean wrong = entries.values().stream().anyMatch(entry -> entry.get().reason().isPresent());
+        change(figures, planned.flatMap(plan -> plan.channel(id))
+                .map(plan -> RowFigures.of(plan, wrong || !plan.channel().equals(channel.get())))
+                .orElse(RowFigures.NONE));
+    }
+
+    /** Writing all texts of all rows anew at each edit would be felt on a large board. */
+    private void showEntries(BoardState state, Channel channel) {
+        if (channel.equals(shownChannel) && state.wrong().equals(shownWrong)) {
+            return;
+        }
+        shownChannel = channel;
+        shownWrong = state.wrong();
         for (ChannelField field : ChannelField.values()) {
             Place.Cell place = new Place.Cell(id, field);
             change(wrapper(field), new CellEntry(state.text(place), state.wrong(place).map(WrongEntry::reason),
-                    field.key(channel.get())));
+                    field.key(channel)));
         }
-        change(figures, planned.flatMap(plan -> plan.channel(id))
-                .map(plan -> RowFigures.of(plan, !plan.channel().equals(channel.get()))).orElse(RowFigures.NONE));
     }
 
     /** Leaves equal values alone, so that only cells that change are drawn again. */

@@ -1,7 +1,5 @@
 package shuntwright.planner.window.table;
 
-import java.util.Optional;
-
 import javafx.css.PseudoClass;
 import javafx.scene.control.TableCell;
 import javafx.scene.control.Tooltip;
@@ -33,11 +31,11 @@ final class VerdictCell extends TableCell<RowModel, RowFigures> {
         }
         mark.show(figures.verdict());
         setGraphic(mark);
-        setText(figures.verdict().get().word());
+        setText((figures.stale() ? "was " : "") + figures.verdict().get().word());
         pseudoClassStateChanged(STALE, figures.stale());
-        String words = figures.stale() ? "As of before the last edit. " + figures.first() : figures.first();
+        String words = figures.stale() ? "As of the last good entries. " + figures.first() : figures.first();
         tip.setText(words);
         setTooltip(words.isBlank() ? null : tip);
-        setAccessibleText(Optional.of(figures.verdict().get().word()).map(word -> word + ". " + words).get());
+        setAccessibleText("Verdict " + figures.verdict().get().word() + ". " + words);
     }
 }

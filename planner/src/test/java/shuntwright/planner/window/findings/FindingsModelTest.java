@@ -11,6 +11,7 @@ import org.junit.jupiter.api.Test;
 import shuntwright.parts.Catalogue;
 import shuntwright.plan.Verdict;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.planner.HandMadeParts;
 import shuntwright.planner.HandMadePlans;
 import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.ChannelField;
@@ -55,5 +56,28 @@ class FindingsModelTest {
         assertThat(findings.shownProperty().get().stale()).isTrue();
         findings.apply(cure);
         assertThat(slow.state().board().channels().get(3).currents().mustTrip()).hasValue(5.05);
+    }
+
+    @Test
+    void aWrongEntryIsNamedWithWhatCountsUntilThen() {
+        session.selectionProperty().set(List.of(0));
+        session.enter(new Place.Cell(0, ChannelField.MUST_TRIP), "garbage");
+        assertThat(model.shownProperty().get().wrong()).singleElement().asString()
+                .startsWith("Must-trip \"garbage\": ").endsWith("Until then 31 A counts.");
+        session.selectionProperty().set(List.of(1));
+        assertThat(model.shownProperty().get().wrong()).isEmpty();
+    }
+
+    @Test
+    void theChosenCircuitIsNamed() {
+        session.selectionProperty().set(List.of(0));
+        assertThat(model.shownProperty().get().chosen())
+                .extracting(line -> line.title() + ": " + line.words())
+                .contains("Shunt: 2 × 4 mΩ " + HandMadeParts.SHUNT.partNumber(),
+                        "Comparator: " + HandMadeParts.COMPARATOR.partNumber(),
+                        "Hysteresis: injected current, 4.7 kΩ")
+                .anyMatch(line -> line.startsWith("Threshold: ") && line.endsWith(" from 10 kΩ over 10 kΩ at supply"));
+        session.selectionProperty().set(List.of(4));
+        assertThat(model.shownProperty().get().chosen()).isEmpty();
     }
 }

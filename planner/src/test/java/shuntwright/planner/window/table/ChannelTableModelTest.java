@@ -11,6 +11,7 @@ import shuntwright.planner.HandMadeBoards;
 import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.session.Place;
 import shuntwright.planner.window.table.ChannelTableModel.Spot;
 
 class ChannelTableModelTest {
@@ -43,6 +44,17 @@ class ChannelTableModelTest {
         assertThat(figures.heat().text()).isEqualTo("800 mW");
         assertThat(row(3).figuresProperty().get().margin().text()).startsWith("−");
         assertThat(row(4).figuresProperty().get().shunt().text()).isEmpty();
+    }
+
+    @Test
+    void figuresAreAsOfThenWhileAnEntryIsWrong() {
+        assertThat(row(0).figuresProperty().get().stale()).isFalse();
+        session.enter(new Place.Cell(0, ChannelField.LOAD), "twelve");
+        assertThat(row(0).figuresProperty().get().stale()).isTrue();
+        assertThat(row(0).figuresProperty().get().verdict()).contains(Verdict.INSIDE);
+        assertThat(row(1).figuresProperty().get().stale()).isFalse();
+        session.undo();
+        assertThat(row(0).figuresProperty().get().stale()).isFalse();
     }
 
     @Test
