@@ -66,7 +66,7 @@ class DemandTest {
     @Test
     void aTurnedWindowIsNotBlamedOnATargetNobodyTyped() {
         assertThat(missing(channel(currents(20, 50, 36))))
-                .containsExactly("the no-trip current must be below the must-trip current");
+                .containsExactly("the no-trip current 50 A must be below the must-trip current 36 A");
     }
 
     @Test
