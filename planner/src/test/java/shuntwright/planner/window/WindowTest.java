@@ -153,24 +153,6 @@ class WindowTest {
     }
 
     @Test
-    void aNewBoardIsTypedWithoutTheMouse(FxRobot robot) {
-        settle();
-        robot.interact(() -> window.documents().newBoard(List.of()));
-        waitFor(() -> window.session().state().board().channels().isEmpty());
-        settle();
-        robot.write("horn\t\t\t");
-        robot.write("12 V\t2\t3\t4\t");
-        settle();
-        Board board = window.session().state().board();
-        assertThat(board.channels()).singleElement().satisfies(horn -> {
-            assertThat(horn.name()).isEqualTo("horn");
-            assertThat(horn.rail().orElseThrow().nominal()).isEqualTo(12);
-            assertThat(horn.currents().load()).hasValue(2);
-            assertThat(horn.currents().mustTrip()).hasValue(4);
-        });
-    }
-
-    @Test
     void typingIntoTheLastRowAddsAChannel(FxRobot robot) {
         settle();
         type(robot, 5, "column-channel", "horn");

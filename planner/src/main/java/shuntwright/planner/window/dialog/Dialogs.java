@@ -10,6 +10,7 @@ import javafx.scene.control.ButtonBar.ButtonData;
 import javafx.scene.control.ButtonType;
 import javafx.scene.control.DialogPane;
 import javafx.scene.control.TextArea;
+import javafx.scene.layout.Region;
 import javafx.stage.Window;
 
 import shuntwright.planner.session.Questions;
@@ -64,7 +65,10 @@ public final class Dialogs implements Questions {
         text.setWrapText(true);
         text.setPrefRowCount(Math.clamp(lines.size() * 2L, 3, 22));
         text.setPrefColumnCount(56);
+        text.setMinHeight(Region.USE_PREF_SIZE);
         alert.getDialogPane().setContent(text);
+        // some window managers give less than asked for
+        alert.getDialogPane().setMinHeight(Region.USE_PREF_SIZE);
         alert.setResizable(true);
         alert.showAndWait();
     }

@@ -139,6 +139,8 @@ public final class ChannelTable {
 
     @SuppressWarnings("unchecked") // the focused column is one of this table's
     private void edit(int row, TableColumn<?, ?> column) {
+        // rows may have come or gone since the last frame; without this the cell would still be that of another row
+        table.layout();
         table.edit(row, (TableColumn<RowModel, ?>) column);
     }
 
