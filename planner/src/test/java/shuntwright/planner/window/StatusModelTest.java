@@ -38,7 +38,7 @@ class StatusModelTest {
         BoardSession overloaded = new BoardSession(new Planning((board, parts, progress) -> {
             Plan plan = HandMadePlans.plan(board, parts, progress);
             return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(), plan.taps(),
-                    plan.parts(), List.of(fault));
+                    plan.references(), plan.parts(), List.of(fault));
         }, Runnable::run, Runnable::run));
         StatusModel words = new StatusModel(overloaded);
         overloaded.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
