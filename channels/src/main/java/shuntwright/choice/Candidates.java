@@ -8,7 +8,7 @@ import java.util.Arrays;
  */
 final class Candidates {
 
-    private static final int START = 4096;
+    private static final int START = 256;
 
     private int size;
     private int[] shunt = new int[START];

@@ -30,10 +30,17 @@ public final class ChannelPicker {
     /** How many combinations of shunts and amplifier there are, and how many are promising. */
     public record Count(int combinations, int promising) {}
 
-    /** Runs only the search for candidates. */
+    /** Runs only the search for candidates, one shunt after the other as the choice does. */
     public static Count count(ChannelProblem problem) {
         CandidateSearch search = new CandidateSearch(problem);
-        return new Count(search.combinations(), search.promising().size());
+        Candidates found = new Candidates();
+        int promising = 0;
+        for (int shunt = 0; shunt < search.shunts(); shunt++) {
+            found.clear();
+            search.promising(shunt, shunt + 1, found);
+            promising += found.size();
+        }
+        return new Count(search.combinations(), promising);
     }
 
     /** The choice; a pure function of the problem. */

@@ -22,7 +22,8 @@ public record Cure(Lever lever, String change, Verdict reached, Optional<Double>
         OTHER_SHUNT("another shunt"), OTHER_AMPLIFIER("another amplifier"), OTHER_COMPARATOR("another comparator"),
         FREE_VALUES("values unpinned"), SOURCE("another source for the threshold"),
         TOLERANCE_CLASS("a tighter tolerance class"), WINDOW("a wider window"), RELEASE("another release window"),
-        READING("another reading accuracy"), MORE_SHUNTS("more shunts in parallel"), LIMIT("a relaxed limit");
+        READING("another reading accuracy"), MORE_SHUNTS("more shunts in parallel"),
+        SIDE("the shunt on the other side"), LIMIT("a relaxed limit");
 
         private final String words;
 

@@ -17,6 +17,7 @@ import shuntwright.board.Pins;
 import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Source;
 import shuntwright.board.ThresholdDemand;
+import shuntwright.circuit.Limit;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.Range;
 
@@ -49,15 +50,18 @@ final class Cures {
         }
         Cures cures = new Cures(failing, trials);
         cures.pins();
-        cures.source();
-        cures.parallel();
-        if (failing.solved().isPresent()) {
-            cures.cures.addAll(TighterClasses.of(failing.solved().get(), trials));
-            cures.outcomes(failing.solved().get());
-        } else {
-            cures.limits();
+        cures.side();
+        if (!cures.excludedByRail()) {
+            cures.source();
+            cures.parallel();
+            if (failing.solved().isPresent()) {
+                cures.cures.addAll(TighterClasses.of(failing.solved().get(), trials));
+                cures.outcomes(failing.solved().get());
+            } else {
+                cures.limits();
+            }
+            cures.windows();
         }
-        cures.windows();
         return cures.cures.stream()
                 .sorted(Comparator.comparing((Cure each) -> !each.cures()).thenComparingDouble(Cure::size)).toList();
     }
@@ -102,6 +106,28 @@ final class Cures {
                 || p.comparator().isPresent();
         if (values && parts) {
             add(Cure.Lever.FREE_VALUES, "nothing pinned", 2 * PART_EFFORT, channel.withPins(Pins.NONE));
+        }
+    }
+
+    /** True when the rail or the supply excludes every amplifier or comparator, whatever the currents. */
+    private boolean excludedByRail() {
+        return failing.refusals().stream().anyMatch(each -> each.refused() == each.examined()
+                && switch (each.nearMiss().limit()) {
+                    case COMMON_MODE_HIGH, COMMON_MODE_LOW, AMPLIFIER_SUPPLY, COMPARATOR_SUPPLY, OUTPUT_VOLTAGE -> true;
+                    case SWING_AT_TRIP, SWING_AT_FULL_SCALE, TRIP_FLOOR, RELEASE_FLOOR, OUTPUT_FLOOR,
+                            DIFFERENTIAL_RANGE, DIFFERENTIAL_SURVIVAL, COMPARATOR_HEADROOM, COMPARATOR_FLOOR,
+                            SHUNT_POWER, SHUNT_PULSE, ADC_FULL_SCALE ->
+                        false;
+                });
+    }
+
+    /** A shunt in the return lead sits at 0 V; worth trying where the rail is what excludes amplifiers. */
+    private void side() {
+        boolean rail = failing.refusals().stream().map(each -> each.nearMiss().limit())
+                .anyMatch(limit -> limit == Limit.COMMON_MODE_HIGH || limit == Limit.COMMON_MODE_LOW);
+        if (rail && channel.side() == Channel.Side.HIGH) {
+            add(Cure.Lever.SIDE, "a shunt in the return lead (low side) instead of the rail", SOURCE_EFFORT,
+                    channel.withSide(Channel.Side.LOW));
         }
     }
 
@@ -278,7 +304,7 @@ final class Cures {
         }
         if (stress.clearingTime().isPresent()) {
             for (FamilyRefusal refusal : failing.refusals()) {
-                if (refusal.nearMiss().limit() == shuntwright.circuit.Limit.SHUNT_PULSE) {
+                if (refusal.nearMiss().limit() == Limit.SHUNT_PULSE) {
                     double time = rounded(stress.clearingTime().getAsDouble() * refusal.nearMiss().bound()
                             / refusal.nearMiss().reached(), false);
                     add(Cure.Lever.LIMIT, "clearing time "

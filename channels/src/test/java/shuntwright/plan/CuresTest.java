@@ -26,6 +26,7 @@ import shuntwright.board.Source;
 import shuntwright.board.Tap;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.quantity.Range;
+import shuntwright.quantity.Spread;
 
 /** Changes that claim to cure, made and planned anew. */
 class CuresTest {
@@ -219,5 +220,18 @@ class CuresTest {
         assertThat(only(plan(board(heavy))).verdict()).isEqualTo(Verdict.NO_FIT);
         assertThat(more).hasSize(2).allSatisfy(cure -> assertThat(cure.cures()).isTrue());
         assertThat(more.getFirst().change()).contains("up to 4");
+    }
+
+    /** No amplifier takes this rail; in the return lead the shunt sits at 0 V, and nothing else can help. */
+    @Test
+    void aRailAboveEveryAmplifierIsCuredByTheLowSideAlone() {
+        Channel high = channel("high", 5, 8, 12).withRail(Optional.of(Spread.exactly(400)));
+        ChannelPlan failing = plan(board(high)).channels().getFirst();
+        assertThat(failing.verdict()).isEqualTo(Verdict.NO_FIT);
+        assertThat(failing.cures()).hasSize(1);
+        Cure cure = failing.cures().getFirst();
+        assertThat(cure.lever()).isEqualTo(Cure.Lever.SIDE);
+        assertThat(cure.cures()).isTrue();
+        assertThat(plan(board(cure.edit().orElseThrow())).channels().getFirst().verdict()).isEqualTo(Verdict.INSIDE);
     }
 }
