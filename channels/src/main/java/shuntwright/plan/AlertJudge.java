@@ -5,6 +5,7 @@ import static shuntwright.quantity.QuantityWriter.show;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 import shuntwright.board.AlertLine;
 import shuntwright.parts.OpenDrainOutput;
@@ -28,7 +29,9 @@ final class AlertJudge {
     private AlertJudge() {
     }
 
-    static AlertPlan judge(AlertLine line, Toleranced voltage, List<String> channels, List<OpenDrainOutput> outputs) {
+    /** @param settled pull-up that feedback networks have been worked out with, Ω; empty lets it be chosen here */
+    static AlertPlan judge(AlertLine line, Toleranced voltage, OptionalDouble settled, List<String> channels,
+            List<OpenDrainOutput> outputs) {
         double leakage = line.inputLeakage();
         double sink = Double.POSITIVE_INFINITY;
         double low = 0;
@@ -50,8 +53,8 @@ final class AlertJudge {
         Optional<Range> allowed = levels && least <= most && most > 0
                 ? Optional.of(Range.of(least, most))
                 : Optional.empty();
-        double pullUp = line.pullUp().orElseGet(() -> allowed.map(AlertJudge::choose)
-                .orElse(BoardContext.DEFAULT_PULL_UP));
+        double pullUp = line.pullUp().orElseGet(() -> settled.orElseGet(() -> allowed.map(AlertJudge::choose)
+                .orElse(BoardContext.DEFAULT_PULL_UP)));
         return new AlertPlan(line, channels, pullUp, allowed, least, most, voltage.max() / pullUp);
     }
 

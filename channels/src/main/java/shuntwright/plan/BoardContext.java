@@ -8,6 +8,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 import shuntwright.board.AlertLine;
 import shuntwright.board.Board;
@@ -196,6 +197,12 @@ final class BoardContext {
 
     double pullUp(AlertLine line) {
         return line.pullUp().orElse(pullUps.getOrDefault(line.name(), DEFAULT_PULL_UP));
+    }
+
+    /** The pull-up that was settled before this pass, Ω. */
+    OptionalDouble settledPullUp(AlertLine line) {
+        Double settled = pullUps.get(line.name());
+        return settled == null ? OptionalDouble.empty() : OptionalDouble.of(settled);
     }
 
     /** The voltage a line is pulled up to. */

@@ -287,7 +287,7 @@ public final class BoardPlanner {
                     .filter(each -> context.line(each.channel()).filter(line::equals).isPresent()).toList();
             List<OpenDrainOutput> outputs = on.stream().flatMap(each -> each.solved().stream())
                     .map(each -> each.circuit().comparator().output()).toList();
-            AlertPlan alert = AlertJudge.judge(line, context.lineVoltage(line),
+            AlertPlan alert = AlertJudge.judge(line, context.lineVoltage(line), context.settledPullUp(line),
                     on.stream().map(each -> each.channel().name()).toList(), outputs);
             alerts.add(alert);
             findings.addAll(AlertJudge.findings(alert, context.lineVoltage(line), outputs));

@@ -30,7 +30,7 @@ class PullUpLimitsTest {
                 OptionalDouble.of(inputHigh), OptionalDouble.empty(), inputLeakage, capacitance,
                 rise > 0 ? OptionalDouble.of(rise) : OptionalDouble.empty());
         OpenDrainOutput output = new OpenDrainOutput(Range.exactly(low), sink, leakage, 40);
-        AlertPlan plan = AlertJudge.judge(line, IdealParts.exactly(volts), List.of(),
+        AlertPlan plan = AlertJudge.judge(line, IdealParts.exactly(volts), OptionalDouble.empty(), List.of(),
                 Collections.nCopies(outputs, output));
         assertThat(plan.least()).isCloseTo(least, within(tolerance));
         if (most == null) {
