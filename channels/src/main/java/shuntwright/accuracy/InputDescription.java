@@ -89,16 +89,11 @@ final class InputDescription {
         plusMinus(Slot.GAIN_DRIFT, 0, owner, circuit.amplifier().gainDrift());
         plusMinus(Slot.OFFSET, 0, owner, errors.offset());
         plusMinus(Slot.OFFSET_DRIFT, 0, owner, errors.offsetDrift());
-        plusMinus(Slot.COMMON_MODE, 0, owner, ratio(errors.rejection()));
-        plusMinus(Slot.SUPPLY_REJECTION, 0, owner, ratio(errors.supplyRejection()));
+        plusMinus(Slot.COMMON_MODE, 0, owner, errors.perCommonModeVolt());
+        plusMinus(Slot.SUPPLY_REJECTION, 0, owner, errors.perSupplyVolt());
         if (around.rules().inputResistance() * around.rules().inputMismatch() > 0) {
             plusMinus(Slot.INPUT_BIAS, 0, owner, errors.biasCurrent());
         }
-    }
-
-    /** Volts per volt of a rejection in dB. */
-    private static double ratio(double decibel) {
-        return Math.pow(10, -decibel / 20);
     }
 
     private void threshold(SenseCircuit circuit) {

@@ -72,9 +72,9 @@ final class AmplifierTerms {
             gainHigh[end][j] = amplifier.gain() * (1 + relative);
             Range rail = demand.commonMode().range();
             double common = Math.max(Math.abs(rail.max() - input.commonModeSpec()),
-                    Math.abs(rail.min() - input.commonModeSpec())) * Math.pow(10, -input.rejection() / 20);
+                    Math.abs(rail.min() - input.commonModeSpec())) * input.perCommonModeVolt();
             double supply = kinder(around.supply().range(), input.supplySpec())
-                    * Math.pow(10, -input.supplyRejection() / 20);
+                    * input.perSupplyVolt();
             error[end][j] = input.offset() + input.offsetDrift() * Math.abs(ta) + common + supply
                     + input.biasCurrent() * around.rules().inputResistance() * around.rules().inputMismatch();
         }

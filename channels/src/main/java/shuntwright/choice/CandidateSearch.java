@@ -50,8 +50,8 @@ final class CandidateSearch {
         while (true) {
             int least = -1;
             for (int i = 0; i < counts.length; i++) {
-                if (next[i] < sorted.size() && (least < 0 || resistance(sorted.get(next[i]), counts[i]) < resistance(
-                        sorted.get(next[least]), counts[least]))) {
+                if (next[i] < sorted.size() && (least < 0 || sorted.get(next[i]).inParallel(counts[i]) < sorted
+                        .get(next[least]).inParallel(counts[least]))) {
                     least = i;
                 }
             }
@@ -64,10 +64,6 @@ final class CandidateSearch {
                 terms.add(new ShuntTerms(shunt, counts[least], problem));
             }
         }
-    }
-
-    private static double resistance(Shunt shunt, int count) {
-        return (shunt.resistance() + shunt.mountingResistance().mid()) / count;
     }
 
     /** The numbers of shunts in parallel that may be tried. */

@@ -58,7 +58,7 @@ final class Refusals {
 
     private record ShuntChoice(Shunt shunt, int count) {
         double resistance() {
-            return (shunt.resistance() + shunt.mountingResistance().mid()) / count;
+            return shunt.inParallel(count);
         }
 
         String words() {

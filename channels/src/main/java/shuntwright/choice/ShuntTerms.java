@@ -44,7 +44,7 @@ final class ShuntTerms {
         Demand demand = problem.demand();
         this.ambient = problem.around().ambient();
         this.heating = shunt.rating().thermalResistance() / count;
-        this.resistance = (shunt.resistance() + shunt.mountingResistance().mid()) / count;
+        this.resistance = shunt.inParallel(count);
         this.heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
         this.cost = count * shunt.purchase().unitPriceAt(saturated(count, problem.buildQuantity()));
         this.emf = shunt.thermalEmf() * problem.around().rules().shuntGradient();

@@ -28,6 +28,6 @@ public record SenseCircuit(Shunt shunt, int shuntCount, SenseAmplifier amplifier
 
     /** Nominal resistance of all shunts in parallel with their mounting, at 25 °C (mounting at 20 °C), Ω. */
     public double resistance() {
-        return (shunt.resistance() + shunt.mountingResistance().mid()) / shuntCount;
+        return shunt.inParallel(shuntCount);
     }
 }

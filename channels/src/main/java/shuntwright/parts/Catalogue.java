@@ -33,7 +33,7 @@ public final class Catalogue {
         }
         shunts = only(Shunt.class);
         byResistance = shunts.stream()
-                .sorted(Comparator.comparingDouble(each -> each.resistance() + each.mountingResistance().mid()))
+                .sorted(Comparator.comparingDouble(each -> each.inParallel(1)))
                 .toList();
         amplifiers = only(SenseAmplifier.class);
         comparators = only(shuntwright.parts.Comparator.class);

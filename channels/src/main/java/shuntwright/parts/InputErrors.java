@@ -25,4 +25,18 @@ public record InputErrors(double offset, double offsetDrift, double rejection, d
             throw new IllegalArgumentException("input errors need magnitudes ≥ 0 and rejections > 0 dB");
         }
     }
+
+    /** Limit of the input error per volt of common-mode voltage, V/V: 10^(−dB/20). */
+    public double perCommonModeVolt() {
+        return perVolt(rejection);
+    }
+
+    /** Limit of the input error per volt of supply voltage, V/V. */
+    public double perSupplyVolt() {
+        return perVolt(supplyRejection);
+    }
+
+    private static double perVolt(double decibel) {
+        return Math.pow(10, -decibel / 20);
+    }
 }

@@ -30,4 +30,9 @@ public record Shunt(String partNumber, String description, double resistance, To
             throw new IllegalArgumentException("shunt " + partNumber + " needs resistance > 0 and limits ≥ 0");
         }
     }
+
+    /** Nominal resistance of {@code count} in parallel with their mounting, at 25 °C (mounting at 20 °C), Ω. */
+    public double inParallel(int count) {
+        return (resistance + mountingResistance.mid()) / count;
+    }
 }
