@@ -11,7 +11,6 @@ import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
-import shuntwright.board.DesignRules;
 import shuntwright.board.Source;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.choice.ChannelProblem;
@@ -84,10 +83,7 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
         if (!context.board().references().isEmpty() || best().isEmpty()) {
             return Optional.empty();
         }
-        Board b = context.board();
-        Board richer = new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
-                List.of(new BoardReference(ADDED, best().get().partNumber())), b.adc(), b.alertLines(), b.taps(),
-                b.zones(), b.heatLimit(), b.acceptance(), b.rules(), b.channels());
+        Board richer = context.board().withReferences(List.of(new BoardReference(ADDED, best().get().partNumber())));
         return Optional.of(on(new BoardContext(richer, context.catalogue(), Map.of()),
                 channel.withThreshold(new ThresholdDemand.OwnDivider(new Source.OfReference(ADDED)))));
     }
@@ -113,12 +109,7 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
     @Override
     public ChannelPlan withParallel(Channel channel, int parallel) {
         Board b = context.board();
-        DesignRules r = b.rules();
-        DesignRules more = new DesignRules(parallel, r.powerMargin(), r.dividerCurrent(), r.biasShare(),
-                r.resistors(), r.heatStep(), r.shuntGradient(), r.inputResistance(), r.inputMismatch());
-        Board richer = new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
-                b.references(), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(), more,
-                b.channels());
+        Board richer = b.withRules(b.rules().withParallelShunts(parallel));
         return on(new BoardContext(richer, context.catalogue(), Map.of()), channel);
     }
 }

@@ -30,8 +30,7 @@ final class Pinning {
         }
         List<Tap> taps = plan.taps().stream().map(Pinning::tap).toList();
         List<AlertLine> lines = plan.alerts().stream().map(Pinning::line).toList();
-        return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
-                b.references(), b.adc(), lines, taps, b.zones(), b.heatLimit(), b.acceptance(), b.rules(), channels);
+        return b.withAlertLines(lines).withTaps(taps).withChannels(channels);
     }
 
     private static AlertLine line(AlertPlan plan) {

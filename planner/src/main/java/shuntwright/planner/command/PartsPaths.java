@@ -29,9 +29,7 @@ final class PartsPaths {
         Stream<Path> all = Stream.concat(of(board, from).stream(),
                 extra.stream().map(each -> each.toAbsolutePath().normalize()));
         List<String> names = all.distinct().map(each -> relative(each, folder(to))).toList();
-        return new Board(board.name(), board.description(), names, board.buildQuantity(), board.ambient(),
-                board.supply(), board.references(), board.adc(), board.alertLines(), board.taps(), board.zones(),
-                board.heatLimit(), board.acceptance(), board.rules(), board.channels());
+        return board.withPartsFiles(names);
     }
 
     private static Path folder(Path file) {
