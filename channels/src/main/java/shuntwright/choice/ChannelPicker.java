@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SenseCircuit;
@@ -151,13 +152,13 @@ public final class ChannelPicker {
         int looked = 0;
         for (Completions.Option option : options) {
             for (SenseCircuit circuit : completions.build(option)) {
-                if (!CandidateSearch.holds(judge.limits(circuit))) {
+                OptionalDouble reached = judge.margin(circuit);
+                if (reached.isEmpty()) {
                     continue;
                 }
                 looked++;
-                double reached = judge.margin(circuit);
-                if (reached > margin) {
-                    margin = reached;
+                if (reached.getAsDouble() > margin) {
+                    margin = reached.getAsDouble();
                     best = circuit;
                 }
             }

@@ -1,6 +1,7 @@
 package shuntwright.choice;
 
 import java.util.List;
+import java.util.OptionalDouble;
 
 import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.board.Acceptance;
@@ -18,13 +19,6 @@ final class Judge {
     Judge(ChannelProblem problem) {
         this.problem = problem;
         this.asked = ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent());
-    }
-
-    /** Every limit with its numbers. */
-    List<LimitCheck> limits(SenseCircuit circuit) {
-        ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
-        return LimitRules.all(circuit, accuracy.changeover(), problem.pullUp().voltage().max(), problem.demand(),
-                problem.around());
     }
 
     /** The limits of its threshold with their numbers. */
@@ -48,15 +42,22 @@ final class Judge {
                 circuit.comparator(), problem.around()));
     }
 
-    /** Smallest slack of all outcomes as a share of the allowed half-width; negative outside. */
-    double margin(SenseCircuit circuit) {
+    /**
+     * Smallest slack of all outcomes as a share of the allowed half-width, negative outside; empty for a circuit that breaks
+     * a limit.
+     */
+    OptionalDouble margin(SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
+        if (!CandidateSearch.holds(LimitRules.all(circuit, accuracy.changeover(),
+                problem.pullUp().voltage().max(), problem.demand(), problem.around()))) {
+            return OptionalDouble.empty();
+        }
         double margin = Double.POSITIVE_INFINITY;
         for (ChannelAccuracy.Asked each : asked) {
             Range reached = accuracy.limits(each);
             double slack = Math.min(reached.min() - each.allowed().min(), each.allowed().max() - reached.max());
             margin = Math.min(margin, slack / (each.allowed().width() / 2));
         }
-        return margin;
+        return OptionalDouble.of(margin);
     }
 }
