@@ -17,14 +17,12 @@ public final class ChannelAccuracy {
 
     private final ChannelEquations equations;
     private final InputDescription description;
-    private final SenseCircuit circuit;
     private final Demand demand;
     private final boolean reads;
 
     private ChannelAccuracy(SenseCircuit circuit, Surroundings around, Demand demand) {
         this.equations = new ChannelEquations(circuit, around);
         this.description = InputDescription.of(circuit, around, demand);
-        this.circuit = circuit;
         this.demand = demand;
         this.reads = around.adc().isPresent();
     }
@@ -158,8 +156,4 @@ public final class ChannelAccuracy {
         return Propagation.secondOrder(equation, estimates);
     }
 
-    /** The circuit judged. */
-    public SenseCircuit circuit() {
-        return circuit;
-    }
 }

@@ -124,10 +124,4 @@ final class CircuitBuilder {
         return (Math.max(low[0], low[1]) + Math.min(high[0], high[1])) / 2;
     }
 
-    /** Extremes of the threshold voltage to compare with limits, before exact evaluation. */
-    static Range spread(Window window, Threshold threshold, ResistorSeries resistors) {
-        Range cold = HysteresisChoice.spread(window, threshold, resistors, 0);
-        Range hot = HysteresisChoice.spread(window, threshold, resistors, 1);
-        return Range.of(Math.min(cold.min(), hot.min()), Math.max(cold.max(), hot.max()));
-    }
 }

@@ -24,8 +24,7 @@ public enum Limit {
 
     /** The kind of part a limit excludes. */
     public enum Family {
-        SHUNT("shunts"), AMPLIFIER("amplifiers"), COMPARATOR("comparators"), THRESHOLD("thresholds"),
-        HYSTERESIS("hysteresis");
+        SHUNT("shunts"), AMPLIFIER("amplifiers"), COMPARATOR("comparators"), THRESHOLD("thresholds");
 
         private final String word;
 

@@ -62,11 +62,6 @@ public final class Fields {
         return object.find(key.name()).isPresent();
     }
 
-    /** What stands in the file behind the key. */
-    public Optional<LocatedJson> located(Key<?> key) {
-        return object.find(key.name());
-    }
-
     /** Adds a problem at the key's value, or at the object when the key is left out. */
     public void problem(Key<?> key, String message) {
         problems.add(object.find(key.name()).orElse(object), message);

@@ -8,7 +8,6 @@ import java.util.Optional;
 import shuntwright.io.form.Form;
 import shuntwright.io.form.FormatLine;
 import shuntwright.io.json.FileReading;
-import shuntwright.io.json.JsonFiles;
 import shuntwright.io.json.JsonText;
 import shuntwright.io.json.JsonTree;
 import shuntwright.io.json.LocatedJson;
@@ -30,12 +29,6 @@ public final class PartsFiles {
         PartsMerge merge = new PartsMerge();
         files.forEach(merge::add);
         return merge.finish();
-    }
-
-    /** Opens one parts file, to be changed and saved again. */
-    public static FileReading<PartsFile> openOne(Path file) {
-        Problems problems = new Problems(String.valueOf(file.getFileName()));
-        return reading(JsonFiles.read(file, problems), problems);
     }
 
     /**

@@ -7,7 +7,6 @@ import java.util.stream.Collectors;
 
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.StringBinding;
-import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
 
 import shuntwright.plan.ChannelPlan;
@@ -91,10 +90,6 @@ final class StatusModel {
     /** Says that something was done, until the next edit. */
     void done(String what) {
         done.set(what);
-    }
-
-    ReadOnlyStringProperty doneProperty() {
-        return done.getReadOnlyProperty();
     }
 
     StringBinding textBinding() {
