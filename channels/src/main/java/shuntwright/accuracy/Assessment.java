@@ -1,6 +1,7 @@
 package shuntwright.accuracy;
 
 import java.util.List;
+import java.util.Optional;
 
 import shuntwright.quantity.Range;
 
@@ -13,9 +14,11 @@ import shuntwright.quantity.Range;
  * @param combined JCGM 100
  * @param allowed  what the demand allows
  * @param budget   contributions, largest first
+ * @param propagated probabilistically symmetric coverage interval of the propagated distribution (JCGM 101); empty until sampled,
+ *                   which is not needed where the limits are inside
  */
 public record Assessment(Outcome outcome, double nominal, Range limits, CombinedUncertainty combined, Range allowed,
-        List<BudgetLine> budget) {
+        List<BudgetLine> budget, Optional<Range> propagated) {
 
     public Assessment {
         budget = List.copyOf(budget);
@@ -26,9 +29,18 @@ public record Assessment(Outcome outcome, double nominal, Range limits, Combined
         return allowed.contains(limits);
     }
 
-    /** True when the coverage interval is within what is allowed. */
+    /** True when the coverage interval of the propagated distribution is within what is allowed. */
     public boolean insideByCoverage() {
-        return allowed.contains(combined.interval());
+        return insideByLimits() || propagated.map(allowed::contains).orElse(false);
+    }
+
+    /** The coverage interval: of the propagated distribution where sampled, else of the combined uncertainty. */
+    public Range coverage() {
+        return propagated.orElseGet(combined::interval);
+    }
+
+    public Assessment withPropagated(Range interval) {
+        return new Assessment(outcome, nominal, limits, combined, allowed, budget, Optional.of(interval));
     }
 
     /**
@@ -41,7 +53,7 @@ public record Assessment(Outcome outcome, double nominal, Range limits, Combined
 
     /** The same for the coverage interval. */
     public double coverageMargin() {
-        return slack(combined.interval());
+        return slack(coverage());
     }
 
     private double slack(Range reached) {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.circuit.LimitRules;
@@ -72,13 +73,30 @@ public final class ChannelAccuracy {
     public List<Assessment> assess(double coverage) {
         List<Assessment> all = new ArrayList<>();
         for (Asked each : asked(demand, reads)) {
-            all.add(assess(each, coverage));
+            all.add(assess(each, equation(each), coverage));
         }
         return all;
     }
 
-    private Assessment assess(Asked asked, double coverage) {
-        Equation equation = equation(asked);
+    /** The readings as they would be without calibration; empty where nothing is calibrated. */
+    public List<Assessment> uncalibrated(double coverage) {
+        if (calibration().isEmpty()) {
+            return List.of();
+        }
+        List<Assessment> all = new ArrayList<>();
+        for (Asked each : asked(demand, reads)) {
+            if (each.outcome() == Outcome.READING_AT_LEAST || each.outcome() == Outcome.READING_AT_LOAD) {
+                all.add(assess(each, equations.reading(each.current()), coverage));
+            }
+        }
+        return all;
+    }
+
+    private Optional<Calibration> calibration() {
+        return demand.channel().reading().calibration();
+    }
+
+    private Assessment assess(Asked asked, Equation equation, double coverage) {
         LimitsReader reader = new LimitsReader(equation, description);
         List<LimitsReader.Corner> extremes = reader.extremes();
         LimitsReader.Corner low = extremes.get(0);
@@ -87,7 +105,7 @@ public final class ChannelAccuracy {
         double nominal = equation.value(description.nominal());
         return new Assessment(asked.outcome(), nominal, Range.of(finite(low.value()), finite(high.value())),
                 propagation.expanded(coverage), asked.allowed(),
-                ErrorBudget.lines(equation, description, low, high, propagation));
+                ErrorBudget.lines(equation, description, low, high, propagation), Optional.empty());
     }
 
     /** Thermal runaway is reported as a current beyond any board, so that it stays a number. */
@@ -141,7 +159,9 @@ public final class ChannelAccuracy {
         return switch (asked.outcome()) {
             case TRIP -> equations.trip();
             case RELEASE -> equations.release();
-            case READING_AT_LEAST, READING_AT_LOAD -> equations.reading(asked.current());
+            case READING_AT_LEAST, READING_AT_LOAD -> calibration()
+                    .<Equation>map(each -> new CalibratedReading(equations, each, demand.load(), asked.current()))
+                    .orElseGet(() -> equations.reading(asked.current()));
         };
     }
 
@@ -151,9 +171,10 @@ public final class ChannelAccuracy {
             estimates.add(Estimate.of(value, 0));
         }
         for (Input input : description.inputs()) {
-            estimates.set(Layout.index(input), Estimate.of(input.limits().mid(), input.standardUncertainty()));
+            estimates.set(Layout.index(input), new Estimate(input.limits().mid(), input.standardUncertainty(),
+                    input.distribution().degreesOfFreedom()));
         }
-        return Propagation.secondOrder(equation, estimates);
+        return Propagation.secondOrder(equation, estimates, description.correlation());
     }
 
 }

@@ -18,6 +18,8 @@ import shuntwright.parts.Hysteresis;
  * current is I = 2v/(A + √(A² + 4Kv²)) with A = R_p + B_p·(T_a − 25 °C) and K = B_p·θ/n; without such a current (thermal
  * runaway) the value is infinite. The n shunts are in parallel, each with its own deviation, at one temperature.
  *
+ * <p>The channel's own parts are at ambient plus the rise of their zone; references, ADC and taps at ambient.
+ *
  * <p>Amplifier: V_o = V_B + G·(I·R + V_e). Threshold node by Kirchhoff's current law. See docs/equations.md.
  */
 final class ChannelEquations {
@@ -39,6 +41,10 @@ final class ChannelEquations {
 
     int size() {
         return size;
+    }
+
+    int shuntCount() {
+        return circuit.shuntCount();
     }
 
     /** The trip current. */
@@ -94,7 +100,7 @@ final class ChannelEquations {
 
     private double cross(boolean tripped, double[] x, double[] g) {
         boolean slopes = g.length > 0;
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        double dT = ThresholdNode.local(x);
         double vo = output(tripped, x, 0, new double[0]);
         double gain = gain(x, dT);
         double v = (vo - OUTPUT_BIAS) / gain - inputError(x, dT);
@@ -114,7 +120,7 @@ final class ChannelEquations {
             output(tripped, x, byV / gain, g);
             gainSlopes(x, dT, -byV * (vo - OUTPUT_BIAS) / (gain * gain), g);
             inputErrorSlopes(x, dT, -byV, g);
-            g[Slot.AMBIENT.place()] += byA * p.slope;
+            ThresholdNode.warm(byA * p.slope, g);
             p.slopes(circuit, x, byA, byA * dT + byK * heating, g);
         }
         return current;
@@ -123,7 +129,7 @@ final class ChannelEquations {
     private double read(double current, double[] x, double[] g) {
         boolean slopes = g.length > 0;
         Surroundings.Converter converter = around.adc().orElseThrow();
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        double dT = ThresholdNode.local(x);
         Parallel p = Parallel.of(circuit, x);
         double a = p.resistance + p.slope * dT;
         double k = p.slope * heating;
@@ -142,7 +148,7 @@ final class ChannelEquations {
         boolean bySupply = converter.source().isSupply();
         double reference = bySupply
                 ? x[Slot.SUPPLY.place()]
-                : full * (1 + tol + drift * dT + age) - x[Slot.ADC_REFERENCE_LOAD.place()];
+                : full * (1 + tol + drift * ThresholdNode.air(x) + age) - x[Slot.ADC_REFERENCE_LOAD.place()];
         double adcGain = 1 + x[Slot.ADC_GAIN.place()];
         double seen = vo + x[Slot.ADC_OFFSET.place()];
         double scale = full / reference;
@@ -158,7 +164,7 @@ final class ChannelEquations {
                 g[Slot.SUPPLY.place()] += byReference;
             } else {
                 g[Slot.ADC_REFERENCE_TOLERANCE.place()] += byReference * full;
-                g[Slot.ADC_REFERENCE_DRIFT.place()] += byReference * full * dT;
+                g[Slot.ADC_REFERENCE_DRIFT.place()] += byReference * full * ThresholdNode.air(x);
                 g[Slot.ADC_REFERENCE_AGEING.place()] += byReference * full;
                 g[Slot.ADC_REFERENCE_LOAD.place()] -= byReference;
                 g[Slot.AMBIENT.place()] += byReference * full * drift;
@@ -168,21 +174,23 @@ final class ChannelEquations {
             double byR = bySeen * gain * current;
             double byA = byR / room;
             double byK = byR * a * current * current / (room * room);
-            g[Slot.AMBIENT.place()] += byA * p.slope;
+            ThresholdNode.warm(byA * p.slope, g);
             p.slopes(circuit, x, byA, byA * dT + byK * heating, g);
         }
         return (indicated - OUTPUT_BIAS) * constant;
     }
 
     private double gain(double[] x, double dT) {
-        return circuit.amplifier().gain() * (1 + x[Slot.GAIN_ERROR.place()] + x[Slot.GAIN_DRIFT.place()] * dT);
+        return circuit.amplifier().gain() * (1 + x[Slot.GAIN_ERROR.place()] + x[Slot.GAIN_DRIFT.place()] * dT
+                + x[Slot.GAIN_AGEING.place()]);
     }
 
     private void gainSlopes(double[] x, double dT, double weight, double[] g) {
         double nominal = circuit.amplifier().gain() * weight;
         g[Slot.GAIN_ERROR.place()] += nominal;
         g[Slot.GAIN_DRIFT.place()] += nominal * dT;
-        g[Slot.AMBIENT.place()] += nominal * x[Slot.GAIN_DRIFT.place()];
+        g[Slot.GAIN_AGEING.place()] += nominal;
+        ThresholdNode.warm(nominal * x[Slot.GAIN_DRIFT.place()], g);
     }
 
     /** V_e, the sum of errors that act like a voltage at the amplifier's input, V. */
@@ -198,7 +206,7 @@ final class ChannelEquations {
     private void inputErrorSlopes(double[] x, double dT, double weight, double[] g) {
         g[Slot.OFFSET.place()] += weight;
         g[Slot.OFFSET_DRIFT.place()] += weight * dT;
-        g[Slot.AMBIENT.place()] += weight * x[Slot.OFFSET_DRIFT.place()];
+        ThresholdNode.warm(weight * x[Slot.OFFSET_DRIFT.place()], g);
         g[Slot.COMMON_MODE.place()] += weight
                 * (x[Slot.RAIL.place()] - circuit.amplifier().input().commonModeSpec());
         g[Slot.RAIL.place()] += weight * x[Slot.COMMON_MODE.place()];
@@ -215,14 +223,14 @@ final class ChannelEquations {
 
     /** V_o at which the comparator changes over; adds weight·∂V_o/∂x to g unless g is empty. */
     private double output(boolean tripped, double[] x, double weight, double[] g) {
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        double dT = ThresholdNode.local(x);
         double node = ThresholdNode.voltage(circuit, tripped, x, weight, g);
         double offset = x[Slot.COMPARATOR_OFFSET.place()] + x[Slot.COMPARATOR_DRIFT.place()] * dT;
         double bias = x[Slot.SENSE_BIAS.place()];
         double rh = circuit.network() instanceof HysteresisNetwork.SenseResistor(double nominal) ? nominal : 0;
         double tol = x[Slot.SENSE_RESISTOR_TOLERANCE.place()];
         double drift = x[Slot.SENSE_RESISTOR_DRIFT.place()];
-        double resistance = rh * (1 + tol + drift * dT);
+        double resistance = rh * (1 + tol + drift * dT + x[Slot.SENSE_RESISTOR_AGEING.place()]);
         boolean injects = tripped && circuit.comparator().hysteresis() instanceof Hysteresis.InjectedCurrent;
         double current = bias - (injects ? x[Slot.INJECTED_CURRENT.place()] : 0);
         double builtIn = tripped ? x[Slot.BUILT_IN.place()] : 0;
@@ -231,8 +239,9 @@ final class ChannelEquations {
             g[Slot.COMPARATOR_DRIFT.place()] += weight * dT;
             g[Slot.SENSE_BIAS.place()] += weight * resistance;
             g[Slot.SENSE_RESISTOR_TOLERANCE.place()] += weight * current * rh;
+            g[Slot.SENSE_RESISTOR_AGEING.place()] += weight * current * rh;
             g[Slot.SENSE_RESISTOR_DRIFT.place()] += weight * current * rh * dT;
-            g[Slot.AMBIENT.place()] += weight * (x[Slot.COMPARATOR_DRIFT.place()] + current * rh * drift);
+            ThresholdNode.warm(weight * (x[Slot.COMPARATOR_DRIFT.place()] + current * rh * drift), g);
             if (injects) {
                 g[Slot.INJECTED_CURRENT.place()] -= weight * resistance;
             }

@@ -1,5 +1,8 @@
 package shuntwright.accuracy;
 
+import java.util.Optional;
+
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 
 /**
@@ -10,9 +13,11 @@ import shuntwright.quantity.Range;
  * @param owner        whose draw it is
  * @param nominal      in the slot's unit
  * @param limits       in the slot's unit
- * @param distribution assigned to the limits
+ * @param distribution assigned to the limits; it lies around their middle (JCGM 100:2008, 4.3.8, where they are asymmetric)
+ * @param reel         whose pieces deviate alike; empty for an independent input
  */
-public record Input(Slot slot, int piece, Owner owner, double nominal, Range limits, Distribution distribution) {
+public record Input(Slot slot, int piece, Owner owner, double nominal, Range limits, Distribution distribution,
+        Optional<Reel> reel) {
 
     /** Standard uncertainty in the slot's unit. */
     public double standardUncertainty() {

@@ -12,7 +12,7 @@ import shuntwright.quantity.Range;
 /**
  * Exact extremes of an equation over the box of its inputs.
  *
- * <p>Ambient, supply, rail and the shunts' temperature coefficients multiply other inputs, so both their ends are
+ * <p>Temperatures, supply, rail and the shunts' temperature coefficients multiply other inputs, so both their ends are
  * enumerated. With those fixed the equation is monotone in each remaining input, and its extreme is at the corner that
  * the signs of the partial derivatives pick. Should a derivative at that corner point the other way than the one in the
  * middle of the box, where it may also be 0, the input concerned is turned over, and enumerated too if that does not
@@ -23,7 +23,9 @@ import shuntwright.quantity.Range;
  */
 final class LimitsReader {
 
-    private static final Set<Slot> ALWAYS = EnumSet.of(Slot.AMBIENT, Slot.SUPPLY, Slot.RAIL, Slot.SHUNT_DRIFT);
+    private static final Set<Slot> ALWAYS = EnumSet.of(Slot.AMBIENT, Slot.ZONE_RISE, Slot.SUPPLY, Slot.RAIL,
+            Slot.SHUNT_DRIFT,
+            Slot.CALIBRATION_TEMPERATURE, Slot.CALIBRATION_SUPPLY, Slot.CALIBRATION_RAIL);
     private static final int MOST_ENUMERATED = 12;
     private static final int MOST_PASSES = 8;
     /** How close to the best corner, relative, another must be for its ambient temperature to be looked at. */

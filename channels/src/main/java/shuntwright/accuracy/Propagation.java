@@ -43,6 +43,11 @@ public final class Propagation {
         return of(f, inputs, new double[0][], true);
     }
 
+    /** With the next terms of the Taylor series; correlation counts in the first order. */
+    public static Propagation secondOrder(Equation f, List<Estimate> inputs, double[][] correlation) {
+        return of(f, inputs, correlation, true);
+    }
+
     /** First order with correlation coefficients r[i][j] (symmetric, ones on the diagonal). */
     public static Propagation correlated(Equation f, List<Estimate> inputs, double[][] correlation) {
         if (correlation.length != inputs.size()) {

@@ -5,8 +5,10 @@ public enum Slot {
     AMBIENT("ambient temperature", "°C"),
     SUPPLY("sense supply", "V"),
     RAIL("rail voltage", "V"),
+    ZONE_RISE("rise of the zone above ambient", "K"),
     GAIN_ERROR("gain error", "1"),
     GAIN_DRIFT("gain drift", "1/K"),
+    GAIN_AGEING("gain ageing", "1"),
     OFFSET("amplifier offset", "V"),
     OFFSET_DRIFT("amplifier offset drift", "V/K"),
     COMMON_MODE("common-mode rejection", "V/V"),
@@ -21,10 +23,13 @@ public enum Slot {
     TOP_DRIFT("divider top drift", "1/K"),
     BOTTOM_TOLERANCE("divider bottom tolerance", "1"),
     BOTTOM_DRIFT("divider bottom drift", "1/K"),
+    TOP_AGEING("divider top ageing", "1"),
+    BOTTOM_AGEING("divider bottom ageing", "1"),
     DAC_GAIN("DAC gain error", "1"),
     DAC_OFFSET("DAC offset and non-linearity", "V"),
     FEEDBACK_TOLERANCE("feedback resistor tolerance", "1"),
     FEEDBACK_DRIFT("feedback resistor drift", "1/K"),
+    FEEDBACK_AGEING("feedback resistor ageing", "1"),
     PULL_UP_TOLERANCE("pull-up tolerance and drift", "1"),
     PULL_UP_VOLTAGE("pull-up voltage", "V"),
     OUTPUT_LOW("comparator output low level", "V"),
@@ -36,6 +41,7 @@ public enum Slot {
     INJECTED_CURRENT("injected hysteresis current", "A"),
     SENSE_RESISTOR_TOLERANCE("hysteresis resistor tolerance", "1"),
     SENSE_RESISTOR_DRIFT("hysteresis resistor drift", "1/K"),
+    SENSE_RESISTOR_AGEING("hysteresis resistor ageing", "1"),
     ADC_GAIN("ADC gain error", "1"),
     ADC_OFFSET("ADC offset", "V"),
     ADC_STEP("ADC non-linearity and half a step", "V"),
@@ -43,6 +49,12 @@ public enum Slot {
     ADC_REFERENCE_DRIFT("ADC reference drift", "1/K"),
     ADC_REFERENCE_AGEING("ADC reference ageing", "1"),
     ADC_REFERENCE_LOAD("ADC reference load regulation", "V"),
+    CALIBRATION_CURRENT("calibration current", "1"),
+    CALIBRATION_TEMPERATURE("temperature at calibration", "°C"),
+    CALIBRATION_SUPPLY("sense supply at calibration", "V"),
+    CALIBRATION_RAIL("rail voltage at calibration", "V"),
+    CALIBRATION_STEP_LOWER("ADC non-linearity at the lower calibration point", "V"),
+    CALIBRATION_STEP_UPPER("ADC non-linearity at the upper calibration point", "V"),
     /** From here on one slot for each shunt in parallel. */
     SHUNT_TOLERANCE("shunt tolerance", "1"),
     SHUNT_DRIFT("shunt temperature coefficient", "1/K"),
@@ -61,14 +73,18 @@ public enum Slot {
         return words;
     }
 
-    /** True for ambient, supply and rail, which multiply other inputs. */
+    /** True for temperatures, supply and rail, which multiply other inputs. */
     public boolean multiplies() {
-        return this == AMBIENT || this == SUPPLY || this == RAIL;
+        return switch (this) {
+            case AMBIENT, ZONE_RISE, SUPPLY, RAIL, CALIBRATION_TEMPERATURE, CALIBRATION_SUPPLY, CALIBRATION_RAIL ->
+                true;
+            default -> false;
+        };
     }
 
     /** Its place in the order above; the vector of inputs is laid out by it. */
     @SuppressWarnings("EnumOrdinal")
-    int place() {
+    public int place() {
         return ordinal();
     }
 

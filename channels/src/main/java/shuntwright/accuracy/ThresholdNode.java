@@ -17,6 +17,22 @@ final class ThresholdNode {
     private ThresholdNode() {
     }
 
+    /** Temperature of the ambient air above 25 °C, K. */
+    static double air(double[] x) {
+        return x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+    }
+
+    /** Temperature around the channel's own parts above 25 °C, K. */
+    static double local(double[] x) {
+        return air(x) + x[Slot.ZONE_RISE.place()];
+    }
+
+    /** Adds a slope by the temperature around the channel's own parts to g. */
+    static void warm(double slope, double[] g) {
+        g[Slot.AMBIENT.place()] += slope;
+        g[Slot.ZONE_RISE.place()] += slope;
+    }
+
     /** V at x; adds weight·∂V/∂x to g unless g is empty. */
     static double voltage(SenseCircuit circuit, boolean tripped, double[] x, double weight, double[] g) {
         return switch (circuit.threshold()) {
@@ -39,10 +55,13 @@ final class ThresholdNode {
 
     private static double divider(SenseCircuit circuit, Threshold.Divider divider, boolean tripped, double[] x,
             double weight, double[] g) {
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        boolean own = divider.tap().isEmpty();
+        double dT = own ? local(x) : air(x);
         double source = source(divider.source(), x);
-        double topFactor = 1 + x[Slot.TOP_TOLERANCE.place()] + x[Slot.TOP_DRIFT.place()] * dT;
-        double bottomFactor = 1 + x[Slot.BOTTOM_TOLERANCE.place()] + x[Slot.BOTTOM_DRIFT.place()] * dT;
+        double topFactor = 1 + x[Slot.TOP_TOLERANCE.place()] + x[Slot.TOP_DRIFT.place()] * dT
+                + x[Slot.TOP_AGEING.place()];
+        double bottomFactor = 1 + x[Slot.BOTTOM_TOLERANCE.place()] + x[Slot.BOTTOM_DRIFT.place()] * dT
+                + x[Slot.BOTTOM_AGEING.place()];
         double gTop = 1 / (divider.top() * topFactor);
         double gBottom = 1 / (divider.bottom() * bottomFactor);
         double bias = divider.users() * x[Slot.COMPARATOR_BIAS.place()];
@@ -50,7 +69,8 @@ final class ThresholdNode {
         double far = 0;
         Slot farSlot = Slot.OUTPUT_LOW;
         if (circuit.network() instanceof HysteresisNetwork.Feedback feedback) {
-            double factor = 1 + x[Slot.FEEDBACK_TOLERANCE.place()] + x[Slot.FEEDBACK_DRIFT.place()] * dT;
+            double factor = 1 + x[Slot.FEEDBACK_TOLERANCE.place()] + x[Slot.FEEDBACK_DRIFT.place()] * local(x)
+                    + x[Slot.FEEDBACK_AGEING.place()];
             double series = feedback.resistance() * factor
                     + (tripped ? 0 : feedback.pullUp() * (1 + x[Slot.PULL_UP_TOLERANCE.place()]));
             gFeedback = 1 / series;
@@ -65,22 +85,29 @@ final class ThresholdNode {
             double byBottom = -w * (0 - v) * gBottom / bottomFactor;
             g[Slot.TOP_TOLERANCE.place()] += byTop;
             g[Slot.TOP_DRIFT.place()] += byTop * dT;
+            g[Slot.TOP_AGEING.place()] += byTop;
             g[Slot.BOTTOM_TOLERANCE.place()] += byBottom;
             g[Slot.BOTTOM_DRIFT.place()] += byBottom * dT;
+            g[Slot.BOTTOM_AGEING.place()] += byBottom;
             g[Slot.COMPARATOR_BIAS.place()] -= w * divider.users();
-            double byAmbient = byTop * x[Slot.TOP_DRIFT.place()] + byBottom * x[Slot.BOTTOM_DRIFT.place()];
+            double byTemperature = byTop * x[Slot.TOP_DRIFT.place()] + byBottom * x[Slot.BOTTOM_DRIFT.place()];
             if (circuit.network() instanceof HysteresisNetwork.Feedback feedback) {
                 double bySeries = -w * (far - v) * gFeedback * gFeedback;
                 double byFactor = bySeries * feedback.resistance();
                 g[Slot.FEEDBACK_TOLERANCE.place()] += byFactor;
-                g[Slot.FEEDBACK_DRIFT.place()] += byFactor * dT;
-                byAmbient += byFactor * x[Slot.FEEDBACK_DRIFT.place()];
+                g[Slot.FEEDBACK_DRIFT.place()] += byFactor * local(x);
+                g[Slot.FEEDBACK_AGEING.place()] += byFactor;
+                warm(byFactor * x[Slot.FEEDBACK_DRIFT.place()], g);
                 g[farSlot.place()] += w * gFeedback;
                 if (!tripped) {
                     g[Slot.PULL_UP_TOLERANCE.place()] += bySeries * feedback.pullUp();
                 }
             }
-            g[Slot.AMBIENT.place()] += byAmbient;
+            if (own) {
+                warm(byTemperature, g);
+            } else {
+                g[Slot.AMBIENT.place()] += byTemperature;
+            }
             sourceSlopes(divider.source(), x, w * gTop, g);
         }
         return v;
@@ -90,7 +117,7 @@ final class ThresholdNode {
         if (source.isSupply()) {
             return x[Slot.SUPPLY.place()];
         }
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        double dT = air(x);
         return source.voltage().nominal() * (1 + x[Slot.REFERENCE_TOLERANCE.place()]
                 + x[Slot.REFERENCE_DRIFT.place()] * dT + x[Slot.REFERENCE_AGEING.place()])
                 - x[Slot.REFERENCE_LOAD.place()];
@@ -101,7 +128,7 @@ final class ThresholdNode {
             g[Slot.SUPPLY.place()] += weight;
             return;
         }
-        double dT = x[Slot.AMBIENT.place()] - REFERENCE_TEMPERATURE;
+        double dT = air(x);
         double nominal = weight * source.voltage().nominal();
         g[Slot.REFERENCE_TOLERANCE.place()] += nominal;
         g[Slot.REFERENCE_DRIFT.place()] += nominal * dT;

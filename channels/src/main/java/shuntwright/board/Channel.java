@@ -58,9 +58,11 @@ public record Channel(String name, String note, Optional<Spread> rail, Side side
      *
      * @param atLeast at the least current
      * @param atLoad  at the load current
+     * @param calibration done at production; empty for none
      */
-    public record ReadingDemand(OptionalDouble atLeast, OptionalDouble atLoad) {
-        public static final ReadingDemand NONE = new ReadingDemand(OptionalDouble.empty(), OptionalDouble.empty());
+    public record ReadingDemand(OptionalDouble atLeast, OptionalDouble atLoad, Optional<Calibration> calibration) {
+        public static final ReadingDemand NONE = new ReadingDemand(OptionalDouble.empty(), OptionalDouble.empty(),
+                Optional.empty());
     }
 
     /**

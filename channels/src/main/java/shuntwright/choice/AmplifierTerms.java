@@ -66,7 +66,7 @@ final class AmplifierTerms {
         cost[j] = amplifier.purchase().unitPriceAt(problem.buildQuantity()) / amplifier.sections();
         InputErrors input = amplifier.input();
         for (int end = 0; end < 2; end++) {
-            double ta = (end == 0 ? around.ambient().min() : around.ambient().max()) - REFERENCE_TEMPERATURE;
+            double ta = (end == 0 ? around.local().min() : around.local().max()) - REFERENCE_TEMPERATURE;
             double relative = amplifier.gainError() + amplifier.gainDrift() * Math.abs(ta);
             gainLow[end][j] = amplifier.gain() * (1 - relative);
             gainHigh[end][j] = amplifier.gain() * (1 + relative);
@@ -78,7 +78,7 @@ final class AmplifierTerms {
             error[end][j] = input.offset() + input.offsetDrift() * Math.abs(ta) + common + supply
                     + input.biasCurrent() * around.rules().inputResistance() * around.rules().inputMismatch();
         }
-        double drift = amplifier.gainDrift() * ShuntTerms.spread(around.ambient());
+        double drift = amplifier.gainDrift() * ShuntTerms.spread(around.local());
         gainVariance[j] = (amplifier.gainError() * amplifier.gainError() + drift * drift) / 3;
         errorVariance[j] = input.offset() * input.offset() / 3;
     }

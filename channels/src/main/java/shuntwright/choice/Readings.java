@@ -30,6 +30,8 @@ final class Readings {
         this.asked = ChannelAccuracy.asked(problem.demand(), around.adc().isPresent()).stream()
                 .filter(each -> each.outcome() == Outcome.READING_AT_LEAST
                         || each.outcome() == Outcome.READING_AT_LOAD)
+                // What calibration leaves is judged exactly, later.
+                .filter(_ -> problem.demand().channel().reading().calibration().isEmpty())
                 .toList();
         if (around.adc().isPresent()) {
             Surroundings.Converter converter = around.adc().get();

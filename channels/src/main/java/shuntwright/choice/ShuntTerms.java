@@ -42,7 +42,7 @@ final class ShuntTerms {
         this.shunt = shunt;
         this.count = count;
         Demand demand = problem.demand();
-        this.ambient = problem.around().ambient();
+        this.ambient = problem.around().local();
         this.heating = shunt.rating().thermalResistance() / count;
         this.resistance = shunt.inParallel(count);
         this.heat = demand.load() * demand.load() * resistance * demand.channel().diversity();

@@ -26,7 +26,7 @@ public final class LimitRules {
         List<LimitCheck> checks = new ArrayList<>();
         double each = demand.tripWindow().min() / count;
         checks.add(atMost(Limit.SHUNT_POWER, each * each * shunt.resistance(),
-                around.rules().powerMargin() * shunt.rating().powerAt(around.ambient().max())));
+                around.rules().powerMargin() * shunt.rating().powerAt(around.local().max())));
         Channel.Stress stress = demand.channel().stress();
         OptionalDouble rated = shunt.rating().pulseEnergy();
         if (stress.fault().isPresent() && stress.clearingTime().isPresent() && rated.isPresent()) {

@@ -10,6 +10,7 @@ import shuntwright.quantity.Finite;
  * @param gain          V/V
  * @param gainError     limit of its magnitude at 25 °C, a fraction
  * @param gainDrift     limit of its magnitude, 1/K, referred to 25 °C
+ * @param gainAgeing    largest relative change of the gain over life, a fraction
  * @param input         errors that act at the input
  * @param ranges        where it works
  * @param bandwidth     -3 dB at this gain, Hz
@@ -19,12 +20,14 @@ import shuntwright.quantity.Finite;
  * @param purchase      how it is sold
  */
 public record SenseAmplifier(String partNumber, String description, double gain, double gainError, double gainDrift,
-        InputErrors input, AmplifierRanges ranges, double bandwidth, double slewRate, double supplyCurrent,
+        double gainAgeing, InputErrors input, AmplifierRanges ranges, double bandwidth, double slewRate,
+        double supplyCurrent,
         int sections, Purchase purchase) implements Part {
 
     /** @throws IllegalArgumentException unless gain, bandwidth, slew rate are &gt; 0, limits ≥ 0 and sections ≥ 1 */
     public SenseAmplifier {
         if (!Finite.positive(gain) || !(gainError >= 0 && gainError < 1) || !Finite.notNegative(gainDrift)
+                || !(gainAgeing >= 0 && gainAgeing < 1)
                 || !Finite.positive(bandwidth)
                 || !Finite.positive(slewRate) || !Finite.notNegative(supplyCurrent) || sections < 1) {
             throw new IllegalArgumentException("amplifier " + partNumber

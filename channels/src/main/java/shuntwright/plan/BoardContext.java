@@ -66,7 +66,8 @@ final class BoardContext {
         }
         this.around = new Surroundings(board.ambient(), board.supply().voltage(), board.rules(),
                 board.adc().flatMap(adc -> source(adc.source())
-                        .map(voltage -> new Surroundings.Converter(adc, voltage))));
+                        .map(voltage -> new Surroundings.Converter(adc, voltage))),
+                board.uncertainty().stated(), Optional.empty());
         this.resistors = resistors();
     }
 

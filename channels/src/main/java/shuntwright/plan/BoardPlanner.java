@@ -299,7 +299,7 @@ public final class BoardPlanner {
                 context.tapResistors(), context.pullUpResistors());
         return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,
                 budget.references(), parts,
-                Findings.sorted(findings));
+                Findings.sorted(findings), Optional.empty());
     }
 
     /** The board with every choice of the plan pinned, so that {@link #check} judges exactly this plan. */

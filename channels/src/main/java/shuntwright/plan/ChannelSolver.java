@@ -85,7 +85,8 @@ final class ChannelSolver {
                 demand,
                 problem.around());
         double heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
-        return new SolvedChannel(demand, circuit, settings, accuracy.inputs(), assessments, limits, heat,
+        return new SolvedChannel(demand, circuit, problem.around(), settings, accuracy.inputs(), assessments,
+                accuracy.uncalibrated(problem.acceptance().coverage()), limits, heat,
                 cost(circuit, problem.buildQuantity()));
     }
 

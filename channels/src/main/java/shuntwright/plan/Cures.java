@@ -273,7 +273,7 @@ final class Cures {
         boolean least = each.outcome() == shuntwright.accuracy.Outcome.READING_AT_LEAST;
         Channel edited = channel.withReading(new Channel.ReadingDemand(
                 least ? OptionalDouble.of(reached) : reading.atLeast(),
-                least ? reading.atLoad() : OptionalDouble.of(reached)));
+                least ? reading.atLoad() : OptionalDouble.of(reached), Optional.empty()));
         add(Cure.Lever.READING,
                 each.outcome().words() + " ±" + show(allowed, Dimension.RATIO, 3) + " → ±"
                         + show(reached, Dimension.RATIO, 3),
@@ -293,7 +293,7 @@ final class Cures {
                     channel.withCurrents(new Currents(c.load(), c.noTrip(), c.mustTrip(), c.tripTarget(),
                             OptionalDouble.empty(), c.fullScale()))
                             .withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
-                                    channel.reading().atLoad())));
+                                    channel.reading().atLoad(), Optional.empty())));
         }
         Channel.Stress stress = channel.stress();
         if (stress.fault().isPresent()) {

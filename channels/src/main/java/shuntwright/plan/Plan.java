@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 
 import shuntwright.board.Board;
+import shuntwright.sampling.BoardStudy;
 
 /**
  * A planned board.
@@ -17,10 +18,11 @@ import shuntwright.board.Board;
  * @param references with their parts
  * @param parts    the consolidated parts list, by designator letter and part number
  * @param findings about the board as a whole
+ * @param study    propagated distributions; empty until sampled
  */
 public record Plan(Board board, String currency, List<ChannelPlan> channels, List<SharedUse> shared,
         List<AlertPlan> alerts, List<TapPlan> taps,
-        List<ReferencePlan> references, List<PartUse> parts, List<Finding> findings) {
+        List<ReferencePlan> references, List<PartUse> parts, List<Finding> findings, Optional<BoardStudy> study) {
 
     public Plan {
         channels = List.copyOf(channels);

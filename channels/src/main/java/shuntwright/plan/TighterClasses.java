@@ -71,7 +71,9 @@ final class TighterClasses {
         var around = problem.around();
         var supply = new Toleranced(around.supply().nominal(), Tolerance.symmetric(tolerance));
         return new ChannelProblem(problem.demand(),
-                new shuntwright.circuit.Surroundings(around.ambient(), supply, around.rules(), around.adc()),
+                new shuntwright.circuit.Surroundings(around.ambient(), supply, around.rules(), around.adc(),
+                        around.stated(),
+                        around.zone()),
                 problem.catalogue(), problem.sources(), problem.tap(), problem.resistors(), problem.pullUp(),
                 problem.acceptance(), problem.buildQuantity());
     }
@@ -98,12 +100,14 @@ final class TighterClasses {
 
     private static Shunt shunt(Shunt s, double tolerance) {
         return new Shunt(s.partNumber(), s.description(), s.resistance(), Tolerance.symmetric(tolerance),
-                s.temperatureCoefficient(), s.ageing(), s.terminals(), s.mountingResistance(), s.thermalEmf(),
+                s.temperatureCoefficient(), s.ageing(), s.correlation(), s.terminals(), s.mountingResistance(),
+                s.thermalEmf(),
                 s.rating(), s.purchase());
     }
 
     private static SenseAmplifier amplifier(SenseAmplifier a, double error) {
-        return new SenseAmplifier(a.partNumber(), a.description(), a.gain(), error, a.gainDrift(), a.input(),
+        return new SenseAmplifier(a.partNumber(), a.description(), a.gain(), error, a.gainDrift(), a.gainAgeing(),
+                a.input(),
                 a.ranges(), a.bandwidth(), a.slewRate(), a.supplyCurrent(), a.sections(), a.purchase());
     }
 

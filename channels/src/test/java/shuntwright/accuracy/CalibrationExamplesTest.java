@@ -9,6 +9,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
 
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 
 /** Worked examples of EA-4/02 M and JCGM 101:2008, and the divisors of the distributions. */

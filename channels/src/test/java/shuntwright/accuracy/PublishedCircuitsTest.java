@@ -122,7 +122,7 @@ class PublishedCircuitsTest {
         SenseCircuit circuit = IdealParts.circuit(IdealParts.shunt(1e-3), IdealParts.amplifier(100),
                 IdealParts.divider(fullScale, 1e4, 1e4));
         Surroundings around = new Surroundings(Range.exactly(25), IdealParts.exactly(fullScale), DesignRules.DEFAULT,
-                Optional.of(converter));
+                Optional.of(converter), List.of(), Optional.empty());
         List<Input> inputs = InputDescription.of(circuit, around, IdealParts.demand(12)).inputs();
         assertThat(inputs).singleElement().satisfies(input -> {
             assertThat(input.slot()).isEqualTo(Slot.ADC_STEP);

@@ -3,6 +3,7 @@ package shuntwright.accuracy;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.random.RandomGenerator;
 import java.util.random.RandomGeneratorFactory;
@@ -54,14 +55,15 @@ class SelfHeatingTest {
 
     /** All of the resistance in copper joints, which refer to 20 °C. */
     private static Shunt copper(double ohms, double kelvinPerWatt) {
-        return new Shunt("copper", "", ohms * 1e-12, Tolerance.NONE, 0, 0, Terminals.TWO, Range.exactly(ohms), 0,
+        return new Shunt("copper", "", ohms * 1e-12, Tolerance.NONE, 0, 0, 0, Terminals.TWO, Range.exactly(ohms), 0,
                 IdealParts.rating(kelvinPerWatt), IdealParts.PURCHASE);
     }
 
     private static Surroundings reading(double ambient, double supply) {
         return new Surroundings(Range.exactly(ambient), IdealParts.exactly(supply), DesignRules.DEFAULT,
                 Optional.of(new Surroundings.Converter(new Adc(new Source.Supply(), 24, 0, 0, 0),
-                        IdealParts.supply(supply))));
+                        IdealParts.supply(supply))),
+                List.of(), Optional.empty());
     }
 
     /** 1 mΩ of copper at 50 K/W has no steady temperature from 71.34 A on; a threshold it cannot reach by then trips. */

@@ -94,7 +94,7 @@ class DemandTest {
                 .hasSize(3).anyMatch(each -> each.contains("trip target"))
                 .anyMatch(each -> each.contains("least current")).anyMatch(each -> each.contains("full-scale"));
         assertThat(missing(channel(currents(20, 25, 36))
-                .withReading(new Channel.ReadingDemand(OptionalDouble.of(0.01), NONE))))
+                .withReading(new Channel.ReadingDemand(OptionalDouble.of(0.01), NONE, Optional.empty()))))
                 .singleElement().satisfies(each -> assertThat(each).contains("least current is missing"));
         assertThat(missing(channel(currents(20, 25, 36)).withStress(
                 new Channel.Stress(OptionalDouble.of(30), NONE, List.of(), Optional.empty()))))

@@ -83,7 +83,8 @@ final class RandomProblems {
                 ? Optional.of(new Surroundings.Converter(
                         new Adc(bySupply.source(), 12, 0.001, 1e-3, 1), random.nextBoolean() ? bySupply : reference))
                 : Optional.empty();
-        Surroundings around = new Surroundings(Range.of(low, low + between(10, 80)), bySupply.voltage(), rules, adc);
+        Surroundings around = new Surroundings(Range.of(low, low + between(10, 80)), bySupply.voltage(), rules, adc,
+                List.of(), Optional.empty());
         Optional<Threshold> tap = random.nextInt(4) == 0 ? Optional.of(tap(reference)) : Optional.empty();
         List<SourceVoltage> sources = tap.isPresent()
                 ? List.of()
@@ -114,7 +115,7 @@ final class RandomProblems {
                 .withRelease(release)
                 .withReading(new Channel.ReadingDemand(
                         reads ? OptionalDouble.of(between(0.01, 0.1)) : OptionalDouble.empty(),
-                        reads ? OptionalDouble.of(between(0.01, 0.05)) : OptionalDouble.empty()));
+                        reads ? OptionalDouble.of(between(0.01, 0.05)) : OptionalDouble.empty(), Optional.empty()));
     }
 
     private Threshold tap(SourceVoltage source) {
@@ -152,7 +153,7 @@ final class RandomProblems {
     private Shunt shunt(String number, double ohm) {
         boolean four = random.nextBoolean();
         return new Shunt(number, "", ohm, new Tolerance(one(0.001, 0.005, 0.01), one(0.001, 0.005, 0.01)),
-                one(15e-6, 100e-6), one(0.0, 0.002), four ? Terminals.FOUR : Terminals.TWO,
+                one(15e-6, 100e-6), one(0.0, 0.002), 0, four ? Terminals.FOUR : Terminals.TWO,
                 four ? Range.exactly(0) : Range.of(0, ohm * 0.01), one(0.0, 3e-6),
                 new ShuntRating(load * load * ohm * between(1.5, 8), 70, 170, between(5, 40), OptionalDouble.empty()),
                 TrialParts.price(one(0.5, 1.0, 1.5)));
@@ -160,7 +161,7 @@ final class RandomProblems {
 
     private SenseAmplifier amplifier(String number) {
         return new SenseAmplifier(number, "", one(20.0, 50.0, 100.0), one(0.001, 0.005, 0.01), 10e-6,
-                new InputErrors(one(10e-6, 100e-6, 300e-6), one(0.1e-6, 1e-6), 100, 12, 90, 3.3, 1e-6),
+                0, new InputErrors(one(10e-6, 100e-6, 300e-6), one(0.1e-6, 1e-6), 100, 12, 90, 3.3, 1e-6),
                 new AmplifierRanges(Range.of(-0.2, 30), one(0.15, 0.3), 10, Range.of(2.7, 5.5), one(0.1, 0.3),
                         one(0.01, 0.05)),
                 100e3, 1e6, 1e-3, one(1, 2), TrialParts.price(one(1.0, 2.0)));

@@ -112,7 +112,8 @@ class ShuntTermsTest {
         double load = demand.load();
         Channel.Currents currents = Records.with(Channel.Currents.NONE, "least", OptionalDouble.of(load / 10));
         Channel channel = demand.channel().withCurrents(currents)
-                .withReading(new Channel.ReadingDemand(OptionalDouble.of(0.1), OptionalDouble.of(0.02)));
+                .withReading(
+                        new Channel.ReadingDemand(OptionalDouble.of(0.1), OptionalDouble.of(0.02), Optional.empty()));
         return Records.with(demand, "channel", channel);
     }
 }

@@ -37,14 +37,14 @@ public final class TrialParts {
 
     /** A four-terminal shunt of 5 W, 50 ppm/K, 10 K/W. */
     public static Shunt shunt(String number, double ohm, double tolerance) {
-        return new Shunt(number, "shunt " + number, ohm, Tolerance.symmetric(tolerance), 50e-6, 0, Terminals.FOUR,
+        return new Shunt(number, "shunt " + number, ohm, Tolerance.symmetric(tolerance), 50e-6, 0, 0, Terminals.FOUR,
                 Range.exactly(0), 0, new ShuntRating(5, 70, 170, 10, OptionalDouble.empty()), price(1));
     }
 
     /** An amplifier for rails of 0 to 30 V and supplies of 2.7 to 5.5 V. */
     public static SenseAmplifier amplifier(String number, double gain, double gainError, double offset) {
         return new SenseAmplifier(number, "amplifier " + number, gain, gainError, 10e-6,
-                new InputErrors(offset, 0.5e-6, 120, 12, 100, 5, 0),
+                0, new InputErrors(offset, 0.5e-6, 120, 12, 100, 5, 0),
                 new AmplifierRanges(Range.of(0, 30), 0.3, 10, Range.of(2.7, 5.5), 0.2, 0.02), 100e3, 1e6, 1e-3, 1,
                 price(2));
     }

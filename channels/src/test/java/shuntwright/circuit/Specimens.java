@@ -7,7 +7,6 @@ import java.util.OptionalInt;
 import java.util.Set;
 import java.util.random.RandomGeneratorFactory;
 
-import shuntwright.accuracy.Distribution;
 import shuntwright.accuracy.Estimate;
 import shuntwright.board.Acceptance;
 import shuntwright.board.Adc;
@@ -31,6 +30,7 @@ import shuntwright.parts.Purchase;
 import shuntwright.parts.Reference;
 import shuntwright.parts.Shunt;
 import shuntwright.parts.ShuntRating;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.ESeries;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Tolerance;
@@ -62,7 +62,8 @@ final class Specimens {
                     OptionalDouble.of(1)),
             new Tap.Kind.Divider(OptionalDouble.of(1), OptionalDouble.of(1)), new Tap.Kind.Dac(12, 1e-3, 1e-3, 1),
             new TimePoint(1e-3, 10), new Withstand.Energy(100), new Withstand.Conductor(1.5, 115),
-            new Zone("z", OptionalDouble.of(1)), DRAWN.circuit(), new SourceVoltage(new Source.Supply(),
+            new Zone("z", OptionalDouble.of(1), OptionalDouble.empty()), DRAWN.circuit(),
+            new SourceVoltage(new Source.Supply(),
                     IdealParts.exactly(5), 1e-5, 1e-4, 1e-3),
             new Threshold.Divider(IdealParts.supply(5), 1e4, 1e4, "", 1),
             new Threshold.DacOutput(IdealParts.supply(5), new Tap.Kind.Dac(12, 0, 0, 0), 2048, "t"),

@@ -204,7 +204,8 @@ class CuresTest {
     @Test
     void aTightReadingIsRelaxed() {
         Channel tight = channel("c", 10, 15, 20)
-                .withReading(new Channel.ReadingDemand(OptionalDouble.empty(), OptionalDouble.of(0.001)));
+                .withReading(
+                        new Channel.ReadingDemand(OptionalDouble.empty(), OptionalDouble.of(0.001), Optional.empty()));
         Board board = TrialBoards.withAdc(board(tight), new Adc(new Source.OfReference("quiet"), 12, 0.001, 1e-3, 1));
         assertThat(cures(board, Cure.Lever.READING)).singleElement().satisfies(cure -> {
             assertThat(cure.cures()).isTrue();

@@ -42,11 +42,11 @@ class SharedBudgetTest {
     private static Catalogue catalogue() {
         SenseAmplifier a = TrialParts.amplifier("A50", 50, 0.002, 50e-6);
         SenseAmplifier twin = new SenseAmplifier("TWIN", "twin amplifier", a.gain(), a.gainError(), a.gainDrift(),
-                a.input(), a.ranges(), a.bandwidth(), a.slewRate(), 2e-3, 2, a.purchase());
+                0, a.input(), a.ranges(), a.bandwidth(), a.slewRate(), 2e-3, 2, a.purchase());
         Comparator quad = TrialParts.comparator("QUAD", TrialParts.injected(), Range.exactly(0), 4);
         Shunt s = TrialParts.shunt("R2", 0.002, 0.005);
         Shunt shunt = new Shunt("R2", "2 mΩ", s.resistance(), s.tolerance(), s.temperatureCoefficient(), s.ageing(),
-                s.terminals(), s.mountingResistance(), s.thermalEmf(), s.rating(), BREAKS);
+                0, s.terminals(), s.mountingResistance(), s.thermalEmf(), s.rating(), BREAKS);
         return Catalogue.of("EUR", List.<Part>of(shunt, twin, quad, TrialParts.reference("REF25", 2.5, 0.001),
                 TrialParts.series("RES", ESeries.E96, 0.001)));
     }
@@ -62,7 +62,8 @@ class SharedBudgetTest {
         Board board = TrialBoards.board(pinned("a", "left", quiet), pinned("b", "left", quiet),
                 pinned("c", "right", new Source.Supply()));
         return TrialBoards.withZones(TrialBoards.withLines(board, AlertLine.named("alert")), heat,
-                new Zone("left", left), new Zone("right", OptionalDouble.empty()));
+                new Zone("left", left, OptionalDouble.empty()),
+                new Zone("right", OptionalDouble.empty(), OptionalDouble.empty()));
     }
 
     private static Plan check(Board board) {

@@ -60,10 +60,10 @@ class WorkedChannelTest {
             Map.entry("V/V", 1.0), Map.entry("dB", 1.0), Map.entry("1", 1.0));
 
     private static Plan plan() {
-        Shunt shunt = new Shunt("R1", "", 1e-3, Tolerance.symmetric(0.01), 50e-6, 0, Terminals.FOUR,
+        Shunt shunt = new Shunt("R1", "", 1e-3, Tolerance.symmetric(0.01), 50e-6, 0, 0, Terminals.FOUR,
                 Range.exactly(0), 0, new ShuntRating(5, 70, 170, 20, OptionalDouble.empty()), TrialParts.price(1));
         SenseAmplifier amplifier = new SenseAmplifier("A50", "", 50, 0.002, 10e-6,
-                new InputErrors(50e-6, 0.5e-6, 100, 12, 80, 3.3, 0),
+                0, new InputErrors(50e-6, 0.5e-6, 100, 12, 80, 3.3, 0),
                 new AmplifierRanges(Range.of(0, 30), 0.1, 10, Range.of(2.7, 5.5), 0.2, 0.02), 100e3, 1e6, 1e-3, 1,
                 TrialParts.price(2));
         Catalogue catalogue = Catalogue.of("EUR",

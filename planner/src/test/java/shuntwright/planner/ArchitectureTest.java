@@ -34,7 +34,8 @@ class ArchitectureTest {
             .withImportOption(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS).importPackages("shuntwright");
 
     /** Packages of channels; each may use itself and those before it. */
-    private static final List<String> CHANNELS = List.of("quantity", "parts", "board", "circuit", "accuracy", "timing",
+    private static final List<String> CHANNELS = List.of("quantity", "parts", "board", "circuit", "accuracy",
+            "sampling", "timing",
             "choice", "plan");
 
     private static final Set<String> NOT_CHANNELS = Set.of("io", "planner");

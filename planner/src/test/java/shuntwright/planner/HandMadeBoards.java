@@ -21,7 +21,8 @@ public final class HandMadeBoards {
     public static Board boat() {
         return Board.named("boat")
                 .withZones(
-                        List.of(new Zone("port", OptionalDouble.of(2)), new Zone("starboard", OptionalDouble.empty())))
+                        List.of(new Zone("port", OptionalDouble.of(2), OptionalDouble.empty()),
+                                new Zone("starboard", OptionalDouble.empty(), OptionalDouble.empty())))
                 .withAlertLines(List.of(AlertLine.named("alert"))).withHeatLimit(OptionalDouble.of(6))
                 .withChannels(List.of(channel("bilge pump", 20, 25, 31), channel("windlass", 12, 15, 18).withZone(
                         Optional.of("port")), channel("radar", 4, 9.8, 10.2), channel("anchor light", 2, 4.95, 5.05),
@@ -33,6 +34,6 @@ public final class HandMadeBoards {
                 .withCurrents(new Currents(OptionalDouble.of(load), OptionalDouble.of(noTrip),
                         OptionalDouble.of(mustTrip), OptionalDouble.empty(), OptionalDouble.empty(),
                         OptionalDouble.empty()))
-                .withReading(new ReadingDemand(OptionalDouble.empty(), OptionalDouble.of(0.05)));
+                .withReading(new ReadingDemand(OptionalDouble.empty(), OptionalDouble.of(0.05), Optional.empty()));
     }
 }

@@ -27,9 +27,10 @@ public final class HandMadeParts {
             List.of(new PriceBreak(1, 0.6), new PriceBreak(100, 0.4)),
             10, 10, "maker", "active");
     public static final Shunt SHUNT = new Shunt("SH-4M", "4 mΩ ±1 %", 0.004, Tolerance.symmetric(0.01), 50e-6, 0.002,
-            Terminals.FOUR, Range.exactly(0), 1e-6, new ShuntRating(3, 70, 170, 20, OptionalDouble.empty()), PURCHASE);
+            0, Terminals.FOUR, Range.exactly(0), 1e-6, new ShuntRating(3, 70, 170, 20, OptionalDouble.empty()),
+            PURCHASE);
     public static final SenseAmplifier AMPLIFIER = new SenseAmplifier("AMP-50", "gain 50", 50, 0.005, 10e-6,
-            new InputErrors(50e-6, 0.2e-6, 110, 12, 100, 3.3, 1e-6),
+            0, new InputErrors(50e-6, 0.2e-6, 110, 12, 100, 3.3, 1e-6),
             new AmplifierRanges(Range.of(0, 60), 0.2, 60, Range.of(2.7, 5.5), 0.1, 0.02), 200e3, 1e6, 200e-6, 1,
             PURCHASE);
     public static final Comparator COMPARATOR = new Comparator("CMP-1", "comparator",

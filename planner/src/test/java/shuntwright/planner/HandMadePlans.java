@@ -8,7 +8,6 @@ import java.util.OptionalDouble;
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
 import shuntwright.accuracy.CombinedUncertainty;
-import shuntwright.accuracy.Distribution;
 import shuntwright.accuracy.Input;
 import shuntwright.accuracy.Outcome;
 import shuntwright.accuracy.Owner;
@@ -16,10 +15,13 @@ import shuntwright.accuracy.Slot;
 import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
+import shuntwright.board.DesignRules;
+import shuntwright.board.SenseSupply;
 import shuntwright.board.Source;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Surroundings;
 import shuntwright.circuit.Threshold;
 import shuntwright.parts.Catalogue;
 import shuntwright.plan.AlertPlan;
@@ -34,6 +36,7 @@ import shuntwright.plan.SharedUse;
 import shuntwright.plan.SolvedChannel;
 import shuntwright.plan.Verdict;
 import shuntwright.quantity.Dimension;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 
 /**
@@ -71,7 +74,8 @@ public final class HandMadePlans {
                 : List.of(new PartUse(HandMadeParts.SHUNT.partNumber(), HandMadeParts.SHUNT.description(),
                         channels.size(), designators(channels.size()),
                         channels.stream().map(each -> each.channel().name()).toList(), HandMadeParts.PURCHASE));
-        return new Plan(board, "EUR", channels, shared, alerts, List.of(), List.of(), parts, List.of());
+        return new Plan(board, "EUR", channels, shared, alerts, List.of(), List.of(), parts, List.of(),
+                Optional.empty());
     }
 
     private static List<String> designators(int count) {
@@ -101,9 +105,9 @@ public final class HandMadePlans {
         channel.reading().atLoad().ifPresent(error -> all.add(assessment(Outcome.READING_AT_LOAD, demand.load(),
                 Range.of(demand.load() * (1 - error), demand.load() * (1 + error)))));
         SolvedChannel solved = new SolvedChannel(demand, circuit,
-                new Settings(threshold, Range.of(threshold * 0.98, threshold * 1.02), OptionalDouble.empty(),
+                AROUND, new Settings(threshold, Range.of(threshold * 0.98, threshold * 1.02), OptionalDouble.empty(),
                         target * resistance, threshold * 0.7, threshold * 1.1),
-                List.of(), all, List.of(), demand.load() * demand.load() * resistance / 2, 1.2);
+                List.of(), all, List.of(), List.of(), demand.load() * demand.load() * resistance / 2, 1.2);
         boolean inside = all.stream().allMatch(Assessment::insideByLimits);
         boolean likely = all.stream().allMatch(Assessment::insideByCoverage);
         Verdict verdict = inside ? Verdict.INSIDE : likely ? Verdict.LIKELY : Verdict.OUTSIDE;
@@ -133,12 +137,18 @@ public final class HandMadePlans {
                 List.of(line(Slot.SUPPLY, new Owner.Shared("supply"), nominal * 0.02, 0.7),
                         line(Slot.SHUNT_TOLERANCE, new Owner.Own("shunt 1"), nominal * 0.006, 0.2),
                         line(Slot.OFFSET, new Owner.Own("amplifier"), nominal * 0.003, 0.09),
-                        line(Slot.THERMAL_EMF, new Owner.Own("shunt 1"), nominal * 0.001, 0.01)));
+                        line(Slot.THERMAL_EMF, new Owner.Own("shunt 1"), nominal * 0.001, 0.01)),
+                Optional.empty());
     }
 
     private static BudgetLine line(Slot slot, Owner owner, double size, double share) {
         return new BudgetLine(
-                new Input(slot, 0, owner, 0, Range.of(-0.01, 0.01), new Distribution.Uniform()), 1, -size, size * 0.9,
+                new Input(slot, 0, owner, 0, Range.of(-0.01, 0.01), new Distribution.Uniform(), Optional.empty()), 1,
+                -size, size * 0.9,
                 size / Math.sqrt(3), share);
     }
+
+    /** A board with every default. */
+    private static final Surroundings AROUND = new Surroundings(Board.DEFAULT_AMBIENT, SenseSupply.DEFAULT.voltage(),
+            DesignRules.DEFAULT, Optional.empty(), List.of(), Optional.empty());
 }

@@ -11,6 +11,7 @@ import shuntwright.board.Channel;
 import shuntwright.board.DesignRules;
 import shuntwright.board.SenseSupply;
 import shuntwright.board.Tap;
+import shuntwright.board.Uncertainty;
 import shuntwright.board.Zone;
 import shuntwright.io.form.Bounds;
 import shuntwright.io.form.Fields;
@@ -80,7 +81,7 @@ final class BoardForm extends Form<Board> {
         return new Board(fields.get(name), fields.get(description), fields.get(parts), fields.get(buildQuantity),
                 fields.get(ambient), fields.get(supply), fields.get(references), fields.find(adc),
                 fields.get(alertLines), fields.get(taps), fields.get(zones), fields.number(heatLimit),
-                fields.get(acceptance), fields.get(rules), fields.get(channels));
+                fields.get(acceptance), fields.get(rules), Uncertainty.DEFAULT, fields.get(channels));
     }
 
     @Override

@@ -2,6 +2,7 @@ package shuntwright.io.boardfile;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 import shuntwright.board.Channel;
 import shuntwright.board.Pins;
@@ -105,7 +106,7 @@ final class ChannelForm extends Form<Channel> {
         Channel.Currents currents = new Channel.Currents(fields.number(load), fields.number(noTrip),
                 fields.number(mustTrip), fields.number(tripTarget), fields.number(least), fields.number(fullScale));
         Channel.ReadingDemand reading = new Channel.ReadingDemand(fields.number(readingAtLeast),
-                fields.number(readingAtLoad));
+                fields.number(readingAtLoad), Optional.empty());
         Channel.Stress stress = new Channel.Stress(fields.number(fault), fields.number(clearingTime),
                 fields.get(inrush), fields.find(withstand));
         return new Channel(fields.get(name), fields.get(note), fields.find(rail), fields.get(side), currents,

@@ -1,5 +1,7 @@
 package shuntwright.io.boardfile;
 
+import java.util.OptionalDouble;
+
 import shuntwright.board.Zone;
 import shuntwright.io.form.Bounds;
 import shuntwright.io.form.Fields;
@@ -21,7 +23,7 @@ final class ZoneForm extends Form<Zone> {
 
     @Override
     protected Zone bind(Fields fields) {
-        return new Zone(fields.get(name), fields.number(heatLimit));
+        return new Zone(fields.get(name), fields.number(heatLimit), OptionalDouble.empty());
     }
 
     @Override

@@ -77,7 +77,7 @@ final class AmplifierForm extends PartForm<SenseAmplifier> {
                 fields.find(survival).orElse(fields.get(differential)), fields.get(supply), fields.get(outputHeadroom),
                 fields.get(outputLow));
         return new SenseAmplifier(partNumber(fields), description(fields), fields.get(gain), fields.get(gainError),
-                fields.get(gainDrift), input, ranges, fields.get(bandwidth), fields.get(slewRate),
+                fields.get(gainDrift), 0, input, ranges, fields.get(bandwidth), fields.get(slewRate),
                 fields.get(supplyCurrent), fields.get(sections), purchase(fields));
     }
 

@@ -81,7 +81,7 @@ final class ShuntForm extends PartForm<Shunt> {
         ShuntRating rating = new ShuntRating(watts, rated, maximum,
                 fields.find(thermalResistance).orElse((maximum - rated) / watts), fields.number(pulseEnergy));
         return new Shunt(partNumber(fields), description(fields), fields.get(resistance), fields.get(tolerance),
-                fields.get(temperatureCoefficient), fields.get(ageing), fields.get(terminals),
+                fields.get(temperatureCoefficient), fields.get(ageing), 0, fields.get(terminals),
                 fields.get(mountingResistance), fields.get(thermalEmf), rating, purchase(fields));
     }
 

@@ -6,9 +6,9 @@ import java.util.OptionalDouble;
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
 import shuntwright.accuracy.CombinedUncertainty;
-import shuntwright.accuracy.Distribution;
 import shuntwright.accuracy.Input;
 import shuntwright.accuracy.Owner;
+import shuntwright.quantity.Distribution;
 
 /** Described inputs and what they do to the outcomes. */
 final class AccuracyTables {
@@ -25,13 +25,18 @@ final class AccuracyTables {
     private static final ObjectTable<Distribution.Trapezoid> TRAPEZOID = ObjectTable.<Distribution.Trapezoid>variant(
             "trapezoid", "trapezoid", "Trapezoidal between the limits.")
             .number("ratio", Unit.PURE, "width of the top over width of the base", Distribution.Trapezoid::ratio);
+    private static final ObjectTable<Distribution.StudentT> STUDENT = ObjectTable.<Distribution.StudentT>variant("t",
+            "t", "Scaled and shifted t, limits at k scale units.")
+            .number("degreesOfFreedom", Unit.PURE, "of the scale", Distribution.StudentT::degreesOfFreedom)
+            .number("k", Unit.PURE, "scale units from the mean to a limit", Distribution.StudentT::k);
     private static final Form<Distribution> DISTRIBUTION = new Form.Either<>(
-            List.of(UNIFORM, NORMAL, TRIANGULAR, ARCSINE, TRAPEZOID), distribution -> switch (distribution) {
+            List.of(UNIFORM, NORMAL, TRIANGULAR, ARCSINE, TRAPEZOID, STUDENT), distribution -> switch (distribution) {
                 case Distribution.Uniform uniform -> new Form.Chosen<>(UNIFORM, uniform);
                 case Distribution.Normal normal -> new Form.Chosen<>(NORMAL, normal);
                 case Distribution.Triangular triangular -> new Form.Chosen<>(TRIANGULAR, triangular);
                 case Distribution.ArcSine arcSine -> new Form.Chosen<>(ARCSINE, arcSine);
                 case Distribution.Trapezoid trapezoid -> new Form.Chosen<>(TRAPEZOID, trapezoid);
+                case Distribution.StudentT student -> new Form.Chosen<>(STUDENT, student);
             });
 
     static final Form<Input> INPUT = ObjectTable.<Input>named("input", "One uncertain input of a channel.")

@@ -22,6 +22,7 @@ import shuntwright.board.Source;
 import shuntwright.board.Tap;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.board.TimePoint;
+import shuntwright.board.Uncertainty;
 import shuntwright.board.Withstand;
 import shuntwright.board.Zone;
 import shuntwright.quantity.Range;
@@ -54,12 +55,12 @@ final class RandomBoards {
                 List.of(new Tap("T1", source(), new Tap.Kind.Divider(maybeNumber(), maybeNumber()), maybeNumber()),
                         new Tap("tap 2", source(), new Tap.Kind.Dac(random.nextInt(4, 21), random.nextDouble(),
                                 positive(), positive()), maybeNumber())),
-                List.of(new Zone("Z", maybeNumber())), maybeNumber(),
+                List.of(new Zone("Z", maybeNumber(), OptionalDouble.empty())), maybeNumber(),
                 new Acceptance(pick(Acceptance.Basis.values()), random.nextDouble(0.5, 1)),
                 new DesignRules(random.nextInt(1, 9), random.nextDouble(0.01, 1), positive(),
                         random.nextDouble(0.01, 1), maybe(this::name), positive(), positive(), positive(),
                         random.nextDouble()),
-                channels);
+                Uncertainty.DEFAULT, channels);
     }
 
     private Channel channel(String name) {
@@ -73,7 +74,8 @@ final class RandomBoards {
                                 : OptionalDouble.of(noTrip + (mustTrip - noTrip) / 2),
                         OptionalDouble.of(noTrip / 10), OptionalDouble.of(mustTrip));
         return new Channel(name, text(), maybe(this::spread), pick(Channel.Side.values()), currents, release(),
-                new Channel.ReadingDemand(maybeShare(), maybeShare()), threshold(), maybe(() -> "B"), maybe(() -> "Z"),
+                new Channel.ReadingDemand(maybeShare(), maybeShare(), Optional.empty()), threshold(), maybe(() -> "B"),
+                maybe(() -> "Z"),
                 random.nextBoolean() ? 1 : random.nextDouble(),
                 new Channel.Stress(maybeNumber(), maybeNumber(), inrush(), maybe(this::withstand)), pins());
     }

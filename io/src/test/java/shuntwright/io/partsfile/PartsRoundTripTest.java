@@ -97,7 +97,7 @@ class PartsRoundTripTest {
         double mounting = random.nextDouble(0, 1e-4);
         return new Shunt(number, "", random.nextDouble(1e-4, 1),
                 new Tolerance(random.nextDouble(), random.nextDouble()),
-                random.nextDouble(0, 1e-3), random.nextDouble(), two ? Terminals.TWO : Terminals.FOUR,
+                random.nextDouble(0, 1e-3), random.nextDouble(), 0, two ? Terminals.TWO : Terminals.FOUR,
                 two ? Range.of(mounting, 2 * mounting) : Range.exactly(0), random.nextDouble(0, 1e-5),
                 new ShuntRating(random.nextDouble(0.1, 5), random.nextDouble(20, 100), random.nextDouble(110, 300),
                         random.nextDouble(0, 100), OptionalDouble.of(random.nextDouble(0.01, 10))),
@@ -109,7 +109,7 @@ class PartsRoundTripTest {
         double differential = random.nextDouble(0.01, 1);
         return new SenseAmplifier(number, "", random.nextDouble(1, 500), random.nextDouble(),
                 random.nextDouble(0, 1e-3),
-                new InputErrors(random.nextDouble(0, 1e-3), random.nextDouble(0, 1e-5), random.nextDouble(40, 140),
+                0, new InputErrors(random.nextDouble(0, 1e-3), random.nextDouble(0, 1e-5), random.nextDouble(40, 140),
                         random.nextDouble(-1, 50), random.nextDouble(40, 140), random.nextDouble(1, 6),
                         random.nextDouble(0, 1e-4)),
                 new AmplifierRanges(Range.of(random.nextDouble(-16, 0), random.nextDouble(1, 80)), differential,

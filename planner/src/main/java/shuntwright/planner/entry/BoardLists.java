@@ -40,10 +40,11 @@ final class BoardLists {
         for (int at = text.indexOf(' '); at > 0; at = text.indexOf(' ', at + 1)) {
             var limit = QuantityReader.number(text.substring(at), Dimension.POWER).ifValue();
             if (limit.isPresent() && limit.get() > 0) {
-                return Reading.value(new Zone(text.substring(0, at).strip(), OptionalDouble.of(limit.get())));
+                return Reading.value(new Zone(text.substring(0, at).strip(), OptionalDouble.of(limit.get()),
+                        OptionalDouble.empty()));
             }
         }
-        return Reading.value(new Zone(text, OptionalDouble.empty()));
+        return Reading.value(new Zone(text, OptionalDouble.empty(), OptionalDouble.empty()));
     }
 
     static String references(Board board) {

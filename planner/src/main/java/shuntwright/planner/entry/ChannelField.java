@@ -61,11 +61,13 @@ public enum ChannelField {
     READING_AT_LOAD("Asked at load", "reading error allowed at load", "such as 1 %",
             channel -> Words.text(channel.reading().atLoad(), Dimension.RATIO),
             (text, at) -> Words.fraction(text, "the reading error").then(value -> Reading.value(
-                    at.channel().withReading(new ReadingDemand(at.channel().reading().atLeast(), value))))),
+                    at.channel().withReading(new ReadingDemand(at.channel().reading().atLeast(), value,
+                            at.channel().reading().calibration()))))),
     READING_AT_LEAST("Asked at least", "reading error allowed at the least current", "such as 10 %",
             channel -> Words.text(channel.reading().atLeast(), Dimension.RATIO),
             (text, at) -> Words.fraction(text, "the reading error").then(value -> Reading.value(
-                    at.channel().withReading(new ReadingDemand(value, at.channel().reading().atLoad()))))),
+                    at.channel().withReading(new ReadingDemand(value, at.channel().reading().atLoad(),
+                            at.channel().reading().calibration()))))),
     ALERT_LINE("Alert line", "alert line", "an alert line of the board; empty for its first",
             channel -> channel.alertLine().orElse(""),
             (text, at) -> Words.oneOf(text, "alert line", at.board().alertLines(), shuntwright.board.AlertLine::name)

@@ -10,12 +10,15 @@ import shuntwright.accuracy.Outcome;
 import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
+import shuntwright.board.DesignRules;
+import shuntwright.board.SenseSupply;
 import shuntwright.board.Source;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.Limit;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.SourceVoltage;
+import shuntwright.circuit.Surroundings;
 import shuntwright.circuit.Threshold;
 import shuntwright.io.workplace.Workplace;
 import shuntwright.parts.Catalogue;
@@ -72,7 +75,8 @@ final class PlanFixture {
                                 Dimension.POWER)),
                 List.of(), List.of(), List.of(), List.of(),
                 List.of(new Finding(Finding.Key.HEAT_OVER_LIMIT, Optional.empty(),
-                        "zone rear edge is over its limit by 50 mW", List.of())));
+                        "zone rear edge is over its limit by 50 mW", List.of())),
+                Optional.empty());
     }
 
     private static Finding finding(Finding.Key key, Channel channel, String text) {
@@ -91,9 +95,15 @@ final class PlanFixture {
         double target = demand.tripTarget();
         Range limits = Range.of(window.min() + 0.25, window.max() - 0.5);
         Assessment trip = new Assessment(Outcome.TRIP, target, limits,
-                new CombinedUncertainty(target, 0.1, Double.POSITIVE_INFINITY, 0.9973, 3), window, List.of());
+                new CombinedUncertainty(target, 0.1, Double.POSITIVE_INFINITY, 0.9973, 3), window, List.of(),
+                Optional.empty());
         Settings settings = new Settings(1.65, Range.of(1.6, 1.7), OptionalDouble.empty(), 0.0825, 0.9, 2.2);
-        return Optional.of(new SolvedChannel(demand, circuit, settings, List.of(), List.of(trip), List.of(),
-                0.125 * (index + 1), 1));
+        return Optional
+                .of(new SolvedChannel(demand, circuit, AROUND, settings, List.of(), List.of(trip), List.of(), List.of(),
+                        0.125 * (index + 1), 1));
     }
+
+    /** A board with every default. */
+    private static final Surroundings AROUND = new Surroundings(Board.DEFAULT_AMBIENT, SenseSupply.DEFAULT.voltage(),
+            DesignRules.DEFAULT, Optional.empty(), List.of(), Optional.empty());
 }

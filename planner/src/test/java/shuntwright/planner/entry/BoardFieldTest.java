@@ -45,8 +45,9 @@ class BoardFieldTest {
     @Test
     void aZoneMayHaveBlanksInItsNameAndALimit() {
         Board changed = BoardField.ZONES.read("port row 1.5 W, bow", board).ifValue().orElseThrow();
-        assertThat(changed.zones()).containsExactly(new Zone("port row", OptionalDouble.of(1.5)),
-                new Zone("bow", OptionalDouble.empty()));
+        assertThat(changed.zones()).containsExactly(
+                new Zone("port row", OptionalDouble.of(1.5), OptionalDouble.empty()),
+                new Zone("bow", OptionalDouble.empty(), OptionalDouble.empty()));
     }
 
     @Test

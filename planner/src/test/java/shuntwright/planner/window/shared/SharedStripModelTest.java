@@ -80,7 +80,7 @@ class SharedStripModelTest {
         BoardSession tapped = new BoardSession(new Planning((asked, parts, progress) -> {
             Plan plan = HandMadePlans.plan(asked, parts, progress);
             return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(),
-                    List.of(planned), plan.references(), plan.parts(), List.of());
+                    List.of(planned), plan.references(), plan.parts(), List.of(), Optional.empty());
         }, Runnable::run, Runnable::run));
         SharedStripModel strip = new SharedStripModel(tapped);
         tapped.start(board, Catalogue.EMPTY, true);
