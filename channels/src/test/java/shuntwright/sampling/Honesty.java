@@ -35,10 +35,14 @@ final class Honesty {
 
     /** Within 0.8 and 1.2 for a hundred scores, wider for fewer; no bias beyond four standard errors of the mean. */
     void check() {
+        check(0.2);
+    }
+
+    /** The same with another room for a hundred scores. */
+    void check(double room) {
         int n = scores.size();
-        double room = 0.2 * Math.max(1, Math.sqrt(100.0 / n));
         assertThat(deviation()).as("standard deviation of the %d scores of %s (mean %.3f)", n, what, mean()).isCloseTo(1,
-                within(room));
+                within(room * Math.max(1, Math.sqrt(100.0 / n))));
         assertThat(mean()).as("mean of the %d scores of %s", n, what).isCloseTo(0, within(4 / Math.sqrt(n)));
     }
 }
