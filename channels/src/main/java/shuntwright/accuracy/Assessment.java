@@ -21,7 +21,7 @@ public record Assessment(Outcome outcome, double nominal, Range limits, Combined
         List<BudgetLine> budget, Optional<Range> propagated) {
 
     /** Standard uncertainties; a normal distribution has 50 % within 0.67 of them (common practice). */
-    private static final double LEAST_FACTOR = 0.5;
+    public static final double LEAST_FACTOR = 0.5;
 
     public Assessment {
         budget = List.copyOf(budget);

@@ -26,8 +26,18 @@ final class Columns {
         /** Any other independent one: mid + half × deviation. */
         record Shaped(long key, double mid, double half, Distribution distribution) implements Column {}
 
-        /** A piece of a reel: √r·z₀ + √(1−r)·z is normal, and is given its distribution. */
-        record OfReel(long key, long reel, double correlation, double mid, double half, Distribution distribution)
+        /** A normal or t piece of a reel: √r·z₀ + √(1−r)·z is normal, and is given its distribution. */
+        record JointlyNormal(long key, long reel, double correlation, double mid, double half,
+                Distribution distribution)
+                implements
+                    Column {}
+
+        /**
+         * Any other piece of a reel: with probability √r it takes the reel's own draw, else one of its own, so that two pieces
+         * have the correlation r whatever the distribution (M. Fréchet's family of joint distributions, 1958).
+         */
+        record OftenAlike(long key, long reel, long choice, double share, double mid, double half,
+                Distribution distribution)
                 implements
                     Column {}
     }
@@ -50,9 +60,12 @@ final class Columns {
         long key = Draws.key(seed, variable.key());
         if (variable.reel().isPresent()) {
             Reel reel = variable.reel().get();
-            return new Column.OfReel(key, Draws.key(seed, reel.name()),
-                    Shape.normalCorrelation(variable.distribution(), reel.correlation()), mid, width / 2,
-                    variable.distribution());
+            long common = Draws.key(seed, reel.name());
+            return variable.distribution().bounded()
+                    ? new Column.OftenAlike(key, common, Draws.key(seed, "choice of " + variable.key()),
+                            Math.sqrt(reel.correlation()), mid, width / 2, variable.distribution())
+                    : new Column.JointlyNormal(key, common, reel.correlation(), mid, width / 2,
+                            variable.distribution());
         }
         return variable.distribution() instanceof Distribution.Uniform
                 ? new Column.Uniform(key, variable.limits().min(), width)
@@ -98,19 +111,29 @@ final class Columns {
                 Shape.apply(distribution, into);
                 scale(mid, half, into);
             }
-            case Column.OfReel c -> {
+            case Column.JointlyNormal c -> jointlyNormal(c, block, stream, draws, scratch.column(0), into);
+            case Column.OftenAlike c -> {
                 double[] common = scratch.column(0);
                 draws.uniform(c.reel(), block, stream, 0, 1, common);
                 draws.uniform(c.key(), block, stream, 0, 1, into);
-                double whole = Math.sqrt(c.correlation());
-                double own = Math.sqrt(1 - c.correlation());
-                for (int j = 0; j < into.length; j++) {
-                    into[j] = whole * Normal.quantile(common[j]) + own * Normal.quantile(into[j]);
-                }
-                Shape.applyToNormal(c.distribution(), into);
+                draws.choose(c.choice(), block, stream, c.share(), common, into);
+                Shape.apply(c.distribution(), into);
                 scale(c.mid(), c.half(), into);
             }
         }
+    }
+
+    private static void jointlyNormal(Column.JointlyNormal c, int block, int stream, Draws draws, double[] common,
+            double[] into) {
+        draws.uniform(c.reel(), block, stream, 0, 1, common);
+        draws.uniform(c.key(), block, stream, 0, 1, into);
+        double whole = Math.sqrt(c.correlation());
+        double own = Math.sqrt(1 - c.correlation());
+        for (int j = 0; j < into.length; j++) {
+            into[j] = whole * Normal.quantile(common[j]) + own * Normal.quantile(into[j]);
+        }
+        Shape.applyToNormal(c.distribution(), into);
+        scale(c.mid(), c.half(), into);
     }
 
     private static void scale(double mid, double half, double[] column) {

@@ -46,4 +46,22 @@ public final class Draws {
             into[at + j] = offset + scale * words[j];
         }
     }
+
+    /** Puts the other number in place of its own with a given probability. */
+    void choose(long key, int block, int stream, double probability, double[] other, double[] own) {
+        Threefry.fill(key, block, stream, low, high);
+        // Signed words: those below this one are the wanted share of all; halves keep the difference within a word.
+        int below = (int) Math.rint((probability - 0.5) * 0x1p31);
+        chosen(low, below, other, own, 0);
+        chosen(high, below, other, own, HALF);
+    }
+
+    private static void chosen(int[] words, int below, double[] other, double[] own, int at) {
+        for (int j = 0; j < HALF; j++) {
+            words[j] = ((words[j] >> 1) - below) >>> 31;
+        }
+        for (int j = 0; j < HALF; j++) {
+            own[at + j] += (other[at + j] - own[at + j]) * words[j];
+        }
+    }
 }

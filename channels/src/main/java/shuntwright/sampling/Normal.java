@@ -1,24 +1,7 @@
 package shuntwright.sampling;
 
-import org.hipparchus.distribution.continuous.NormalDistribution;
-
-/** Quantiles and probabilities of the standard normal distribution, fast enough to be taken for every trial. */
+/** Quantiles of the standard normal distribution, fast enough to be taken for every trial. */
 final class Normal {
-
-    /** Beyond every quantile of a 32-bit number, and of a sum of such. */
-    private static final double REACH = 9;
-    private static final int CELLS = 1800;
-    private static final double CELL = REACH / CELLS;
-    private static final double[] BELOW = new double[CELLS + 1];
-    private static final double[] SLOPES = new double[CELLS + 1];
-
-    static {
-        NormalDistribution exact = new NormalDistribution(0, 1);
-        for (int i = 0; i <= CELLS; i++) {
-            BELOW[i] = exact.cumulativeProbability(-i * CELL);
-            SLOPES[i] = -CELL * exact.density(i * CELL);
-        }
-    }
 
     private Normal() {
     }
@@ -28,6 +11,7 @@ final class Normal {
      *
      * @param p above 0 to below 1
      */
+    @SuppressWarnings("FloatingPointLiteralPrecision") // digits as published
     static double quantile(double p) {
         double q = p - 0.5;
         if (Math.abs(q) <= 0.425) {
@@ -59,19 +43,5 @@ final class Normal {
                             * r + 0.13692988092273580531) * r + 0.59983220655588793769) * r + 1);
         }
         return q < 0 ? -z : z;
-    }
-
-    /** The probability of a value below {@code z}, by cubic Hermite interpolation of exact values; error below 10⁻¹¹ (tested). */
-    static double probability(double z) {
-        double at = Math.abs(z) / CELL;
-        double tail = 0;
-        if (at < CELLS) {
-            int i = (int) at;
-            double t = at - i;
-            double s = 1 - t;
-            tail = s * s * ((1 + 2 * t) * BELOW[i] + t * SLOPES[i])
-                    + t * t * ((1 + 2 * s) * BELOW[i + 1] - s * SLOPES[i + 1]);
-        }
-        return z < 0 ? tail : 1 - tail;
     }
 }

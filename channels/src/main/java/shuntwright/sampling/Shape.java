@@ -52,21 +52,9 @@ final class Shape {
                 case Distribution.StudentT(double degrees, double k) ->
                     StudentTable.of(degrees).quantile(column[j]) / k;
                 case Distribution.Uniform _,Distribution.Triangular _,Distribution.ArcSine _,Distribution.Trapezoid _ ->
-                    quantile(distribution, Normal.probability(column[j]));
+                    throw new IllegalArgumentException("bounded distributions are not made of normal numbers");
             };
         }
-    }
-
-    /**
-     * Coefficient that two normal numbers need so that the deviations made of them have correlation {@code wanted}: the same for
-     * normal and t, 2·sin(π/6·r) for uniform ones (exact), and for the others so that their rank correlation is as wanted.
-     */
-    static double normalCorrelation(Distribution distribution, double wanted) {
-        return switch (distribution) {
-            case Distribution.Normal _,Distribution.StudentT _ -> wanted;
-            case Distribution.Uniform _,Distribution.Triangular _,Distribution.ArcSine _,Distribution.Trapezoid _ -> 2
-                    * Math.sin(Math.PI / 6 * wanted);
-        };
     }
 
     /** The sum of two uniform deviations of half-widths (1+β)/2 and (1−β)/2. */

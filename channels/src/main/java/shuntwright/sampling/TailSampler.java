@@ -78,8 +78,10 @@ final class TailSampler {
         if (!(p > 0)) {
             return Optional.empty();
         }
-        double least = Math.max(p / 1e3, p - Z * error);
-        double most = Math.min(1, p + Z * error);
+        // On a logarithmic scale, so that it never reaches 0.
+        double factor = Math.exp(Z * error / p);
+        double least = p / factor;
+        double most = Math.min(1, p * factor);
         return Optional.of(new Probability(p, Range.of(least, most),
                 error, Probability.Method.WEIGHTED, n));
     }
