@@ -33,6 +33,11 @@ public final class ProbabilityWords {
                 + near(low, RoundingMode.FLOOR) + " to " + near(high, RoundingMode.CEILING) + ")";
     }
 
+    /** The estimate alone, for where its interval stands beside it. */
+    public static String estimate(double probability) {
+        return near(probability, RoundingMode.HALF_UP);
+    }
+
     /** Rounded so that its distance from the nearer of 0 and 1 keeps its digits. */
     private static String near(double value, RoundingMode mode) {
         return value <= 0.5
