@@ -64,6 +64,7 @@ final class BoardContext {
                         + names(catalogue.references()) + ", or add the parts file that holds it.", List.of()));
             }
         }
+        findings.addAll(StatedParts.unknown(board, catalogue));
         this.around = new Surroundings(board.ambient(), board.supply().voltage(), board.rules(),
                 board.adc().flatMap(adc -> source(adc.source())
                         .map(voltage -> new Surroundings.Converter(adc, voltage))),

@@ -51,6 +51,13 @@ public final class BoardPlanner {
     /** Thrown out of a plan that its {@link Progress} cancelled. */
     public static final class Cancelled extends RuntimeException {
         private static final long serialVersionUID = 1;
+
+        public Cancelled() {
+        }
+
+        Cancelled(Exception cause) {
+            super(cause);
+        }
     }
 
     /**

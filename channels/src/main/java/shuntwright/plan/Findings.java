@@ -49,11 +49,7 @@ final class Findings {
                 findings.add(broken(channel, check));
             }
         }
-        for (Assessment each : solved.assessments()) {
-            if (!each.insideByLimits()) {
-                findings.add(outside(channel, each, verdict));
-            }
-        }
+        findings.addAll(outside(solved, verdict));
         release(solved, findings);
         if (coupled && solved.circuit().network() instanceof HysteresisNetwork.Feedback) {
             findings.add(channel(Finding.Key.FEEDBACK_COUPLES, channel,
@@ -66,6 +62,12 @@ final class Findings {
             findings.add(margin(channel, solved.tightest()));
         }
         return findings;
+    }
+
+    /** The outcomes that are not inside by limits. */
+    static List<Finding> outside(SolvedChannel solved, Verdict verdict) {
+        return solved.assessments().stream().filter(each -> !each.insideByLimits())
+                .map(each -> outside(solved.demand().channel(), each, verdict)).toList();
     }
 
     private static Finding broken(Channel channel, LimitCheck check) {
@@ -94,7 +96,7 @@ final class Findings {
         String text = capital(each.outcome().words()) + ": by limits " + show(reached, AMPERE, 4) + ", allowed "
                 + show(allowed, AMPERE, 4) + "; " + String.join(" and ", misses) + ". " + largest(each)
                 + (likely
-                        ? " The coverage interval " + show(each.combined().interval(), AMPERE, 4) + " is within."
+                        ? " The coverage interval " + show(each.coverage(), AMPERE, 4) + " is within."
                         : "");
         return channel(likely ? Finding.Key.BY_COVERAGE_ONLY : Finding.Key.OUTSIDE_WINDOW, channel, text,
                 new Measure("reached least", reached.min(), AMPERE),

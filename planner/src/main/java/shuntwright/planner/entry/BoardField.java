@@ -38,7 +38,8 @@ public enum BoardField {
             board -> Words.text(board.heatLimit(), Dimension.POWER),
             (text, board) -> Words.positive(text, "the heat limit", Dimension.POWER)
                     .then(limit -> Reading.value(board.withHeatLimit(limit)))),
-    ZONES("Zones", "each with its heat limit: port 2 W, starboard 1.5 W", BoardLists::zones, BoardLists::withZones),
+    ZONES("Zones", "each with its heat limit and its rise per watt, if any: port 2 W 12 K/W, starboard 1.5 W",
+            BoardLists::zones, BoardLists::withZones),
     REFERENCES("References", "name = part number: quiet = REF-2V5", BoardLists::references,
             BoardLists::withReferences),
     ALERT_LINES("Alert lines", "names: alert, alert 2", BoardLists::alertLines, BoardLists::withAlertLines),

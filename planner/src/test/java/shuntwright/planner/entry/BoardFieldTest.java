@@ -2,6 +2,8 @@ package shuntwright.planner.entry;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 import org.junit.jupiter.api.Test;
@@ -10,8 +12,14 @@ import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
 
 import shuntwright.board.Board;
+import shuntwright.board.Calibration;
+import shuntwright.board.Channel;
+import shuntwright.board.Sampling;
+import shuntwright.board.StatedDistribution;
+import shuntwright.board.Uncertainty;
 import shuntwright.board.Zone;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.quantity.Distribution;
 
 class BoardFieldTest {
     private final Board board = HandMadeBoards.boat();
@@ -42,12 +50,52 @@ class BoardFieldTest {
         assertThat(field.read(typed, board).ifProblem().orElse("")).contains(reason);
     }
 
+    private static Zone zone(String name, double limit, double resistance) {
+        return new Zone(name, limit > 0 ? OptionalDouble.of(limit) : OptionalDouble.empty(),
+                resistance > 0 ? OptionalDouble.of(resistance) : OptionalDouble.empty());
+    }
+
+    private List<Zone> zones(String typed) {
+        return BoardField.ZONES.read(typed, board).ifValue().orElseThrow().zones();
+    }
+
     @Test
-    void aZoneMayHaveBlanksInItsNameAndALimit() {
-        Board changed = BoardField.ZONES.read("port row 1.5 W, bow", board).ifValue().orElseThrow();
-        assertThat(changed.zones()).containsExactly(
-                new Zone("port row", OptionalDouble.of(1.5), OptionalDouble.empty()),
-                new Zone("bow", OptionalDouble.empty(), OptionalDouble.empty()));
+    void aZoneMayHaveBlanksInItsNameALimitAndAThermalResistance() {
+        assertThat(zones("port row 1.5 W, bow")).containsExactly(zone("port row", 1.5, 0), zone("bow", 0, 0));
+        assertThat(zones("port row 1.5 W 12 K/W, bow 900 mW 8.5K/W, stern 20 K/W"))
+                .containsExactly(zone("port row", 1.5, 12), zone("bow", 0.9, 8.5), zone("stern", 0, 20));
+        assertThat(zones("stern 20 K/W 3 W")).containsExactly(zone("stern", 3, 20));
+        assertThat(BoardField.ZONES.read("port 1 W 2 W", board).ifProblem().orElse("")).contains("two heat limits");
+        assertThat(BoardField.ZONES.read("port 1 K/W 1 W 2 K/W", board).ifProblem().orElse(""))
+                .contains("two thermal resistances");
+    }
+
+    @Test
+    void zonesThatAreThereKeepTheirData() {
+        Board odd = board
+                .withZones(List.of(zone("row 2", 0, 0), zone("row 2 W", 3, 0.1 + 0.2), zone("bow 8 K/W", 0, 0)));
+
+        assertThat(BoardField.ZONES.read(BoardField.ZONES.text(odd), odd).ifValue()).contains(odd);
+        assertThat(BoardField.ZONES.read("new 4 K/W, " + BoardField.ZONES.text(odd), odd).ifValue().orElseThrow()
+                .zones()).containsExactly(zone("new", 0, 4), odd.zones().get(0), odd.zones().get(1),
+                        odd.zones().get(2));
+    }
+
+    /** Everything that a board file holds and the strip does not show. */
+    @ParameterizedTest
+    @EnumSource(BoardField.class)
+    void typingLosesNothingThatIsNotShown(BoardField field) {
+        Board full = board.withUncertainty(new Uncertainty(
+                List.of(new StatedDistribution("shunt tolerance", Optional.empty(), new Distribution.Normal(3))),
+                new Sampling(new Sampling.Trials.Adaptive(1, 50_000), 9))).withChannels(List.of(
+                        board.channels().getFirst().withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
+                                OptionalDouble.of(0.02), Optional.of(new Calibration(Calibration.Points.ONE,
+                                        OptionalDouble.empty(), OptionalDouble.empty(), 1e-3,
+                                        Calibration.DEFAULT_TEMPERATURE))))));
+
+        Board read = field.read(field.text(full), full).ifValue().orElseThrow();
+
+        assertThat(read).isEqualTo(full);
     }
 
     @Test
