@@ -20,6 +20,9 @@ import shuntwright.quantity.Range;
 public record Assessment(Outcome outcome, double nominal, Range limits, CombinedUncertainty combined, Range allowed,
         List<BudgetLine> budget, Optional<Range> propagated) {
 
+    /** Standard uncertainties; a normal distribution has 50 % within 0.67 of them (common practice). */
+    public static final double LEAST_FACTOR = 0.5;
+
     public Assessment {
         budget = List.copyOf(budget);
     }
@@ -32,6 +35,16 @@ public record Assessment(Outcome outcome, double nominal, Range limits, Combined
     /** True when the coverage interval of the propagated distribution is within what is allowed. */
     public boolean insideByCoverage() {
         return insideByLimits() || propagated.map(allowed::contains).orElse(false);
+    }
+
+    /**
+     * False where sampling is not worth its time: not even half a standard uncertainty on each side of the estimate fits, and every
+     * coverage interval of 50 % or more of the distributions met here is wider.
+     */
+    public boolean mayBeInsideByCoverage() {
+        double half = LEAST_FACTOR * combined.standard();
+        return insideByLimits()
+                || allowed.contains(Range.of(combined.estimate() - half, combined.estimate() + half));
     }
 
     /** The coverage interval: of the propagated distribution where sampled, else of the combined uncertainty. */

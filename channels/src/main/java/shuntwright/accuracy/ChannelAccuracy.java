@@ -43,6 +43,11 @@ public final class ChannelAccuracy {
         return List.copyOf(description.inputs());
     }
 
+    /** The vector of the equations with every input at its nominal value; a copy. */
+    public double[] nominal() {
+        return description.nominal();
+    }
+
     /** What the demand allows for each outcome it asks for, trip first. */
     public static List<Asked> asked(Demand demand, boolean reads) {
         List<Asked> asked = new ArrayList<>();

@@ -276,7 +276,7 @@ final class InputDescription {
         boolean byPart = false;
         for (StatedDistribution each : stated) {
             boolean names = each.part().isPresent();
-            boolean suits = each.input().equals(slot.words()) && (!names || each.part().get().equals(part));
+            boolean suits = each.input().equals(slot.words()) && (!names || each.names(part));
             if (suits && (names || !byPart)) {
                 found = each.distribution();
                 byPart |= names;

@@ -1,5 +1,8 @@
 package shuntwright.accuracy;
 
+import java.util.Arrays;
+import java.util.Optional;
+
 /** The place at which an input enters the equations of a channel; the unit is that of the input. */
 public enum Slot {
     AMBIENT("ambient temperature", "°C"),
@@ -71,6 +74,33 @@ public enum Slot {
 
     public String words() {
         return words;
+    }
+
+    /** The slot with these words. */
+    public static Optional<Slot> of(String words) {
+        return Arrays.stream(values()).filter(each -> each.words.equals(words)).findFirst();
+    }
+
+    /** The kind of part that owns such an input; empty where it belongs to the board, a reference, a tap or a converter. */
+    public Optional<PartKind> part() {
+        return switch (this) {
+            case SHUNT_TOLERANCE, SHUNT_DRIFT, SHUNT_AGEING, MOUNTING, THERMAL_EMF -> Optional.of(PartKind.SHUNT);
+            case GAIN_ERROR, GAIN_DRIFT, GAIN_AGEING, OFFSET, OFFSET_DRIFT, COMMON_MODE, SUPPLY_REJECTION, INPUT_BIAS ->
+                Optional.of(PartKind.AMPLIFIER);
+            case OUTPUT_LOW, COMPARATOR_BIAS, SENSE_BIAS, COMPARATOR_OFFSET, COMPARATOR_DRIFT, BUILT_IN,
+                    INJECTED_CURRENT ->
+                Optional.of(PartKind.COMPARATOR);
+            case TOP_TOLERANCE, TOP_DRIFT, TOP_AGEING, BOTTOM_TOLERANCE, BOTTOM_DRIFT, BOTTOM_AGEING,
+                    FEEDBACK_TOLERANCE, FEEDBACK_DRIFT, FEEDBACK_AGEING, SENSE_RESISTOR_TOLERANCE,
+                    SENSE_RESISTOR_DRIFT, SENSE_RESISTOR_AGEING ->
+                Optional.of(PartKind.RESISTORS);
+            case AMBIENT, SUPPLY, RAIL, ZONE_RISE, REFERENCE_TOLERANCE, REFERENCE_DRIFT, REFERENCE_AGEING,
+                    REFERENCE_LOAD, DAC_GAIN, DAC_OFFSET, PULL_UP_TOLERANCE, PULL_UP_VOLTAGE, ADC_GAIN, ADC_OFFSET,
+                    ADC_STEP, ADC_REFERENCE_TOLERANCE, ADC_REFERENCE_DRIFT, ADC_REFERENCE_AGEING, ADC_REFERENCE_LOAD,
+                    CALIBRATION_CURRENT, CALIBRATION_TEMPERATURE, CALIBRATION_SUPPLY, CALIBRATION_RAIL,
+                    CALIBRATION_STEP_LOWER, CALIBRATION_STEP_UPPER ->
+                Optional.empty();
+        };
     }
 
     /** True for temperatures, supply and rail, which multiply other inputs. */

@@ -84,6 +84,7 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
             missing.add("the fault current " + amperes(fault.getAsDouble())
                     + " must not be below the must-trip current " + amperes(mustTrip));
         }
+        channel.reading().calibration().ifPresent(each -> calibration(each, load, fullScale, missing));
         if (channel.release() instanceof ReleaseDemand.Between && !(load < noTrip)) {
             missing.add("the release window between load current " + amperes(load) + " and no-trip current "
                     + amperes(noTrip) + " is empty");
@@ -105,6 +106,19 @@ public record Demand(Channel channel, Spread commonMode, double load, Range trip
         };
         return new Reading.Complete(new Demand(channel, commonMode, load, Range.of(noTrip, mustTrip), target, rearm,
                 fullScale));
+    }
+
+    private static void calibration(Calibration calibration, double load, double fullScale, List<String> missing) {
+        double upper = calibration.upperCurrent(load);
+        double lower = calibration.lowerCurrent(load);
+        if (calibration.points() == Calibration.Points.TWO && !(lower < upper)) {
+            missing.add("the lower calibration current " + amperes(lower) + " must be below the upper one "
+                    + amperes(upper) + (calibration.upper().isEmpty() ? ", which is the load current" : ""));
+        }
+        if (!(upper <= fullScale)) {
+            missing.add("the calibration current " + amperes(upper) + " must not be above the full-scale current "
+                    + amperes(fullScale) + ", beyond which nothing is read");
+        }
     }
 
     private static String amperes(double current) {

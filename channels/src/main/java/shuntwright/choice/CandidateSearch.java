@@ -11,10 +11,12 @@ import shuntwright.accuracy.Propagation;
 import shuntwright.board.Acceptance;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
+import shuntwright.board.StatedDistribution;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.LimitRules;
 import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 
 /**
@@ -36,7 +38,24 @@ final class CandidateSearch {
         this.amplifiers = new AmplifierTerms(amplifiers(problem), problem);
         this.readings = new Readings(problem, amplifiers);
         this.thresholds = new ThresholdTerms(problem);
-        this.coverageFactor = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
+        this.coverageFactor = leastFactor(problem);
+    }
+
+    /**
+     * Standard uncertainties, counted as if every input were uniform, that a coverage interval reaches at least on each side: those of
+     * the normal or of the U-shaped distribution, whichever are fewer, and fewer still where the user states that limits are further
+     * out than those of a uniform distribution.
+     */
+    static double leastFactor(ChannelProblem problem) {
+        double coverage = problem.acceptance().coverage();
+        double factor = Math.min(Propagation.coverageFactor(Double.POSITIVE_INFINITY, coverage),
+                Math.sqrt(2) * Math.sin(Math.PI / 2 * coverage));
+        Range unit = Range.of(-1, 1);
+        double uniform = new Distribution.Uniform().standardUncertainty(unit);
+        for (StatedDistribution each : problem.around().stated()) {
+            factor *= Math.min(1, each.distribution().standardUncertainty(unit) / uniform);
+        }
+        return factor;
     }
 
     /** Shunts within their limits by ascending resistance, and so by ascending heat. */

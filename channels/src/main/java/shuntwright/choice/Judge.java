@@ -3,12 +3,15 @@ package shuntwright.choice;
 import java.util.List;
 import java.util.OptionalDouble;
 
+import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.ChannelAccuracy;
+import shuntwright.accuracy.CombinedUncertainty;
 import shuntwright.board.Acceptance;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.quantity.Range;
+import shuntwright.sampling.CoverageLook;
 
 /** Judges complete circuits exactly. */
 final class Judge {
@@ -32,14 +35,35 @@ final class Judge {
     boolean accepts(SenseCircuit circuit) {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
+        boolean open = false;
         for (ChannelAccuracy.Asked each : asked) {
-            if (!each.allowed().contains(accuracy.limits(each)) && !(coverage && each.allowed()
-                    .contains(accuracy.combined(each, problem.acceptance().coverage()).interval()))) {
-                return false;
+            if (!each.allowed().contains(accuracy.limits(each))) {
+                open = true;
+                if (!coverage || hopeless(each, accuracy.combined(each, problem.acceptance().coverage()))) {
+                    return false;
+                }
             }
         }
         return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(),
-                circuit.comparator(), problem.around()));
+                circuit.comparator(), problem.around())) && (!open || likely(circuit, accuracy));
+    }
+
+    private static boolean hopeless(ChannelAccuracy.Asked asked, CombinedUncertainty combined) {
+        double half = Assessment.LEAST_FACTOR * combined.standard();
+        return !asked.allowed().contains(Range.of(combined.estimate() - half, combined.estimate() + half));
+    }
+
+    /** True when every outcome is inside by limits or by a first look at its coverage interval. */
+    private boolean likely(SenseCircuit circuit, ChannelAccuracy accuracy) {
+        List<Range> intervals = CoverageLook.intervals(circuit, problem.around(), problem.demand(),
+                problem.acceptance().coverage());
+        for (int i = 0; i < asked.size(); i++) {
+            Range allowed = asked.get(i).allowed();
+            if (!allowed.contains(intervals.get(i)) && !allowed.contains(accuracy.limits(asked.get(i)))) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /**

@@ -27,6 +27,7 @@ import shuntwright.parts.ResistorSeries;
 import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
 import shuntwright.quantity.Range;
+import shuntwright.sampling.CoverageLook;
 
 /** Turns a chosen circuit into a judged channel. */
 final class ChannelSolver {
@@ -36,9 +37,8 @@ final class ChannelSolver {
 
     /** The channel with this circuit, judged; without cures. */
     static ChannelPlan judged(ChannelProblem problem, SenseCircuit circuit) {
-        SolvedChannel solved = solve(problem, circuit);
-        boolean respects = solved.limits().stream().allMatch(LimitCheck::holds);
-        Verdict verdict = respects ? verdict(solved) : Verdict.NO_FIT;
+        SolvedChannel solved = looked(solve(problem, circuit), problem.acceptance().coverage());
+        Verdict verdict = verdict(solved);
         boolean coupled = problem.pullUp().sharedLine() || problem.tap().isPresent();
         List<Finding> findings = new ArrayList<>(Findings.of(solved, verdict, coupled));
         Channel channel = problem.demand().channel();
@@ -60,7 +60,27 @@ final class ChannelSolver {
         };
     }
 
-    private static Verdict verdict(SolvedChannel solved) {
+    /** With a first look at the coverage intervals where limits do not decide and a coverage interval may. */
+    private static SolvedChannel looked(SolvedChannel solved, double coverage) {
+        boolean open = solved.assessments().stream().anyMatch(each -> !each.insideByLimits())
+                && solved.limits().stream().allMatch(LimitCheck::holds)
+                && solved.assessments().stream().allMatch(Assessment::mayBeInsideByCoverage);
+        if (!open) {
+            return solved;
+        }
+        List<Range> intervals = CoverageLook.intervals(solved.circuit(), solved.around(), solved.demand(), coverage);
+        List<Assessment> assessments = new ArrayList<>();
+        for (int i = 0; i < intervals.size(); i++) {
+            assessments.add(solved.assessments().get(i).withPropagated(intervals.get(i)));
+        }
+        return new SolvedChannel(solved.demand(), solved.circuit(), solved.around(), solved.settings(),
+                solved.inputs(), assessments, solved.uncalibrated(), solved.limits(), solved.heat(), solved.cost());
+    }
+
+    static Verdict verdict(SolvedChannel solved) {
+        if (!solved.limits().stream().allMatch(LimitCheck::holds)) {
+            return Verdict.NO_FIT;
+        }
         if (solved.assessments().stream().allMatch(Assessment::insideByLimits)) {
             return Verdict.INSIDE;
         }

@@ -9,6 +9,7 @@ import java.util.Optional;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Channel;
 import shuntwright.circuit.HysteresisNetwork;
@@ -49,11 +50,8 @@ final class Findings {
                 findings.add(broken(channel, check));
             }
         }
-        for (Assessment each : solved.assessments()) {
-            if (!each.insideByLimits()) {
-                findings.add(outside(channel, each, verdict));
-            }
-        }
+        findings.addAll(outside(solved, verdict));
+        runaway(solved, findings);
         release(solved, findings);
         if (coupled && solved.circuit().network() instanceof HysteresisNetwork.Feedback) {
             findings.add(channel(Finding.Key.FEEDBACK_COUPLES, channel,
@@ -66,6 +64,12 @@ final class Findings {
             findings.add(margin(channel, solved.tightest()));
         }
         return findings;
+    }
+
+    /** The outcomes that are not inside by limits. */
+    static List<Finding> outside(SolvedChannel solved, Verdict verdict) {
+        return solved.assessments().stream().filter(each -> !each.insideByLimits())
+                .map(each -> outside(solved.demand().channel(), each, verdict)).toList();
     }
 
     private static Finding broken(Channel channel, LimitCheck check) {
@@ -94,7 +98,7 @@ final class Findings {
         String text = capital(each.outcome().words()) + ": by limits " + show(reached, AMPERE, 4) + ", allowed "
                 + show(allowed, AMPERE, 4) + "; " + String.join(" and ", misses) + ". " + largest(each)
                 + (likely
-                        ? " The coverage interval " + show(each.combined().interval(), AMPERE, 4) + " is within."
+                        ? " The coverage interval " + show(each.coverage(), AMPERE, 4) + " is within."
                         : "");
         return channel(likely ? Finding.Key.BY_COVERAGE_ONLY : Finding.Key.OUTSIDE_WINDOW, channel, text,
                 new Measure("reached least", reached.min(), AMPERE),
@@ -120,6 +124,25 @@ final class Findings {
                         + show(tightest.margin(), Dimension.RATIO, 2) + " of the allowed half-width. "
                         + largest(tightest),
                 new Measure("margin", tightest.margin(), Dimension.RATIO));
+    }
+
+    private static void runaway(SolvedChannel solved, List<Finding> findings) {
+        Channel channel = solved.demand().channel();
+        boolean calibrated = !solved.uncalibrated().isEmpty();
+        for (Assessment each : solved.assessments()) {
+            boolean reading = each.outcome() == Outcome.READING_AT_LEAST || each.outcome() == Outcome.READING_AT_LOAD;
+            if (each.limits().max() < ChannelAccuracy.BEYOND) {
+                continue;
+            }
+            findings.add(calibrated && reading
+                    ? channel(Finding.Key.CALIBRATION_FAILS, channel, Findings.capital(each.outcome().words())
+                            + ": by limits the errors at the calibration currents may outweigh the signal, so that nothing can "
+                            + "be calibrated. Calibrate at a larger current, or at two that lie further apart.")
+                    : channel(Finding.Key.THERMAL_RUNAWAY, channel, Findings.capital(each.outcome().words())
+                            + ": by limits a shunt runs away thermally before it is reached, because its resistance rises "
+                            + "faster with its own heat than it can carry the heat away. A shunt of lower thermal "
+                            + "resistance, less resistance or smaller temperature coefficient would cure it."));
+        }
     }
 
     private static void release(SolvedChannel solved, List<Finding> findings) {

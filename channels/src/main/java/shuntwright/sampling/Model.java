@@ -1,5 +1,7 @@
 package shuntwright.sampling;
 
+import java.util.List;
+
 /** Quantities as functions of inputs, evaluated for many trials at once; safe for several threads. */
 public interface Model {
 
@@ -18,4 +20,9 @@ public interface Model {
      * @param scratch for this thread's use between calls
      */
     void evaluate(double[][] x, int count, double[][] y, Scratch scratch);
+
+    /** Inputs that multiply others with wide effect, as a temperature multiplies drifts: rare events have a way out at each end. */
+    default List<Integer> multiplying() {
+        return List.of();
+    }
 }

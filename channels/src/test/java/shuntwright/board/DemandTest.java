@@ -101,6 +101,39 @@ class DemandTest {
                 .singleElement().satisfies(each -> assertThat(each).contains("fault current"));
     }
 
+    private static Channel calibrated(Calibration.Points points, OptionalDouble lower, OptionalDouble upper) {
+        return channel(currents(20, 25, 36)).withReading(new Channel.ReadingDemand(NONE, OptionalDouble.of(0.01),
+                Optional.of(new Calibration(points, lower, upper, 1e-3, Calibration.DEFAULT_TEMPERATURE))));
+    }
+
+    @Test
+    void aCalibrationWithItsDefaultsLiesAtTheLoadAndATenthOfIt() {
+        Demand demand = complete(calibrated(Calibration.Points.TWO, NONE, NONE));
+        Calibration calibration = demand.channel().reading().calibration().orElseThrow();
+        assertThat(calibration.upperCurrent(demand.load())).isEqualTo(20);
+        assertThat(calibration.lowerCurrent(demand.load())).isEqualTo(2);
+    }
+
+    @Test
+    void aLowerCalibrationCurrentMustBeBelowTheUpperOne() {
+        assertThat(missing(calibrated(Calibration.Points.TWO, OptionalDouble.of(20), NONE))).containsExactly(
+                "the lower calibration current 20 A must be below the upper one 20 A, which is the load current");
+        assertThat(missing(calibrated(Calibration.Points.TWO, OptionalDouble.of(30), NONE))).hasSize(1);
+        assertThat(complete(calibrated(Calibration.Points.TWO, OptionalDouble.of(19.9), NONE)).load()).isEqualTo(20);
+        assertThat(complete(calibrated(Calibration.Points.TWO, OptionalDouble.of(30), OptionalDouble.of(32))).load())
+                .isEqualTo(20);
+        assertThat(complete(calibrated(Calibration.Points.ONE, OptionalDouble.of(30), NONE)).load())
+                .as("with one point nothing lies at the lower current").isEqualTo(20);
+    }
+
+    @Test
+    void aCalibrationCurrentMustBeReadable() {
+        assertThat(missing(calibrated(Calibration.Points.ONE, NONE, OptionalDouble.of(37))))
+                .containsExactly("the calibration current 37 A must not be above the full-scale current 36 A, beyond "
+                        + "which nothing is read");
+        assertThat(complete(calibrated(Calibration.Points.ONE, NONE, OptionalDouble.of(36))).load()).isEqualTo(20);
+    }
+
     @Test
     void aLatchNeedsNoRoomBetweenLoadAndNoTrip() {
         assertThat(complete(channel(currents(25, 25, 36)).withRelease(new ReleaseDemand.Latch())).load())

@@ -3,9 +3,9 @@ package shuntwright.choice;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 
 import shuntwright.accuracy.ChannelAccuracy;
-import shuntwright.accuracy.Propagation;
 import shuntwright.board.Acceptance;
 import shuntwright.board.Pins;
 import shuntwright.circuit.HysteresisNetwork;
@@ -18,6 +18,7 @@ import shuntwright.parts.ResistorSeries;
 import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
 import shuntwright.quantity.Range;
+import shuntwright.sampling.CoverageLook;
 
 /** Every combination of a small catalogue, completed and judged exactly, with no rejection on the way. */
 final class BruteForce {
@@ -101,7 +102,7 @@ final class BruteForce {
         boolean room = Math.max(low[0], low[1]) <= Math.min(high[0], high[1]);
         if (!room && problem.acceptance().basis() == Acceptance.Basis.COVERAGE) {
             Range trip = problem.demand().tripWindow();
-            double k = Propagation.coverageFactor(Double.POSITIVE_INFINITY, problem.acceptance().coverage());
+            double k = CandidateSearch.leastFactor(problem);
             double volt = trip.max() * s.resistance;
             double relative = 0.98 * k
                     * Math.sqrt(s.variance + a.gainVariance[j] + a.errorVariance[j] / (volt * volt));
@@ -125,14 +126,24 @@ final class BruteForce {
         boolean respects = CandidateSearch.holds(LimitRules.all(circuit, accuracy.changeover(),
                 problem.pullUp().voltage().max(), problem.demand(), problem.around()));
         return new Tried(circuit, heat(problem, circuit), cost(problem, circuit), respects,
-                respects && accepted(problem, accuracy));
+                respects && accepted(problem, circuit, accuracy));
     }
 
-    private static boolean accepted(ChannelProblem problem, ChannelAccuracy accuracy) {
-        boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
-        return ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent()).stream()
-                .allMatch(each -> each.allowed().contains(accuracy.limits(each)) || (coverage && each.allowed()
-                        .contains(accuracy.combined(each, problem.acceptance().coverage()).interval())));
+    private static boolean accepted(ChannelProblem problem, SenseCircuit circuit, ChannelAccuracy accuracy) {
+        List<ChannelAccuracy.Asked> asked = ChannelAccuracy.asked(problem.demand(),
+                problem.around().adc().isPresent());
+        List<Boolean> inside = asked.stream().map(each -> each.allowed().contains(accuracy.limits(each))).toList();
+        if (!inside.contains(false) || problem.acceptance().basis() == Acceptance.Basis.LIMITS) {
+            return !inside.contains(false);
+        }
+        if (asked.stream().anyMatch(each -> !each.allowed().contains(accuracy.nominal(each)))) {
+            // A coverage interval far from the nominal value would be another mistake; spares sampling it.
+            return false;
+        }
+        List<Range> intervals = CoverageLook.intervals(circuit, problem.around(), problem.demand(),
+                problem.acceptance().coverage());
+        return IntStream.range(0, asked.size())
+                .allMatch(i -> inside.get(i) || asked.get(i).allowed().contains(intervals.get(i)));
     }
 
     static double heat(ChannelProblem problem, SenseCircuit circuit) {

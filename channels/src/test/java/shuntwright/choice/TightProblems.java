@@ -8,7 +8,6 @@ import java.util.random.RandomGenerator;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.ChannelAccuracy;
-import shuntwright.accuracy.Outcome;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.board.Pins;
@@ -17,6 +16,7 @@ import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.Threshold;
 import shuntwright.quantity.Range;
+import shuntwright.sampling.CoverageLook;
 
 /** Problems whose windows are exactly what one circuit reaches. */
 final class TightProblems {
@@ -34,7 +34,12 @@ final class TightProblems {
         SenseCircuit circuit = all.get(random.nextInt(all.size())).circuit();
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, loose.around(), loose.demand());
         List<Assessment> reached = accuracy.assess(loose.acceptance().coverage());
-        Range trip = interval(loose, reached.getFirst());
+        List<Range> intervals = switch (loose.acceptance().basis()) {
+            case LIMITS -> reached.stream().map(Assessment::limits).toList();
+            case COVERAGE -> CoverageLook.intervals(circuit, loose.around(), loose.demand(),
+                    loose.acceptance().coverage());
+        };
+        Range trip = intervals.getFirst();
         if (!(trip.min() > 0 && trip.max() < 1e6)) {
             return Optional.empty();
         }
@@ -44,8 +49,7 @@ final class TightProblems {
         Channel tight = channel.withCurrents(new Channel.Currents(OptionalDouble.of(load), OptionalDouble.of(noTrip),
                 OptionalDouble.of(trip.max() * (1 + SPARE)), OptionalDouble.empty(),
                 OptionalDouble.empty(), OptionalDouble.empty())).withReading(Channel.ReadingDemand.NONE);
-        Optional<Range> release = reached.stream().filter(each -> each.outcome() == Outcome.RELEASE).findFirst()
-                .map(each -> interval(loose, each));
+        Optional<Range> release = loose.demand().rearm().map(_ -> intervals.get(1));
         if (release.isPresent() && !(release.get().min() > 0 && release.get().max() < 1e6)) {
             return Optional.empty();
         }
@@ -62,13 +66,6 @@ final class TightProblems {
                         loose.tap(), pinned ? List.of(circuit.resistors()) : loose.resistors(), loose.pullUp(),
                         loose.acceptance(), loose.buildQuantity()))
                 : Optional.empty();
-    }
-
-    private static Range interval(ChannelProblem loose, Assessment assessment) {
-        return switch (loose.acceptance().basis()) {
-            case LIMITS -> assessment.limits();
-            case COVERAGE -> assessment.combined().interval();
-        };
     }
 
     private static Pins pins(SenseCircuit circuit) {

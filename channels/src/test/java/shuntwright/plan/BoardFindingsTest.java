@@ -10,14 +10,18 @@ import org.junit.jupiter.api.Test;
 import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
 import shuntwright.board.Channel;
+import shuntwright.board.Sampling;
 import shuntwright.board.Source;
+import shuntwright.board.StatedDistribution;
 import shuntwright.board.ThresholdDemand;
+import shuntwright.board.Uncertainty;
 import shuntwright.circuit.Limit;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.parts.Catalogue;
 import shuntwright.parts.Part;
 import shuntwright.parts.Reference;
 import shuntwright.parts.Shunt;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 
 /** Findings that name what is wrong with the board or the catalogue instead of a consequence of it. */
@@ -49,6 +53,26 @@ class BoardFindingsTest {
             assertThat(finding.text()).contains("\"quiet\"", "REF25", "3.3 .. 5.5 V", "3.234 .. 3.366 V");
         });
         assertThat(plan(Range.of(3.234, 3.366)).accepted()).isTrue();
+    }
+
+    private static List<Finding> stated(String input, String part) {
+        Uncertainty uncertainty = new Uncertainty(List.of(new StatedDistribution(input, Optional.of(part),
+                new Distribution.Triangular())), Sampling.DEFAULT);
+        return new BoardPlanner().plan(TrialBoards.board(CHANNEL).withUncertainty(uncertainty), TrialBoards.CATALOGUE,
+                Progress.SILENT).findings();
+    }
+
+    @Test
+    void aDistributionStatedForAPartThatNoFileHoldsIsAFault() {
+        String amplifier = TrialBoards.CATALOGUE.amplifiers().getFirst().partNumber();
+        assertThat(stated("gain error", amplifier)).isEmpty();
+        assertThat(stated("gain error", amplifier.substring(0, 1) + "*")).isEmpty();
+        assertThat(stated("gain error", amplifier + "X")).singleElement().satisfies(finding -> {
+            assertThat(finding.key()).isEqualTo(Finding.Key.UNKNOWN_PART);
+            assertThat(finding.text()).contains("\"gain error\"", "\"" + amplifier + "X\"", "no amplifier");
+        });
+        assertThat(stated("shunt tolerance", amplifier)).as("an amplifier has no shunt tolerance").singleElement()
+                .satisfies(finding -> assertThat(finding.text()).contains("no shunt"));
     }
 
     private static String firstFinding(Channel channel, Catalogue catalogue) {

@@ -21,7 +21,7 @@ public final class HandMadeBoards {
     public static Board boat() {
         return Board.named("boat")
                 .withZones(
-                        List.of(new Zone("port", OptionalDouble.of(2), OptionalDouble.empty()),
+                        List.of(new Zone("port", OptionalDouble.of(2), OptionalDouble.of(12)),
                                 new Zone("starboard", OptionalDouble.empty(), OptionalDouble.empty())))
                 .withAlertLines(List.of(AlertLine.named("alert"))).withHeatLimit(OptionalDouble.of(6))
                 .withChannels(List.of(channel("bilge pump", 20, 25, 31), channel("windlass", 12, 15, 18).withZone(

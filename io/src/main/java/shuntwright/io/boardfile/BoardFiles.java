@@ -77,6 +77,11 @@ public final class BoardFiles {
         return parse("board", write(board)).problems();
     }
 
+    /** The inputs whose distribution a board file may state, as a table in Markdown for the guide. */
+    public static String inputTable() {
+        return InputWords.markdown();
+    }
+
     /** Every type of object in a board file, the file itself first. */
     public static List<Form<?>> forms() {
         return FORM.all();

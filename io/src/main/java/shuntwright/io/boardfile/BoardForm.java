@@ -24,7 +24,7 @@ import shuntwright.quantity.Dimension;
 import shuntwright.quantity.Range;
 
 final class BoardForm extends Form<Board> {
-    private static final Bounds PHYSICAL_TEMPERATURE = new Bounds(-273.15, true, Double.POSITIVE_INFINITY, false);
+    static final Bounds PHYSICAL_TEMPERATURE = new Bounds(-273.15, true, Double.POSITIVE_INFINITY, false);
 
     private final SupplyForm supplyForm = new SupplyForm();
     private final ReferenceForm referenceForm = new ReferenceForm();
@@ -34,6 +34,7 @@ final class BoardForm extends Form<Board> {
     private final ZoneForm zoneForm = new ZoneForm();
     private final AcceptanceForm acceptanceForm = new AcceptanceForm();
     private final RulesForm rulesForm = new RulesForm();
+    private final UncertaintyForm uncertaintyForm = new UncertaintyForm();
     private final ChannelForm channelForm = new ChannelForm();
 
     private final Key<String> format = required("format", BoardFiles.FORMAT.kind(), "kind and version of the file");
@@ -56,13 +57,15 @@ final class BoardForm extends Form<Board> {
     private final Key<List<Tap>> taps = withDefault("taps", Kinds.list(tapForm), List.of(),
             "thresholds that several channels share");
     private final Key<List<Zone>> zones = withDefault("zones", Kinds.list(zoneForm), List.of(),
-            "areas of the board with a heat limit of their own");
+            "areas of the board with a heat limit or a warming of their own");
     private final Key<Double> heatLimit = optional("heatLimit", Quantities.number(Dimension.POWER, Bounds.POSITIVE),
             "no limit", "largest heat of all shunts together");
     private final Key<Acceptance> acceptance = withDefault("acceptance", acceptanceForm, Acceptance.DEFAULT,
             "when a channel counts as accepted");
     private final Key<DesignRules> rules = withDefault("rules", rulesForm, DesignRules.DEFAULT,
             "design rules for every channel");
+    private final Key<Uncertainty> uncertainty = withDefault("uncertainty", uncertaintyForm, Uncertainty.DEFAULT,
+            "what is known of the inputs beyond their limits, and how distributions are propagated");
     private final Key<List<Channel>> channels = withDefault("channels", Kinds.list(channelForm), List.of(),
             "one for each output rail");
 
@@ -72,8 +75,10 @@ final class BoardForm extends Form<Board> {
 
     List<Form<?>> all() {
         return List.of(this, supplyForm, referenceForm, adcForm, alertLineForm, tapForm, tapForm.dividerForm,
-                tapForm.dacForm, zoneForm, acceptanceForm, rulesForm, channelForm, channelForm.withstandForm,
-                channelForm.withstandForm.conductorForm, channelForm.pinsForm);
+                tapForm.dacForm, zoneForm, acceptanceForm, rulesForm, uncertaintyForm, uncertaintyForm.distributionForm,
+                channelForm, channelForm.calibrationForm, channelForm.withstandForm,
+                channelForm.withstandForm.conductorForm,
+                channelForm.pinsForm);
     }
 
     @Override
@@ -81,7 +86,7 @@ final class BoardForm extends Form<Board> {
         return new Board(fields.get(name), fields.get(description), fields.get(parts), fields.get(buildQuantity),
                 fields.get(ambient), fields.get(supply), fields.get(references), fields.find(adc),
                 fields.get(alertLines), fields.get(taps), fields.get(zones), fields.number(heatLimit),
-                fields.get(acceptance), fields.get(rules), Uncertainty.DEFAULT, fields.get(channels));
+                fields.get(acceptance), fields.get(rules), fields.get(uncertainty), fields.get(channels));
     }
 
     @Override
@@ -101,6 +106,7 @@ final class BoardForm extends Form<Board> {
         sheet.put(heatLimit, value.heatLimit());
         sheet.put(acceptance, value.acceptance());
         sheet.put(rules, value.rules());
+        sheet.put(uncertainty, value.uncertainty());
         sheet.put(channels, value.channels());
     }
 }

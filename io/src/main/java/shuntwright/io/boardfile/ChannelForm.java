@@ -2,8 +2,8 @@ package shuntwright.io.boardfile;
 
 import java.util.List;
 import java.util.Locale;
-import java.util.Optional;
 
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.Pins;
 import shuntwright.board.ReleaseDemand;
@@ -27,6 +27,7 @@ final class ChannelForm extends Form<Channel> {
     private static final Kind<Double> ERROR = Quantities.limit(Dimension.RATIO, Bounds.BETWEEN_ZERO_AND_ONE);
     private static final String NOT_YET = "not planned until given";
 
+    final CalibrationForm calibrationForm = new CalibrationForm();
     final WithstandForm withstandForm = new WithstandForm();
     final PinsForm pinsForm = new PinsForm();
 
@@ -53,6 +54,8 @@ final class ChannelForm extends Form<Channel> {
             "largest reading error at the least current");
     private final Key<Double> readingAtLoad = optional("readingAtLoad", ERROR, "nothing asked",
             "largest reading error at the load current");
+    private final Key<Calibration> calibration = optional("calibration", calibrationForm, "none",
+            "of the reading at production; it needs the board's `adc`");
     private final Key<ThresholdDemand> threshold = withDefault("threshold", ThresholdWords.KIND,
             new ThresholdDemand.Free(), "where the threshold comes from: any own divider, an own divider from the "
                     + "supply or a reference, or a shared tap");
@@ -106,7 +109,7 @@ final class ChannelForm extends Form<Channel> {
         Channel.Currents currents = new Channel.Currents(fields.number(load), fields.number(noTrip),
                 fields.number(mustTrip), fields.number(tripTarget), fields.number(least), fields.number(fullScale));
         Channel.ReadingDemand reading = new Channel.ReadingDemand(fields.number(readingAtLeast),
-                fields.number(readingAtLoad), Optional.empty());
+                fields.number(readingAtLoad), fields.find(calibration));
         Channel.Stress stress = new Channel.Stress(fields.number(fault), fields.number(clearingTime),
                 fields.get(inrush), fields.find(withstand));
         return new Channel(fields.get(name), fields.get(note), fields.find(rail), fields.get(side), currents,
@@ -129,6 +132,7 @@ final class ChannelForm extends Form<Channel> {
         sheet.put(release, value.release());
         sheet.put(readingAtLeast, value.reading().atLeast());
         sheet.put(readingAtLoad, value.reading().atLoad());
+        sheet.put(calibration, value.reading().calibration());
         sheet.put(threshold, value.threshold());
         sheet.put(alertLine, value.alertLine());
         sheet.put(zone, value.zone());

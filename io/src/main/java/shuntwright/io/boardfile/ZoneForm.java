@@ -1,7 +1,5 @@
 package shuntwright.io.boardfile;
 
-import java.util.OptionalDouble;
-
 import shuntwright.board.Zone;
 import shuntwright.io.form.Bounds;
 import shuntwright.io.form.Fields;
@@ -16,6 +14,9 @@ final class ZoneForm extends Form<Zone> {
     private final Key<String> name = required("name", Kinds.name(), "what channels call it");
     private final Key<Double> heatLimit = optional("heatLimit", Quantities.number(Dimension.POWER, Bounds.POSITIVE),
             "no limit", "largest heat of its shunts together");
+    private final Key<Double> thermalResistance = optional("thermalResistance",
+            Quantities.number(Dimension.THERMAL_RESISTANCE, Bounds.POSITIVE), "its parts stay at ambient temperature",
+            "from the zone's board to the ambient air: the zone's own heat warms all parts of its channels");
 
     ZoneForm() {
         super("Zone");
@@ -23,12 +24,13 @@ final class ZoneForm extends Form<Zone> {
 
     @Override
     protected Zone bind(Fields fields) {
-        return new Zone(fields.get(name), fields.number(heatLimit), OptionalDouble.empty());
+        return new Zone(fields.get(name), fields.number(heatLimit), fields.number(thermalResistance));
     }
 
     @Override
     protected void fill(Zone value, Sheet sheet) {
         sheet.put(name, value.name());
         sheet.put(heatLimit, value.heatLimit());
+        sheet.put(thermalResistance, value.thermalResistance());
     }
 }

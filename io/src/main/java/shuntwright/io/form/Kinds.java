@@ -59,6 +59,11 @@ public final class Kinds {
         return new WholeKind(least, most);
     }
 
+    /** A whole number of any size that 64 bits hold. */
+    public static Kind<Long> whole() {
+        return new AnyWholeKind();
+    }
+
     /** A bare number without a unit of its own. */
     public static Kind<Double> bare(String unit, Bounds bounds) {
         return new BareKind(unit, bounds);
@@ -138,6 +143,36 @@ public final class Kinds {
         @Override
         public String unit() {
             return "whole number " + (most == Integer.MAX_VALUE ? "from " + least : "from " + least + " to " + most);
+        }
+    }
+
+    private record AnyWholeKind() implements Kind<Long> {
+        /** Up to here a double has every whole number. */
+        private static final double EXACT = 0x1p53;
+
+        @Override
+        public Optional<Long> read(LocatedJson value, Problems problems) {
+            if (value instanceof LocatedJson.Num num) {
+                try {
+                    return Optional.of(Long.parseLong(num.written()));
+                } catch (NumberFormatException _) {
+                    if (num.value() == Math.rint(num.value()) && Math.abs(num.value()) <= EXACT) {
+                        return Optional.of((long) num.value());
+                    }
+                }
+            }
+            return refuse(value, "a whole number of at most 18 digits is needed here, without quotes, not "
+                    + value.inWords(), problems);
+        }
+
+        @Override
+        public Json write(Long value) {
+            return new Json.Whole(value);
+        }
+
+        @Override
+        public String unit() {
+            return "whole number";
         }
     }
 

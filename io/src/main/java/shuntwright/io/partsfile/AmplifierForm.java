@@ -18,6 +18,8 @@ final class AmplifierForm extends PartForm<SenseAmplifier> {
     private final Key<Double> gainError = required("gainError", PartKinds.ERROR, "limit of its magnitude at 25 °C");
     private final Key<Double> gainDrift = required("gainDrift", PartKinds.DRIFT,
             "limit of its magnitude, referred to 25 °C");
+    private final Key<Double> gainAgeing = withDefault("gainAgeing", PartKinds.ERROR, 0.0,
+            "largest relative change of the gain over life");
     private final Key<Double> offset = required("offset", PartKinds.OFFSET,
             "input offset, limit of its magnitude at 25 °C");
     private final Key<Double> offsetDrift = required("offsetDrift", PartKinds.OFFSET_DRIFT,
@@ -77,7 +79,8 @@ final class AmplifierForm extends PartForm<SenseAmplifier> {
                 fields.find(survival).orElse(fields.get(differential)), fields.get(supply), fields.get(outputHeadroom),
                 fields.get(outputLow));
         return new SenseAmplifier(partNumber(fields), description(fields), fields.get(gain), fields.get(gainError),
-                fields.get(gainDrift), 0, input, ranges, fields.get(bandwidth), fields.get(slewRate),
+                fields.get(gainDrift), fields.get(gainAgeing), input, ranges, fields.get(bandwidth),
+                fields.get(slewRate),
                 fields.get(supplyCurrent), fields.get(sections), purchase(fields));
     }
 
@@ -86,6 +89,7 @@ final class AmplifierForm extends PartForm<SenseAmplifier> {
         sheet.put(gain, value.gain());
         sheet.put(gainError, value.gainError());
         sheet.put(gainDrift, value.gainDrift());
+        sheet.put(gainAgeing, value.gainAgeing());
         sheet.put(offset, value.input().offset());
         sheet.put(offsetDrift, value.input().offsetDrift());
         sheet.put(rejection, value.input().rejection());

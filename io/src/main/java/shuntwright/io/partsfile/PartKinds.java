@@ -18,6 +18,7 @@ final class PartKinds {
     static final Kind<Double> OFFSET_DRIFT = Quantities.limit(Dimension.VOLTAGE_PER_KELVIN, Bounds.NOT_NEGATIVE);
     static final Kind<Double> DRIFT = Quantities.limit(Dimension.TEMPERATURE_COEFFICIENT, Bounds.NOT_NEGATIVE);
     static final Kind<Double> ERROR = Quantities.limit(Dimension.RATIO, Bounds.BELOW_ONE);
+    static final Kind<Double> CORRELATION = Quantities.number(Dimension.RATIO, Bounds.SHARE);
     static final Kind<Double> CURRENT = Quantities.number(Dimension.CURRENT, Bounds.POSITIVE);
     static final Kind<Double> LEAKAGE = Quantities.limit(Dimension.CURRENT, Bounds.NOT_NEGATIVE);
     static final Kind<Double> POWER = Quantities.number(Dimension.POWER, Bounds.POSITIVE);

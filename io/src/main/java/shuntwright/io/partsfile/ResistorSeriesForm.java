@@ -21,9 +21,8 @@ final class ResistorSeriesForm extends PartForm<ResistorSeries> {
     private final Key<Double> temperatureCoefficient = required("temperatureCoefficient", PartKinds.DRIFT,
             "limit of its magnitude, referred to 25 °C");
     private final Key<Double> ageing = withDefault("ageing", PartKinds.ERROR, 0.0, "largest relative change over life");
-    private final Key<Double> correlation = withDefault("correlation",
-            Quantities.number(Dimension.RATIO, Bounds.SHARE), 0.0,
-            "correlation coefficient between pieces of one reel");
+    private final Key<Double> correlation = withDefault("correlation", PartKinds.CORRELATION, 0.0,
+            "correlation coefficient of tolerance and of temperature coefficient between pieces of one value from one reel");
     private final Key<Double> power = required("power", PartKinds.POWER, "rated dissipation");
     private final SaleKeys saleKeys = makeSaleKeys();
 

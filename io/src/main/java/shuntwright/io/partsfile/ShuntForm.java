@@ -25,6 +25,8 @@ final class ShuntForm extends PartForm<Shunt> {
     private final Key<Double> temperatureCoefficient = required("temperatureCoefficient", PartKinds.DRIFT,
             "limit of its magnitude, referred to 25 °C");
     private final Key<Double> ageing = withDefault("ageing", PartKinds.ERROR, 0.0, "largest relative change over life");
+    private final Key<Double> correlation = withDefault("correlation", PartKinds.CORRELATION, 0.0,
+            "correlation coefficient of tolerance and of temperature coefficient between pieces of one reel");
     private final Key<Terminals> terminals = required("terminals",
             Kinds.choice(each -> each.name().toLowerCase(Locale.ROOT), Terminals.values()),
             "whether sense and load current share the joints");
@@ -81,7 +83,7 @@ final class ShuntForm extends PartForm<Shunt> {
         ShuntRating rating = new ShuntRating(watts, rated, maximum,
                 fields.find(thermalResistance).orElse((maximum - rated) / watts), fields.number(pulseEnergy));
         return new Shunt(partNumber(fields), description(fields), fields.get(resistance), fields.get(tolerance),
-                fields.get(temperatureCoefficient), fields.get(ageing), 0, fields.get(terminals),
+                fields.get(temperatureCoefficient), fields.get(ageing), fields.get(correlation), fields.get(terminals),
                 fields.get(mountingResistance), fields.get(thermalEmf), rating, purchase(fields));
     }
 
@@ -91,6 +93,7 @@ final class ShuntForm extends PartForm<Shunt> {
         sheet.put(tolerance, value.tolerance());
         sheet.put(temperatureCoefficient, value.temperatureCoefficient());
         sheet.put(ageing, value.ageing());
+        sheet.put(correlation, value.correlation());
         sheet.put(terminals, value.terminals());
         sheet.put(mountingResistance, value.mountingResistance());
         sheet.put(thermalEmf, value.thermalEmf());

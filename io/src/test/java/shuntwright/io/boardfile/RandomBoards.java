@@ -8,23 +8,28 @@ import java.util.OptionalInt;
 import java.util.function.Supplier;
 import java.util.random.RandomGenerator;
 
+import shuntwright.accuracy.Slot;
 import shuntwright.board.Acceptance;
 import shuntwright.board.Adc;
 import shuntwright.board.AlertLine;
 import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.DesignRules;
 import shuntwright.board.Pins;
 import shuntwright.board.ReleaseDemand;
+import shuntwright.board.Sampling;
 import shuntwright.board.SenseSupply;
 import shuntwright.board.Source;
+import shuntwright.board.StatedDistribution;
 import shuntwright.board.Tap;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.board.TimePoint;
 import shuntwright.board.Uncertainty;
 import shuntwright.board.Withstand;
 import shuntwright.board.Zone;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Spread;
 import shuntwright.quantity.Tolerance;
@@ -55,12 +60,51 @@ final class RandomBoards {
                 List.of(new Tap("T1", source(), new Tap.Kind.Divider(maybeNumber(), maybeNumber()), maybeNumber()),
                         new Tap("tap 2", source(), new Tap.Kind.Dac(random.nextInt(4, 21), random.nextDouble(),
                                 positive(), positive()), maybeNumber())),
-                List.of(new Zone("Z", maybeNumber(), OptionalDouble.empty())), maybeNumber(),
+                List.of(new Zone("Z", maybeNumber(), maybeNumber())), maybeNumber(),
                 new Acceptance(pick(Acceptance.Basis.values()), random.nextDouble(0.5, 1)),
                 new DesignRules(random.nextInt(1, 9), random.nextDouble(0.01, 1), positive(),
                         random.nextDouble(0.01, 1), maybe(this::name), positive(), positive(), positive(),
                         random.nextDouble()),
-                Uncertainty.DEFAULT, channels);
+                uncertainty(), channels);
+    }
+
+    private Uncertainty uncertainty() {
+        if (random.nextInt(4) == 0) {
+            return Uncertainty.DEFAULT;
+        }
+        Sampling.Trials trials = random.nextBoolean()
+                ? new Sampling.Trials.Fixed(trials())
+                : new Sampling.Trials.Adaptive(random.nextInt(1, 3), trials());
+        long seed = random.nextBoolean() ? random.nextLong() : random.nextLong(-3, 4);
+        return new Uncertainty(list(this::stated), new Sampling(trials, seed));
+    }
+
+    private int trials() {
+        return random.nextInt(Sampling.LEAST, Sampling.MOST + 1);
+    }
+
+    private StatedDistribution stated() {
+        Slot slot = pick(Slot.values());
+        Optional<String> part = slot.part().flatMap(_ -> maybe(this::name));
+        return new StatedDistribution(slot.words(), part, switch (random.nextInt(6)) {
+            case 0 -> new Distribution.Uniform();
+            case 1 -> new Distribution.Normal(positive());
+            case 2 -> new Distribution.Triangular();
+            case 3 -> new Distribution.ArcSine();
+            case 4 -> new Distribution.Trapezoid(random.nextDouble());
+            default -> new Distribution.StudentT(2 + positive(), positive());
+        });
+    }
+
+    private Calibration calibration() {
+        boolean two = random.nextBoolean();
+        double lower = positive();
+        return new Calibration(two ? Calibration.Points.TWO : Calibration.Points.ONE,
+                two && random.nextBoolean() ? OptionalDouble.of(lower) : OptionalDouble.empty(),
+                random.nextBoolean() ? OptionalDouble.of(lower * random.nextDouble(1.01, 20)) : OptionalDouble.empty(),
+                random.nextDouble(), random.nextBoolean()
+                        ? Calibration.DEFAULT_TEMPERATURE
+                        : Range.of(random.nextDouble(0, 20), random.nextDouble(20, 40)));
     }
 
     private Channel channel(String name) {
@@ -74,7 +118,8 @@ final class RandomBoards {
                                 : OptionalDouble.of(noTrip + (mustTrip - noTrip) / 2),
                         OptionalDouble.of(noTrip / 10), OptionalDouble.of(mustTrip));
         return new Channel(name, text(), maybe(this::spread), pick(Channel.Side.values()), currents, release(),
-                new Channel.ReadingDemand(maybeShare(), maybeShare(), Optional.empty()), threshold(), maybe(() -> "B"),
+                new Channel.ReadingDemand(maybeShare(), maybeShare(), maybe(this::calibration)), threshold(),
+                maybe(() -> "B"),
                 maybe(() -> "Z"),
                 random.nextBoolean() ? 1 : random.nextDouble(),
                 new Channel.Stress(maybeNumber(), maybeNumber(), inrush(), maybe(this::withstand)), pins());

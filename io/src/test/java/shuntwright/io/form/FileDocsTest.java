@@ -25,6 +25,11 @@ class FileDocsTest {
     private static final Path DOCS = Path.of(System.getProperty("shuntwright.root", ".."), "docs");
     private static final Pattern EXAMPLE = Pattern.compile("```json\n(.*?)```", Pattern.DOTALL);
 
+    private static final Pattern INPUTS = Pattern.compile("<!-- inputs -->\n.*?<!-- end -->", Pattern.DOTALL);
+    private static final boolean WRITE = "write".equals(System.getProperty("shuntwright.docs"));
+    private static final String STALE = "the tables in %s are out of date; run this test once with "
+            + "-Dextra.test.jvm=-Dshuntwright.docs=write";
+
     @TempDir
     Path folder;
 
@@ -49,12 +54,25 @@ class FileDocsTest {
             wanted = found.replaceFirst(Matcher.quoteReplacement(found.group(1) + FormTable.markdown(form))
                     + "$2");
         }
-        if ("write".equals(System.getProperty("shuntwright.docs"))) {
+        if (WRITE) {
             Files.writeString(guide, wanted);
         }
-        assertThat(text).as("the tables in %s are out of date; run this test once with "
-                + "-Dextra.test.jvm=-Dshuntwright.docs=write", guide).isEqualTo(wanted);
+        assertThat(text).as(STALE, guide).isEqualTo(wanted);
         assertThat(Pattern.compile("<!-- table ").matcher(text).results().count()).isEqualTo(forms.size());
+    }
+
+    @Test
+    void theBoardFileGuideListsTheInputs() throws IOException {
+        Path guide = DOCS.resolve("board-file.md");
+        String text = Files.readString(guide);
+        Matcher place = INPUTS.matcher(text);
+        assertThat(place.find()).isTrue();
+        String wanted = place.replaceFirst(Matcher.quoteReplacement("<!-- inputs -->\n" + BoardFiles.inputTable()
+                + "<!-- end -->"));
+        if (WRITE) {
+            Files.writeString(guide, wanted);
+        }
+        assertThat(text).as(STALE, guide).isEqualTo(wanted);
     }
 
     @Test

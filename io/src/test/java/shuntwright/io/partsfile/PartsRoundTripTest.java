@@ -53,6 +53,9 @@ class PartsRoundTripTest {
         assertThat(PartsFiles.write(read(written))).isEqualTo(written);
         assertThat(PartsFile.of(parts.currency(), parts.note(), parts.parts())).isEqualTo(parts);
         assertThat(parts.shunts().getFirst().resistance()).isEqualTo(0.004);
+        assertThat(parts.shunts().getFirst().correlation()).isEqualTo(0.25);
+        assertThat(parts.shunts().getLast().correlation()).isZero();
+        assertThat(parts.amplifiers().getFirst().gainAgeing()).isEqualTo(5e-4);
         assertThat(parts.shunts().getFirst().purchase().unitPriceAt(100)).isEqualTo(0.31);
     }
 
@@ -92,12 +95,17 @@ class PartsRoundTripTest {
         }
     }
 
+    /** A share, or none. */
+    private static double maybe(RandomGenerator random) {
+        return random.nextBoolean() ? 0 : random.nextDouble();
+    }
+
     private static Shunt shunt(RandomGenerator random, String number) {
         boolean two = random.nextBoolean();
         double mounting = random.nextDouble(0, 1e-4);
         return new Shunt(number, "", random.nextDouble(1e-4, 1),
                 new Tolerance(random.nextDouble(), random.nextDouble()),
-                random.nextDouble(0, 1e-3), random.nextDouble(), 0, two ? Terminals.TWO : Terminals.FOUR,
+                random.nextDouble(0, 1e-3), random.nextDouble(), maybe(random), two ? Terminals.TWO : Terminals.FOUR,
                 two ? Range.of(mounting, 2 * mounting) : Range.exactly(0), random.nextDouble(0, 1e-5),
                 new ShuntRating(random.nextDouble(0.1, 5), random.nextDouble(20, 100), random.nextDouble(110, 300),
                         random.nextDouble(0, 100), OptionalDouble.of(random.nextDouble(0.01, 10))),
@@ -109,7 +117,8 @@ class PartsRoundTripTest {
         double differential = random.nextDouble(0.01, 1);
         return new SenseAmplifier(number, "", random.nextDouble(1, 500), random.nextDouble(),
                 random.nextDouble(0, 1e-3),
-                0, new InputErrors(random.nextDouble(0, 1e-3), random.nextDouble(0, 1e-5), random.nextDouble(40, 140),
+                maybe(random),
+                new InputErrors(random.nextDouble(0, 1e-3), random.nextDouble(0, 1e-5), random.nextDouble(40, 140),
                         random.nextDouble(-1, 50), random.nextDouble(40, 140), random.nextDouble(1, 6),
                         random.nextDouble(0, 1e-4)),
                 new AmplifierRanges(Range.of(random.nextDouble(-16, 0), random.nextDouble(1, 80)), differential,

@@ -3,6 +3,7 @@ package shuntwright.planner.entry;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.function.Function;
@@ -23,28 +24,68 @@ final class BoardLists {
     }
 
     static String zones(Board board) {
-        return board.zones().stream()
-                .map(zone -> zone.heatLimit().isPresent()
-                        ? zone.name() + " " + QuantityWriter.write(zone.heatLimit().getAsDouble(), Dimension.POWER)
-                        : zone.name())
-                .collect(Collectors.joining(", "));
+        return board.zones().stream().map(BoardLists::shown).collect(Collectors.joining(", "));
+    }
+
+    private static String shown(Zone zone) {
+        StringBuilder text = new StringBuilder(zone.name());
+        zone.heatLimit().ifPresent(limit -> text.append(' ').append(QuantityWriter.write(limit, Dimension.POWER)));
+        zone.thermalResistance().ifPresent(resistance -> text.append(' ')
+                .append(QuantityWriter.write(resistance, Dimension.THERMAL_RESISTANCE)));
+        return text.toString();
     }
 
     static Reading<Board> withZones(String text, Board board) {
-        return list(text, "zone", BoardLists::zone, Zone::name)
+        return list(text, "zone", piece -> zone(piece, board), Zone::name)
                 .then(zones -> Reading.value(board.withZones(zones)));
     }
 
-    /** A name, or a name and behind it a power: the longest tail that reads as a power is the limit. */
-    private static Reading<Zone> zone(String text) {
-        for (int at = text.indexOf(' '); at > 0; at = text.indexOf(' ', at + 1)) {
-            var limit = QuantityReader.number(text.substring(at), Dimension.POWER).ifValue();
-            if (limit.isPresent() && limit.get() > 0) {
-                return Reading.value(new Zone(text.substring(0, at).strip(), OptionalDouble.of(limit.get()),
-                        OptionalDouble.empty()));
+    /** A zone as it is shown, or a name and behind it a power and a thermal resistance, each if there is one. */
+    private static Reading<Zone> zone(String text, Board board) {
+        for (Zone there : board.zones()) {
+            if (text.equals(shown(there))) {
+                return Reading.value(there);
             }
         }
-        return Reading.value(new Zone(text, OptionalDouble.empty(), OptionalDouble.empty()));
+        OptionalDouble limit = OptionalDouble.empty();
+        OptionalDouble resistance = OptionalDouble.empty();
+        String rest = text;
+        while (true) {
+            boolean perWatt = rest.endsWith("/W");
+            Optional<Tail> tail = perWatt ? tail(rest, Dimension.THERMAL_RESISTANCE) : tail(rest, Dimension.POWER);
+            if (tail.isEmpty()) {
+                return Reading.value(new Zone(rest, limit, resistance));
+            }
+            if ((perWatt ? resistance : limit).isPresent()) {
+                return Reading.misread("\"" + text + "\" has two " + (perWatt ? "thermal resistances" : "heat limits")
+                        + "; leave one.");
+            }
+            if (perWatt) {
+                resistance = OptionalDouble.of(tail.get().value());
+            } else {
+                limit = OptionalDouble.of(tail.get().value());
+            }
+            rest = tail.get().before();
+        }
+    }
+
+    /**
+     * A quantity at the end of a text.
+     *
+     * @param before the text without it
+     * @param value  in the SI unit, above 0
+     */
+    private record Tail(String before, double value) {}
+
+    /** The longest tail that reads as such a quantity. */
+    private static Optional<Tail> tail(String text, Dimension dimension) {
+        for (int at = text.indexOf(' '); at > 0; at = text.indexOf(' ', at + 1)) {
+            Optional<Double> value = QuantityReader.number(text.substring(at), dimension).ifValue();
+            if (value.isPresent() && value.get() > 0) {
+                return Optional.of(new Tail(text.substring(0, at).strip(), value.get()));
+            }
+        }
+        return Optional.empty();
     }
 
     static String references(Board board) {

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -12,8 +13,10 @@ import org.junit.jupiter.params.provider.EnumSource;
 
 import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.quantity.Range;
 
 class ChannelFieldTest {
     private final Board board = HandMadeBoards.boat().withReferences(List.of(new BoardReference("quiet", "REF-1")));
@@ -57,5 +60,16 @@ class ChannelFieldTest {
         assertThat(pinned.withPins(channel.pins())).isEqualTo(channel);
         Channel loaded = read(ChannelField.LOAD, "13").orElseThrow();
         assertThat(loaded.withCurrents(channel.currents())).isEqualTo(channel);
+    }
+
+    @ParameterizedTest
+    @EnumSource(ChannelField.class)
+    void keepsTheCalibration(ChannelField field) {
+        Calibration calibration = new Calibration(Calibration.Points.TWO, OptionalDouble.of(1), OptionalDouble.empty(),
+                1e-3, Range.of(18, 28));
+        Channel calibrated = channel.withReading(new Channel.ReadingDemand(OptionalDouble.of(0.1),
+                OptionalDouble.of(0.02), Optional.of(calibration)));
+
+        assertThat(field.read(field.text(calibrated), calibrated, board).ifValue()).contains(calibrated);
     }
 }
