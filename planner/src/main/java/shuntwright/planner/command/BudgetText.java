@@ -30,6 +30,9 @@ final class BudgetText {
     private static final int DIGITS = 3;
     private static final int NOT_PAINTED = -1;
     private static final String NONE = "-";
+    /** Shares and errors that the last digit shown would make 0. */
+    private static final double LEAST = 0.0005;
+    private static final String LITTLE = "< 0.1 %";
 
     private final List<String> lines = new ArrayList<>();
 
@@ -96,7 +99,7 @@ final class BudgetText {
         }
         Validation validation = propagated.validation();
         readers.add(List.of("  JCGM 101, clause 8", validation.valid() ? "valid" : "not valid",
-                "the ends of the first two intervals differ by " + brief(validation.lowDifference()) + " and "
+                "ends differ by " + brief(validation.lowDifference()) + " and "
                         + brief(validation.highDifference()) + ", tolerance " + brief(validation.tolerance())));
     }
 
@@ -128,11 +131,14 @@ final class BudgetText {
     }
 
     private static String withError(double share, double error) {
-        return String.format(Locale.ROOT, "%.1f ±%.1f %%", 100 * share, 100 * error);
+        String value = percent(share);
+        return error < LEAST || value.equals(LITTLE)
+                ? value
+                : String.format(Locale.ROOT, "%.1f ±%.1f %%", 100 * share, 100 * error);
     }
 
     private static String percent(double share) {
-        return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+        return Math.abs(share) < LEAST ? LITTLE : String.format(Locale.ROOT, "%.1f %%", 100 * share);
     }
 
     private static String signed(double value) {
