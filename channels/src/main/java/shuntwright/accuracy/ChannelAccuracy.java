@@ -16,6 +16,9 @@ import shuntwright.quantity.Range;
 /** Judges one circuit against one demand: the readers of one {@link InputDescription}. */
 public final class ChannelAccuracy {
 
+    /** Stands for a current that does not exist, A. */
+    public static final double RUNAWAY = 1e9;
+
     private final ChannelEquations equations;
     private final InputDescription description;
     private final Demand demand;
@@ -115,7 +118,7 @@ public final class ChannelAccuracy {
 
     /** Thermal runaway is reported as a current beyond any board, so that it stays a number. */
     private static double finite(double current) {
-        return Math.min(current, 1e9);
+        return Math.min(current, RUNAWAY);
     }
 
     /** The exact limits of one outcome, A. */

@@ -9,6 +9,7 @@ import java.util.Optional;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Channel;
 import shuntwright.circuit.HysteresisNetwork;
@@ -50,6 +51,7 @@ final class Findings {
             }
         }
         findings.addAll(outside(solved, verdict));
+        runaway(solved, findings);
         release(solved, findings);
         if (coupled && solved.circuit().network() instanceof HysteresisNetwork.Feedback) {
             findings.add(channel(Finding.Key.FEEDBACK_COUPLES, channel,
@@ -122,6 +124,17 @@ final class Findings {
                         + show(tightest.margin(), Dimension.RATIO, 2) + " of the allowed half-width. "
                         + largest(tightest),
                 new Measure("margin", tightest.margin(), Dimension.RATIO));
+    }
+
+    private static void runaway(SolvedChannel solved, List<Finding> findings) {
+        boolean runs = solved.assessments().stream()
+                .anyMatch(each -> each.limits().max() >= ChannelAccuracy.RUNAWAY);
+        if (runs) {
+            findings.add(channel(Finding.Key.THERMAL_RUNAWAY, solved.demand().channel(),
+                    "By limits a shunt runs away thermally before an outcome is reached: its resistance rises faster with "
+                            + "its own heat than it can carry the heat away. A shunt of lower thermal resistance, less "
+                            + "resistance or smaller temperature coefficient would cure it."));
+        }
     }
 
     private static void release(SolvedChannel solved, List<Finding> findings) {
