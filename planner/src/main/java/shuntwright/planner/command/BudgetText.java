@@ -13,6 +13,7 @@ import shuntwright.io.planfile.Cautions;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Plan;
 import shuntwright.plan.SolvedChannel;
+import shuntwright.planner.work.TrialWords;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 import shuntwright.sampling.CoverageInterval;
@@ -91,10 +92,10 @@ final class BudgetText {
         readers.add(interval("  sampled, symmetric", sampled.symmetric()));
         readers.add(interval("  sampled, shortest", sampled.shortest()));
         readers.add(List.of("  mean", ampere(sampled.mean()), "standard deviation " + brief(sampled.standard()) + ", "
-                + StudyText.count(sampled.trials()) + " trials"));
+                + TrialWords.count(sampled.trials()) + " trials"));
         readers.add(List.of("  outside", ProbabilityWords.of(sampled.outside()), sampled.outside().method().word()));
         if (sampled.runaways() > 0) {
-            readers.add(List.of("  thermal runaway", "in " + StudyText.count(sampled.runaways()),
+            readers.add(List.of("  thermal runaway", "in " + TrialWords.count(sampled.runaways()),
                     "trials, counted as outside"));
         }
         Validation validation = propagated.validation();

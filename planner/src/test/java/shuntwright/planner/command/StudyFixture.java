@@ -100,7 +100,8 @@ final class StudyFixture {
         Assessment budgeted = new Assessment(trip.outcome(), trip.nominal(), trip.limits(), trip.combined(),
                 trip.allowed(), List.of(new BudgetLine(SUPPLY, 1, -0.2, 0.21, 0.08, 0.7),
                         new BudgetLine(TOLERANCE, 1, -0.1, 0.11, 0.05, 0.28),
-                        new BudgetLine(OFFSET, 1, -0.02, 0.02, 1e-3, 4e-4), new BudgetLine(EMF, 1, -0.01, 0.01, 0.002, 0.02)),
+                        new BudgetLine(OFFSET, 1, -0.02, 0.02, 1e-3, 4e-4),
+                        new BudgetLine(EMF, 1, -0.01, 0.01, 0.002, 0.02)),
                 trip.propagated());
         SolvedChannel solved = new SolvedChannel(old.demand(), old.circuit(), old.around(), old.settings(),
                 old.inputs(), List.of(budgeted), List.of(), old.limits(), old.heat(), old.cost());
