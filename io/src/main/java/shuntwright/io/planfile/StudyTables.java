@@ -85,8 +85,9 @@ final class StudyTables {
             .flag("inside", "whether the symmetric coverage interval is within that", Propagated::inside)
             .object("sampled", SAMPLED, "what the trials say", Propagated::sampled)
             .object("validation", VALIDATION, "of the combined uncertainty", Propagated::validation)
-            .list("effects", EFFECT, "by input, largest total first, inputs without any effect left out; empty where they were not "
-                    + "worked out",
+            .list("effects", EFFECT,
+                    "by input, largest total first, inputs without any effect left out; empty where they were not "
+                            + "worked out",
                     Propagated::effects)
             .form();
 

@@ -162,8 +162,9 @@ final class BudgetInputsSheet {
             return new Column.Content.Marked("not worked out", Style.TEXT);
         }
         // Inputs without any effect are not listed among the effects.
-        return line.together()
-                .<Column.Content>map(each -> new Column.Content.Marked("with " + each.owner().name(), Style.TEXT))
+        return line
+                .together().<Column.Content>map(
+                        each -> new Column.Content.Marked("with " + each.owner().name(), Style.TEXT))
                 .orElseGet(() -> Column.finite(100 * line.effect().map(get::applyAsDouble).orElse(0.0)));
     }
 
