@@ -170,8 +170,10 @@ class DistributionsTest {
             double p = law.cumulativeProbability(-z);
             double root = Math.sqrt(4 * p * (1 - p));
             double exact = 2 * Math.sqrt(Math.cos(Math.acos(root) / 3) / root - 1);
-            assertThat(StudentTable.of(4).quantile(z)).as("z = %s", z).isCloseTo(exact, within(1e-8 * Math.max(0.1, exact)));
-            assertThat(StudentTable.of(4).quantile(-z)).as("z = %s", -z).isCloseTo(-exact, within(1e-8 * Math.max(0.1, exact)));
+            assertThat(StudentTable.of(4).quantile(z)).as("z = %s", z).isCloseTo(exact,
+                    within(1e-8 * Math.max(0.1, exact)));
+            assertThat(StudentTable.of(4).quantile(-z)).as("z = %s", -z).isCloseTo(-exact,
+                    within(1e-8 * Math.max(0.1, exact)));
         }
     }
 
