@@ -57,7 +57,7 @@ final class BudgetInputsSheet {
             Column.wrapped("Input", 30, row -> switch (row) {
                 case Sum _ -> ALL;
                 case Line line -> line.input().slot().words();
-            }), words("Owner", 18, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
+            }), words("Owner", 22, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
             figure("From", Style.GENERAL, each -> each.limits().min()),
             figure("To", Style.GENERAL, each -> each.limits().max()),
             figure("Standard uncertainty", Style.EXPONENT, Input::standardUncertainty),
@@ -183,7 +183,7 @@ final class BudgetInputsSheet {
     }
 
     private static Column<InputRow> figure(String header, Style style, ToDoubleFunction<Input> get) {
-        return new Column<>(INPUT, header, 10, style, (row, _) -> row instanceof Line line
+        return new Column<>(INPUT, header, 12, style, (row, _) -> row instanceof Line line
                 ? Column.finite(get.applyAsDouble(line.input()))
                 : new Column.Content.Empty());
     }
