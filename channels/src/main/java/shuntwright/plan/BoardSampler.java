@@ -30,8 +30,8 @@ import shuntwright.sampling.YieldSampler;
  */
 public final class BoardSampler {
 
-    /** Kept results; beyond this many all are forgotten. */
-    private static final int MOST_KEPT = 2_000;
+    /** Kept results for each channel of the board; beyond this many all are forgotten. */
+    private static final int MOST_KEPT = 6;
 
     private final int threads;
     private final Map<Key, ChannelSampler.Result> kept = new HashMap<>();
@@ -62,10 +62,7 @@ public final class BoardSampler {
      * @throws BoardPlanner.Cancelled when progress says so
      */
     public Plan sample(Plan plan, Sampling sampling, Depth depth, Progress progress) {
-        if (kept.size() > MOST_KEPT) {
-            kept.clear();
-            withEffects.clear();
-        }
+        forgetOld(plan.channels().size());
         double coverage = plan.board().acceptance().coverage();
         List<SolvedChannel> solved = plan.channels().stream().flatMap(each -> each.solved().stream()).toList();
         Counter counter = new Counter(progress, sampling, solved.size());
@@ -96,6 +93,14 @@ public final class BoardSampler {
                     results.stream().map(ChannelSampler.Result::study).toList(), together));
         } catch (MonteCarlo.Cancelled e) {
             throw new BoardPlanner.Cancelled(e);
+        }
+    }
+
+    private void forgetOld(int channels) {
+        int most = MOST_KEPT * Math.max(10, channels);
+        if (kept.size() > most || withEffects.size() > most) {
+            kept.clear();
+            withEffects.clear();
         }
     }
 

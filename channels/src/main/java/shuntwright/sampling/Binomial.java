@@ -7,6 +7,9 @@ import shuntwright.quantity.Range;
 /** Exact confidence intervals of a counted probability (C. J. Clopper, E. S. Pearson, Biometrika 26, 1934). */
 final class Binomial {
 
+    /** Of the limits; far below one in the most trials there can be. */
+    private static final double ACCURACY = 1e-15;
+
     private Binomial() {
     }
 
@@ -21,6 +24,6 @@ final class Binomial {
     }
 
     private static double quantile(double a, double b, double p) {
-        return new BetaDistribution(a, b).inverseCumulativeProbability(p);
+        return new BetaDistribution(a, b, ACCURACY).inverseCumulativeProbability(p);
     }
 }

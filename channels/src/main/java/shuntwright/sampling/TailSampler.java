@@ -78,8 +78,10 @@ final class TailSampler {
         if (!(p > 0)) {
             return Optional.empty();
         }
-        double least = Math.max(p / 1e3, p - Z * error);
-        double most = Math.min(1, p + Z * error);
+        // On a logarithmic scale, so that it never reaches 0.
+        double factor = Math.exp(Z * error / p);
+        double least = p / factor;
+        double most = Math.min(1, p * factor);
         return Optional.of(new Probability(p, Range.of(least, most),
                 error, Probability.Method.WEIGHTED, n));
     }
@@ -173,19 +175,17 @@ final class TailSampler {
         return ways;
     }
 
-    /** The middle, and each input with a wide effect on others at both its ends: where products have their ways out. */
+    /** No tilt, and each input with a wide effect on others tilted to both its sides: where products have their ways out. */
     private List<double[]> starts() {
         List<double[]> starts = new ArrayList<>();
-        double[] mid = new double[tilts.length];
-        for (int i = 0; i < mid.length; i++) {
-            mid[i] = tilts[i].mid();
-        }
-        starts.add(mid);
+        starts.add(new double[tilts.length]);
         for (int i : model.multiplying()) {
             for (int side = -1; side <= 1; side += 2) {
-                double[] start = mid.clone();
-                start[i] += side * 0.8 * tilts[i].half();
-                starts.add(start);
+                double[] start = new double[tilts.length];
+                start[i] = tilts[i].towards(side);
+                if (start[i] != 0) {
+                    starts.add(start);
+                }
             }
         }
         return starts;
@@ -201,24 +201,34 @@ final class TailSampler {
         return difference <= 0.05 * size;
     }
 
-    /** Follows the gradient: tilt along it until the output at the tilted means meets the bound, then look at it again there. */
+    /**
+     * Follows the gradient: tilt along it until the output at the tilted means meets the bound, then look at it again there. What
+     * the start tilts stays so the first time, as what it multiplies has no effect before, and it has none before that is tilted;
+     * the bound may then be out of reach yet.
+     */
     private Optional<double[]> way(int output, double bound, boolean upper, double[] start) {
-        double[] at = start;
-        double[] tilt = new double[tilts.length];
+        double[] fixed = start;
+        double[] tilt = start.clone();
         for (int round = 0; round < ROUNDS; round++) {
-            double[] gradient = gradient(output, at);
-            double strength = strength(output, bound, upper, gradient);
+            double[] gradient = gradient(output, means(tilt));
+            double strength = strength(output, bound, upper, gradient, fixed, round == 0);
             if (!(strength > 0)) {
                 return Optional.empty();
             }
-            double[] means = new double[tilts.length];
             for (int i = 0; i < tilts.length; i++) {
-                tilt[i] = tilts[i].bounded((upper ? strength : -strength) * gradient[i]);
-                means[i] = tilts[i].mean(tilt[i]);
+                tilt[i] = tilts[i].bounded(fixed[i] + (upper ? strength : -strength) * gradient[i]);
             }
-            at = means;
+            fixed = new double[tilts.length];
         }
         return Optional.of(tilt);
+    }
+
+    private double[] means(double[] tilt) {
+        double[] means = new double[tilts.length];
+        for (int i = 0; i < means.length; i++) {
+            means[i] = tilts[i].mean(tilt[i]);
+        }
+        return means;
     }
 
     /** By central differences, all inputs in one evaluation or several. */
@@ -250,8 +260,12 @@ final class TailSampler {
         }
     }
 
-    /** Factor of the gradient at which the tilted means bring the output to the bound; 0 when none does. */
-    private double strength(int output, double bound, boolean upper, double[] gradient) {
+    /**
+     * Factor of the gradient at which the tilted means bring the output to the bound; where none does a large one if that is
+     * good enough to begin with, else 0.
+     */
+    private double strength(int output, double bound, boolean upper, double[] gradient, double[] fixed,
+            boolean mayMiss) {
         double spread = 0;
         for (int i = 0; i < gradient.length; i++) {
             spread += square(gradient[i] * tilts[i].standard());
@@ -263,16 +277,16 @@ final class TailSampler {
         double low = 0;
         double high = unit;
         int doublings = 0;
-        while (!reaches(output, bound, upper, gradient, high)) {
+        while (!reaches(output, bound, upper, gradient, fixed, high)) {
             low = high;
             high *= 2;
             if (++doublings > 12) {
-                return 0;
+                return mayMiss ? high : 0;
             }
         }
         for (int i = 0; i < 30; i++) {
             double middle = (low + high) / 2;
-            if (reaches(output, bound, upper, gradient, middle)) {
+            if (reaches(output, bound, upper, gradient, fixed, middle)) {
                 high = middle;
             } else {
                 low = middle;
@@ -281,9 +295,10 @@ final class TailSampler {
         return high;
     }
 
-    private boolean reaches(int output, double bound, boolean upper, double[] gradient, double strength) {
+    private boolean reaches(int output, double bound, boolean upper, double[] gradient, double[] fixed,
+            double strength) {
         for (int i = 0; i < tilts.length; i++) {
-            x[i][0] = tilts[i].mean(tilts[i].bounded((upper ? strength : -strength) * gradient[i]));
+            x[i][0] = tilts[i].mean(tilts[i].bounded(fixed[i] + (upper ? strength : -strength) * gradient[i]));
         }
         model.evaluate(x, 1, y, scratch);
         double value = y[output][0];

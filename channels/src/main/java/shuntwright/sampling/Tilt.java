@@ -17,6 +17,9 @@ record Tilt(double mid, double half, double first, double second, double deviati
     /** Beyond this a uniform part sits at its end, and a normal one is further out than anyone asks. */
     private static final double MOST = 200;
     private static final double MOST_DEVIATIONS = 12;
+    /** A uniform part has its mean at four fifths, a normal one at two standard deviations. */
+    private static final double FAR = 5;
+    private static final double FAR_DEVIATIONS = 2;
     private static final double SMALL = 1e-4;
 
     static Tilt of(Variable variable) {
@@ -57,6 +60,14 @@ record Tilt(double mid, double half, double first, double second, double deviati
         }
         double most = deviation > 0 ? MOST_DEVIATIONS / deviation : MOST / first;
         return Math.max(-most, Math.min(most, t));
+    }
+
+    /** The tilt that brings the mean far to one side, +1 or -1; 0 where it cannot be tilted. */
+    double towards(int side) {
+        if (fixed()) {
+            return 0;
+        }
+        return side * (deviation > 0 ? FAR_DEVIATIONS / deviation : FAR / first);
     }
 
     double mean(double t) {

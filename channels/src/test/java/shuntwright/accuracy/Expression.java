@@ -9,7 +9,7 @@ import org.hipparchus.analysis.differentiation.Gradient;
  *
  * @param formula of the inputs in order
  */
-record Expression(Function<Gradient[], Gradient> formula) implements Equation {
+public record Expression(Function<Gradient[], Gradient> formula) implements Equation {
 
     @Override
     public double value(double[] x) {

@@ -8,13 +8,13 @@ import java.util.List;
 import java.util.Objects;
 
 /** Reads the published tables that are one data set, not one check a row. */
-final class Table {
+public final class Table {
 
     private Table() {
     }
 
     /** Rows without comments and header. */
-    static List<String[]> rows(String resource) {
+    public static List<String[]> rows(String resource) {
         try (InputStream in = Objects.requireNonNull(Table.class.getResourceAsStream(resource), resource)) {
             return new String(in.readAllBytes(), StandardCharsets.UTF_8).lines()
                     .filter(line -> !line.startsWith("#")).skip(1).map(line -> line.split(";", -1)).toList();

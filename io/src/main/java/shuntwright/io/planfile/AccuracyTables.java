@@ -1,6 +1,5 @@
 package shuntwright.io.planfile;
 
-import java.util.List;
 import java.util.OptionalDouble;
 
 import shuntwright.accuracy.Assessment;
@@ -8,36 +7,15 @@ import shuntwright.accuracy.BudgetLine;
 import shuntwright.accuracy.CombinedUncertainty;
 import shuntwright.accuracy.Input;
 import shuntwright.accuracy.Owner;
-import shuntwright.quantity.Distribution;
+import shuntwright.accuracy.Reel;
 
 /** Described inputs and what they do to the outcomes. */
 final class AccuracyTables {
 
-    private static final ObjectTable<Distribution.Uniform> UNIFORM = ObjectTable.variant("uniform", "uniform",
-            "Equal probability between the limits.");
-    private static final ObjectTable<Distribution.Normal> NORMAL = ObjectTable.<Distribution.Normal>variant("normal",
-            "normal", "Normal, limits at k standard deviations.")
-            .number("k", Unit.PURE, "standard deviations from the mean to a limit", Distribution.Normal::k);
-    private static final ObjectTable<Distribution.Triangular> TRIANGULAR = ObjectTable.variant("triangular",
-            "triangular", "Triangular between the limits.");
-    private static final ObjectTable<Distribution.ArcSine> ARCSINE = ObjectTable.variant("arcsine", "arcsine",
-            "U-shaped between the limits.");
-    private static final ObjectTable<Distribution.Trapezoid> TRAPEZOID = ObjectTable.<Distribution.Trapezoid>variant(
-            "trapezoid", "trapezoid", "Trapezoidal between the limits.")
-            .number("ratio", Unit.PURE, "width of the top over width of the base", Distribution.Trapezoid::ratio);
-    private static final ObjectTable<Distribution.StudentT> STUDENT = ObjectTable.<Distribution.StudentT>variant("t",
-            "t", "Scaled and shifted t, limits at k scale units.")
-            .number("degreesOfFreedom", Unit.PURE, "of the scale", Distribution.StudentT::degreesOfFreedom)
-            .number("k", Unit.PURE, "scale units from the mean to a limit", Distribution.StudentT::k);
-    private static final Form<Distribution> DISTRIBUTION = new Form.Either<>(
-            List.of(UNIFORM, NORMAL, TRIANGULAR, ARCSINE, TRAPEZOID, STUDENT), distribution -> switch (distribution) {
-                case Distribution.Uniform uniform -> new Form.Chosen<>(UNIFORM, uniform);
-                case Distribution.Normal normal -> new Form.Chosen<>(NORMAL, normal);
-                case Distribution.Triangular triangular -> new Form.Chosen<>(TRIANGULAR, triangular);
-                case Distribution.ArcSine arcSine -> new Form.Chosen<>(ARCSINE, arcSine);
-                case Distribution.Trapezoid trapezoid -> new Form.Chosen<>(TRAPEZOID, trapezoid);
-                case Distribution.StudentT student -> new Form.Chosen<>(STUDENT, student);
-            });
+    private static final Form<Reel> REEL = ObjectTable.<Reel>named("reel",
+            "Pieces of one reel deviate alike: the same quantity of two of them is correlated.")
+            .text("name", "which reel, the same for every channel that takes pieces of it", Reel::name)
+            .number("correlation", Unit.FRACTION, "coefficient between two pieces", Reel::correlation).form();
 
     static final Form<Input> INPUT = ObjectTable.<Input>named("input", "One uncertain input of a channel.")
             .text("slot", "where it enters the equations", each -> each.slot().name())
@@ -52,8 +30,9 @@ final class AccuracyTables {
             .numberIn(AccuracyTables::unit, "nominal", "nominal value", Input::nominal)
             .numberIn(AccuracyTables::unit, "low", "lower limit", each -> each.limits().min())
             .numberIn(AccuracyTables::unit, "high", "upper limit", each -> each.limits().max())
-            .object("distribution", DISTRIBUTION, "assigned to the limits", Input::distribution)
+            .object("distribution", DistributionTables.DISTRIBUTION, "assigned to the limits", Input::distribution)
             .numberIn(AccuracyTables::unit, "standardUncertainty", "of that distribution", Input::standardUncertainty)
+            .maybeObject("reel", REEL, "whose pieces deviate alike; absent for an independent input", Input::reel)
             .form();
 
     private static final Form<CombinedUncertainty> COMBINED = ObjectTable.<CombinedUncertainty>named(
@@ -79,7 +58,10 @@ final class AccuracyTables {
             .number("towardsLow", Unit.AMPERE, "how it moves the lower limit", BudgetLine::towardsLow)
             .number("towardsHigh", Unit.AMPERE, "how it moves the upper limit", BudgetLine::towardsHigh)
             .number("standard", Unit.AMPERE, "its part of u_c", BudgetLine::standard)
-            .number("varianceShare", Unit.FRACTION, "its share of u_c²", BudgetLine::varianceShare).form();
+            .number("varianceShare", Unit.FRACTION,
+                    "its share of u_c²; together less or more than 1 where inputs are correlated",
+                    BudgetLine::varianceShare)
+            .form();
 
     /** One outcome with its error budget. */
     static final Form<Assessment> ASSESSMENT = ObjectTable
@@ -91,12 +73,16 @@ final class AccuracyTables {
             .range("limits", Unit.AMPERE, "exact extremes over all inputs", Assessment::limits)
             .range("allowed", Unit.AMPERE, "what the demand allows", Assessment::allowed)
             .object("combined", COMBINED, "combined uncertainty", Assessment::combined)
+            .maybeRange("propagated", Unit.AMPERE, "probabilistically symmetric coverage interval of the propagated "
+                    + "distribution; absent until sampled", Assessment::propagated)
+            .range("coverage", Unit.AMPERE, "the coverage interval: `propagated_A` where it is there, else that of "
+                    + "`combined`", Assessment::coverage)
             .flag("insideByLimits", "limits within what is allowed", Assessment::insideByLimits)
-            .flag("insideByCoverage", "coverage interval within what is allowed",
+            .flag("insideByCoverage", "limits or `propagated_A` within what is allowed",
                     Assessment::insideByCoverage)
             .number("margin", Unit.FRACTION, "slack of the limits, of the allowed half-width",
                     Assessment::margin)
-            .number("coverageMargin", Unit.FRACTION, "slack of the coverage interval, of the allowed half-width",
+            .number("coverageMargin", Unit.FRACTION, "slack of `coverage_A`, of the allowed half-width",
                     Assessment::coverageMargin)
             .list("budget", LINE, "contributions, largest first", Assessment::budget).form();
 

@@ -75,7 +75,11 @@ final class BoardTables {
 
     private static final Form<Zone> ZONE = ObjectTable.<Zone>named("zone", "An area of the board.")
             .text("name", "what channels call it", Zone::name)
-            .maybeNumber("heatLimit", Unit.WATT, "largest heat of its shunts together", Zone::heatLimit).form();
+            .maybeNumber("heatLimit", Unit.WATT, "largest heat of its shunts together", Zone::heatLimit)
+            .maybeNumber("thermalResistance", Unit.KELVIN_PER_WATT, "from the zone's board to the air: its own heat "
+                    + "warms every part of its channels by this; absent where they stay at ambient temperature",
+                    Zone::thermalResistance)
+            .form();
 
     private static final Form<Acceptance> ACCEPTANCE = ObjectTable.<Acceptance>named("acceptance",
             "When a channel counts as accepted.")
@@ -118,7 +122,9 @@ final class BoardTables {
             .list("taps", TAP, "shared thresholds", Board::taps).list("zones", ZONE, "areas of the board", Board::zones)
             .maybeNumber("heatLimit", Unit.WATT, "largest heat of all shunts together", Board::heatLimit)
             .object("acceptance", ACCEPTANCE, "when a channel is accepted", Board::acceptance)
-            .object("rules", RULES, "design rules", Board::rules).form();
+            .object("rules", RULES, "design rules", Board::rules)
+            .object("uncertainty", UncertaintyTables.UNCERTAINTY, "distributions and trials", Board::uncertainty)
+            .form();
 
     private BoardTables() {
     }

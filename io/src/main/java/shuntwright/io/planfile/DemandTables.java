@@ -39,7 +39,10 @@ final class DemandTables {
     private static final Form<Channel.ReadingDemand> READING = ObjectTable.<Channel.ReadingDemand>named("reading asked",
             "Largest reading errors allowed, of the current; absent where nothing is asked.")
             .maybeNumber("atLeast", Unit.FRACTION, "at the least current", Channel.ReadingDemand::atLeast)
-            .maybeNumber("atLoad", Unit.FRACTION, "at the load current", Channel.ReadingDemand::atLoad).form();
+            .maybeNumber("atLoad", Unit.FRACTION, "at the load current", Channel.ReadingDemand::atLoad)
+            .maybeObject("calibration", UncertaintyTables.CALIBRATION, "at production; absent where none is",
+                    Channel.ReadingDemand::calibration)
+            .form();
 
     private static final ObjectTable<ThresholdDemand.Free> FREE = ObjectTable.variant("threshold free", "free",
             "An own divider from the supply or any reference, whichever serves best.");

@@ -8,7 +8,7 @@ import java.util.OptionalInt;
 import java.util.function.Function;
 import java.util.function.Predicate;
 import java.util.function.ToDoubleFunction;
-import java.util.function.ToIntFunction;
+import java.util.function.ToLongFunction;
 
 import tools.jackson.core.JsonGenerator;
 
@@ -22,6 +22,7 @@ import shuntwright.quantity.Range;
 final class ObjectTable<T> {
 
     private static final String NUMBER = "number";
+    private static final String WHOLE = "whole number";
     private static final String ENDS = "[low, high]";
 
     private final String name;
@@ -89,13 +90,21 @@ final class ObjectTable<T> {
                 (out, object) -> out.writeBooleanProperty(key, get.test(object)));
     }
 
-    ObjectTable<T> count(String key, String words, ToIntFunction<T> get) {
-        return add(key, "whole number", "", true, words,
-                (out, object) -> out.writeNumberProperty(key, get.applyAsInt(object)));
+    ObjectTable<T> count(String key, String words, ToLongFunction<T> get) {
+        return add(key, WHOLE, "", true, words,
+                (out, object) -> out.writeNumberProperty(key, get.applyAsLong(object)));
+    }
+
+    ObjectTable<T> counts(String key, String words, Function<T, List<Long>> get) {
+        return add(key, "list of whole numbers", "", true, words, (out, object) -> {
+            out.writeArrayPropertyStart(key);
+            get.apply(object).forEach(out::writeNumber);
+            out.writeEndArray();
+        });
     }
 
     ObjectTable<T> maybeCount(String key, String words, Function<T, OptionalInt> get) {
-        return add(key, "whole number", "", false, words,
+        return add(key, WHOLE, "", false, words,
                 (out, object) -> get.apply(object).ifPresent(value -> out.writeNumberProperty(key, value)));
     }
 

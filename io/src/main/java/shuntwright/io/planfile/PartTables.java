@@ -52,6 +52,7 @@ final class PartTables {
             .number("temperatureCoefficient", Unit.PER_KELVIN, MAGNITUDE + ", referred to 25 °C",
                     Shunt::temperatureCoefficient)
             .number("ageing", Unit.FRACTION, "largest relative change over life", Shunt::ageing)
+            .number("correlation", Unit.FRACTION, "between pieces of one reel", Shunt::correlation)
             .count("terminals", "two or four", each -> switch (each.terminals()) {
                 case TWO -> 2;
                 case FOUR -> 4;
@@ -89,6 +90,8 @@ final class PartTables {
             .number("gain", Unit.VOLT_PER_VOLT, "G", SenseAmplifier::gain)
             .number("gainError", Unit.FRACTION, MAGNITUDE + " at 25 °C", SenseAmplifier::gainError)
             .number("gainDrift", Unit.PER_KELVIN, MAGNITUDE + ", referred to 25 °C", SenseAmplifier::gainDrift)
+            .number("gainAgeing", Unit.FRACTION, "largest relative change of the gain over life",
+                    SenseAmplifier::gainAgeing)
             .object("input", INPUT_ERRORS, "errors at the input", SenseAmplifier::input)
             .object("ranges", RANGES, "where it works", SenseAmplifier::ranges)
             .number("bandwidth", Unit.HERTZ, "-3 dB at this gain", SenseAmplifier::bandwidth)

@@ -19,7 +19,7 @@ import shuntwright.plan.Plan;
 public final class PlanFile {
 
     /** Name and version of the format, the first attribute of every file. */
-    public static final String FORMAT = "shuntwright plan 1";
+    public static final String FORMAT = "shuntwright plan 2";
 
     private static final JsonMapper MAPPER = JsonMapper.builder().build();
 

@@ -3,6 +3,7 @@ package shuntwright.io.planfile;
 import java.util.OptionalDouble;
 
 import shuntwright.accuracy.Outcome;
+import shuntwright.circuit.Surroundings;
 import shuntwright.plan.AlertPlan;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Cure;
@@ -30,10 +31,21 @@ final class PlanTables {
             .number("outputAtLoad", Unit.VOLT, "amplifier output at the load current", Settings::outputAtLoad)
             .number("outputAtFull", Unit.VOLT, "amplifier output at full scale", Settings::outputAtFull).form();
 
+    private static final Form<Surroundings.ZoneRise> ZONE_RISE = ObjectTable.<Surroundings.ZoneRise>named("zone rise",
+            "Warming of a channel's parts by the heat of its zone.")
+            .text("zone", "its name; all its channels share one draw", Surroundings.ZoneRise::zone)
+            .number("most", Unit.KELVIN, "above ambient with every channel of the zone at its load current; the least "
+                    + "is 0", Surroundings.ZoneRise::most)
+            .form();
+
     private static final Form<SolvedChannel> SOLVED = ObjectTable.<SolvedChannel>named("solved channel",
             "A channel with chosen parts and everything computed of them.")
             .object("demand", DemandTables.DEMAND, "with defaults filled in", SolvedChannel::demand)
             .object("circuit", CircuitTables.CIRCUIT, "parts and values", SolvedChannel::circuit)
+            .maybeObject("zoneRise", ZONE_RISE, "absent where the parts stay at ambient temperature",
+                    each -> each.around().zone())
+            .range("localTemperature", Unit.CELSIUS, "around its own parts: from the coldest ambient to the hottest "
+                    + "with the zone's rise", each -> each.around().local())
             .object("settings", SETTINGS, "nominal figures for the bench", SolvedChannel::settings)
             .number("tripNominal", Unit.AMPERE, "trip current with every input nominal", each -> each.trip().nominal())
             .range("tripLimits", Unit.AMPERE, "its exact extremes", each -> each.trip().limits())
@@ -52,6 +64,8 @@ final class PlanTables {
             .list("inputs", AccuracyTables.INPUT, "the one description of the uncertain inputs", SolvedChannel::inputs)
             .list("assessments", AccuracyTables.ASSESSMENT, "trip first, then release and readings where asked",
                     SolvedChannel::assessments)
+            .list("uncalibrated", AccuracyTables.ASSESSMENT, "readings as they would be without calibration; empty "
+                    + "where nothing is calibrated", SolvedChannel::uncalibrated)
             .list("limits", CircuitTables.CHECK, "every limit with its numbers", SolvedChannel::limits).form();
 
     private static final Form<Measure> MEASURE = ObjectTable.<Measure>named("measure", "A number within a finding.")
@@ -155,7 +169,8 @@ final class PlanTables {
             .list("alerts", ALERT, "alert lines", Plan::alerts).list("taps", TAP, "shared thresholds", Plan::taps)
             .list("references", REFERENCE, "with their parts", Plan::references)
             .list("parts", PART, "the consolidated parts list", Plan::parts)
-            .list("findings", FINDING, "about the board as a whole", Plan::findings);
+            .list("findings", FINDING, "about the board as a whole", Plan::findings)
+            .maybeObject("study", StudyTables.STUDY, "propagated distributions; absent until sampled", Plan::study);
 
     private PlanTables() {
     }

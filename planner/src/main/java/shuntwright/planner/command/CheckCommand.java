@@ -15,6 +15,9 @@ final class CheckCommand implements Callable<Integer> {
     private BoardOptions input = new BoardOptions();
 
     @Mixin
+    private SamplingOptions sampling = new SamplingOptions();
+
+    @Mixin
     private OutputOptions output = new OutputOptions();
 
     CheckCommand(Terminal terminal) {
@@ -23,7 +26,8 @@ final class CheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        return new Job(Job.Kind.CHECK, input.board(), input.parts(), output.chosen(), Optional.empty()).run(terminal)
+        return new Job(Job.Kind.CHECK, input.board(), input.parts(), sampling.chosen(), output.chosen(),
+                Optional.empty()).run(terminal)
                 .number();
     }
 }

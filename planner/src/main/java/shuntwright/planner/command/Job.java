@@ -6,7 +6,10 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 
+import shuntwright.board.Board;
+import shuntwright.board.Channel;
 import shuntwright.io.boardfile.BoardFiles;
+import shuntwright.io.form.NearestWord;
 import shuntwright.io.json.FileReading;
 import shuntwright.io.json.Problem;
 import shuntwright.io.planfile.PlanFile;
@@ -15,18 +18,20 @@ import shuntwright.io.save.SaveResult;
 import shuntwright.io.workbook.Workbook;
 import shuntwright.io.workplace.Workplace;
 import shuntwright.plan.BoardPlanner;
+import shuntwright.plan.BoardSampler;
 import shuntwright.plan.Plan;
 
 /**
- * Opens a board, plans or checks it, saves and prints.
+ * Opens a board, plans or checks it, samples the plan, saves and prints.
  *
- * @param kind   what to do with the board
- * @param board  board file
- * @param parts  parts files besides the board's own
- * @param output what to make of the plan
- * @param pinned where to write the board with every choice pinned
+ * @param kind     what to do with the board
+ * @param board    board file
+ * @param parts    parts files besides the board's own
+ * @param sampling how to sample the plan
+ * @param output   what to make of the plan
+ * @param pinned   where to write the board with every choice pinned
  */
-record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path> pinned) {
+record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Output output, Optional<Path> pinned) {
 
     /** What is done with the board. */
     enum Kind {
@@ -39,8 +44,9 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
      * @param workbook where to write the workbook
      * @param plan     where to write the plan file
      * @param json     whether to print JSON instead of the table
+     * @param budget   name of the channel whose error budget to print instead of the table
      */
-    record Output(Optional<Path> workbook, Optional<Path> plan, boolean json) {}
+    record Output(Optional<Path> workbook, Optional<Path> plan, boolean json, Optional<String> budget) {}
 
     Job {
         parts = List.copyOf(parts);
@@ -54,12 +60,15 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
         Targets.check(inputs, targets);
         Workplace opened = open();
         Targets.check(PartsPaths.of(opened.board(), board), targets);
+        output.budget().ifPresent(name -> known(name, opened.board()));
         Plan plan = judge(opened, terminal);
-        List<String> failed = save(plan);
+        List<String> failed = save(plan, opened.board());
         if (output.json()) {
             terminal.printBytes(PlanFile.bytes(plan));
         } else {
-            PlanText.of(plan, terminal.colour()).forEach(terminal::print);
+            output.budget().flatMap(plan::channel)
+                    .map(each -> BudgetText.of(plan, each, terminal.colour()))
+                    .orElseGet(() -> PlanText.of(plan, terminal.colour())).forEach(terminal::print);
         }
         if (!failed.isEmpty()) {
             throw new BadInput(failed);
@@ -78,24 +87,43 @@ record Job(Kind kind, Path board, List<Path> parts, Output output, Optional<Path
         };
     }
 
-    private Plan judge(Workplace opened, Terminal terminal) {
-        try (ProgressLine progress = ProgressLine.on(terminal, !output.json())) {
-            BoardPlanner planner = new BoardPlanner();
-            return switch (kind) {
-                case PLAN -> planner.plan(opened.board(), opened.catalogue(), progress);
-                case CHECK -> planner.check(opened.board(), opened.catalogue(), progress);
-            };
+    private static void known(String channel, Board board) {
+        List<String> names = board.channels().stream().map(Channel::name).toList();
+        if (!names.contains(channel)) {
+            throw new BadInput("--budget: " + NearestWord.unknown("channel", channel, names));
         }
     }
 
-    /** Saves what is wanted. @return why something could not be saved */
-    private List<String> save(Plan plan) {
+    private Plan judge(Workplace opened, Terminal terminal) {
+        Board asked = sampling.applied(opened.board());
+        try (ProgressLine progress = ProgressLine.on(terminal, !output.json())) {
+            BoardPlanner planner = new BoardPlanner();
+            Plan plan = switch (kind) {
+                case PLAN -> planner.plan(asked, opened.catalogue(), progress);
+                case CHECK -> planner.check(asked, opened.catalogue(), progress);
+            };
+            return sampling.skipped()
+                    ? plan
+                    : new BoardSampler(Runtime.getRuntime().availableProcessors()).sample(plan,
+                            asked.uncertainty().sampling(), BoardSampler.Depth.FULL, progress);
+        }
+    }
+
+    /**
+     * Saves what is wanted.
+     *
+     * @param original the board as its file has it
+     * @return why something could not be saved
+     */
+    private List<String> save(Plan plan, Board original) {
         List<SaveResult> results = new ArrayList<>();
         output.plan().ifPresent(file -> results.add(SafeSave.save(file, out -> PlanFile.write(plan, out))));
         output.workbook()
                 .ifPresent(file -> results.add(SafeSave.save(file, out -> Workbook.write(plan, out))));
-        pinned.ifPresent(file -> results
-                .add(BoardFiles.save(PartsPaths.moved(BoardPlanner.pinned(plan), board, parts, file), file)));
+        pinned.ifPresent(file -> {
+            Board own = SamplingChoice.restored(BoardPlanner.pinned(plan), original);
+            results.add(BoardFiles.save(PartsPaths.moved(own, board, parts, file), file));
+        });
         return results.stream().flatMap(each -> switch (each) {
             case SaveResult.Saved _ -> Stream.<String>empty();
             case SaveResult.Failed(String message) -> Stream.of(message);

@@ -17,6 +17,9 @@ final class PlanCommand implements Callable<Integer> {
     private BoardOptions input = new BoardOptions();
 
     @Mixin
+    private SamplingOptions sampling = new SamplingOptions();
+
+    @Mixin
     private OutputOptions output = new OutputOptions();
 
     @Option(names = "--pinned", paramLabel = "FILE", description = "Write the board with every choice pinned, so that check judges exactly this plan.")
@@ -28,6 +31,8 @@ final class PlanCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        return new Job(Job.Kind.PLAN, input.board(), input.parts(), output.chosen(), pinned).run(terminal).number();
+        return new Job(Job.Kind.PLAN, input.board(), input.parts(), sampling.chosen(), output.chosen(), pinned)
+                .run(terminal)
+                .number();
     }
 }

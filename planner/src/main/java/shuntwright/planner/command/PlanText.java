@@ -25,6 +25,7 @@ import shuntwright.quantity.Range;
 /** A plan as text for people: the table of channels, then what to know, then what is shared. */
 final class PlanText {
     private static final int DIGITS = 4;
+    private static final String NOT_SAMPLED = "not sampled: no probabilities, and \"likely\" rests on a first look";
 
     private final Plan plan;
     private final boolean colour;
@@ -40,6 +41,7 @@ final class PlanText {
         PlanText text = new PlanText(plan, colour);
         text.summary();
         text.channels();
+        text.sampled();
         text.findings();
         text.shared();
         text.lines.add("");
@@ -53,6 +55,7 @@ final class PlanText {
                 + " channels accepted, parts "
                 + String.format(Locale.ROOT, "%.2f %s", plan.costPerBoard(), plan.currency())
                 + " for each board of a build of " + plan.board().buildQuantity());
+        lines.addAll(plan.study().map(StudyText::board).orElse(List.of(NOT_SAMPLED)));
         lines.add("");
     }
 
@@ -67,8 +70,16 @@ final class PlanText {
         lines.addAll(table.lines());
     }
 
+    private void sampled() {
+        List<String> sampled = plan.study().map(StudyText::channels).orElse(List.of());
+        if (!sampled.isEmpty()) {
+            lines.add("");
+            lines.addAll(sampled);
+        }
+    }
+
     /** The verdict's word; where acceptance does not follow from it, that too. */
-    private static String verdict(ChannelPlan channel) {
+    static String verdict(ChannelPlan channel) {
         String word = channel.verdict().word();
         return switch (channel.verdict()) {
             case INSIDE -> channel.accepted() ? word : word + ", not accepted";

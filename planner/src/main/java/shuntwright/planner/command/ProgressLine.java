@@ -1,15 +1,22 @@
 package shuntwright.planner.command;
 
+import java.util.concurrent.locks.LockSupport;
+
 import shuntwright.plan.Progress;
 
-/** Progress as one line that overwrites itself, only where a person watches. */
+/**
+ * Progress as one line that overwrites itself, only where a person watches. Nothing is written to files while there is progress:
+ * when the process is told to end (Ctrl-C) it says so and leaves the terminal with a line of its own.
+ */
 final class ProgressLine implements Progress, AutoCloseable {
     private static final long NANOS_BETWEEN = 100_000_000;
 
     private final Terminal terminal;
     private final boolean shown;
+    private final Thread goodbye = new Thread(this::stopped, "stopped");
     private long last = System.nanoTime();
     private int width;
+    private boolean ended;
 
     private ProgressLine(Terminal terminal, boolean shown) {
         this.terminal = terminal;
@@ -22,13 +29,26 @@ final class ProgressLine implements Progress, AutoCloseable {
      * @param wanted false to stay silent even where somebody does
      */
     static ProgressLine on(Terminal terminal, boolean wanted) {
-        return new ProgressLine(terminal, wanted && terminal.progress());
+        ProgressLine line = new ProgressLine(terminal, wanted && terminal.progress());
+        try {
+            Runtime.getRuntime().addShutdownHook(line.goodbye);
+        } catch (IllegalStateException _) {
+            waitForTheEnd();
+        }
+        return line;
+    }
+
+    /** The process is ending: this thread must not go on to write anything. */
+    private static void waitForTheEnd() {
+        while (true) {
+            LockSupport.park();
+        }
     }
 
     @Override
-    public void reached(String stage, int done, int total) {
+    public synchronized void reached(String stage, int done, int total) {
         long now = System.nanoTime();
-        if (shown && now - last >= NANOS_BETWEEN) {
+        if (shown && !ended && now - last >= NANOS_BETWEEN) {
             last = now;
             show(stage + " " + done + " of " + total);
         }
@@ -46,9 +66,24 @@ final class ProgressLine implements Progress, AutoCloseable {
         width = spelt.length();
     }
 
+    private synchronized void stopped() {
+        ended = true;
+        wipe();
+        terminal.complain("Stopped; nothing was written.");
+    }
+
     /** Wipes the line. */
     @Override
     public void close() {
+        try {
+            Runtime.getRuntime().removeShutdownHook(goodbye);
+        } catch (IllegalStateException _) {
+            waitForTheEnd();
+        }
+        wipe();
+    }
+
+    private synchronized void wipe() {
         if (width > 0) {
             show("");
             terminal.err().print("\r");

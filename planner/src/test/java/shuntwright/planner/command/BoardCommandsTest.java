@@ -17,6 +17,7 @@ import shuntwright.io.boardfile.BoardFiles;
 import shuntwright.io.planfile.PlanFile;
 import shuntwright.io.workplace.Workplace;
 import shuntwright.plan.BoardPlanner;
+import shuntwright.plan.BoardSampler;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Progress;
@@ -31,7 +32,9 @@ class BoardCommandsTest {
     @BeforeAll
     static void planOnce() {
         Workplace wren = Workplace.open(Run.WREN, List.of()).ifOpened().orElseThrow();
-        plan = new BoardPlanner().plan(wren.board(), wren.catalogue(), Progress.SILENT);
+        Plan chosen = new BoardPlanner().plan(wren.board(), wren.catalogue(), Progress.SILENT);
+        plan = new BoardSampler(1).sample(chosen, wren.board().uncertainty().sampling(), BoardSampler.Depth.FULL,
+                Progress.SILENT);
         easy = folder.resolve("easy.board.json");
         List<String> accepted = plan.channels().stream().filter(ChannelPlan::accepted)
                 .map(each -> each.channel().name()).toList();
@@ -94,12 +97,69 @@ class BoardCommandsTest {
     void the_pinned_board_checks_as_it_was_planned_from_wherever_it_stands() throws IOException {
         Path pinned = Files.createDirectory(folder.resolve("deeper")).resolve("pinned.board.json");
 
-        Run planned = Run.of("plan", easy, "--pinned", pinned);
-        Run checked = Run.of("check", pinned);
+        Run planned = Run.of("plan", easy, "--trials", "20000", "--pinned", pinned);
+        Run checked = Run.of("check", pinned, "--trials", "20000");
 
         assertThat(checked.err()).isEmpty();
         assertThat(checked.code()).isZero();
         assertThat(table(checked)).isEqualTo(table(planned)).hasSize(3);
+    }
+
+    @Test
+    void the_table_says_what_was_sampled() {
+        Run run = Run.of("plan", easy, "--trials", "20000", "--seed", "9", "--coverage", "95 %");
+
+        assertThat(run.out()).contains("20,000 trials of each channel, seed 9", "95 % of trips")
+                .containsPattern("boards with every circuit inside +(above|0\\.\\d+)");
+    }
+
+    @Test
+    void without_sampling_there_is_none_of_it() {
+        Run run = Run.of("plan", easy, "--no-sampling");
+
+        assertThat(run.code()).isZero();
+        assertThat(run.out()).contains("not sampled").doesNotContain("trials of each channel", "boards with");
+    }
+
+    @Test
+    void the_same_seed_gives_the_same_bytes_and_another_does_not() {
+        Run first = Run.of("plan", easy, "--trials", "20000", "--seed", "9", "--json");
+        Run again = Run.of("plan", easy, "--trials", "20000", "--seed", "9", "--json");
+        Run other = Run.of("plan", easy, "--trials", "20000", "--seed", "10", "--json");
+
+        assertThat(again.out()).isEqualTo(first.out());
+        assertThat(other.out().replace("\"seed\": 10", "\"seed\": 9")).isNotEqualTo(first.out());
+    }
+
+    @Test
+    void options_hold_for_the_run_and_not_for_the_pinned_board() {
+        Path pinned = folder.resolve("own.board.json");
+
+        Run run = Run.of("plan", easy, "--trials", "20000", "--coverage", "0.9", "--pinned", pinned);
+
+        assertThat(run.err()).isEmpty();
+        Board kept = Workplace.open(pinned, List.of()).ifOpened().orElseThrow().board();
+        Board own = Workplace.open(easy, List.of()).ifOpened().orElseThrow().board();
+        assertThat(kept.acceptance()).isEqualTo(own.acceptance());
+        assertThat(kept.uncertainty()).isEqualTo(own.uncertainty());
+    }
+
+    @Test
+    void a_channels_budget_is_printed_in_place_of_the_table() {
+        Run run = Run.of("check", pinnedEasy(), "--trials", "20000", "--budget",
+                plan.channels().getFirst().channel().name());
+
+        assertThat(run.err()).isEmpty();
+        assertThat(run.code()).isZero();
+        assertThat(run.out()).startsWith(plan.channels().getFirst().channel().name() + ": ")
+                .contains("Trip current: nominal", "sampled, symmetric", "shunt tolerance (shunt 1)")
+                .doesNotContain("channels accepted");
+    }
+
+    private static Path pinnedEasy() {
+        Path pinned = folder.resolve("easy-pinned.board.json");
+        assertThat(Run.of("plan", easy, "--no-sampling", "--pinned", pinned).code()).isZero();
+        return pinned;
     }
 
     private static List<String> table(Run run) {
