@@ -42,7 +42,8 @@ class ThreefryTest {
     @CsvFileSource(resources = "/shuntwright/sampling/known-answers.csv", delimiter = ';', useHeadersInDisplayName = true)
     void definitionAndBlocksGiveTheKnownAnswers(int rounds, String counter0, String counter1, String key0, String key1,
             String first, String second) {
-        assertThat(threefry(rounds, word(counter0), word(counter1), word(key0), word(key1))).containsExactly(word(first),
+        assertThat(threefry(rounds, word(counter0), word(counter1), word(key0), word(key1))).containsExactly(
+                word(first),
                 word(second));
         if (rounds == 13) {
             int[] low = new int[HALF];

@@ -68,7 +68,8 @@ final class StudyTables {
             .form();
 
     private static final Form<EffectIndex> EFFECT = ObjectTable.<EffectIndex>named("effect index",
-            "How much of an outcome's variance an input explains (Sobol indices). Pieces of one reel have one together.")
+            "How much of an outcome's variance an input explains (Sobol indices). Pieces of one reel move "
+                    + "together: each has the index of all of them.")
             .text("slot", "of the input", each -> each.input().slot().name())
             .count("piece", "of the input", each -> each.input().piece())
             .text("ownerName", "of the input", each -> each.input().owner().name())
@@ -84,7 +85,8 @@ final class StudyTables {
             .flag("inside", "whether the symmetric coverage interval is within that", Propagated::inside)
             .object("sampled", SAMPLED, "what the trials say", Propagated::sampled)
             .object("validation", VALIDATION, "of the combined uncertainty", Propagated::validation)
-            .list("effects", EFFECT, "by input, largest total first; empty where they were not worked out",
+            .list("effects", EFFECT, "by input, largest total first, inputs without any effect left out; empty where they were not "
+                    + "worked out",
                     Propagated::effects)
             .form();
 

@@ -29,9 +29,10 @@ class WorkbookTest {
     @Test
     void hasItsSheetsInOrder() throws IOException {
         assertThat(sheets(PLAN)).containsExactly("Parts list", "Settings", "Findings", "Cures", "Refused parts",
-                "Shared", "Alert lines", "Taps", "Designators", "Prices", "Assumptions and cautions");
-        assertThat(sheets(PlanFixtures.empty())).containsExactly("Parts list", "Settings", "Findings", "Shared",
-                "Designators", "Prices", "Assumptions and cautions");
+                "Error budget", "Error budget by input", "Board yield", "Shared", "Alert lines", "Taps", "Designators",
+                "Prices", "Assumptions and cautions");
+        assertThat(sheets(PlanFixtures.empty())).containsExactly("Parts list", "Settings", "Findings",
+                "Error budget", "Error budget by input", "Shared", "Designators", "Prices", "Assumptions and cautions");
     }
 
     @Test
@@ -40,7 +41,7 @@ class WorkbookTest {
             for (Sheet each : book) {
                 XSSFSheet sheet = (XSSFSheet) each;
                 assertThat(sheet.getPaneInformation().isFreezePane()).as(sheet.getSheetName()).isTrue();
-                assertThat(sheet.getPaneInformation().getVerticalSplitPosition()).isEqualTo((short) 1);
+                assertThat(sheet.getPaneInformation().getVerticalSplitPosition()).isEqualTo(frozen(each));
                 int headers = sheet.getPaneInformation().getHorizontalSplitPosition() - 1;
                 assertThat(sheet.getCTWorksheet().getAutoFilter().getRef()).startsWith("A" + (headers + 1) + ":");
                 assertThat(sheet.getPrintSetup().getLandscape()).isTrue();
@@ -52,6 +53,15 @@ class WorkbookTest {
                         .isLessThan(250);
             }
         }
+    }
+
+    /** Columns that say whose line it is. */
+    private static short frozen(Sheet sheet) {
+        return switch (sheet.getSheetName()) {
+            case ErrorBudgetSheet.NAME -> 2;
+            case BudgetInputsSheet.NAME -> 3;
+            default -> 1;
+        };
     }
 
     @Test
