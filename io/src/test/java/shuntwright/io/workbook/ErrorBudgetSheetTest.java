@@ -78,8 +78,8 @@ class ErrorBudgetSheetTest {
         Sampled sampled = each.sampled();
         close(Cells.at(row, PROPAGATED, "Mean"), sampled.mean());
         close(Cells.at(row, PROPAGATED, "Standard deviation"), sampled.standard());
-        close(Cells.at(row, PROPAGATED, "Trials"), sampled.trials());
-        close(Cells.at(row, PROPAGATED, "of them without"), sampled.runaways());
+        close(Cells.at(row, PROPAGATED, "Trials"), (double) sampled.trials());
+        close(Cells.at(row, PROPAGATED, "of them without"), (double) sampled.runaways());
         says(Cells.at(row, PROPAGATED, "Settled"), study.settled());
         Range symmetric = sampled.symmetric().range();
         close(Cells.at(row, SYMMETRIC, "From"), symmetric.min());
@@ -93,7 +93,7 @@ class ErrorBudgetSheetTest {
         close(Cells.at(row, SHORTEST, "± of upper"), sampled.shortest().standardErrors().high());
         close(Cells.at(row, OUTSIDE, "95 % from"), sampled.outside().interval().min());
         close(Cells.at(row, OUTSIDE, "95 % to"), sampled.outside().interval().max());
-        close(Cells.at(row, OUTSIDE, "Trials"), sampled.outside().trials());
+        close(Cells.at(row, OUTSIDE, "Trials"), (double) sampled.outside().trials());
         assertThat(Cells.at(row, OUTSIDE, "Method").getStringCellValue()).isEqualTo(sampled.outside().method().word());
         close(Cells.at(row, "JCGM", "δ"), each.validation().tolerance());
         says(Cells.at(row, "JCGM", "Combined is valid"), each.validation().valid());
