@@ -127,13 +127,21 @@ final class Findings {
     }
 
     private static void runaway(SolvedChannel solved, List<Finding> findings) {
-        boolean runs = solved.assessments().stream()
-                .anyMatch(each -> each.limits().max() >= ChannelAccuracy.RUNAWAY);
-        if (runs) {
-            findings.add(channel(Finding.Key.THERMAL_RUNAWAY, solved.demand().channel(),
-                    "By limits a shunt runs away thermally before an outcome is reached: its resistance rises faster with "
-                            + "its own heat than it can carry the heat away. A shunt of lower thermal resistance, less "
-                            + "resistance or smaller temperature coefficient would cure it."));
+        Channel channel = solved.demand().channel();
+        boolean calibrated = !solved.uncalibrated().isEmpty();
+        for (Assessment each : solved.assessments()) {
+            boolean reading = each.outcome() == Outcome.READING_AT_LEAST || each.outcome() == Outcome.READING_AT_LOAD;
+            if (each.limits().max() < ChannelAccuracy.BEYOND) {
+                continue;
+            }
+            findings.add(calibrated && reading
+                    ? channel(Finding.Key.CALIBRATION_FAILS, channel, Findings.capital(each.outcome().words())
+                            + ": by limits the errors at the calibration currents may outweigh the signal, so that nothing can "
+                            + "be calibrated. Calibrate at a larger current, or at two that lie further apart.")
+                    : channel(Finding.Key.THERMAL_RUNAWAY, channel, Findings.capital(each.outcome().words())
+                            + ": by limits a shunt runs away thermally before it is reached, because its resistance rises "
+                            + "faster with its own heat than it can carry the heat away. A shunt of lower thermal "
+                            + "resistance, less resistance or smaller temperature coefficient would cure it."));
         }
     }
 

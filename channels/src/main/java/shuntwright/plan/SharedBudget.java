@@ -167,7 +167,7 @@ final class SharedBudget {
         return switch (kind) {
             case SUPPLY -> Finding.Key.SUPPLY_OVERLOADED;
             case REFERENCE -> Finding.Key.REFERENCE_OVERLOADED;
-            case BOARD_HEAT,ZONE_HEAT,ZONE_RISE -> Finding.Key.HEAT_OVER_LIMIT;
+            case BOARD_HEAT, ZONE_HEAT, ZONE_RISE -> Finding.Key.HEAT_OVER_LIMIT;
         };
     }
 }

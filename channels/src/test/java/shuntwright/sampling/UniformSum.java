@@ -1,5 +1,6 @@
 package shuntwright.sampling;
 
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -15,7 +16,7 @@ record UniformSum(List<Double> halves) {
     }
 
     static UniformSum of(double... halves) {
-        return new UniformSum(java.util.Arrays.stream(halves).boxed().toList());
+        return new UniformSum(Arrays.stream(halves).boxed().toList());
     }
 
     /** P(S ≤ s); exact to rounding where that is small. */

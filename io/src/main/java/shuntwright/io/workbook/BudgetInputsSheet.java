@@ -57,7 +57,7 @@ final class BudgetInputsSheet {
             Column.wrapped("Input", 30, row -> switch (row) {
                 case Sum _ -> ALL;
                 case Line line -> line.input().slot().words();
-            }), words("Owner", 18, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
+            }), words("Owner", 22, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
             figure("From", Style.GENERAL, each -> each.limits().min()),
             figure("To", Style.GENERAL, each -> each.limits().max()),
             figure("Standard uncertainty", Style.EXPONENT, Input::standardUncertainty),
@@ -150,24 +150,30 @@ final class BudgetInputsSheet {
     private static Column<InputRow> index(String header, ToDoubleFunction<EffectIndex> get) {
         return new Column<>(EFFECTS, header, A, Style.PERCENT, (row, cells) -> switch (row) {
             case Sum sum -> sum.effects() ? total(sum, cells) : new Column.Content.Empty();
-            case Line line -> line.effect().map(each -> Column.finite(100 * get.applyAsDouble(each)))
-                    .orElseGet(() -> missing(line));
+            case Line line -> effect(line, get);
         });
     }
 
-    private static Column<InputRow> error(String header, ToDoubleFunction<EffectIndex> get) {
-        return Column.maybeNumber(EFFECTS, header, A, Style.PERCENT, row -> row instanceof Line line
-                ? line.effect().map(each -> OptionalDouble.of(100 * get.applyAsDouble(each)))
-                        .orElseGet(OptionalDouble::empty)
-                : OptionalDouble.empty());
-    }
-
-    private static Column.Content missing(Line line) {
+    private static Column.Content effect(Line line, ToDoubleFunction<EffectIndex> get) {
         if (line.outcome().propagated().isEmpty()) {
             return BudgetRows.NOT_SAMPLED;
         }
-        return new Column.Content.Marked(
-                line.together().map(each -> "with " + each.owner().name()).orElse("not worked out"), Style.TEXT);
+        if (line.effects().isEmpty()) {
+            return new Column.Content.Marked("not worked out", Style.TEXT);
+        }
+        // Inputs without any effect are not listed among the effects.
+        return line
+                .together().<Column.Content>map(
+                        each -> new Column.Content.Marked("with " + each.owner().name(), Style.TEXT))
+                .orElseGet(() -> Column.finite(100 * line.effect().map(get::applyAsDouble).orElse(0.0)));
+    }
+
+    private static Column<InputRow> error(String header, ToDoubleFunction<EffectIndex> get) {
+        return Column.maybeNumber(EFFECTS, header, A, Style.PERCENT,
+                row -> row instanceof Line line && line.together().isEmpty()
+                        ? line.effect().map(each -> OptionalDouble.of(100 * get.applyAsDouble(each)))
+                                .orElseGet(OptionalDouble::empty)
+                        : OptionalDouble.empty());
     }
 
     private static Column<InputRow> words(String header, int width, Function<Input, String> get) {
@@ -177,7 +183,7 @@ final class BudgetInputsSheet {
     }
 
     private static Column<InputRow> figure(String header, Style style, ToDoubleFunction<Input> get) {
-        return new Column<>(INPUT, header, 10, style, (row, _) -> row instanceof Line line
+        return new Column<>(INPUT, header, 12, style, (row, _) -> row instanceof Line line
                 ? Column.finite(get.applyAsDouble(line.input()))
                 : new Column.Content.Empty());
     }

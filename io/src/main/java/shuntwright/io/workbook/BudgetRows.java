@@ -84,17 +84,17 @@ final class BudgetRows {
             return effects().stream().filter(each -> each.input().equals(input())).findFirst();
         }
 
-        /** The piece of the same reel with which this one has its index together. */
+        /** An input above it that is of the same reel, and so has its index together with it. */
         Optional<Input> together() {
             return input().reel().isEmpty()
                     ? Optional.empty()
-                    : effects().stream().map(EffectIndex::input)
+                    : outcome.assessment().budget().stream().limit(number - 1L).map(BudgetLine::input)
                             .filter(each -> each.reel().equals(input().reel())
                                     && each.slot().unit().equals(input().slot().unit()))
                             .findFirst();
         }
 
-        private List<EffectIndex> effects() {
+        List<EffectIndex> effects() {
             return outcome.propagated().map(Propagated::effects).orElse(List.of());
         }
     }
