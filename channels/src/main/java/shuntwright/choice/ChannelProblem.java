@@ -46,6 +46,7 @@ public record ChannelProblem(Demand demand, Surroundings around, Catalogue catal
                 demand.rearm(), demand.fullScale());
         Surroundings nameless = around
                 .withZone(around.zone().map(each -> new Surroundings.ZoneRise("", each.most())));
-        return new ChannelProblem(same, nameless, catalogue, sources, tap, resistors, pullUp, acceptance, buildQuantity);
+        return new ChannelProblem(same, nameless, catalogue, sources, tap, resistors, pullUp, acceptance,
+                buildQuantity);
     }
 }

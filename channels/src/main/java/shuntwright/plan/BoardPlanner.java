@@ -187,7 +187,8 @@ public final class BoardPlanner {
         forget();
         Chosen atAmbient = asPinned(new BoardContext(board, catalogue, Map.of(), Map.of()), progress);
         Map<String, Double> rises = finite(atAmbient.rises());
-        return finished(rises.isEmpty() ? atAmbient : asPinned(atAmbient.context().withRises(rises), progress), progress);
+        return finished(rises.isEmpty() ? atAmbient : asPinned(atAmbient.context().withRises(rises), progress),
+                progress);
     }
 
     private Chosen asPinned(BoardContext context, Progress progress) {

@@ -135,16 +135,19 @@ final class Findings {
                 continue;
             }
             if (each.limits().min() <= -ChannelAccuracy.BEYOND) {
-                findings.add(channel(Finding.Key.CALIBRATION_FAILS, channel, what + "the errors at the calibration currents "
+                findings.add(channel(Finding.Key.CALIBRATION_FAILS, channel, what
+                        + "the errors at the calibration currents "
                         + "may outweigh the signal, so that nothing can be calibrated. Calibrate at a larger current, or at "
                         + "two that lie further apart."));
                 continue;
             }
             findings.add(channel(Finding.Key.THERMAL_RUNAWAY, channel, what + switch (each.outcome()) {
-                case TRIP, RELEASE -> "the resistance of the shunts falls with their own heat so far that their voltage never "
-                        + "reaches the threshold: it may never trip. ";
-                case READING_AT_LEAST, READING_AT_LOAD -> "the shunts run away thermally at this current: their resistance "
-                        + "rises faster with their own heat than they can give that heat away. ";
+                case TRIP, RELEASE ->
+                    "the resistance of the shunts falls with their own heat so far that their voltage never "
+                            + "reaches the threshold: it may never trip. ";
+                case READING_AT_LEAST, READING_AT_LOAD ->
+                    "the shunts run away thermally at this current: their resistance "
+                            + "rises faster with their own heat than they can give that heat away. ";
             } + "Shunts of lower thermal resistance, less resistance or smaller temperature coefficient would cure it."));
         }
     }

@@ -134,7 +134,8 @@ class BoardFindingsTest {
     /** A resistance that falls by 0.2 % per kelvin holds no more than √(R/(4·α·θ)) = 0.25 V, less than the threshold asks. */
     @Test
     void aShuntThatFadesWithItsHeatMayNeverTrip() {
-        Shunt fading = Records.with(Records.with(TrialParts.shunt("FADES", 0.02, 0.005), "temperatureCoefficient", 2e-3),
+        Shunt fading = Records.with(
+                Records.with(TrialParts.shunt("FADES", 0.02, 0.005), "temperatureCoefficient", 2e-3),
                 "rating", new ShuntRating(100, 70, 170, 40, OptionalDouble.empty()));
         List<Part> parts = new ArrayList<>(List.of(fading, TrialParts.amplifier("A", 4, 0.002, 50e-6),
                 TrialParts.comparator("C", new Hysteresis.Latched()), TrialParts.series("S", ESeries.E96, 0.001)));

@@ -19,8 +19,8 @@ import java.util.random.RandomGenerator;
 import org.junit.jupiter.api.Test;
 
 import shuntwright.board.Adc;
-import shuntwright.board.Calibration;
 import shuntwright.board.Board;
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Source;
