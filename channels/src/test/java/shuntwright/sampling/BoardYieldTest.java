@@ -61,7 +61,7 @@ class BoardYieldTest {
             return this;
         }
 
-        BoardYield yield() {
+        BoardYield together() {
             List<Supplier<BoardYield.SharedCost>> costs = YieldSampler.costs(parts, sampling.seed(), Watch.NONE);
             return YieldSampler.withCosts(YieldSampler.of(parts), costs.stream().map(Supplier::get).toList());
         }
@@ -75,7 +75,7 @@ class BoardYieldTest {
     @Test
     void channelsThatFailTogetherYieldMoreThanTheirProduct() {
         Range half = between(0.99, 1.01);
-        BoardYield found = new Trial(1).channel("a", 0.02, 0, half).channel("b", 0.02, 0, half).yield();
+        BoardYield found = new Trial(1).channel("a", 0.02, 0, half).channel("b", 0.02, 0, half).together();
         double slip = Math.sqrt(0.25 / TRIALS);
         assertThat(found.inside().estimate()).isCloseTo(0.5, within(4 * slip));
         assertThat(found.inside().interval().contains(found.inside().estimate())).isTrue();
@@ -94,7 +94,7 @@ class BoardYieldTest {
     void independentChannelsYieldTheirProduct() {
         Range half = between(1 / 1.01, 1 / 0.99);
         BoardYield found = new Trial(2).channel("a", 0, 0.02, half).channel("b", 0, 0.02, half)
-                .channel("c", 0, 0.02, half).yield();
+                .channel("c", 0, 0.02, half).together();
         double slip = Math.sqrt(0.125 * 0.875 / TRIALS);
         assertThat(found.inside().estimate()).isCloseTo(0.125, within(4 * slip));
         assertThat(found.product()).isCloseTo(0.125, within(4 * slip * 2));
@@ -116,7 +116,7 @@ class BoardYieldTest {
         double both = Grid.mean(-shared, shared, 400, s -> Math.pow(inside.applyAsDouble(s), 2));
         double cost = Math.pow(inside.applyAsDouble(0), 2) - both;
         BoardYield found = new Trial(3).channel("a", shared, own, between(low, high))
-                .channel("b", shared, own, between(low, high)).yield();
+                .channel("b", shared, own, between(low, high)).together();
         double slip = Math.sqrt(both * (1 - both) / TRIALS);
         assertThat(both).isGreaterThan(single * single + 20 * slip);
         assertThat(found.inside().estimate()).isCloseTo(both, within(4 * slip));
@@ -137,7 +137,7 @@ class BoardYieldTest {
         assertThat(other.parts.get(2).result().study()).isEqualTo(one.parts.get(0).result().study());
         assertThat(other.parts.get(1).result().study()).isEqualTo(one.parts.get(1).result().study());
         Trial reversed = new Trial(4).channel("b", 0.02, 0.02, window).channel("a", 0.02, 0.01, window);
-        assertThat(reversed.yield().inside()).isEqualTo(one.yield().inside());
+        assertThat(reversed.together().inside()).isEqualTo(one.together().inside());
         Trial reseeded = new Trial(5).channel("a", 0.02, 0.01, window);
         assertThat(reseeded.parts.getFirst().result().study()).isNotEqualTo(one.parts.getFirst().result().study());
         // Two channels alike in all but their name draw their own shunts apart.
@@ -149,7 +149,7 @@ class BoardYieldTest {
     /** A board on which nothing was outside: the yield is not claimed to be 1. */
     @Test
     void aBoardWithoutFailuresIsNotCertain() {
-        BoardYield found = new Trial(6).channel("a", 0.02, 0, between(0.9, 1.1)).yield();
+        BoardYield found = new Trial(6).channel("a", 0.02, 0, between(0.9, 1.1)).together();
         assertThat(found.inside().estimate()).isEqualTo(1);
         assertThat(found.inside().interval().min()).isLessThan(1).isGreaterThan(0.9999);
         assertThat(found.product()).isEqualTo(1);

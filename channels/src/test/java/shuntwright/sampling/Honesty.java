@@ -41,7 +41,8 @@ final class Honesty {
     /** The same with another room for a hundred scores. */
     void check(double room) {
         int n = scores.size();
-        assertThat(deviation()).as("standard deviation of the %d scores of %s (mean %.3f)", n, what, mean()).isCloseTo(1,
+        assertThat(deviation()).as("standard deviation of the %d scores of %s (mean %.3f)", n, what, mean()).isCloseTo(
+                1,
                 within(room * Math.max(1, Math.sqrt(100.0 / n))));
         assertThat(mean()).as("mean of the %d scores of %s", n, what).isCloseTo(0, within(4 / Math.sqrt(n)));
     }

@@ -1,6 +1,7 @@
 package shuntwright.sampling;
 
 import java.util.List;
+import java.util.function.Function;
 import java.util.stream.IntStream;
 
 import shuntwright.board.Sampling;
@@ -52,7 +53,7 @@ final class Runs {
     }
 
     /** As many as wanted, x1, x2 ... */
-    static List<Variable> many(int count, java.util.function.Function<String, Variable> each) {
+    static List<Variable> many(int count, Function<String, Variable> each) {
         return IntStream.rangeClosed(1, count).mapToObj(i -> each.apply("x" + i)).toList();
     }
 }

@@ -20,7 +20,7 @@ import shuntwright.quantity.Range;
 class TailsTest {
 
     private static final NormalDistribution NORMAL = new NormalDistribution(0, 1);
-    private static final int SEEDS = 100;
+    private static final int SEEDS = 50;
     private static final int TRIALS = 100_000;
 
     /**
@@ -42,7 +42,8 @@ class TailsTest {
     static Stream<Rare> events() {
         return Stream.of(1e-4, 1e-6, 1e-9).flatMap(p -> Stream.of(
                 equalUniform(4, p, true), equalUniform(6, p, false), unequalUniform(p), normal(p, false),
-                normal(p, true), triangular(p), trapezoids(p), normalAndUniform(p), product(p)));
+                normal(p, true), triangular(p), trapezoids(p), normalAndUniform(p),
+                product(Math.max(p, 1e-6)), productBesideNormal(p))).distinct();
     }
 
     private static Rare twoSided(String name, Model model, List<Variable> variables, double bound, double exact) {
@@ -132,6 +133,19 @@ class TailsTest {
         return (b - s) * Grid.mean(s, b, z -> (z - s) * -Math.log1p((z - b) / b)) / (4 * a * b);
     }
 
+    /** The same with a normal a, which alone could reach the bound too, but seldom does: the product must not be overlooked. */
+    private static Rare productBesideNormal(double p) {
+        double bound = Bisection.root(s -> p - productBesideNormalAbove(s), 1, 8);
+        return new Rare("product beside normal both sides " + 2 * p,
+                new Formula(3, List.of(x -> x[0] + x[1] * x[2]), List.of(2)),
+                List.of(Variable.normal("a", 0, 0.3), Runs.uniform("b", 0, 2), Runs.uniform("c", 0, 1)),
+                Range.of(-bound, bound), 2 * productBesideNormalAbove(bound));
+    }
+
+    private static double productBesideNormalAbove(double bound) {
+        return Grid.mean(0, 1, 4, c -> Grid.mean(-2, 2, 8, b -> NORMAL.cumulativeProbability((b * c - bound) / 0.3)));
+    }
+
     /** Numerical agreement of quadrature and closed form where the latter is good. */
     @Test
     void theProductsProbabilityIsTheClosedForm() {
@@ -156,8 +170,8 @@ class TailsTest {
             honesty.add(found.estimate(), found.standardError(), rare.exact());
         }
         honesty.check();
-        // 95 % of 100, standard error 2.2.
-        assertThat(covered).isGreaterThanOrEqualTo(87);
+        // 95 %, less three and a half standard errors.
+        assertThat(covered / (double) SEEDS).isGreaterThan(0.95 - 3.5 * Math.sqrt(0.95 * 0.05 / SEEDS));
     }
 
     /** The way that everyone takes chooses the weighted estimate where few trials were outside. */

@@ -1,6 +1,7 @@
 package shuntwright.sampling;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
 import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
 import static org.assertj.core.api.Assertions.within;
 import static shuntwright.sampling.Runs.MILLION;
@@ -15,7 +16,7 @@ import java.util.List;
 import java.util.SplittableRandom;
 import java.util.concurrent.atomic.AtomicLong;
 
-import org.assertj.core.api.Assertions;
+import org.hipparchus.distribution.continuous.NormalDistribution;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
@@ -93,7 +94,7 @@ class ValidationTest {
         int checks = 0;
         for (int run = 0; run < 200; run++) {
             double p = run % 2 == 0 ? 0.95 : 0.9;
-            int digits = 1 + run % 3 % 2;
+            int digits = 1 + (run % 3) % 2;
             Stability stability = new Stability(p, digits);
             List<double[]> results = new ArrayList<>();
             double scale = Math.pow(10, random.nextDouble(-4, 4));
@@ -241,7 +242,7 @@ class ValidationTest {
         MonteCarlo.run(Formula.sum(1), List.of(Runs.uniform("x", 0, 1)), List.of(Formula.ANYTHING), 0.9,
                 fixed(50_000, 1), counts);
         assertThat(seen).hasValue(50_000);
-        Assertions.assertThatExceptionOfType(MonteCarlo.Cancelled.class).isThrownBy(() -> MonteCarlo.run(Formula.sum(1),
+        assertThatExceptionOfType(MonteCarlo.Cancelled.class).isThrownBy(() -> MonteCarlo.run(Formula.sum(1),
                 List.of(Runs.uniform("x", 0, 1)), List.of(Formula.ANYTHING), 0.9, fixed(MILLION, 1), counts));
         assertThat(seen.get()).isLessThan(200_000);
     }
@@ -284,7 +285,7 @@ class ValidationTest {
         assertThat(histogram.trials()).isEqualTo(MILLION);
         assertThat(histogram.counts().stream().mapToLong(Long::longValue).sum()).isEqualTo(MILLION);
         double width = histogram.range().width() / histogram.counts().size();
-        var law = new org.hipparchus.distribution.continuous.NormalDistribution(3, 2);
+        NormalDistribution law = new NormalDistribution(3, 2);
         for (int i = 0; i < histogram.counts().size(); i++) {
             double from = histogram.range().min() + i * width;
             double expected = MILLION * law.probability(from, from + width);
