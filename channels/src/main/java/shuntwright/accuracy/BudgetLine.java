@@ -8,7 +8,7 @@ package shuntwright.accuracy;
  * @param towardsLow    how much it lowers the lower limit (≤ 0 unless it works the other way)
  * @param towardsHigh   how much it raises the upper limit
  * @param standard      its part of the combined standard uncertainty
- * @param varianceShare its share of u_c², 0 to 1
+ * @param varianceShare its share of u_c²; all add up to 1, and one is negative where correlation takes more away than the input adds
  */
 public record BudgetLine(Input input, double sensitivity, double towardsLow, double towardsHigh, double standard,
         double varianceShare) {

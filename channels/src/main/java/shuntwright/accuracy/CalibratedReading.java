@@ -12,6 +12,9 @@ import shuntwright.board.Calibration;
  * <p>At calibration the parts are new, at the calibration temperature, not warmed by their zone, at supply and rail of their own;
  * the ADC's non-linearity is another at each point. So whatever is the same in both places cancels by itself.
  *
+ * <p>Where errors outweigh the signal so far that the readings at calibration do not rise with the current, or a shunt runs away
+ * there, nothing can be calibrated, and the value is infinite.
+ *
  * @param equations   of the channel
  * @param calibration at production
  * @param load        load current, A
@@ -32,6 +35,37 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         return evaluate(x, gradient);
     }
 
+    /**
+     * What rises with the current at calibration: the reading at the only point, or the difference of the two; infinite where a
+     * shunt runs away. Where it may be 0 or infinite the calibrated reading has no limits.
+     */
+    Equation signal() {
+        return new Equation() {
+            @Override
+            public double value(double[] x) {
+                return rise(x, new double[0]);
+            }
+
+            @Override
+            public double gradient(double[] x, double[] gradient) {
+                Arrays.fill(gradient, 0);
+                return rise(x, gradient);
+            }
+        };
+    }
+
+    private double rise(double[] x, double[] g) {
+        double[] slopes = g.clone();
+        double upper = reading(calibration.upperCurrent(load), atCalibration(x, Slot.CALIBRATION_STEP_UPPER), slopes);
+        addFromCalibration(slopes, 1, Slot.CALIBRATION_STEP_UPPER, g);
+        if (calibration.points() == Calibration.Points.ONE || Double.isInfinite(upper)) {
+            return upper;
+        }
+        double lower = reading(calibration.lowerCurrent(load), atCalibration(x, Slot.CALIBRATION_STEP_LOWER), slopes);
+        addFromCalibration(slopes, -1, Slot.CALIBRATION_STEP_LOWER, g);
+        return Double.isInfinite(lower) ? lower : upper - lower;
+    }
+
     private double evaluate(double[] x, double[] g) {
         double error = 1 + x[Slot.CALIBRATION_CURRENT.place()];
         double[] none = new double[0];
@@ -42,6 +76,9 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         double[] atUpper = atCalibration(x, Slot.CALIBRATION_STEP_UPPER);
         double i2 = calibration.upperCurrent(load);
         double r2 = reading(i2, atUpper, upper);
+        if (!rises(0, r2)) {
+            return Double.POSITIVE_INFINITY;
+        }
         if (calibration.points() == Calibration.Points.ONE) {
             double scale = i2 * error / r2;
             if (slopes) {
@@ -54,6 +91,9 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         double i1 = calibration.lowerCurrent(load);
         double[] lower = slopes ? new double[g.length] : none;
         double r1 = reading(i1, atCalibration(x, Slot.CALIBRATION_STEP_LOWER), lower);
+        if (!rises(r1, r2)) {
+            return Double.POSITIVE_INFINITY;
+        }
         double span = r2 - r1;
         double slope = (i2 - i1) / span;
         double plain = i1 + slope * (r - r1);
@@ -64,6 +104,10 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
             g[Slot.CALIBRATION_CURRENT.place()] += plain;
         }
         return error * plain;
+    }
+
+    private static boolean rises(double from, double to) {
+        return from < to && to < Double.POSITIVE_INFINITY;
     }
 
     private double reading(double at, double[] x, double[] g) {
@@ -98,6 +142,9 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
 
     /** Adds slopes by the inputs at calibration: what stood elsewhere goes back there, what was set to 0 is left out. */
     private void addFromCalibration(double[] slopes, double weight, Slot step, double[] g) {
+        if (g.length == 0) {
+            return;
+        }
         for (Slot aged : AGEING) {
             slopes[aged.place()] = 0;
         }

@@ -16,6 +16,12 @@ import shuntwright.quantity.Range;
 /** Judges one circuit against one demand: the readers of one {@link InputDescription}. */
 public final class ChannelAccuracy {
 
+    /**
+     * Stands for no limit at all, A: a current beyond any board, so that it stays a number. Thermal runaway and calibration
+     * whose errors outweigh its signal come to it.
+     */
+    public static final double BEYOND = 1e9;
+
     private final ChannelEquations equations;
     private final InputDescription description;
     private final Demand demand;
@@ -102,26 +108,35 @@ public final class ChannelAccuracy {
     }
 
     private Assessment assess(Asked asked, Equation equation, double coverage) {
-        LimitsReader reader = new LimitsReader(equation, description);
-        List<LimitsReader.Corner> extremes = reader.extremes();
+        List<LimitsReader.Corner> extremes = new LimitsReader(equation, description).extremes();
         LimitsReader.Corner low = extremes.get(0);
         LimitsReader.Corner high = extremes.get(1);
         Propagation propagation = propagate(equation);
-        double nominal = equation.value(description.nominal());
-        return new Assessment(asked.outcome(), nominal, Range.of(finite(low.value()), finite(high.value())),
-                propagation.expanded(coverage), asked.allowed(),
-                ErrorBudget.lines(equation, description, low, high, propagation), Optional.empty());
+        double nominal = finite(equation.value(description.nominal()));
+        return new Assessment(asked.outcome(), nominal, limits(equation, low, high), propagation.expanded(coverage),
+                asked.allowed(), ErrorBudget.lines(equation, description, low, high, propagation), Optional.empty());
     }
 
-    /** Thermal runaway is reported as a current beyond any board, so that it stays a number. */
     private static double finite(double current) {
-        return Math.min(current, 1e9);
+        return Math.max(-BEYOND, Math.min(current, BEYOND));
     }
 
-    /** The exact limits of one outcome, A. */
+    /** The exact limits of one outcome, A; {@link #BEYOND} where there are none. */
     public Range limits(Asked asked) {
-        List<LimitsReader.Corner> extremes = new LimitsReader(equation(asked), description).extremes();
-        return Range.of(finite(extremes.get(0).value()), finite(extremes.get(1).value()));
+        Equation equation = equation(asked);
+        List<LimitsReader.Corner> extremes = new LimitsReader(equation, description).extremes();
+        return limits(equation, extremes.get(0), extremes.get(1));
+    }
+
+    private Range limits(Equation equation, LimitsReader.Corner low, LimitsReader.Corner high) {
+        return equation instanceof CalibratedReading calibrated && !calibrates(calibrated)
+                ? Range.of(-BEYOND, BEYOND)
+                : Range.of(finite(low.value()), finite(high.value()));
+    }
+
+    private boolean calibrates(CalibratedReading calibrated) {
+        List<LimitsReader.Corner> signal = new LimitsReader(calibrated.signal(), description).extremes();
+        return signal.get(0).value() > 0 && signal.get(1).value() < Double.POSITIVE_INFINITY;
     }
 
     /** Combined standard uncertainty of one outcome and its expanded interval. */
@@ -131,7 +146,7 @@ public final class ChannelAccuracy {
 
     /** The outcome with every input at its nominal value, A. */
     public double nominal(Asked asked) {
-        return equation(asked).value(description.nominal());
+        return finite(equation(asked).value(description.nominal()));
     }
 
     /** Nominal amplifier output voltage at which the comparator trips (false) or releases (true), V. */

@@ -76,7 +76,8 @@ public final class Propagation {
             first += ui * ui;
             fourth += parts[i] * parts[i] / inputs.get(i).degreesOfFreedom();
         }
-        double variance = first + crossTerms(c, u, correlation);
+        double cross = crossTerms(c, u, correlation, parts);
+        double variance = first + cross;
         // The Welch-Satterthwaite formula is for the first order combination of independent inputs (G.4.1).
         double degrees = fourth > 0 ? first * first / fourth : Double.POSITIVE_INFINITY;
         if (second) {
@@ -89,11 +90,15 @@ public final class Propagation {
         return new Propagation(y, c, parts, Math.max(0, variance), degrees);
     }
 
-    private static double crossTerms(double[] c, double[] u, double[][] correlation) {
+    /** The sum of 2·c_i·c_j·u_i·u_j·r_ij, of which each of the two inputs is given half. */
+    private static double crossTerms(double[] c, double[] u, double[][] correlation, double[] parts) {
         double sum = 0;
         for (int i = 0; i < correlation.length; i++) {
             for (int j = i + 1; j < correlation.length; j++) {
-                sum += 2 * c[i] * c[j] * u[i] * u[j] * correlation[i][j];
+                double half = c[i] * c[j] * u[i] * u[j] * correlation[i][j];
+                parts[i] += half;
+                parts[j] += half;
+                sum += 2 * half;
             }
         }
         return sum;
@@ -151,13 +156,20 @@ public final class Propagation {
         return sensitivities[input];
     }
 
-    /** The part of u_c² that comes with an input (half of each mixed second order term). */
+    /**
+     * The part of u_c² that comes with an input: half of each mixed second order term, and of each covariance, so that it is
+     * negative where an input takes more away than it adds.
+     */
     public double variancePart(int input) {
         return variances[input];
     }
 
-    /** Expanded with the coverage factor for {@code probability}. */
+    /** Expanded with the coverage factor for {@code probability}; without bounds where there is no finite uncertainty. */
     public CombinedUncertainty expanded(double probability) {
+        if (!Double.isFinite(value) || !Double.isFinite(variance)) {
+            return new CombinedUncertainty(ChannelAccuracy.BEYOND, ChannelAccuracy.BEYOND, Double.POSITIVE_INFINITY,
+                    probability, coverageFactor(Double.POSITIVE_INFINITY, probability));
+        }
         return new CombinedUncertainty(value, standard(), effectiveDegrees, probability,
                 coverageFactor(effectiveDegrees, probability));
     }

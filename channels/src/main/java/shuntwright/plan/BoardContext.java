@@ -46,12 +46,17 @@ final class BoardContext {
     private final Surroundings around;
     private final List<ResistorSeries> resistors;
     private final Map<String, Double> pullUps;
+    private final Map<String, Double> rises;
 
-    /** @param pullUps chosen pull-up of each alert line, Ω; lines without an entry take what the board gives or a default */
-    BoardContext(Board board, Catalogue catalogue, Map<String, Double> pullUps) {
+    /**
+     * @param pullUps chosen pull-up of each alert line, Ω; lines without an entry take what the board gives or a default
+     * @param rises   largest rise of each zone above ambient, K; zones without an entry stay at ambient
+     */
+    BoardContext(Board board, Catalogue catalogue, Map<String, Double> pullUps, Map<String, Double> rises) {
         this.board = board;
         this.catalogue = catalogue;
         this.pullUps = Map.copyOf(pullUps);
+        this.rises = Map.copyOf(rises);
         for (BoardReference reference : board.references()) {
             Optional<Reference> part = catalogue.find(reference.part(), Reference.class);
             if (part.isPresent()) {
@@ -119,7 +124,7 @@ final class BoardContext {
 
     /** The same with another board. */
     BoardContext with(Board other) {
-        return new BoardContext(other, catalogue, pullUps);
+        return new BoardContext(other, catalogue, pullUps, rises);
     }
 
     Board board() {
@@ -132,6 +137,23 @@ final class BoardContext {
 
     Surroundings around() {
         return around;
+    }
+
+    /** What a channel shares, its zone's warmth included. */
+    private Surroundings around(Channel channel) {
+        double rise = channel.zone().map(zone -> rises.getOrDefault(zone, 0.0)).orElse(0.0);
+        return rise > 0
+                ? around.withZone(Optional.of(new Surroundings.ZoneRise(channel.zone().orElseThrow(), rise)))
+                : around;
+    }
+
+    /** The same board with other rises of its zones. */
+    BoardContext withRises(Map<String, Double> newRises) {
+        return new BoardContext(board, catalogue, pullUps, newRises);
+    }
+
+    Map<String, Double> rises() {
+        return rises;
     }
 
     List<Finding> findings() {
@@ -220,7 +242,7 @@ final class BoardContext {
                 .flatMap(number -> catalogue.find(number, ResistorSeries.class));
         boolean onTap = channel.threshold() instanceof ThresholdDemand.SharedTap;
         List<ResistorSeries> series = onTap ? tapResistors() : pinned.map(List::of).orElse(resistors);
-        return new ChannelProblem(demand, around, catalogue, sources, tap, series, pullUp(channel),
+        return new ChannelProblem(demand, around(channel), catalogue, sources, tap, series, pullUp(channel),
                 board.acceptance(), board.buildQuantity());
     }
 

@@ -35,6 +35,11 @@ public final class BoardPlanner {
     /** Kept choices and judgements; beyond this many everything is worked out anew. */
     private static final int MOST_KEPT = 20_000;
 
+    /** Rises of zones are counted in steps of this, upward, K. */
+    private static final double RISE_STEP = 0.5;
+    /** Plans after which the rises of zones are taken as they are; a finding says so if they do not hold. */
+    private static final int MOST_PASSES = 12;
+
     /** A table depends on nothing but preferred numbers, so all planners share them. */
     private static final DividerTables TABLES = new DividerTables();
 
@@ -66,7 +71,32 @@ public final class BoardPlanner {
      * @throws Cancelled when progress says so
      */
     public Plan plan(Board board, Catalogue catalogue, Progress progress) {
-        Plan first = planned(board, catalogue, Map.of(), progress);
+        Map<String, Double> rises = Map.of();
+        for (int pass = 1;; pass++) {
+            Plan plan = settled(board, catalogue, rises, progress);
+            Map<String, Double> needed = higher(rises,
+                    ZoneHeat.rises(board.zones(), plan.channels(), board.ambient().max()));
+            if (needed.equals(rises) || pass == MOST_PASSES) {
+                return plan;
+            }
+            rises = needed;
+        }
+    }
+
+    /** The rises to count with next: never lower than before, in steps, so that this comes to an end. */
+    private static Map<String, Double> higher(Map<String, Double> before, Map<String, Double> actual) {
+        Map<String, Double> next = new HashMap<>(before);
+        actual.forEach((zone, rise) -> {
+            if (rise > before.getOrDefault(zone, 0.0) && Double.isFinite(rise)) {
+                next.put(zone, Math.ceil(rise / RISE_STEP) * RISE_STEP);
+            }
+        });
+        return next;
+    }
+
+    /** With pull-ups that suit the outputs chosen. */
+    private Plan settled(Board board, Catalogue catalogue, Map<String, Double> rises, Progress progress) {
+        Plan first = planned(board, catalogue, Map.of(), rises, progress);
         Map<String, Double> pullUps = new HashMap<>();
         boolean again = false;
         for (AlertPlan alert : first.alerts()) {
@@ -75,7 +105,7 @@ public final class BoardPlanner {
                     && first.channels().stream().anyMatch(each -> alert.channels().contains(each.channel().name())
                             && feeds(each));
         }
-        return again ? planned(board, catalogue, pullUps, progress) : first;
+        return again ? planned(board, catalogue, pullUps, rises, progress) : first;
     }
 
     private static boolean feeds(ChannelPlan plan) {
@@ -89,7 +119,16 @@ public final class BoardPlanner {
      * @throws Cancelled when progress says so
      */
     public Plan check(Board board, Catalogue catalogue, Progress progress) {
-        BoardContext context = new BoardContext(board, catalogue, Map.of());
+        BoardContext context = new BoardContext(board, catalogue, Map.of(), Map.of());
+        Plan atAmbient = checked(context, progress);
+        Map<String, Double> rises = new HashMap<>(
+                ZoneHeat.rises(board.zones(), atAmbient.channels(), board.ambient().max()));
+        rises.values().removeIf(rise -> !(rise > 0 && Double.isFinite(rise)));
+        return rises.isEmpty() ? atAmbient : checked(context.withRises(rises), progress);
+    }
+
+    private Plan checked(BoardContext context, Progress progress) {
+        Board board = context.board();
         List<TapPlan> taps = taps(context);
         List<ChannelPlan> channels = new ArrayList<>();
         for (Channel channel : board.channels()) {
@@ -98,7 +137,7 @@ public final class BoardPlanner {
                 case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(channel, missing);
                 case Demand.Reading.Complete(Demand demand) -> {
                     ChannelProblem problem = context.problem(demand, threshold(channel, taps));
-                    List<String> unknown = ChannelSolver.unknownPins(channel, catalogue);
+                    List<String> unknown = ChannelSolver.unknownPins(channel, context.catalogue());
                     yield unknown.isEmpty() ? checked(problem, context) : ChannelSolver.unknown(channel, unknown);
                 }
             });
@@ -123,14 +162,15 @@ public final class BoardPlanner {
         };
     }
 
-    private Plan planned(Board board, Catalogue catalogue, Map<String, Double> pullUps, Progress progress) {
+    private Plan planned(Board board, Catalogue catalogue, Map<String, Double> pullUps,
+            Map<String, Double> rises, Progress progress) {
         if (choices.size() > MOST_KEPT || judgements.size() > MOST_KEPT) {
             choices.clear();
             judgements.clear();
             voltages.clear();
             acceptances.clear();
         }
-        BoardContext context = new BoardContext(board, catalogue, pullUps);
+        BoardContext context = new BoardContext(board, catalogue, pullUps, rises);
         List<TapPlan> taps = taps(context);
         List<ChannelPlan> channels = new ArrayList<>();
         Set<String> used = new HashSet<>();
@@ -170,7 +210,7 @@ public final class BoardPlanner {
      * a threshold within every limit.
      */
     public static ChannelPicker.Count candidates(Board board, Catalogue catalogue) {
-        BoardContext context = new BoardContext(board, catalogue, Map.of());
+        BoardContext context = new BoardContext(board, catalogue, Map.of(), Map.of());
         int combinations = 0;
         int promising = 0;
         for (Channel channel : board.channels()) {
@@ -302,6 +342,7 @@ public final class BoardPlanner {
         SharedBudget budget = new SharedBudget(context, channels, taps, alerts);
         List<SharedUse> uses = budget.uses();
         findings.addAll(SharedBudget.findings(uses));
+        findings.addAll(ZoneFindings.of(context, channels));
         List<PartUse> parts = PartsList.of(channels, new LinkedHashMap<>(context.referenceParts()), taps, alerts,
                 context.tapResistors(), context.pullUpResistors());
         return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,

@@ -84,7 +84,7 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
             return Optional.empty();
         }
         Board richer = context.board().withReferences(List.of(new BoardReference(ADDED, best().get().partNumber())));
-        return Optional.of(on(new BoardContext(richer, context.catalogue(), Map.of()),
+        return Optional.of(on(new BoardContext(richer, context.catalogue(), Map.of(), context.rises()),
                 channel.withThreshold(new ThresholdDemand.OwnDivider(new Source.OfReference(ADDED)))));
     }
 
@@ -110,6 +110,6 @@ record BoardTrials(BoardPlanner planner, BoardContext context, ChannelProblem pr
     public ChannelPlan withParallel(Channel channel, int parallel) {
         Board b = context.board();
         Board richer = b.withRules(b.rules().withParallelShunts(parallel));
-        return on(new BoardContext(richer, context.catalogue(), Map.of()), channel);
+        return on(new BoardContext(richer, context.catalogue(), Map.of(), context.rises()), channel);
     }
 }

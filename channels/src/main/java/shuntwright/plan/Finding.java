@@ -50,6 +50,8 @@ public record Finding(Key key, Optional<String> channel, String text, List<Measu
         REFERENCE_SUPPLY(Severity.FAULT, "reference outside its supply range"),
         REFERENCE_OVERLOADED(Severity.FAULT, "reference overloaded"),
         HEAT_OVER_LIMIT(Severity.FAULT, "heat over limit"),
+        THERMAL_RUNAWAY(Severity.FAULT, "thermal runaway"),
+        CALIBRATION_FAILS(Severity.FAULT, "calibration fails"),
         TIME_NOT_JUDGED(Severity.NOTE, "time not judged"),
         MARGIN(Severity.NOTE, "margin"),
         PRICE_MISSING(Severity.NOTE, "price missing");

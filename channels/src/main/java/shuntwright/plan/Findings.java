@@ -9,6 +9,7 @@ import java.util.Optional;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Channel;
 import shuntwright.circuit.HysteresisNetwork;
@@ -50,6 +51,7 @@ final class Findings {
             }
         }
         findings.addAll(outside(solved, verdict));
+        runaway(solved, findings);
         release(solved, findings);
         if (coupled && solved.circuit().network() instanceof HysteresisNetwork.Feedback) {
             findings.add(channel(Finding.Key.FEEDBACK_COUPLES, channel,
@@ -122,6 +124,25 @@ final class Findings {
                         + show(tightest.margin(), Dimension.RATIO, 2) + " of the allowed half-width. "
                         + largest(tightest),
                 new Measure("margin", tightest.margin(), Dimension.RATIO));
+    }
+
+    private static void runaway(SolvedChannel solved, List<Finding> findings) {
+        Channel channel = solved.demand().channel();
+        boolean calibrated = !solved.uncalibrated().isEmpty();
+        for (Assessment each : solved.assessments()) {
+            boolean reading = each.outcome() == Outcome.READING_AT_LEAST || each.outcome() == Outcome.READING_AT_LOAD;
+            if (each.limits().max() < ChannelAccuracy.BEYOND) {
+                continue;
+            }
+            findings.add(calibrated && reading
+                    ? channel(Finding.Key.CALIBRATION_FAILS, channel, Findings.capital(each.outcome().words())
+                            + ": by limits the errors at the calibration currents may outweigh the signal, so that nothing can "
+                            + "be calibrated. Calibrate at a larger current, or at two that lie further apart.")
+                    : channel(Finding.Key.THERMAL_RUNAWAY, channel, Findings.capital(each.outcome().words())
+                            + ": by limits a shunt runs away thermally before it is reached, because its resistance rises "
+                            + "faster with its own heat than it can carry the heat away. A shunt of lower thermal "
+                            + "resistance, less resistance or smaller temperature coefficient would cure it."));
+        }
     }
 
     private static void release(SolvedChannel solved, List<Finding> findings) {

@@ -22,6 +22,9 @@ import shuntwright.quantity.Dimension;
  */
 final class SharedBudget {
 
+    /** Stands for the rise of a zone in thermal runaway, K. */
+    static final double RUNAWAY = 1e6;
+
     private final BoardContext context;
     private final List<ChannelPlan> channels;
     private final List<TapPlan> taps;
@@ -46,6 +49,10 @@ final class SharedBudget {
             uses.add(new SharedUse(SharedUse.Kind.ZONE_HEAT, "zone " + zone.name(), heat(zone.name()),
                     zone.heatLimit(), Dimension.POWER));
         }
+        ZoneHeat.rises(context.board().zones(), channels, context.board().ambient().max())
+                .forEach((zone, rise) -> uses.add(new SharedUse(SharedUse.Kind.ZONE_RISE,
+                        "zone " + zone + " above ambient", Math.min(rise, RUNAWAY), OptionalDouble.empty(),
+                        Dimension.TEMPERATURE_DIFFERENCE)));
         return uses;
     }
 
@@ -149,6 +156,7 @@ final class SharedBudget {
                     + "channels would cure it.";
             case REFERENCE -> "A smaller divider current in the design rules, a shared tap, a second reference or a "
                     + "reference for more current would cure it.";
+            case ZONE_RISE -> "";
             case BOARD_HEAT, ZONE_HEAT ->
                 "Each channel alone has about the least heat it can have; a higher limit, fewer "
                         + "channels or wider windows would cure it.";
@@ -159,7 +167,7 @@ final class SharedBudget {
         return switch (kind) {
             case SUPPLY -> Finding.Key.SUPPLY_OVERLOADED;
             case REFERENCE -> Finding.Key.REFERENCE_OVERLOADED;
-            case BOARD_HEAT, ZONE_HEAT -> Finding.Key.HEAT_OVER_LIMIT;
+            case BOARD_HEAT, ZONE_HEAT, ZONE_RISE -> Finding.Key.HEAT_OVER_LIMIT;
         };
     }
 }

@@ -11,13 +11,15 @@ import shuntwright.quantity.Dimension;
  * @param name      which one, for example "supply", "reference quiet", "zone port"
  * @param used      SI
  * @param limit     SI; empty when none is set
- * @param dimension current or power
+ * @param dimension current, power or temperature difference
  */
 public record SharedUse(Kind kind, String name, double used, OptionalDouble limit, Dimension dimension) {
 
     /** Kinds of shared things. */
     public enum Kind {
-        SUPPLY, REFERENCE, BOARD_HEAT, ZONE_HEAT
+        SUPPLY, REFERENCE, BOARD_HEAT, ZONE_HEAT,
+        /** How far a zone's own heat warms it above ambient, by limits. */
+        ZONE_RISE
     }
 
     /** True when there is no limit or it is kept. */

@@ -360,15 +360,17 @@ public final class ChannelModel implements Model {
 
     private static void byOne(double upper, double[] atUpper, double[] error, int count, double[] y) {
         for (int j = 0; j < count; j++) {
-            y[j] = y[j] * upper * (1 + error[j]) / atUpper[j];
+            y[j] = atUpper[j] > 0 ? y[j] * upper * (1 + error[j]) / atUpper[j] : Double.NaN;
         }
     }
 
     private static void byTwo(double lower, double upper, double[] atLower, double[] atUpper, double[] error, int count,
             double[] y) {
         for (int j = 0; j < count; j++) {
-            y[j] = (1 + error[j])
-                    * (lower + (upper - lower) * (y[j] - atLower[j]) / (atUpper[j] - atLower[j]));
+            double span = atUpper[j] - atLower[j];
+            y[j] = span > 0
+                    ? (1 + error[j]) * (lower + (upper - lower) * (y[j] - atLower[j]) / span)
+                    : Double.NaN;
         }
     }
 

@@ -2,6 +2,7 @@ package shuntwright.accuracy;
 
 import org.hipparchus.analysis.differentiation.Gradient;
 
+import shuntwright.board.Calibration;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Surroundings;
@@ -11,18 +12,34 @@ import shuntwright.parts.Hysteresis;
 
 /**
  * A channel's equations written anew for a differentiation library: the threshold by Thévenin's theorem, the shunts by
- * their conductance, the current by Newton's method on the heated shunts' voltage.
+ * their conductance, the current by Newton's method on the heated shunts' voltage, calibration by the gain and offset that
+ * firmware would store.
  */
 final class IndependentEquations {
 
     private final RandomCircuits.Drawn drawn;
-    private final double[] at;
+    private final Gradient[] inputs;
+    /** Distance from 25 °C of the board's air and of the channel's own parts, K. */
+    private final Gradient air;
     private final Gradient kelvin;
 
     IndependentEquations(RandomCircuits.Drawn drawn, double[] at) {
+        this(drawn, variables(at));
+    }
+
+    private IndependentEquations(RandomCircuits.Drawn drawn, Gradient[] inputs) {
         this.drawn = drawn;
-        this.at = at;
-        this.kelvin = x(Slot.AMBIENT).subtract(25);
+        this.inputs = inputs;
+        this.air = x(Slot.AMBIENT).subtract(25);
+        this.kelvin = air.add(x(Slot.ZONE_RISE));
+    }
+
+    private static Gradient[] variables(double[] at) {
+        Gradient[] inputs = new Gradient[at.length];
+        for (int i = 0; i < at.length; i++) {
+            inputs[i] = Gradient.variable(at.length, i, at[i]);
+        }
+        return inputs;
     }
 
     private Gradient x(Slot slot) {
@@ -30,12 +47,11 @@ final class IndependentEquations {
     }
 
     private Gradient x(Slot slot, int piece) {
-        int index = Layout.index(slot, piece);
-        return Gradient.variable(at.length, index, at[index]);
+        return inputs[Layout.index(slot, piece)];
     }
 
     private Gradient constant(double value) {
-        return Gradient.constant(at.length, value);
+        return Gradient.constant(inputs.length, value);
     }
 
     Gradient threshold(boolean tripped) {
@@ -44,7 +60,8 @@ final class IndependentEquations {
             node = node.subtract(x(Slot.BUILT_IN));
         }
         if (drawn.circuit().network() instanceof HysteresisNetwork.SenseResistor(double nominal)) {
-            Gradient resistance = varied(nominal, Slot.SENSE_RESISTOR_TOLERANCE, Slot.SENSE_RESISTOR_DRIFT);
+            Gradient resistance = varied(nominal, kelvin, Slot.SENSE_RESISTOR_TOLERANCE, Slot.SENSE_RESISTOR_DRIFT,
+                    Slot.SENSE_RESISTOR_AGEING);
             // The sense input draws its bias current, and drives out I_H while tripped.
             node = node.add(resistance.multiply(x(Slot.SENSE_BIAS)));
             if (tripped && drawn.circuit().comparator().hysteresis() instanceof Hysteresis.InjectedCurrent) {
@@ -54,8 +71,8 @@ final class IndependentEquations {
         return node;
     }
 
-    private Gradient varied(double nominal, Slot tolerance, Slot drift) {
-        return x(tolerance).add(x(drift).multiply(kelvin)).add(1).multiply(nominal);
+    private Gradient varied(double nominal, Gradient distance, Slot tolerance, Slot drift, Slot ageing) {
+        return x(tolerance).add(x(drift).multiply(distance)).add(x(ageing)).add(1).multiply(nominal);
     }
 
     private Gradient node(boolean tripped) {
@@ -67,9 +84,12 @@ final class IndependentEquations {
         };
     }
 
+    /** A tap's divider is at ambient temperature, like the references; an own one among the channel's parts. */
     private Gradient divider(Threshold.Divider divider, boolean tripped) {
-        Gradient top = varied(divider.top(), Slot.TOP_TOLERANCE, Slot.TOP_DRIFT);
-        Gradient bottom = varied(divider.bottom(), Slot.BOTTOM_TOLERANCE, Slot.BOTTOM_DRIFT);
+        Gradient distance = divider.tap().isEmpty() ? kelvin : air;
+        Gradient top = varied(divider.top(), distance, Slot.TOP_TOLERANCE, Slot.TOP_DRIFT, Slot.TOP_AGEING);
+        Gradient bottom = varied(divider.bottom(), distance, Slot.BOTTOM_TOLERANCE, Slot.BOTTOM_DRIFT,
+                Slot.BOTTOM_AGEING);
         Gradient ratio = bottom.divide(top.add(bottom));
         Gradient open = source(divider.source(), Slot.REFERENCE_TOLERANCE, Slot.REFERENCE_DRIFT, Slot.REFERENCE_AGEING,
                 Slot.REFERENCE_LOAD).multiply(ratio);
@@ -78,7 +98,8 @@ final class IndependentEquations {
         if (!(drawn.circuit().network() instanceof HysteresisNetwork.Feedback feedback)) {
             return loaded;
         }
-        Gradient back = varied(feedback.resistance(), Slot.FEEDBACK_TOLERANCE, Slot.FEEDBACK_DRIFT);
+        Gradient back = varied(feedback.resistance(), kelvin, Slot.FEEDBACK_TOLERANCE, Slot.FEEDBACK_DRIFT,
+                Slot.FEEDBACK_AGEING);
         Gradient far = x(Slot.OUTPUT_LOW);
         if (!tripped) {
             back = back.add(x(Slot.PULL_UP_TOLERANCE).add(1).multiply(feedback.pullUp()));
@@ -90,12 +111,11 @@ final class IndependentEquations {
     private Gradient source(SourceVoltage source, Slot tolerance, Slot drift, Slot ageing, Slot load) {
         return source.isSupply()
                 ? x(Slot.SUPPLY)
-                : varied(source.voltage().nominal(), tolerance, drift)
-                        .add(x(ageing).multiply(source.voltage().nominal())).subtract(x(load));
+                : varied(source.voltage().nominal(), air, tolerance, drift, ageing).subtract(x(load));
     }
 
-    private Gradient gain() {
-        return varied(drawn.circuit().amplifier().gain(), Slot.GAIN_ERROR, Slot.GAIN_DRIFT);
+    Gradient gain() {
+        return varied(drawn.circuit().amplifier().gain(), kelvin, Slot.GAIN_ERROR, Slot.GAIN_DRIFT, Slot.GAIN_AGEING);
     }
 
     Gradient inputError() {
@@ -150,5 +170,42 @@ final class IndependentEquations {
                 .multiply(Math.pow(2, converter.adc().bits())).add(x(Slot.ADC_STEP).divide(converter.step()));
         return steps.multiply(converter.step()).divide(drawn.circuit().amplifier().gain())
                 .divide(drawn.circuit().resistance());
+    }
+
+    /**
+     * The reading that firmware corrects by a gain (and an offset): those that made the readings at production equal to the
+     * currents it was told, each wrong by the same share.
+     */
+    Gradient calibrated(double actual) {
+        Calibration calibration = drawn.demand().channel().reading().calibration().orElseThrow();
+        double load = drawn.demand().load();
+        double set = calibration.upper().orElse(load);
+        Gradient told = x(Slot.CALIBRATION_CURRENT).add(1);
+        Gradient raw = reading(actual);
+        Gradient rawAtUpper = atProduction(Slot.CALIBRATION_STEP_UPPER).reading(set);
+        if (calibration.points() == Calibration.Points.ONE) {
+            return raw.multiply(told.multiply(set).divide(rawAtUpper));
+        }
+        double low = calibration.lower().orElse(set / 10);
+        Gradient rawAtLower = atProduction(Slot.CALIBRATION_STEP_LOWER).reading(low);
+        Gradient gain = told.multiply(set - low).divide(rawAtUpper.subtract(rawAtLower));
+        Gradient offset = told.multiply(low).subtract(gain.multiply(rawAtLower));
+        return gain.multiply(raw).add(offset);
+    }
+
+    /** The same circuit new, in the production hall. */
+    private IndependentEquations atProduction(Slot step) {
+        Gradient[] then = inputs.clone();
+        then[Slot.AMBIENT.place()] = x(Slot.CALIBRATION_TEMPERATURE);
+        then[Slot.SUPPLY.place()] = x(Slot.CALIBRATION_SUPPLY);
+        then[Slot.RAIL.place()] = x(Slot.CALIBRATION_RAIL);
+        then[Slot.ADC_STEP.place()] = x(step);
+        then[Slot.ZONE_RISE.place()] = constant(0);
+        then[Slot.GAIN_AGEING.place()] = constant(0);
+        then[Slot.ADC_REFERENCE_AGEING.place()] = constant(0);
+        for (int i = 0; i < drawn.circuit().shuntCount(); i++) {
+            then[Layout.index(Slot.SHUNT_AGEING, i)] = constant(0);
+        }
+        return new IndependentEquations(drawn, then);
     }
 }

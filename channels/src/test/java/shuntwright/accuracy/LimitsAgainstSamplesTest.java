@@ -2,6 +2,7 @@ package shuntwright.accuracy;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
 import java.util.random.RandomGenerator;
 import java.util.random.RandomGeneratorFactory;
 
@@ -15,6 +16,7 @@ class LimitsAgainstSamplesTest {
 
     private static final int CIRCUITS = 400;
     private static final int SAMPLES = 1500;
+    private static final int CLIMBS = 20;
 
     private final RandomGenerator random = RandomGeneratorFactory.of("L64X128MixRandom").create(1717);
 
@@ -36,6 +38,9 @@ class LimitsAgainstSamplesTest {
     private void check(RandomCircuits.Drawn drawn) {
         InputDescription description = RandomPoints.describe(drawn);
         for (Outcomes.Named outcome : Outcomes.of(drawn)) {
+            if (!Outcomes.hasLimits(outcome.equation(), description)) {
+                continue;
+            }
             LimitsReader reader = new LimitsReader(outcome.equation(), description);
             LimitsReader.Corner lowest = reader.lowest();
             LimitsReader.Corner highest = reader.highest();
@@ -56,5 +61,60 @@ class LimitsAgainstSamplesTest {
                 }
             }
         }
+    }
+
+    /** From corners anywhere, one input after the other goes to its other end as long as that leads further out. */
+    @Test
+    void climbsFromRandomCornersEndWithinTheLimits() {
+        RandomCircuits circuits = RandomCircuits.full(random);
+        int calibrated = 0;
+        int without = 0;
+        for (int i = 0; i < CIRCUITS; i++) {
+            RandomCircuits.Drawn drawn = circuits.next();
+            InputDescription description = RandomPoints.describe(drawn);
+            for (Outcomes.Named outcome : Outcomes.of(drawn)) {
+                calibrated += outcome.equation() instanceof CalibratedReading ? 1 : 0;
+                if (!Outcomes.hasLimits(outcome.equation(), description)) {
+                    without++;
+                    continue;
+                }
+                List<LimitsReader.Corner> extremes = new LimitsReader(outcome.equation(), description).extremes();
+                for (int climb = 0; climb < CLIMBS; climb++) {
+                    boolean up = climb % 2 == 0;
+                    double found = extremes.get(up ? 1 : 0).value();
+                    double reached = climb(outcome.equation(), description, up);
+                    double slack = Math.abs(found) * 1e-12;
+                    assertThat(reached).as(outcome.name()).isBetween(up ? Double.NEGATIVE_INFINITY : found - slack,
+                            up ? found + slack : Double.POSITIVE_INFINITY);
+                }
+            }
+        }
+        assertThat(calibrated).isGreaterThan(CIRCUITS / 2);
+        assertThat(without).isLessThan(calibrated / 20);
+    }
+
+    private double climb(Equation equation, InputDescription description, boolean up) {
+        double[] x = description.nominal();
+        for (Input input : description.inputs()) {
+            x[Layout.index(input)] = random.nextBoolean() ? input.limits().min() : input.limits().max();
+        }
+        double value = equation.value(x);
+        boolean moved = true;
+        while (moved) {
+            moved = false;
+            for (Input input : description.inputs()) {
+                int at = Layout.index(input);
+                double before = x[at];
+                x[at] = before == input.limits().min() ? input.limits().max() : input.limits().min();
+                double now = equation.value(x);
+                if (up ? now > value : now < value) {
+                    value = now;
+                    moved = true;
+                } else {
+                    x[at] = before;
+                }
+            }
+        }
+        return value;
     }
 }

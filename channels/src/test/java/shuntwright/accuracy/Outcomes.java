@@ -3,6 +3,7 @@ package shuntwright.accuracy;
 import java.util.ArrayList;
 import java.util.List;
 
+import shuntwright.board.Calibration;
 import shuntwright.fixture.RandomCircuits;
 
 /** The equations of a drawn circuit by name. */
@@ -30,7 +31,23 @@ final class Outcomes {
             double load = drawn.demand().load();
             all.add(new Named("reading at least current", equations.reading(load / 10)));
             all.add(new Named("reading at load", equations.reading(load)));
+            drawn.demand().channel().reading().calibration().ifPresent(each -> {
+                String points = each.points() == Calibration.Points.ONE ? "one point" : "two points";
+                for (double share : new double[]{0.1, 0.3, 1}) {
+                    all.add(new Named("calibrated at " + points, new CalibratedReading(equations, each, load,
+                            share * load)));
+                }
+            });
         }
         return all;
+    }
+
+    /** False for a calibrated reading that has no limits, because errors may outweigh the signal at calibration. */
+    static boolean hasLimits(Equation equation, InputDescription description) {
+        if (!(equation instanceof CalibratedReading reading)) {
+            return true;
+        }
+        List<LimitsReader.Corner> signal = new LimitsReader(reading.signal(), description).extremes();
+        return signal.get(0).value() > 0 && signal.get(1).value() < Double.POSITIVE_INFINITY;
     }
 }

@@ -3,10 +3,14 @@ package shuntwright.accuracy;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.List;
+import java.util.OptionalDouble;
 import java.util.random.RandomGeneratorFactory;
 
 import org.junit.jupiter.api.Test;
 
+import shuntwright.board.Calibration;
+import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.Threshold;
@@ -40,8 +44,17 @@ class ScaleInvarianceTest {
     }
 
     private static Demand half(Demand demand) {
-        return new Demand(demand.channel(), demand.commonMode(), demand.load() / 2, scale(demand.tripWindow(), 0.5),
+        Channel channel = Records.withPath(demand.channel(), "currents.least",
+                half(demand.channel().currents().least()));
+        channel = Records.withPath(channel, "reading.calibration",
+                channel.reading().calibration().map(each -> new Calibration(each.points(), half(each.lower()),
+                        half(each.upper()), each.uncertainty(), each.temperature())));
+        return new Demand(channel, demand.commonMode(), demand.load() / 2, scale(demand.tripWindow(), 0.5),
                 demand.tripTarget() / 2, demand.rearm().map(window -> scale(window, 0.5)), demand.fullScale() / 2);
+    }
+
+    private static OptionalDouble half(OptionalDouble current) {
+        return current.isPresent() ? OptionalDouble.of(current.getAsDouble() / 2) : current;
     }
 
     /** Threshold and hysteresis resistors three times as large with a third of the currents: same voltages. */
@@ -77,24 +90,26 @@ class ScaleInvarianceTest {
     }
 
     private static void compare(RandomCircuits.Drawn drawn, RandomCircuits.Drawn scaled, double factor) {
-        for (ChannelAccuracy.Asked asked : ChannelAccuracy.asked(drawn.demand(), false)) {
-            ChannelAccuracy before = ChannelAccuracy.of(drawn.circuit(), drawn.around(), drawn.demand());
-            ChannelAccuracy after = ChannelAccuracy.of(scaled.circuit(), scaled.around(), scaled.demand());
-            Range limits = before.limits(asked);
+        boolean reads = drawn.around().adc().isPresent();
+        List<ChannelAccuracy.Asked> former = ChannelAccuracy.asked(drawn.demand(), reads);
+        List<ChannelAccuracy.Asked> now = ChannelAccuracy.asked(scaled.demand(), reads);
+        assertThat(former).hasSize(reads ? 4 : 2);
+        ChannelAccuracy before = ChannelAccuracy.of(drawn.circuit(), drawn.around(), drawn.demand());
+        ChannelAccuracy after = ChannelAccuracy.of(scaled.circuit(), scaled.around(), scaled.demand());
+        for (int i = 0; i < former.size(); i++) {
+            Range limits = before.limits(former.get(i));
             double tolerance = 1e-11 * limits.max();
-            assertThat(after.limits(asked).min()).isCloseTo(limits.min() * factor, within(tolerance));
-            assertThat(after.limits(asked).max()).isCloseTo(limits.max() * factor, within(tolerance));
-            assertThat(after.nominal(asked)).isCloseTo(before.nominal(asked) * factor, within(tolerance));
-            assertThat(after.combined(asked, 0.95).standard())
-                    .isCloseTo(before.combined(asked, 0.95).standard() * factor, within(tolerance));
-        }
-        if (drawn.around().adc().isPresent()) {
-            double load = drawn.demand().load();
-            ChannelEquations before = new ChannelEquations(drawn.circuit(), drawn.around());
-            ChannelEquations after = new ChannelEquations(scaled.circuit(), scaled.around());
-            double expected = before.reading(load).value(RandomPoints.describe(drawn).nominal()) * factor;
-            assertThat(after.reading(load * factor).value(RandomPoints.describe(scaled).nominal()))
-                    .isCloseTo(expected, within(1e-11 * expected));
+            Range found = after.limits(now.get(i));
+            if (limits.max() == ChannelAccuracy.BEYOND) {
+                assertThat(found).isEqualTo(limits);
+                continue;
+            }
+            assertThat(found.min()).isCloseTo(limits.min() * factor, within(tolerance));
+            assertThat(found.max()).isCloseTo(limits.max() * factor, within(tolerance));
+            assertThat(after.nominal(now.get(i))).isCloseTo(before.nominal(former.get(i)) * factor, within(tolerance));
+            double standard = before.combined(former.get(i), 0.95).standard();
+            assertThat(after.combined(now.get(i), 0.95).standard()).isCloseTo(standard * factor,
+                    within(Math.max(tolerance, 1e-9 * standard)));
         }
     }
 }

@@ -130,15 +130,15 @@ class SelfHeatingTest {
     private static void check(RandomCircuits.Drawn drawn, double[] x, double relative) {
         ChannelEquations equations = new ChannelEquations(drawn.circuit(), drawn.around());
         double current = equations.trip().value(x);
-        double gain = drawn.circuit().amplifier().gain()
-                * (1 + x[Slot.GAIN_ERROR.place()] + x[Slot.GAIN_DRIFT.place()] * (x[Slot.AMBIENT.place()] - 25));
-        double error = new IndependentEquations(drawn, x).inputError().getValue();
+        IndependentEquations independent = new IndependentEquations(drawn, x);
+        double gain = independent.gain().getValue();
+        double error = independent.inputError().getValue();
         double shunts = equations.outputVoltage(false, x) / gain - error;
         assertThat(current * iterated(drawn, x, current)).isBetween((1 - relative) * shunts, (1 + 1e-10) * shunts);
     }
 
     private static double iterated(RandomCircuits.Drawn drawn, double[] x, double current) {
-        double ambient = x[Slot.AMBIENT.place()];
+        double ambient = x[Slot.AMBIENT.place()] + x[Slot.ZONE_RISE.place()];
         int n = drawn.circuit().shuntCount();
         double temperature = ambient;
         double resistance = 0;

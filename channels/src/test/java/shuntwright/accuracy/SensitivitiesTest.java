@@ -4,12 +4,15 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
+import java.util.EnumMap;
+import java.util.Optional;
 import java.util.random.RandomGenerator;
 import java.util.random.RandomGeneratorFactory;
 
 import org.hipparchus.analysis.differentiation.Gradient;
 import org.junit.jupiter.api.Test;
 
+import shuntwright.board.Calibration;
 import shuntwright.fixture.RandomCircuits;
 
 /** Values and partial derivatives of the equations against a differentiation library. */
@@ -22,6 +25,7 @@ class SensitivitiesTest {
         RandomGenerator random = RandomGeneratorFactory.of("L64X128MixRandom").create(23);
         RandomCircuits circuits = RandomCircuits.full(random);
         int read = 0;
+        EnumMap<Calibration.Points, Integer> calibrated = new EnumMap<>(Calibration.Points.class);
         for (int i = 0; i < CIRCUITS; i++) {
             RandomCircuits.Drawn drawn = circuits.next();
             double[] x = RandomPoints.within(drawn, random);
@@ -35,8 +39,16 @@ class SensitivitiesTest {
                 read++;
                 double load = drawn.demand().load();
                 compare("reading", equations.reading(load), independent.reading(load), x);
+                Optional<Calibration> calibration = drawn.demand().channel().reading().calibration();
+                if (calibration.isPresent()) {
+                    calibrated.merge(calibration.get().points(), 1, Integer::sum);
+                    double at = load * random.nextDouble(0.05, 1.2);
+                    compare("calibrated " + calibration, new CalibratedReading(equations, calibration.get(), load, at),
+                            independent.calibrated(at), x);
+                }
             }
         }
+        assertThat(calibrated.values()).hasSize(2).allMatch(count -> count > CIRCUITS / 20);
         assertThat(read).isGreaterThan(CIRCUITS / 4);
     }
 

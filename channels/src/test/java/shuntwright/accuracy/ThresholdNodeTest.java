@@ -52,17 +52,21 @@ class ThresholdNodeTest {
 
     /** Two nodes, threshold and comparator output; a conducting output is a voltage source of V_OL. */
     private static double solve(SenseCircuit circuit, Threshold.Divider divider, boolean tripped, double[] x) {
-        double dT = x[Slot.AMBIENT.place()] - 25;
+        double local = x[Slot.AMBIENT.place()] - 25 + x[Slot.ZONE_RISE.place()];
+        double dT = divider.tap().isEmpty() ? local : x[Slot.AMBIENT.place()] - 25;
         RealMatrix conductance = new Array2DRowRealMatrix(2, 2);
         RealVector current = new ArrayRealVector(2);
-        double top = divider.top() * (1 + x[Slot.TOP_TOLERANCE.place()] + dT * x[Slot.TOP_DRIFT.place()]);
-        double bottom = divider.bottom() * (1 + x[Slot.BOTTOM_TOLERANCE.place()] + dT * x[Slot.BOTTOM_DRIFT.place()]);
+        double top = divider.top() * (1 + x[Slot.TOP_TOLERANCE.place()] + dT * x[Slot.TOP_DRIFT.place()]
+                + x[Slot.TOP_AGEING.place()]);
+        double bottom = divider.bottom() * (1 + x[Slot.BOTTOM_TOLERANCE.place()] + dT * x[Slot.BOTTOM_DRIFT.place()]
+                + x[Slot.BOTTOM_AGEING.place()]);
         conductance.addToEntry(NODE, NODE, 1 / top + 1 / bottom);
         current.addToEntry(NODE, source(divider.source(), x) / top
                 - divider.users() * x[Slot.COMPARATOR_BIAS.place()]);
         if (circuit.network() instanceof HysteresisNetwork.Feedback feedback) {
             double back = feedback.resistance()
-                    * (1 + x[Slot.FEEDBACK_TOLERANCE.place()] + dT * x[Slot.FEEDBACK_DRIFT.place()]);
+                    * (1 + x[Slot.FEEDBACK_TOLERANCE.place()] + local * x[Slot.FEEDBACK_DRIFT.place()]
+                            + x[Slot.FEEDBACK_AGEING.place()]);
             conductance.addToEntry(NODE, NODE, 1 / back);
             conductance.addToEntry(NODE, OUTPUT, -1 / back);
             if (tripped) {

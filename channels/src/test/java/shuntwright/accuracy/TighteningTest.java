@@ -3,12 +3,15 @@ package shuntwright.accuracy;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.random.RandomGeneratorFactory;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
+import shuntwright.board.Calibration;
+import shuntwright.circuit.Surroundings;
 import shuntwright.fixture.RandomCircuits;
 import shuntwright.fixture.Records;
 import shuntwright.parts.Hysteresis;
@@ -25,13 +28,14 @@ class TighteningTest {
     @ParameterizedTest
     @ValueSource(strings = {"circuit.shunt.tolerance", "circuit.shunt.temperatureCoefficient", "circuit.shunt.ageing",
             "circuit.shunt.mountingResistance", "circuit.shunt.thermalEmf", "circuit.amplifier.gainError",
-            "circuit.amplifier.gainDrift", "circuit.amplifier.input.offset", "circuit.amplifier.input.offsetDrift",
+            "circuit.amplifier.gainDrift",
+            "circuit.amplifier.gainAgeing", "circuit.amplifier.input.offset", "circuit.amplifier.input.offsetDrift",
             "circuit.amplifier.input.rejection", "circuit.amplifier.input.supplyRejection",
             "circuit.amplifier.input.biasCurrent", "circuit.comparator.inputs.offset",
             "circuit.comparator.inputs.offsetDrift", "circuit.comparator.inputs.biasCurrent",
             "circuit.comparator.output.lowLevel", "circuit.resistors.tolerance",
             "circuit.resistors.temperatureCoefficient", "circuit.resistors.ageing", "around.ambient", "around.supply",
-            "demand.commonMode"})
+            "around.zone", "demand.commonMode", "demand.channel.reading.calibration"})
     void limitsStayWithinTheFormer(String path) {
         RandomCircuits circuits = RandomCircuits.full(RandomGeneratorFactory.of("L64X128MixRandom").create(41));
         int narrower = 0;
@@ -75,6 +79,10 @@ class TighteningTest {
                 Range.of(range.mid() - LEFT / 2 * range.width(), range.mid() + LEFT / 2 * range.width());
             case Spread spread -> new Spread(spread.nominal() - LEFT * (spread.nominal() - spread.min()),
                     spread.nominal(), spread.nominal() + LEFT * (spread.max() - spread.nominal()));
+            case Optional<?> maybe -> maybe.map(TighteningTest::tightened);
+            case Surroundings.ZoneRise rise -> new Surroundings.ZoneRise(rise.zone(), LEFT * rise.most());
+            case Calibration c -> new Calibration(c.points(), c.lower(), c.upper(), LEFT * c.uncertainty(),
+                    (Range) tightened(c.temperature()));
             default -> throw new IllegalArgumentException(limit.toString());
         };
     }
@@ -98,7 +106,11 @@ class TighteningTest {
     }
 
     private static Range limits(Outcomes.Named outcome, RandomCircuits.Drawn drawn) {
-        LimitsReader reader = new LimitsReader(outcome.equation(), RandomPoints.describe(drawn));
-        return Range.of(reader.lowest().value(), reader.highest().value());
+        InputDescription description = RandomPoints.describe(drawn);
+        if (!Outcomes.hasLimits(outcome.equation(), description)) {
+            return Range.of(-ChannelAccuracy.BEYOND, ChannelAccuracy.BEYOND);
+        }
+        List<LimitsReader.Corner> extremes = new LimitsReader(outcome.equation(), description).extremes();
+        return Range.of(extremes.get(0).value(), extremes.get(1).value());
     }
 }

@@ -38,8 +38,8 @@ class ShuntTermsTest {
             RandomCircuits.Drawn drawn = circuits.next();
             ShuntTerms terms = new ShuntTerms(drawn.circuit().shunt(), drawn.circuit().shuntCount(), problem(drawn));
             for (int end = 0; end < 2; end++) {
-                Range ambient = drawn.around().ambient();
-                double temperature = end == 0 ? ambient.min() : ambient.max();
+                Range local = drawn.around().local();
+                double temperature = end == 0 ? local.min() : local.max();
                 Range window = drawn.demand().tripWindow();
                 check(terms.noTripHigh[end], corners(drawn, window.min(), temperature).max());
                 check(terms.mustTripLow[end], corners(drawn, window.max(), temperature).min());

@@ -104,7 +104,7 @@ class WorkedChannelTest {
             switch (use.kind()) {
                 case SUPPLY -> all.put("supply.current", use.used());
                 case REFERENCE -> all.put("reference.current", use.used());
-                case BOARD_HEAT, ZONE_HEAT -> {
+                case BOARD_HEAT, ZONE_HEAT, ZONE_RISE -> {
                 }
             }
         }

@@ -100,14 +100,15 @@ public final class HandMadePlans {
                 HandMadeParts.COMPARATOR, new Threshold.Divider(source, 10e3, 10e3, "", 1),
                 new HysteresisNetwork.SenseResistor(4700), HandMadeParts.RESISTORS);
         double threshold = target * resistance / 2 * 50;
-        Assessment trip = assessment(Outcome.TRIP, target, demand.tripWindow());
+        Assessment trip = assessment(Outcome.TRIP, target, demand.tripWindow(), 1);
         List<Assessment> all = new ArrayList<>(List.of(trip));
         channel.reading().atLoad().ifPresent(error -> all.add(assessment(Outcome.READING_AT_LOAD, demand.load(),
-                Range.of(demand.load() * (1 - error), demand.load() * (1 + error)))));
+                Range.of(demand.load() * (1 - error), demand.load() * (1 + error)), 1)));
         SolvedChannel solved = new SolvedChannel(demand, circuit,
                 AROUND, new Settings(threshold, Range.of(threshold * 0.98, threshold * 1.02), OptionalDouble.empty(),
                         target * resistance, threshold * 0.7, threshold * 1.1),
-                List.of(), all, List.of(), List.of(), demand.load() * demand.load() * resistance / 2, 1.2);
+                List.of(), all, uncalibrated(channel, all), List.of(), demand.load() * demand.load() * resistance / 2,
+                1.2);
         boolean inside = all.stream().allMatch(Assessment::insideByLimits);
         boolean likely = all.stream().allMatch(Assessment::insideByCoverage);
         Verdict verdict = inside ? Verdict.INSIDE : likely ? Verdict.LIKELY : Verdict.OUTSIDE;
@@ -130,9 +131,18 @@ public final class HandMadePlans {
         return new ChannelPlan(channel, verdict, inside, Optional.of(solved), findings, cures, List.of());
     }
 
-    private static Assessment assessment(Outcome outcome, double nominal, Range allowed) {
-        double expanded = nominal * COVERAGE;
-        return new Assessment(outcome, nominal, Range.of(nominal * (1 - LIMITS), nominal * (1 + LIMITS)),
+    /** Calibration halves limits and uncertainty of readings. */
+    private static List<Assessment> uncalibrated(Channel channel, List<Assessment> all) {
+        return channel.reading().calibration().isEmpty()
+                ? List.of()
+                : all.stream().filter(each -> each.outcome() == Outcome.READING_AT_LOAD)
+                        .map(each -> assessment(each.outcome(), each.nominal(), each.allowed(), 2)).toList();
+    }
+
+    private static Assessment assessment(Outcome outcome, double nominal, Range allowed, double wider) {
+        double expanded = nominal * COVERAGE * wider;
+        return new Assessment(outcome, nominal,
+                Range.of(nominal * (1 - LIMITS * wider), nominal * (1 + LIMITS * wider)),
                 new CombinedUncertainty(nominal, expanded / 3, Double.POSITIVE_INFINITY, 0.9973, 3), allowed,
                 List.of(line(Slot.SUPPLY, new Owner.Shared("supply"), nominal * 0.02, 0.7),
                         line(Slot.SHUNT_TOLERANCE, new Owner.Own("shunt 1"), nominal * 0.006, 0.2),

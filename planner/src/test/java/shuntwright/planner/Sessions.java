@@ -1,12 +1,19 @@
 package shuntwright.planner;
 
+import java.util.concurrent.Executor;
+
 import shuntwright.board.Board;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 
 /** Sessions that plan at once, on the calling thread. */
 public final class Sessions {
+    /** Waits for the first picture however long it takes. */
+    public static final Executor PATIENT = _ -> {
+    };
+
     private Sessions() {
     }
 
@@ -16,8 +23,18 @@ public final class Sessions {
         return session;
     }
 
+    /** Without a board yet, with this planner. */
+    public static BoardSession planned(Planning.Planner planner) {
+        return new BoardSession(new Planning(planner, Runnable::run, Runnable::run), sampling(), PATIENT);
+    }
+
+    /** Samples at once. */
+    public static PlanSampling sampling() {
+        return new PlanSampling(HandMadeStudies::sample, Runnable::run, Runnable::run);
+    }
+
     /** Without a board yet. */
     public static BoardSession closed() {
-        return new BoardSession(new Planning(HandMadePlans::plan, Runnable::run, Runnable::run));
+        return planned(HandMadePlans::plan);
     }
 }

@@ -113,12 +113,15 @@ final class PlanTables {
 
     private static final Form<SharedUse> SHARED = ObjectTable.<SharedUse>named("shared use",
             "What all channels together take of a shared thing.")
-            .text("kind", "supply, reference, board heat or zone heat", each -> switch (each.kind()) {
-                case SUPPLY -> "supply";
-                case REFERENCE -> "reference";
-                case BOARD_HEAT -> "board heat";
-                case ZONE_HEAT -> "zone heat";
-            }).text("name", "which one", SharedUse::name)
+            .text("kind", "supply, reference, board heat, zone heat or zone rise (above ambient, by limits)",
+                    each -> switch (each.kind()) {
+                        case SUPPLY -> "supply";
+                        case REFERENCE -> "reference";
+                        case BOARD_HEAT -> "board heat";
+                        case ZONE_HEAT -> "zone heat";
+                        case ZONE_RISE -> "zone rise";
+                    })
+            .text("name", "which one", SharedUse::name)
             .numberIn(each -> Unit.of(each.dimension()), "used", "by all channels", SharedUse::used)
             .maybeNumberIn(each -> Unit.of(each.dimension()), "limit", "absent when none is set", SharedUse::limit)
             .flag("holds", "no limit, or kept", SharedUse::holds).form();

@@ -8,7 +8,9 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 import shuntwright.board.Board;
 import shuntwright.board.DesignRules;
+import shuntwright.board.StatedDistribution;
 import shuntwright.io.planfile.Cautions;
+import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Plan;
 import shuntwright.quantity.Range;
 
@@ -27,8 +29,15 @@ final class AssumptionsSheet {
             "Lowest and highest are exact extremes: every input at the worse of its limits, all at once, both ends of "
                     + "ambient temperature, supply and rail voltage included. Inside means that these extremes keep to "
                     + "the demand.",
-            "Likely means that only the coverage interval (combined standard uncertainty by JCGM 100, times the "
-                    + "coverage factor) keeps to the demand.",
+            "Likely means that only the probabilistically symmetric coverage interval of the propagated distribution "
+                    + "(JCGM 101, by trials) keeps to the demand. The combined uncertainty (JCGM 100: combined standard "
+                    + "uncertainty times the coverage factor) stands beside it, with whether clause 8 of JCGM 101 finds it "
+                    + "valid.",
+            "A probability found by trials holds within its interval of 95 %. Where no trial was outside it is below the "
+                    + "upper end of that interval; it is not zero.",
+            "Shares of variance that do not add up to 100 % leave the rest to pieces of one reel, which deviate alike. "
+                    + "The first-order index of an input is what it explains by itself, the total index what it takes part "
+                    + "in (a drift acts through temperature).",
             "Margin is the distance of the extremes from the nearer end of the allowed window, as a share of half the "
                     + "window; negative is outside.",
             "Shunt power holds to the rated temperature and falls linearly to zero at the maximum temperature (the "
@@ -44,6 +53,10 @@ final class AssumptionsSheet {
 
         static Line text(String item, String text) {
             return new Line(BOARD, item, new Column.Content.Text(text), OptionalDouble.empty(), "");
+        }
+
+        static Line inputs(String item, String text) {
+            return new Line("Inputs", item, new Column.Content.Text(text), OptionalDouble.empty(), "");
         }
 
         static Line number(String item, double value, String unit) {
@@ -72,6 +85,7 @@ final class AssumptionsSheet {
         Cautions.of(plan).forEach(each -> lines.add(Line.words("Caution", each)));
         MODEL.forEach(each -> lines.add(Line.words("Model", each)));
         board(plan.board(), lines);
+        known(plan, lines);
         new TableSheet<>(book.createSheet(NAME), look, NAME, COLUMNS, 1).add(lines);
     }
 
@@ -96,13 +110,32 @@ final class AssumptionsSheet {
             lines.add(Line.number("ADC, integral non-linearity", adc.nonlinearity(), "±LSB"));
         });
         lines.add(Line.maybe("Heat of all shunts, at most", board.heatLimit(), "W"));
-        board.zones().forEach(each -> lines.add(Line.maybe("Heat of zone " + each.name(), each.heatLimit(), "W")));
+        board.zones().forEach(each -> {
+            lines.add(Line.maybe("Heat of zone " + each.name(), each.heatLimit(), "W"));
+            each.thermalResistance().ifPresent(it -> lines
+                    .add(Line.number("Zone " + each.name() + " warms its parts above ambient by", it, "K/W")));
+        });
         lines.add(Line.words(BOARD, switch (board.acceptance().basis()) {
             case LIMITS -> "Accepted are channels that are inside by limits.";
             case COVERAGE -> "Accepted are channels that are inside by limits, or whose coverage interval is inside.";
         }));
         lines.add(Line.number("Coverage probability", 100 * board.acceptance().coverage(), "%"));
         rules(board.rules(), lines);
+    }
+
+    private static void known(Plan plan, List<Line> lines) {
+        lines.add(Line.inputs("Propagated distribution", plan.study().map(it -> SamplingWords.of(it.sampling()))
+                .orElse("not sampled; asked for: " + SamplingWords.of(plan.board().uncertainty().sampling()))));
+        for (StatedDistribution each : plan.board().uncertainty().stated()) {
+            String part = each.part().map(it -> " of " + it).orElse("");
+            lines.add(Line.inputs("Stated: " + each.input() + part, SamplingWords.of(each.distribution())));
+        }
+        lines.add(Line.inputs("All other inputs", "uniform between their limits"));
+        for (ChannelPlan each : plan.channels()) {
+            each.channel().reading().calibration()
+                    .ifPresent(it -> lines.add(Line.inputs("Reading of " + each.channel().name() + " calibrated at "
+                            + "production", SamplingWords.of(it, each.channel().currents().load()))));
+        }
     }
 
     private static void rules(DesignRules rules, List<Line> lines) {

@@ -40,10 +40,18 @@ record Column<T>(String group, String header, int width, Style style, Fill<T> fi
         Content of(T row, Cells<T> cells);
     }
 
-    /** Addresses of the cells of the same row. */
-    @FunctionalInterface
+    /** Addresses of cells near the one that is filled. */
     interface Cells<T> {
-        String at(Column<T> column);
+        /** In that column, so many rows further down. */
+        String at(Column<T> column, int down);
+
+        /** In the same column, so many rows below it. */
+        String below(int first, int last);
+
+        /** In the same row. */
+        default String at(Column<T> column) {
+            return at(column, 0);
+        }
     }
 
     static <T> Column<T> text(String group, String header, int width, Function<T, String> get) {

@@ -4,12 +4,19 @@ import java.util.EnumMap;
 import java.util.Map;
 
 import org.apache.poi.ss.usermodel.BorderStyle;
+import org.apache.poi.ss.usermodel.ComparisonOperator;
 import org.apache.poi.ss.usermodel.FillPatternType;
 import org.apache.poi.ss.usermodel.HorizontalAlignment;
+import org.apache.poi.ss.usermodel.PatternFormatting;
 import org.apache.poi.ss.usermodel.VerticalAlignment;
+import org.apache.poi.ss.util.CellRangeAddress;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFColor;
+import org.apache.poi.xssf.usermodel.XSSFConditionalFormattingRule;
 import org.apache.poi.xssf.usermodel.XSSFFont;
+import org.apache.poi.xssf.usermodel.XSSFPatternFormatting;
+import org.apache.poi.xssf.usermodel.XSSFSheet;
+import org.apache.poi.xssf.usermodel.XSSFSheetConditionalFormatting;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** The cell styles of one workbook: dark petrol on white, one tinted header, tints where a verdict or an input stands. */
@@ -17,6 +24,7 @@ final class Look {
 
     private static final int PETROL = 0x1F4E5A;
     private static final int HEADER_TINT = 0xE4EEF0;
+    private static final int SUM_TINT = 0xF3F7F8;
     private static final int INPUT_TINT = 0xFFF7D6;
     private static final int GOOD_TINT = 0xE2F2E4;
     private static final int FAIR_TINT = 0xFCEFD2;
@@ -25,19 +33,28 @@ final class Look {
 
     private final XSSFWorkbook book;
     private final Map<Style, XSSFCellStyle> styles = new EnumMap<>(Style.class);
+    private final Map<Style, XSSFCellStyle> sums = new EnumMap<>(Style.class);
     private final XSSFCellStyle quoted;
+    private final XSSFCellStyle quotedSum;
 
     Look(XSSFWorkbook book) {
         this.book = book;
         for (Style each : Style.values()) {
             styles.put(each, make(each));
+            sums.put(each, sum(each));
         }
         quoted = make(Style.TEXT);
         quoted.setQuotePrefixed(true);
+        quotedSum = sum(Style.TEXT);
+        quotedSum.setQuotePrefixed(true);
     }
 
     XSSFCellStyle of(Style style) {
-        XSSFCellStyle made = styles.get(style);
+        return found(styles, style);
+    }
+
+    private static XSSFCellStyle found(Map<Style, XSSFCellStyle> among, Style style) {
+        XSSFCellStyle made = among.get(style);
         if (made == null) {
             throw new IllegalStateException("no style for " + style);
         }
@@ -47,6 +64,36 @@ final class Look {
     /** For text that a spreadsheet would take for a formula once someone edits its cell. */
     XSSFCellStyle quoted() {
         return quoted;
+    }
+
+    /** How that cell looks in a row that sums up those below it. */
+    XSSFCellStyle ofSum(Style style, XSSFCellStyle alone) {
+        return alone.getQuotePrefixed() ? quotedSum : found(sums, style);
+    }
+
+    /** Tints cells that say yes or no by what they say now. */
+    void answers(XSSFSheet sheet, CellRangeAddress cells) {
+        XSSFSheetConditionalFormatting formatting = sheet.getSheetConditionalFormatting();
+        formatting.addConditionalFormatting(new CellRangeAddress[]{cells},
+                new XSSFConditionalFormattingRule[]{answer(formatting, "yes", GOOD_TINT),
+                        answer(formatting, "no", FAIR_TINT)});
+    }
+
+    private static XSSFConditionalFormattingRule answer(XSSFSheetConditionalFormatting formatting, String word,
+            int tint) {
+        XSSFConditionalFormattingRule rule = formatting.createConditionalFormattingRule(ComparisonOperator.EQUAL,
+                "\"" + word + "\"");
+        XSSFPatternFormatting pattern = rule.createPatternFormatting();
+        pattern.setFillBackgroundColor(colour(tint));
+        pattern.setFillPattern(PatternFormatting.SOLID_FOREGROUND);
+        return rule;
+    }
+
+    private XSSFCellStyle sum(Style style) {
+        XSSFCellStyle made = make(style);
+        made.setFont(font(true, 10));
+        tint(made, SUM_TINT);
+        return made;
     }
 
     private XSSFCellStyle make(Style style) {
@@ -74,6 +121,10 @@ final class Look {
                 header(made);
                 made.setAlignment(HorizontalAlignment.RIGHT);
             }
+            case ANSWER_HEADER -> {
+                header(made);
+                made.setAlignment(HorizontalAlignment.CENTER);
+            }
             case WRAPPED -> {
                 made.setWrapText(true);
                 indent(made);
@@ -88,14 +139,24 @@ final class Look {
                 box(made);
                 indent(made);
             }
-            case TOTAL_MONEY, TOTAL_COUNT -> {
+            case TOTAL_MONEY, TOTAL_COUNT, TOTAL_PERCENT -> {
                 made.setFont(font(true, 11));
                 indent(made);
+            }
+            case FACTOR, TENTH -> {
+                made.setAlignment(HorizontalAlignment.RIGHT);
+                line(made);
+            }
+            case ANSWER -> {
+                made.setAlignment(HorizontalAlignment.CENTER);
+                line(made);
             }
             case GOOD -> verdict(made, GOOD_TINT);
             case FAIR -> verdict(made, FAIR_TINT);
             case BAD -> verdict(made, BAD_TINT);
-            case COUNT, VOLT, AMPERE, MILLIOHM, OHM, GAIN, PERCENT, WATT, MONEY, UNIT_PRICE, GENERAL ->
+            case COUNT, VOLT, AMPERE, MILLIOHM, OHM, GAIN, PERCENT, WATT, MONEY, UNIT_PRICE, GENERAL, FINE_AMPERE,
+                    EXPONENT,
+                    FINE_PERCENT ->
                 line(made);
         }
         return made;

@@ -6,7 +6,6 @@ import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 
-import org.apache.poi.ss.util.CellRangeAddress;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
@@ -85,9 +84,7 @@ final class SettingsSheet {
         XSSFSheet sheet = book.createSheet(NAME);
         TableSheet<ChannelPlan> table = new TableSheet<>(sheet, look, NAME, COLUMNS, 1);
         table.add(plan.channels());
-        sheet.getPrintSetup().setFitWidth((short) 3);
-        sheet.setRepeatingRows(new CellRangeAddress(2, 3, -1, -1));
-        sheet.setRepeatingColumns(new CellRangeAddress(-1, -1, 0, 0));
+        table.keep(1, 3);
         sheet.setAutobreaks(true);
     }
 

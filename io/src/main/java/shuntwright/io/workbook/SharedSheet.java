@@ -93,6 +93,7 @@ final class SharedSheet {
         return switch (use.kind()) {
             case SUPPLY, REFERENCE -> "current";
             case BOARD_HEAT, ZONE_HEAT -> "heat";
+            case ZONE_RISE -> "warming";
         };
     }
 

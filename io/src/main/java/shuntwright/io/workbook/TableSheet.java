@@ -1,6 +1,7 @@
 package shuntwright.io.workbook;
 
 import java.util.List;
+import java.util.function.Predicate;
 
 import org.apache.poi.ss.usermodel.PageMargin;
 import org.apache.poi.ss.usermodel.PaperSize;
@@ -24,6 +25,8 @@ final class TableSheet<T> {
     private static final int WIDTH_UNIT = 256;
     /** Characters of prose for each 100 digits of width: letters are narrower than digits on average. */
     private static final int PROSE = 120;
+    /** The same for bold letters. */
+    private static final int BOLD = 100;
     /** A column of single lines grows with its text to this many characters. */
     private static final int WIDEST = 44;
 
@@ -32,6 +35,8 @@ final class TableSheet<T> {
     private final List<Column<T>> columns;
     private final int headerRow;
     private final int[] widths;
+    private final boolean grouped;
+    private Predicate<T> sums = _ -> false;
     private int next;
 
     /**
@@ -46,7 +51,7 @@ final class TableSheet<T> {
         this.look = look;
         this.columns = List.copyOf(columns);
         widths = new int[columns.size()];
-        boolean grouped = columns.stream().anyMatch(each -> !each.group().isEmpty());
+        grouped = columns.stream().anyMatch(each -> !each.group().isEmpty());
         headerRow = 1 + above + (grouped ? 1 : 0);
         next = headerRow + 1;
         text(row(0).createCell(0), title, Style.TITLE);
@@ -67,6 +72,26 @@ final class TableSheet<T> {
         return headerRow + 1 + tableRow;
     }
 
+    /** The cell of a column in a row of the table, from 0; for formulas of other sheets. */
+    String cell(Column<T> column, int tableRow) {
+        return "'" + sheet.getSheetName() + "'!" + address(columns.indexOf(column), rowIndex(tableRow));
+    }
+
+    /** Says which rows sum up those below them, and so stand out. */
+    void sumUp(Predicate<T> rows) {
+        sums = rows;
+        sheet.setRowSumsBelow(false);
+    }
+
+    /** Keeps the first columns on screen, and on every page where the table is wider than one. */
+    void keep(int firstColumns, int pagesWide) {
+        sheet.createFreezePane(firstColumns, headerRow + 1);
+        if (pagesWide > 1) {
+            sheet.setRepeatingColumns(new CellRangeAddress(-1, -1, 0, firstColumns - 1));
+            sheet.getPrintSetup().setFitWidth((short) pagesWide);
+        }
+    }
+
     /** The cells of a column over all rows of the table, "B5:B9". */
     String span(Column<T> column, int rows) {
         int index = columns.indexOf(column);
@@ -78,20 +103,28 @@ final class TableSheet<T> {
             add(each);
         }
         sheet.setAutoFilter(new CellRangeAddress(headerRow, next - 1, 0, columns.size() - 1));
+        for (int index = 0; index < columns.size() && !rows.isEmpty(); index++) {
+            if (columns.get(index).style() == Style.ANSWER) {
+                look.answers(sheet, new CellRangeAddress(headerRow + 1, next - 1, index, index));
+            }
+        }
     }
 
     private void add(T object) {
         int rowNumber = next++;
         XSSFRow row = row(rowNumber);
+        boolean sum = sums.test(object);
         int lines = 1;
         for (int index = 0; index < columns.size(); index++) {
             Column<T> column = columns.get(index);
-            Column.Content content = column.fill().of(object,
-                    other -> address(columns.indexOf(other), rowNumber));
+            Column.Content content = column.fill().of(object, new Near(index, rowNumber));
             fill(row.createCell(index), content, column.style());
+            if (sum) {
+                row.getCell(index).setCellStyle(look.ofSum(column.style(), row.getCell(index).getCellStyle()));
+            }
             if (content instanceof Column.Content.Text(String text)) {
                 if (column.style() == Style.WRAPPED) {
-                    lines = Math.max(lines, lines(text, PROSE * column.width() / 100));
+                    lines = Math.max(lines, lines(text, (sum ? BOLD : PROSE) * column.width() / 100));
                 } else {
                     widen(index, Math.min(text.length() + 3, WIDEST));
                 }
@@ -99,6 +132,27 @@ final class TableSheet<T> {
         }
         if (lines > 1) {
             row.setHeightInPoints(lines * POINTS_PER_LINE + 2f);
+        }
+    }
+
+    /** Addresses of cells near one of this table. */
+    private final class Near implements Column.Cells<T> {
+        private final int column;
+        private final int row;
+
+        Near(int column, int row) {
+            this.column = column;
+            this.row = row;
+        }
+
+        @Override
+        public String at(Column<T> other, int down) {
+            return address(columns.indexOf(other), row + down);
+        }
+
+        @Override
+        public String below(int first, int last) {
+            return address(column, row + first) + ":" + address(column, row + last);
         }
     }
 
@@ -162,8 +216,7 @@ final class TableSheet<T> {
         int lines = 1;
         for (int index = 0; index < columns.size(); index++) {
             Column<T> column = columns.get(index);
-            text(row.createCell(index), column.header(),
-                    column.style().isNumber() ? Style.NUMBER_HEADER : Style.HEADER);
+            text(row.createCell(index), column.header(), column.style().header());
             widen(index, column.width());
             lines = Math.max(lines, lines(column.header(), column.width() - 2));
         }
@@ -172,7 +225,7 @@ final class TableSheet<T> {
     }
 
     private void print(String title) {
-        sheet.setRepeatingRows(new CellRangeAddress(headerRow, headerRow, -1, -1));
+        sheet.setRepeatingRows(new CellRangeAddress(grouped ? headerRow - 1 : headerRow, headerRow, -1, -1));
         sheet.setFitToPage(true);
         sheet.setHorizontallyCenter(false);
         sheet.getPrintSetup().setLandscape(true);

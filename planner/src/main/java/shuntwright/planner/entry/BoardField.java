@@ -76,7 +76,11 @@ public enum BoardField {
             board -> QuantityWriter.write(board.rules().heatStep(), Dimension.POWER),
             (text, board) -> QuantityReader.number(text, Dimension.POWER).then(value -> value >= 0
                     ? Reading.value(board.withRules(board.rules().withHeatStep(value)))
-                    : Reading.misread("The heat step must not be below 0 W.")));
+                    : Reading.misread("The heat step must not be below 0 W."))),
+    TRIALS("Trials of each channel", "a number such as 1,000,000, or adaptive, 2 digits, most 10,000,000 (until the "
+            + "standard uncertainty's digits are stable)", TrialsText::trials, TrialsText::withTrials),
+    SEED("Seed of all draws", "a whole number; another seed gives other draws, the same seed the same figures",
+            board -> Long.toString(board.uncertainty().sampling().seed()), TrialsText::withSeed);
 
     private final String title;
     private final String hint;

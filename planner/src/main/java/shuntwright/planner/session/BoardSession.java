@@ -2,6 +2,7 @@ package shuntwright.planner.session;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.Executor;
 import java.util.function.UnaryOperator;
 
 import javafx.beans.binding.Bindings;
@@ -22,14 +23,17 @@ import shuntwright.board.Channel;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.undo.History;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 
 /**
  * The open board: what was entered, how to undo it, and the latest plan. Every edit is a function from state to state
- * with a name, and starts planning again. To be used on the publisher's thread only.
+ * with a name, and starts planning again; a new plan is sampled again. To be used on the publisher's thread only.
  */
 public final class BoardSession {
     private final Planning planning;
+    private final PlanSampling sampling;
+    private final Executor patience;
     private final ReadOnlyObjectWrapper<BoardState> state = new ReadOnlyObjectWrapper<>(
             BoardState.of(Board.named("new board")));
     private final ReadOnlyObjectWrapper<Catalogue> catalogue = new ReadOnlyObjectWrapper<>(Catalogue.EMPTY);
@@ -45,9 +49,14 @@ public final class BoardSession {
             () -> planned.get().map(plan -> plan.isOf(state.get())).orElse(false), planned, state);
     private History<BoardState> history = new History<>(state.get());
     private Optional<Board> saved = Optional.empty();
+    /** A plan that waits for its first picture. */
+    private Optional<Planned> held = Optional.empty();
 
-    public BoardSession(Planning planning) {
+    /** @param patience runs things a little later on the publisher's thread */
+    public BoardSession(Planning planning, PlanSampling sampling, Executor patience) {
         this.planning = planning;
+        this.sampling = sampling;
+        this.patience = patience;
     }
 
     /**
@@ -195,10 +204,73 @@ public final class BoardSession {
     /** Plans the board as it stands. */
     public void plan() {
         BoardState of = state.get();
+        sampling.cancel();
+        held = Optional.empty();
         planning.ask(of.board(), catalogue.get(), plan -> {
             message.set("");
-            planned.set(Optional.of(new Planned(plan, of)));
+            take(new Planned(plan, of));
         }, message::set);
+    }
+
+    /**
+     * Where a sampled plan is on show, a new one waits a moment for its first picture, so that what rests on trials does not come
+     * and go with each edit.
+     */
+    private void take(Planned fresh) {
+        boolean circuits = fresh.plan().channels().stream().anyMatch(each -> each.solved().isPresent());
+        held = Optional.of(fresh);
+        if (!circuits || !sampled()) {
+            release();
+        }
+        if (circuits) {
+            patience.execute(() -> {
+                if (held.equals(Optional.of(fresh))) {
+                    release();
+                }
+            });
+            sample(fresh);
+        }
+    }
+
+    /** True when the plan on show rests on trials. */
+    private boolean sampled() {
+        return planned.get().flatMap(each -> each.plan().study()).isPresent();
+    }
+
+    private void sample(Planned bare) {
+        sampling.ask(bare.plan(), plan -> {
+            held = Optional.of(new Planned(plan, bare.of()));
+            release();
+        }, problem -> {
+            release();
+            message.set(problem);
+        });
+    }
+
+    private void release() {
+        Optional<Planned> waiting = held;
+        held = Optional.empty();
+        if (waiting.isPresent()) {
+            planned.set(waiting);
+        }
+    }
+
+    /** Ends sampling; the best picture so far stays. */
+    public void stopSampling() {
+        sampling.stop();
+        release();
+    }
+
+    /** Goes on with sampling where it was stopped. */
+    public void sampleAgain() {
+        planned.get().filter(each -> each.isOf(state.get())).ifPresent(each -> {
+            message.set("");
+            sample(each);
+        });
+    }
+
+    public PlanSampling sampling() {
+        return sampling;
     }
 
     public Planning planning() {

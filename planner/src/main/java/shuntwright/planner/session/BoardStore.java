@@ -1,5 +1,6 @@
 package shuntwright.planner.session;
 
+import java.awt.image.BufferedImage;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -33,4 +34,6 @@ public interface BoardStore {
     SaveResult exportWorkbook(Plan plan, Path file);
 
     SaveResult exportPlan(Plan plan, Path file);
+
+    SaveResult savePicture(BufferedImage picture, Path file);
 }

@@ -1,11 +1,13 @@
 package shuntwright.planner.session;
 
+import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -18,6 +20,7 @@ import shuntwright.io.save.SaveResult;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.work.FileWork;
+import shuntwright.planner.work.PlanSampling;
 
 /** Opens, saves and exports the session's board, asking where nothing may be lost. */
 public final class Documents {
@@ -188,17 +191,43 @@ public final class Documents {
                     List.of("Wait until planning has ended, then export again."));
             return;
         }
-        String name = file.get().map(path -> path.getFileName().toString().replaceFirst("(\\.board)?\\.json$", ""))
-                .orElse(fileName(session.state().board().name()));
-        Path suggestion = file.get().map(path -> path.resolveSibling(name + kind.ending()))
-                .orElse(Path.of(name + kind.ending()));
-        questions.fileToSave(kind, suggestion).ifPresent(target -> work.run(() -> switch (kind) {
+        if (session.sampling().stateProperty().get() == PlanSampling.State.RUNNING) {
+            questions.tell("Not exported",
+                    "Trials are still being drawn for the plan on show, so its distributions would not be the ones the "
+                            + "board asks for.",
+                    List.of("Wait until sampling has ended, or stop it in the status bar to export what was drawn so "
+                            + "far; then export again."));
+            return;
+        }
+        questions.fileToSave(kind, suggestion("", kind)).ifPresent(target -> work.run(() -> switch (kind) {
             case WORKBOOK -> store.exportWorkbook(planned.get().plan(), target);
             case PLAN -> store.exportPlan(planned.get().plan(), target);
-            case BOARD, PARTS -> throw new IllegalArgumentException(kind + " is not exported");
+            case BOARD, PARTS, PICTURE -> throw new IllegalArgumentException(kind + " is not exported");
         }, result -> savedOr(result, path -> questions.done("exported " + path.getFileName()
                 + ". Verify the board by test at its temperature extremes; it does not replace the fuse or breaker that "
                 + "codes ask for."))));
+    }
+
+    /** A file's name beside the board's. */
+    private Path suggestion(String of, Kind kind) {
+        String board = file.get().map(path -> path.getFileName().toString().replaceFirst("(\\.board)?\\.json$", ""))
+                .orElse(fileName(session.state().board().name()));
+        String name = board + (of.isEmpty() ? "" : "-" + fileName(of)) + kind.ending();
+        return file.get().map(path -> path.resolveSibling(name)).orElse(Path.of(name));
+    }
+
+    /**
+     * Saves a picture.
+     *
+     * @param of      what it shows, for the suggested name
+     * @param picture made once a file is chosen
+     */
+    public void savePicture(String of, Supplier<BufferedImage> picture) {
+        questions.fileToSave(Kind.PICTURE, suggestion(of, Kind.PICTURE)).ifPresent(target -> {
+            BufferedImage drawn = picture.get();
+            work.run(() -> store.savePicture(drawn, target),
+                    result -> savedOr(result, path -> questions.done("saved " + path.getFileName())));
+        });
     }
 
     /** Adds a parts file to the board. */

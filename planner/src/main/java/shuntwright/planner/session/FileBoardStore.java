@@ -1,5 +1,6 @@
 package shuntwright.planner.session;
 
+import java.awt.image.BufferedImage;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -8,6 +9,7 @@ import shuntwright.io.boardfile.BoardFiles;
 import shuntwright.io.json.FileReading;
 import shuntwright.io.json.Problem;
 import shuntwright.io.partsfile.PartsFiles;
+import shuntwright.io.picture.PngFile;
 import shuntwright.io.planfile.PlanFile;
 import shuntwright.io.save.SafeSave;
 import shuntwright.io.save.SaveResult;
@@ -46,5 +48,10 @@ public final class FileBoardStore implements BoardStore {
     @Override
     public SaveResult exportPlan(Plan plan, Path file) {
         return SafeSave.save(file, out -> PlanFile.write(plan, out));
+    }
+
+    @Override
+    public SaveResult savePicture(BufferedImage picture, Path file) {
+        return SafeSave.save(file, out -> PngFile.write(picture, out));
     }
 }

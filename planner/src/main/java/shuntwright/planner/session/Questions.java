@@ -14,7 +14,7 @@ public interface Questions {
     /** Kinds of files a person is asked for. */
     enum Kind {
         BOARD("board", ".board.json"), PARTS("parts", ".parts.json"), WORKBOOK("workbook", ".xlsx"),
-        PLAN("plan", ".plan.json");
+        PLAN("plan", ".plan.json"), PICTURE("picture", ".png");
 
         private final String word;
         private final String ending;

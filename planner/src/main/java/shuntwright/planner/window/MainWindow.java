@@ -5,6 +5,7 @@ import java.util.List;
 
 import javafx.application.Platform;
 import javafx.beans.binding.Bindings;
+import javafx.beans.value.ObservableBooleanValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.Scene;
@@ -43,6 +44,7 @@ import shuntwright.planner.window.shared.SharedStrip;
 import shuntwright.planner.window.shared.SharedStripModel;
 import shuntwright.planner.window.table.ChannelTable;
 import shuntwright.planner.window.table.ChannelTableModel;
+import shuntwright.planner.work.PlanSampling;
 
 /** The content of the window. */
 final class MainWindow {
@@ -121,7 +123,7 @@ final class MainWindow {
 
     private TabPane tabs() {
         TabPane tabs = new TabPane(new Tab("Findings", new FindingsPanel(new FindingsModel(session)).node()),
-                new Tab("Error budget", new BudgetPanel(new BudgetModel(session)).node()),
+                new Tab("Error budget", new BudgetPanel(new BudgetModel(session), documents).node()),
                 new Tab("Parts list", new PartsPanel(new PartsModel(session)).node()));
         tabs.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
         tabs.setId("tabs");
@@ -183,10 +185,18 @@ final class MainWindow {
         bar.setId("status");
         bar.textProperty().bind(status.textBinding());
         bar.progressProperty().bind(Bindings.when(session.planning().runningProperty())
-                .then(session.planning().progressProperty()).otherwise(0));
+                .then(session.planning().progressProperty()).otherwise(session.sampling().progressProperty()));
         Button cancel = button("Cancel", "Stop planning; the last plan stays on show", session.planning()::cancel);
-        cancel.visibleProperty().bind(session.planning().runningProperty());
-        cancel.managedProperty().bind(cancel.visibleProperty());
+        shownWhile(session.planning().runningProperty(), cancel);
+        var sampling = session.sampling().stateProperty();
+        Button stop = button("Stop sampling", "Draw no further trials; the best picture so far stays",
+                session::stopSampling);
+        stop.setId("stop-sampling");
+        shownWhile(Bindings.createBooleanBinding(() -> sampling.get() == PlanSampling.State.RUNNING, sampling), stop);
+        Button again = button("Sample on", "Draw the trials the board asks for", session::sampleAgain);
+        again.setId("sample-again");
+        shownWhile(Bindings.createBooleanBinding(() -> sampling.get() == PlanSampling.State.STOPPED
+                || sampling.get() == PlanSampling.State.FAILED, sampling), again);
         Label wrong = new Label();
         wrong.setId("wrong-entries");
         wrong.textProperty().bind(status.wrongBinding());
@@ -195,8 +205,13 @@ final class MainWindow {
         wrong.setMaxWidth(720);
         wrong.visibleProperty().bind(status.wrongBinding().isNotEmpty());
         wrong.managedProperty().bind(wrong.visibleProperty());
-        bar.getRightItems().addAll(wrong, cancel);
+        bar.getRightItems().addAll(wrong, cancel, stop, again);
         return bar;
+    }
+
+    private static void shownWhile(ObservableBooleanValue condition, Button button) {
+        button.visibleProperty().bind(condition);
+        button.managedProperty().bind(condition);
     }
 
     private Commands.Window menus() {

@@ -2,6 +2,8 @@ package shuntwright.planner.window;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.TimeUnit;
 
 import javafx.application.ColorScheme;
 import javafx.application.Platform;
@@ -17,11 +19,15 @@ import shuntwright.planner.session.FileBoardStore;
 import shuntwright.planner.window.dialog.Choosers;
 import shuntwright.planner.window.dialog.Dialogs;
 import shuntwright.planner.work.FileWork;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 import shuntwright.planner.work.Threads;
 
 /** Puts a window together: session, files, threads, content. */
 final class OpenWindow {
+    /** Milliseconds that a new plan may wait for its first picture. */
+    private static final long PATIENCE = 200;
+
     private final Threads threads = new Threads();
     private final BoardSession session;
     private final ThemeChoice themes;
@@ -31,13 +37,20 @@ final class OpenWindow {
     private final Stage stage;
 
     /**
+     * What works in the background.
+     *
      * @param planner used by one thread at a time
-     * @param nearby  folders near which demo boards may be
+     * @param sampler used by one thread at a time
      */
-    OpenWindow(Stage stage, Planning.Planner planner, Choosers choosers, ObservableValue<ColorScheme> system,
+    record Engines(Planning.Planner planner, PlanSampling.Sampler sampler) {}
+
+    /** @param nearby folders near which demo boards may be */
+    OpenWindow(Stage stage, Engines engines, Choosers choosers, ObservableValue<ColorScheme> system,
             List<Path> nearby) {
         this.stage = stage;
-        session = new BoardSession(new Planning(planner, threads.planning(), Platform::runLater));
+        session = new BoardSession(new Planning(engines.planner(), threads.planning(), Platform::runLater),
+                new PlanSampling(engines.sampler(), threads.sampling(), Platform::runLater),
+                CompletableFuture.delayedExecutor(PATIENCE, TimeUnit.MILLISECONDS, Platform::runLater));
         Theme.loadFonts();
         themes = new ThemeChoice(system);
         StatusModel status = new StatusModel(session);
@@ -100,6 +113,7 @@ final class OpenWindow {
     /** Ends the background work. */
     void release() {
         session.planning().cancel();
+        session.sampling().cancel();
         threads.close();
     }
 }

@@ -16,6 +16,7 @@ import shuntwright.plan.Verdict;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Planned;
 import shuntwright.planner.session.WrongEntry;
+import shuntwright.planner.work.TrialWords;
 
 /** What the status bar says. */
 final class StatusModel {
@@ -27,7 +28,8 @@ final class StatusModel {
     StatusModel(BoardSession session) {
         this.session = session;
         text = Bindings.createStringBinding(this::words, session.openProperty(), session.messageProperty(), done,
-                session.planning().stageProperty(), session.plannedProperty(), session.stateProperty());
+                session.planning().stageProperty(), session.plannedProperty(), session.stateProperty(),
+                session.sampling().stageProperty(), session.sampling().stateProperty());
         wrong = Bindings.createStringBinding(() -> {
             var entries = session.state().wrong();
             return switch (entries.size()) {
@@ -47,10 +49,19 @@ final class StatusModel {
         if (!session.planning().stageProperty().get().isEmpty()) {
             return capital(session.planning().stageProperty().get()) + " …";
         }
-        if (!done.get().isEmpty()) {
-            return capital(done.get());
-        }
-        return session.plannedProperty().get().map(this::verdicts).orElse("");
+        String last = done.get().isEmpty()
+                ? session.plannedProperty().get().map(this::verdicts).orElse("")
+                : capital(done.get());
+        return last.isEmpty() ? capital(sampling()) : last + (sampling().isEmpty() ? "" : " – " + sampling());
+    }
+
+    private String sampling() {
+        return switch (session.sampling().stateProperty().get()) {
+            case IDLE, FAILED, DONE -> "";
+            case RUNNING -> session.sampling().stageProperty().get() + " …";
+            case STOPPED -> "sampling stopped" + session.plannedProperty().get().flatMap(each -> each.plan().study())
+                    .map(study -> " at " + TrialWords.of(study.sampling())).orElse("");
+        };
     }
 
     private String verdicts(Planned planned) {
@@ -84,7 +95,7 @@ final class StatusModel {
     }
 
     private static String capital(String words) {
-        return Character.toUpperCase(words.charAt(0)) + words.substring(1);
+        return words.isEmpty() ? words : Character.toUpperCase(words.charAt(0)) + words.substring(1);
     }
 
     /** Says that something was done, until the next edit. */

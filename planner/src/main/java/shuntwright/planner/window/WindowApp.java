@@ -15,6 +15,7 @@ import javafx.stage.Stage;
 import org.jspecify.annotations.Nullable;
 
 import shuntwright.plan.BoardPlanner;
+import shuntwright.plan.BoardSampler;
 import shuntwright.planner.window.dialog.SystemChoosers;
 
 /** The desktop window as a program. */
@@ -66,8 +67,9 @@ public final class WindowApp extends Application {
     @Override
     public void start(Stage stage) {
         STARTED.set(true);
-        OpenWindow opened = new OpenWindow(stage, new BoardPlanner()::plan, new SystemChoosers(() -> stage),
-                Platform.getPreferences().colorSchemeProperty(), nearby());
+        BoardSampler sampler = new BoardSampler(Runtime.getRuntime().availableProcessors());
+        OpenWindow opened = new OpenWindow(stage, new OpenWindow.Engines(new BoardPlanner()::plan, sampler::sample),
+                new SystemChoosers(() -> stage), Platform.getPreferences().colorSchemeProperty(), nearby());
         window = opened;
         Thread.setDefaultUncaughtExceptionHandler((thread, problem) -> {
             System.getLogger(WindowApp.class.getName()).log(System.Logger.Level.ERROR,

@@ -7,11 +7,17 @@ import java.util.concurrent.Executors;
 public final class Threads implements AutoCloseable {
     private final ExecutorService planning = Executors
             .newSingleThreadExecutor(Thread.ofPlatform().name("planning").daemon().factory());
+    private final ExecutorService sampling = Executors
+            .newSingleThreadExecutor(Thread.ofPlatform().name("sampling").daemon().factory());
     private final ExecutorService files = Executors
             .newSingleThreadExecutor(Thread.ofPlatform().name("files").factory());
 
     public ExecutorService planning() {
         return planning;
+    }
+
+    public ExecutorService sampling() {
+        return sampling;
     }
 
     /** Not a daemon: a save that has begun is finished even when the window closes. */
@@ -22,6 +28,7 @@ public final class Threads implements AutoCloseable {
     @Override
     public void close() {
         planning.shutdownNow();
+        sampling.shutdownNow();
         files.shutdown();
     }
 }

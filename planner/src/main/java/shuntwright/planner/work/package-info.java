@@ -1,4 +1,4 @@
-/** Work off the window's thread: one named thread for planning, one for files; results are handed to a publisher. */
+/** Work off the window's thread: one named thread for planning, one for sampling, one for files; results are handed to a publisher. */
 @NullMarked
 package shuntwright.planner.work;
 

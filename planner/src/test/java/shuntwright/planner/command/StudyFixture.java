@@ -65,7 +65,8 @@ final class StudyFixture {
                         true,
                         settled),
                 channel(names.get(2), true, 1_000_000,
-                        new Probability(0.0123, Range.of(0.01214, 0.01256), 1e-4, Probability.Method.COUNTED, 1_000_000),
+                        new Probability(0.0123, Range.of(0.01214, 0.01256), 1e-4, Probability.Method.COUNTED,
+                                1_000_000),
                         false, true));
         return new BoardStudy(new Sampling(trials, 7), channels, new BoardYield(
                 new Probability(0.9876, Range.of(0.9874, 0.9879), 1e-4, Probability.Method.COUNTED, 1_000_000), 0.9512,

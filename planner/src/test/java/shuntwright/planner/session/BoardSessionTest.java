@@ -15,14 +15,17 @@ import shuntwright.parts.Catalogue;
 import shuntwright.plan.Verdict;
 import shuntwright.planner.HandMadeBoards;
 import shuntwright.planner.HandMadePlans;
+import shuntwright.planner.HandMadeStudies;
+import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.BoardField;
 import shuntwright.planner.entry.ChannelField;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 
 class BoardSessionTest {
     private final Queue<Runnable> background = new ArrayDeque<>();
     private final BoardSession session = new BoardSession(
-            new Planning(HandMadePlans::plan, background::add, Runnable::run));
+            new Planning(HandMadePlans::plan, background::add, Runnable::run), Sessions.sampling(), Sessions.PATIENT);
     private final Place load = new Place.Cell(0, ChannelField.LOAD);
 
     @BeforeEach
@@ -125,12 +128,12 @@ class BoardSessionTest {
 
     @Test
     void aPlannersMistakeIsToldAndTheLastPlanStays() {
-        BoardSession broken = new BoardSession(new Planning((board, catalogue, progress) -> {
+        BoardSession broken = Sessions.planned((board, catalogue, progress) -> {
             if (board.channels().getFirst().currents().load().orElse(0) < 20) {
                 throw new IllegalStateException("divided by zero");
             }
             return HandMadePlans.plan(board, catalogue, progress);
-        }, Runnable::run, Runnable::run));
+        });
         broken.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
         Optional<Planned> before = broken.plannedProperty().get();
         broken.enter(load, "19");
@@ -157,5 +160,95 @@ class BoardSessionTest {
         assertThat(session.unsavedProperty().get()).isTrue();
         session.markSaved(session.state().board());
         assertThat(session.unsavedProperty().get()).isFalse();
+    }
+
+    private final Queue<Runnable> drawing = new ArrayDeque<>();
+    private final Queue<Runnable> patience = new ArrayDeque<>();
+
+    private BoardSession sampledLater() {
+        BoardSession later = new BoardSession(new Planning(HandMadePlans::plan, Runnable::run, Runnable::run),
+                new PlanSampling(HandMadeStudies::sample, drawing::add, Runnable::run), patience::add);
+        later.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
+        return later;
+    }
+
+    private static Verdict radar(BoardSession of) {
+        return of.plannedProperty().get().orElseThrow().channel(2).orElseThrow().verdict();
+    }
+
+    @Test
+    void theFirstPlanIsOnShowBeforeItIsSampled() {
+        BoardSession later = sampledLater();
+        assertThat(later.currentBinding().get()).isTrue();
+        assertThat(radar(later)).as("without trials nothing is likely").isEqualTo(Verdict.OUTSIDE);
+        drawing.remove().run();
+        assertThat(radar(later)).isEqualTo(Verdict.LIKELY);
+        assertThat(later.currentBinding().get()).isTrue();
+    }
+
+    @Test
+    void verdictsDoNotGoToAndFroWithEachEdit() {
+        BoardSession later = sampledLater();
+        drawing.remove().run();
+        later.enter(load, "19");
+        assertThat(radar(later)).as("until the new plan has its first picture").isEqualTo(Verdict.LIKELY);
+        assertThat(later.currentBinding().get()).isFalse();
+        drawing.remove().run();
+        assertThat(radar(later)).isEqualTo(Verdict.LIKELY);
+        assertThat(later.currentBinding().get()).isTrue();
+    }
+
+    @Test
+    void aPlanWaitsOnlyAMomentForItsFirstPicture() {
+        BoardSession later = sampledLater();
+        drawing.remove().run();
+        later.enter(load, "19");
+        patience.forEach(Runnable::run);
+        assertThat(later.currentBinding().get()).isTrue();
+        assertThat(later.plannedProperty().get().orElseThrow().plan().study()).isEmpty();
+        drawing.remove().run();
+        patience.forEach(Runnable::run);
+        assertThat(later.plannedProperty().get().orElseThrow().plan().study()).as("the pictures stay").isPresent();
+    }
+
+    @Test
+    void aStoppedPlanIsShownWithoutTrialsAndCanBeSampledOn() {
+        BoardSession later = sampledLater();
+        drawing.remove().run();
+        later.enter(load, "19");
+        later.stopSampling();
+        assertThat(later.currentBinding().get()).isTrue();
+        assertThat(later.plannedProperty().get().orElseThrow().plan().study()).isEmpty();
+        drawing.clear();
+        later.sampleAgain();
+        drawing.remove().run();
+        assertThat(later.plannedProperty().get().orElseThrow().plan().study()).isPresent();
+    }
+
+    @Test
+    void aNewerEditEndsTheSamplingOfTheOlderPlan() {
+        BoardSession later = sampledLater();
+        later.enter(load, "19");
+        later.enter(load, "18");
+        assertThat(drawing).hasSize(3);
+        List<Double> loads = new java.util.ArrayList<>();
+        later.plannedProperty().subscribe(plan -> plan.ifPresent(each -> loads
+                .add(each.plan().board().channels().getFirst().currents().load().orElseThrow())));
+        loads.clear();
+        drawing.forEach(Runnable::run);
+        assertThat(loads).as("three pictures of the last plan only").containsExactly(18.0, 18.0, 18.0);
+    }
+
+    @Test
+    void aSamplersMistakeIsToldAndThePlanStands() {
+        BoardSession broken = new BoardSession(new Planning(HandMadePlans::plan, Runnable::run, Runnable::run),
+                new PlanSampling((_, _, _, _) -> {
+                    throw new IllegalStateException("no numbers left");
+                }, Runnable::run, Runnable::run), Sessions.PATIENT);
+        broken.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
+        assertThat(broken.messageProperty().get()).contains("no numbers left");
+        assertThat(broken.currentBinding().get()).isTrue();
+        broken.enter(load, "19");
+        assertThat(broken.currentBinding().get()).as("plans are made as before").isTrue();
     }
 }

@@ -2,6 +2,7 @@ package shuntwright.planner.session;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -18,8 +19,11 @@ import shuntwright.io.boardfile.BoardFiles;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.HandMadeBoards;
 import shuntwright.planner.HandMadePlans;
+import shuntwright.planner.HandMadeStudies;
+import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.ChannelField;
 import shuntwright.planner.work.FileWork;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 
 class DocumentsTest {
@@ -60,8 +64,7 @@ class DocumentsTest {
     private Path folder;
 
     private final Answers answers = new Answers();
-    private final BoardSession session = new BoardSession(
-            new Planning(HandMadePlans::plan, Runnable::run, Runnable::run));
+    private final BoardSession session = Sessions.closed();
     private final Documents documents = new Documents(session, new FileBoardStore(), answers,
             new FileWork(Runnable::run, Runnable::run));
     private Path file;
@@ -159,7 +162,7 @@ class DocumentsTest {
     @Test
     void nothingIsExportedThatDoesNotBelongToTheBoardOnShow() {
         BoardSession waiting = new BoardSession(new Planning(HandMadePlans::plan, _ -> {
-        }, Runnable::run));
+        }, Runnable::run), Sessions.sampling(), Sessions.PATIENT);
         Documents early = new Documents(waiting, new FileBoardStore(), answers,
                 new FileWork(Runnable::run, Runnable::run));
         early.open(file);
@@ -167,6 +170,34 @@ class DocumentsTest {
         early.exportWorkbook();
         assertThat(answers.told.getLast()).startsWith("Not exported");
         assertThat(folder.resolve("early.xlsx")).doesNotExist();
+    }
+
+    @Test
+    void nothingIsExportedWhileTrialsAreDrawnUnlessTheyAreStopped() {
+        BoardSession drawing = new BoardSession(new Planning(HandMadePlans::plan, Runnable::run, Runnable::run),
+                new PlanSampling(HandMadeStudies::sample, _ -> {
+                }, Runnable::run), Sessions.PATIENT);
+        Documents early = new Documents(drawing, new FileBoardStore(), answers,
+                new FileWork(Runnable::run, Runnable::run));
+        early.open(file);
+        answers.target = Optional.of(folder.resolve("early.plan.json"));
+        early.exportPlan();
+        assertThat(answers.told.getLast()).startsWith("Not exported").contains("stop it in the status bar");
+        drawing.stopSampling();
+        early.exportPlan();
+        assertThat(folder.resolve("early.plan.json")).isNotEmptyFile();
+    }
+
+    @Test
+    void aPictureIsSavedUnderTheBoardsNameAndWhatItShows() {
+        answers.target = Optional.of(folder.resolve("radar.png"));
+        documents.savePicture("radar, trip current", () -> new BufferedImage(2, 2, BufferedImage.TYPE_INT_ARGB));
+        assertThat(folder.resolve("radar.png")).isNotEmptyFile();
+        assertThat(answers.told).contains("suggested boat-radar-trip-current.png", "saved radar.png");
+        answers.target = Optional.empty();
+        documents.savePicture("radar", () -> {
+            throw new AssertionError("no picture is made where no file is chosen");
+        });
     }
 
     @Test

@@ -24,6 +24,7 @@ import org.testfx.util.WaitForAsyncUtils;
 
 import shuntwright.board.Channel;
 import shuntwright.planner.HandMadePlans;
+import shuntwright.planner.HandMadeStudies;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.window.dialog.Choosers;
 
@@ -48,7 +49,9 @@ class NewBoardWindowTest {
                 return Optional.empty();
             }
         };
-        window = new OpenWindow(shown, HandMadePlans::plan, none, new SimpleObjectProperty<>(ColorScheme.LIGHT),
+        window = new OpenWindow(shown,
+                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample), none,
+                new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of());
         window.show();
     }

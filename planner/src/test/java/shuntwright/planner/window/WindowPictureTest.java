@@ -26,8 +26,10 @@ import org.testfx.framework.junit5.Stop;
 import org.testfx.util.WaitForAsyncUtils;
 
 import shuntwright.plan.BoardPlanner;
+import shuntwright.plan.BoardSampler;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.window.dialog.Choosers;
+import shuntwright.planner.work.PlanSampling;
 
 /**
  * The window with a demo board and its real plan. With -Dshuntwright.pictures=FOLDER the pictures of the documentation
@@ -54,7 +56,9 @@ class WindowPictureTest {
                 return Optional.empty();
             }
         };
-        window = new OpenWindow(shown, new BoardPlanner()::plan, none, new SimpleObjectProperty<>(ColorScheme.LIGHT),
+        window = new OpenWindow(shown,
+                new OpenWindow.Engines(new BoardPlanner()::plan, new BoardSampler(2)::sample), none,
+                new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of(root));
         window.show();
         stage.setWidth(1500);
@@ -68,7 +72,8 @@ class WindowPictureTest {
 
     private void settle() throws Exception {
         WaitForAsyncUtils.waitFor(120, TimeUnit.SECONDS,
-                () -> WaitForAsyncUtils.asyncFx(() -> window.session().currentBinding().get()).get());
+                () -> WaitForAsyncUtils.asyncFx(() -> window.session().currentBinding().get()
+                        && window.session().sampling().stateProperty().get() == PlanSampling.State.DONE).get());
         WaitForAsyncUtils.waitForFxEvents();
     }
 

@@ -33,6 +33,7 @@ import shuntwright.io.boardfile.BoardFiles;
 import shuntwright.plan.Verdict;
 import shuntwright.planner.HandMadeBoards;
 import shuntwright.planner.HandMadePlans;
+import shuntwright.planner.HandMadeStudies;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.window.dialog.Choosers;
 
@@ -62,7 +63,9 @@ class WindowTest {
                 return Optional.of(saved);
             }
         };
-        window = new OpenWindow(shown, HandMadePlans::plan, choosers, new SimpleObjectProperty<>(ColorScheme.LIGHT),
+        window = new OpenWindow(shown,
+                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample), choosers,
+                new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of());
         window.show();
         Path file = folder.resolve("boat.board.json");

@@ -3,35 +3,46 @@ package shuntwright.planner.window.budget;
 import java.util.List;
 import java.util.Optional;
 
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.ReadOnlyBooleanProperty;
+import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 
 import shuntwright.accuracy.Assessment;
-import shuntwright.accuracy.BudgetLine;
 import shuntwright.accuracy.Outcome;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.SolvedChannel;
 import shuntwright.planner.session.BoardSession;
-import shuntwright.quantity.Dimension;
-import shuntwright.quantity.QuantityWriter;
+import shuntwright.sampling.ChannelStudy;
 
-/** The sorted contributions to one outcome of the selected channel. */
+/** One outcome of the selected channel by limits, combined uncertainty and propagated distribution. */
 public final class BudgetModel {
     private final BoardSession session;
     private final ObservableList<BudgetRow> rows = FXCollections.observableArrayList();
     private final ObservableList<Outcome> outcomes = FXCollections.observableArrayList();
+    private final ObservableList<Fact> facts = FXCollections.observableArrayList();
     private final ObjectProperty<Outcome> outcome = new SimpleObjectProperty<>(Outcome.TRIP);
+    private final BooleanProperty beforeCalibration = new SimpleBooleanProperty();
+    private final ReadOnlyBooleanWrapper calibrated = new ReadOnlyBooleanWrapper();
     private final ReadOnlyStringWrapper summary = new ReadOnlyStringWrapper("");
+    private final ReadOnlyObjectWrapper<Optional<HistogramDrawing>> drawing = new ReadOnlyObjectWrapper<>(
+            Optional.empty());
 
     public BudgetModel(BoardSession session) {
         this.session = session;
         session.plannedProperty().subscribe(this::refresh);
         session.selectionProperty().subscribe(this::refresh);
+        session.sampling().stateProperty().subscribe(this::refresh);
         outcome.subscribe(this::refresh);
+        beforeCalibration.subscribe(this::refresh);
         refresh();
     }
 
@@ -44,13 +55,33 @@ public final class BudgetModel {
         return outcomes;
     }
 
+    /** What the three ways say of the outcome as a whole. */
+    ObservableList<Fact> facts() {
+        return facts;
+    }
+
     ObjectProperty<Outcome> outcomeProperty() {
         return outcome;
     }
 
-    /** The outcome as a whole, in words. */
+    /** Whether a calibrated reading is shown as it would be without calibration. */
+    BooleanProperty beforeCalibrationProperty() {
+        return beforeCalibration;
+    }
+
+    /** True when the outcome is a calibrated reading. */
+    ReadOnlyBooleanProperty calibratedProperty() {
+        return calibrated.getReadOnlyProperty();
+    }
+
+    /** Whose outcome it is, or why there is none, in words. */
     ReadOnlyStringProperty summaryProperty() {
         return summary.getReadOnlyProperty();
+    }
+
+    /** The picture; empty without an outcome. */
+    ReadOnlyObjectProperty<Optional<HistogramDrawing>> drawingProperty() {
+        return drawing.getReadOnlyProperty();
     }
 
     private void refresh() {
@@ -64,45 +95,58 @@ public final class BudgetModel {
         if (!there.equals(outcomes)) {
             outcomes.setAll(there);
         }
-        Optional<Assessment> chosen = solved
-                .flatMap(each -> each.assessment(outcome.get()).or(() -> Optional.of(each.trip())));
-        if (chosen.isEmpty() || solved.isEmpty()) {
+        if (plan.isEmpty() || solved.isEmpty()) {
+            calibrated.set(false);
+            drawing.set(Optional.empty());
             rows.clear();
+            facts.clear();
             summary.set(plan.isPresent()
                     ? "No error budget, since nothing could be chosen for this channel; see the findings."
                     : "Select a planned channel to see what its tolerances come from.");
             return;
         }
-        Assessment assessment = chosen.get();
-        double target = solved.get().demand().tripTarget();
-        double longest = assessment.budget().stream().mapToDouble(BudgetLine::widest).max().orElse(1);
-        rows.setAll(assessment.budget().stream().map(line -> row(line, target, longest > 0 ? longest : 1)).toList());
-        summary.set(plan.get().channel().name() + ", " + assessment.outcome().words() + ": nominal "
-                + show(assessment.nominal()) + ", limits " + show(assessment.limits().min()) + " to "
-                + show(assessment.limits().max()) + ", combined ±" + show(assessment.combined().expanded()) + " (k = "
-                + String.format(java.util.Locale.ROOT, "%.2f", assessment.combined().coverageFactor()) + "), allowed "
-                + show(assessment.allowed().min()) + " to " + show(assessment.allowed().max()) + ".");
+        show(plan.get(), solved.get());
     }
 
-    private static BudgetRow row(BudgetLine line, double target, double longest) {
-        return new BudgetRow(line.input().label(), signed(line.towardsLow()), signed(line.towardsHigh()),
-                percent(line.towardsLow() / target), percent(line.towardsHigh() / target),
-                String.format(java.util.Locale.ROOT, "%.1f %%", line.varianceShare() * 100),
-                line.towardsLow() / longest, line.towardsHigh() / longest, line.varianceShare(), line.widest());
+    private void show(ChannelPlan plan, SolvedChannel solved) {
+        Assessment after = solved.assessment(outcome.get()).orElseGet(solved::trip);
+        Optional<Assessment> before = solved.uncalibrated().stream()
+                .filter(each -> each.outcome() == after.outcome()).findFirst();
+        calibrated.set(before.isPresent());
+        boolean bare = before.isPresent() && beforeCalibration.get();
+        Assessment shown = bare ? before.get() : after;
+        Optional<ChannelStudy> study = bare ? Optional.empty() : study(plan.channel().name());
+        String unsampled = bare ? "not sampled: trials are of the calibrated reading" : unsampled();
+        List<BudgetRow> lines = BudgetRows.of(shown, study.flatMap(each -> each.outcome(shown.outcome())),
+                solved.demand().tripTarget());
+        if (!lines.equals(rows)) {
+            rows.setAll(lines);
+        }
+        List<Fact> said = new java.util.ArrayList<>(Facts.of(shown, study, unsampled));
+        if (!bare) {
+            before.ifPresent(each -> said.add(Facts.before(each)));
+        }
+        if (!said.equals(facts)) {
+            facts.setAll(said);
+        }
+        String title = plan.channel().name() + ", " + shown.outcome().words()
+                + (bare ? " without calibration" : before.isPresent() ? " with calibration" : "");
+        drawing.set(Optional.of(HistogramDrawing.of(title, shown,
+                study.flatMap(each -> each.outcome(shown.outcome())), unsampled)));
+        summary.set(title);
     }
 
-    private static String show(double current) {
-        return QuantityWriter.show(current, Dimension.CURRENT);
+    private Optional<ChannelStudy> study(String channel) {
+        return session.plannedProperty().get().flatMap(each -> each.plan().study())
+                .flatMap(each -> each.channel(channel));
     }
 
-    private static String signed(double current) {
-        String size = QuantityWriter.show(Math.abs(current), Dimension.CURRENT, 3);
-        return current == 0 ? size : current < 0 ? "−" + size : "+" + size;
-    }
-
-    private static String percent(double share) {
-        double value = Math.abs(share * 100);
-        String size = String.format(java.util.Locale.ROOT, value < 0.01 ? "%.4f %%" : "%.2f %%", value);
-        return value == 0 ? "0 %" : share < 0 ? "−" + size : "+" + size;
+    private String unsampled() {
+        return switch (session.sampling().stateProperty().get()) {
+            case RUNNING -> "sampling …";
+            case STOPPED -> "not sampled: stopped before the first picture";
+            case FAILED -> "not sampled: an error within the program, see the status bar";
+            case IDLE, DONE -> "not sampled";
+        };
     }
 }

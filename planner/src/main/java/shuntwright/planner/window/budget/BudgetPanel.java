@@ -1,40 +1,86 @@
 package shuntwright.planner.window.budget;
 
-import java.util.Comparator;
-import java.util.function.Function;
-
-import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.collections.ListChangeListener;
+import javafx.collections.transformation.SortedList;
+import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.TableCell;
-import javafx.scene.control.TableColumn;
+import javafx.scene.control.RadioButton;
 import javafx.scene.control.TableView;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
 
 import org.jspecify.annotations.Nullable;
 
 import shuntwright.accuracy.Outcome;
+import shuntwright.planner.session.Documents;
 
-/** The error budget as a table of bars. */
+/** The error budget: what the outcome is, which input does what, and the trials in a picture. */
 public final class BudgetPanel {
+    /** Room for all columns. */
+    private static final double TABLE = 1000;
+
+    private final BudgetModel model;
     private final BorderPane pane = new BorderPane();
     private final TableView<BudgetRow> table = new TableView<>();
+    private final HistogramView histogram = new HistogramView();
+    private final FlowPane facts = new FlowPane();
 
-    public BudgetPanel(BudgetModel model) {
+    public BudgetPanel(BudgetModel model, Documents documents) {
+        this.model = model;
         table.setId("budget");
         table.getStyleClass().add("plain-table");
         table.setPlaceholder(new Label(""));
-        words("Contribution", 300, BudgetRow::label, Comparator.comparing(BudgetRow::label));
-        bars(260);
-        number("Lower limit", BudgetRow::low, Comparator.comparingDouble(BudgetRow::lowBar));
-        number("of trip target", BudgetRow::lowPercent, Comparator.comparingDouble(BudgetRow::lowBar));
-        number("Upper limit", BudgetRow::high, Comparator.comparingDouble(BudgetRow::highBar));
-        number("of trip target ", BudgetRow::highPercent, Comparator.comparingDouble(BudgetRow::highBar));
-        number("Variance share", BudgetRow::variance, Comparator.comparingDouble(BudgetRow::share));
-        table.setItems(model.rows());
+        BudgetColumns.addTo(table);
+        SortedList<BudgetRow> sorted = new SortedList<>(model.rows());
+        sorted.comparatorProperty().bind(table.comparatorProperty());
+        table.setItems(sorted);
+        facts.getStyleClass().add("facts");
+        facts.setId("budget-facts");
+        model.facts().addListener((ListChangeListener<Fact>) _ -> showFacts());
+        showFacts();
+        model.drawingProperty().subscribe(histogram::show);
+        table.setPrefWidth(TABLE);
+        table.setMinWidth(TABLE / 2);
+        HBox.setHgrow(histogram, Priority.ALWAYS);
+        HBox both = new HBox(table, histogram);
+        pane.setTop(new VBox(head(documents), facts));
+        pane.setCenter(both);
+    }
+
+    /** The control for the window. */
+    public Region node() {
+        return pane;
+    }
+
+    private HBox head(Documents documents) {
+        ComboBox<Outcome> outcomes = outcomes();
+        Label of = new Label("Budget of the");
+        of.setLabelFor(outcomes);
+        Label summary = new Label();
+        summary.textProperty().bind(model.summaryProperty());
+        summary.getStyleClass().add("budget-summary");
+        summary.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(summary, Priority.ALWAYS);
+        Button save = new Button("Save picture…");
+        save.setId("save-picture");
+        save.setMnemonicParsing(false);
+        save.disableProperty().bind(model.drawingProperty().map(java.util.Optional::isEmpty));
+        save.setTooltip(new Tooltip("Save the picture as a PNG file"));
+        save.setOnAction(_ -> documents.savePicture(model.summaryProperty().get(), histogram::picture));
+        HBox head = new HBox(of, outcomes, calibration(), summary, save);
+        head.getStyleClass().add("panel-head");
+        return head;
+    }
+
+    private ComboBox<Outcome> outcomes() {
         ComboBox<Outcome> outcomes = new ComboBox<>(model.outcomes());
         outcomes.setId("budget-outcome");
         outcomes.setConverter(new StringConverter<>() {
@@ -56,77 +102,44 @@ public final class BudgetPanel {
         model.outcomes().subscribe(() -> outcomes.setValue(model.outcomes().contains(model.outcomeProperty().get())
                 ? model.outcomeProperty().get()
                 : model.outcomes().isEmpty() ? null : model.outcomes().getFirst()));
-        Label of = new Label("Budget of the");
-        of.setLabelFor(outcomes);
-        Label summary = new Label();
-        summary.textProperty().bind(model.summaryProperty());
-        summary.getStyleClass().add("budget-summary");
-        HBox head = new HBox(of, outcomes, summary);
-        head.getStyleClass().add("panel-head");
-        pane.setTop(head);
-        pane.setCenter(table);
+        return outcomes;
     }
 
-    /** The control for the window. */
-    public Region node() {
-        return pane;
+    private HBox calibration() {
+        RadioButton after = new RadioButton("after calibration");
+        RadioButton before = new RadioButton("before calibration");
+        after.setId("after-calibration");
+        before.setId("before-calibration");
+        ToggleGroup group = new ToggleGroup();
+        after.setToggleGroup(group);
+        before.setToggleGroup(group);
+        after.setSelected(true);
+        model.beforeCalibrationProperty().bind(before.selectedProperty());
+        HBox both = new HBox(after, before);
+        both.getStyleClass().add("calibration-choice");
+        both.visibleProperty().bind(model.calibratedProperty());
+        both.managedProperty().bind(model.calibratedProperty());
+        return both;
     }
 
-    private TableColumn<BudgetRow, BudgetRow> column(String title, double width, Comparator<BudgetRow> order) {
-        TableColumn<BudgetRow, BudgetRow> column = new TableColumn<>(title);
-        column.setPrefWidth(width);
-        column.setCellValueFactory(row -> new ReadOnlyObjectWrapper<>(row.getValue()));
-        column.setComparator(order);
-        table.getColumns().add(column);
-        return column;
+    private void showFacts() {
+        facts.getChildren().setAll(model.facts().stream().map(BudgetPanel::fact).toList());
     }
 
-    private void words(String title, double width, Function<BudgetRow, String> text, Comparator<BudgetRow> order) {
-        column(title, width, order).setCellFactory(_ -> new TextCell(text));
-    }
-
-    private void number(String title, Function<BudgetRow, String> text, Comparator<BudgetRow> order) {
-        TableColumn<BudgetRow, BudgetRow> column = column(title, 104, order);
-        column.getStyleClass().add("number-column");
-        column.setCellFactory(_ -> {
-            TextCell cell = new TextCell(text);
-            cell.getStyleClass().add("figure-cell");
-            return cell;
-        });
-    }
-
-    private void bars(double width) {
-        TableColumn<BudgetRow, BudgetRow> column = column("Moves the limits by", width,
-                Comparator.comparingDouble(BudgetRow::widest));
-        column.setCellFactory(_ -> new BarCell());
-    }
-
-    private static final class TextCell extends TableCell<BudgetRow, BudgetRow> {
-        private final Function<BudgetRow, String> text;
-
-        TextCell(Function<BudgetRow, String> text) {
-            this.text = text;
-        }
-
-        @Override
-        protected void updateItem(@Nullable BudgetRow row, boolean empty) {
-            super.updateItem(row, empty);
-            setText(empty || row == null ? null : text.apply(row));
-        }
-    }
-
-    private static final class BarCell extends TableCell<BudgetRow, BudgetRow> {
-        private final ContributionBar bar = new ContributionBar();
-
-        @Override
-        protected void updateItem(@Nullable BudgetRow row, boolean empty) {
-            super.updateItem(row, empty);
-            if (empty || row == null) {
-                setGraphic(null);
-            } else {
-                bar.show(row.lowBar(), row.highBar());
-                setGraphic(bar);
-            }
-        }
+    private static VBox fact(Fact fact) {
+        Label title = new Label(fact.title());
+        title.getStyleClass().add("tile-title");
+        Label value = new Label(fact.value());
+        value.getStyleClass().add("tile-value");
+        title.setLabelFor(value);
+        Tooltip tip = new Tooltip(fact.note());
+        tip.setWrapText(true);
+        tip.setMaxWidth(420);
+        title.setTooltip(tip);
+        value.setTooltip(tip);
+        value.setAccessibleText(fact.title() + ": " + fact.value() + ". " + fact.note());
+        VBox box = new VBox(title, value);
+        box.getStyleClass().add("fact");
+        return box;
     }
 }

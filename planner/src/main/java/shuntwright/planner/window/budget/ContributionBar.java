@@ -30,7 +30,7 @@ final class ContributionBar extends Region {
 
     @Override
     protected double computePrefWidth(double height) {
-        return 240;
+        return 72;
     }
 
     @Override

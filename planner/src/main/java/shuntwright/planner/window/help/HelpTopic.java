@@ -14,17 +14,47 @@ public enum HelpTopic {
                     + "shows where in the allowed window it trips.",
             "4. Select a channel that is not inside and read its findings. A cure that is a change of the demand has a "
                     + "button; Undo takes it back.",
-            "5. The error budget shows which tolerance costs most. The shared strip shows what all channels take of "
+            "5. The error budget shows which tolerance costs most, and the trials inside the allowed window. The shared strip shows what all channels take of "
                     + "supply, references and heat; click a tile to change its limits.",
             "6. Export the workbook for purchasing and for the bench.")),
     VERDICTS("Verdicts", List.of(
             "● inside – even in the worst case of all tolerances it trips (releases, reads) within what is asked.",
-            "○ likely – not in the worst case, but the coverage interval is within. The board's acceptance decides "
-                    + "whether that counts.",
+            "○ likely – not in the worst case, but the coverage interval of the propagated distribution is within. The "
+                    + "board's acceptance decides whether that counts.",
             "▲ outside – neither; the findings say by how much and what would cure it.",
             "✕ no fit – no choice of parts respects the limits, such as an amplifier's output swing or a shunt's "
                     + "power; the findings name the nearest miss.",
             "▫ incomplete – something needed is not typed yet; the findings say what.")),
+    ERROR_BUDGET("Error budget", List.of(
+            "The same inputs, with the same limits and distributions, are read in three ways.",
+            "Limits – the exact extremes when every input may stand anywhere within its limits at once. A channel inside "
+                    + "by limits is inside whatever the distributions are.",
+            "Combined – the combined uncertainty of JCGM 100: standard uncertainties, weighted by sensitivity and added "
+                    + "as squares, times the coverage factor k. It supposes that the outcome is nearly normal.",
+            "Propagated – the distribution that random trials give (JCGM 101). Its symmetric interval leaves as many "
+                    + "trials below as above, its shortest interval is the shortest that holds as many. After ± stands "
+                    + "the standard error that more trials would make smaller.",
+            "Combined uncertainty valid – whether the combined uncertainty may stand for the distribution (JCGM 101, "
+                    + "clause 8). Where one input with flat limits leads, it is not, and the propagated interval is "
+                    + "narrower.",
+            "Outside allowed – the probability that this outcome is not within its window. Trials cannot prove that "
+                    + "something never happens: where none failed, the bound is given that holds with 95 % confidence.",
+            "Limits, Lower, Upper, of target – what each input does to the limits by itself, in amperes and of the trip "
+                    + "target.",
+            "Variance – its share of the combined variance.",
+            "First-order – the share of the trials' variance that it explains by itself. Total effect – the share it "
+                    + "takes part in together with the inputs it multiplies, as a drift takes part with the ambient. "
+                    + "Where the two differ, mending one of the partners helps as well.",
+            "Before and after calibration – a calibrated reading can be seen as it would be without calibration; its "
+                    + "trials are of the calibrated reading.",
+            "Board yield – on how many boards all channels are inside together, with one supply, ambient and reference "
+                    + "for all of them; beside it what the product of the channels' own probabilities would have "
+                    + "claimed. Click it to see what each shared thing costs.",
+            "The trials are drawn in the background: a first picture of 10,000, a better one of 100,000, then as many as "
+                    + "the board asks for. The status bar shows it and can stop it; the best picture stays. The same "
+                    + "board and seed give the same figures on every machine.",
+            "Distributions that nobody stated are uniform between the limits. The figures are as good as the limits and "
+                    + "distributions stated.")),
     KEYBOARD("Keyboard",
             List.of("Arrow keys: move between cells",
                     "Tab, Shift+Tab: move to the next, the last cell that can be typed into (Ctrl+Tab leaves the "

@@ -38,11 +38,6 @@ final class BoardFieldEditor {
             line.setMaxWidth(560);
             grid.add(line, 0, fields.size() * 2 + at, 2, 1);
         }
-        if (fields.isEmpty()) {
-            Label where = new Label("These are made and changed in the board file.");
-            where.getStyleClass().add("hint");
-            grid.add(where, 0, details.size(), 2, 1);
-        }
     }
 
     Region node() {

@@ -62,7 +62,7 @@ public final class SharedStrip {
 
     private void fill(Button button, SharedTile tile) {
         button.getStyleClass().setAll("button", "shared-tile");
-        Label title = new Label(tile.title());
+        Label title = new Label(tile.note().isEmpty() ? tile.title() : tile.title() + ", " + tile.note());
         title.getStyleClass().add("tile-title");
         Label value = new Label(tile.well()
                 ? tile.value()

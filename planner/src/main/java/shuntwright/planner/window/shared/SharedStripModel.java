@@ -18,6 +18,7 @@ import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Place;
 import shuntwright.planner.session.Planned;
 import shuntwright.planner.session.WrongEntry;
+import shuntwright.planner.work.PlanSampling;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 
@@ -30,6 +31,7 @@ public final class SharedStripModel {
         this.session = session;
         session.stateProperty().subscribe(this::refresh);
         session.plannedProperty().subscribe(this::refresh);
+        session.sampling().stateProperty().subscribe(this::refresh);
         refresh();
     }
 
@@ -56,6 +58,7 @@ public final class SharedStripModel {
             case LIMITS -> "inside by limits";
             case COVERAGE -> "likely too, " + QuantityWriter.show(board.acceptance().coverage(), Dimension.RATIO);
         }, OptionalDouble.empty(), true, List.of(BoardField.BASIS, BoardField.COVERAGE)));
+        plan.flatMap(each -> inside(each, session.sampling().stateProperty().get())).ifPresent(all::add);
         all.add(new SharedTile("Board and build", board.buildQuantity() == 1
                 ? "1 board"
                 : board.buildQuantity() + " boards"
@@ -69,6 +72,14 @@ public final class SharedStripModel {
         if (!all.equals(tiles)) {
             tiles.setAll(all);
         }
+    }
+
+    /** Empty for a board without circuits. */
+    private static Optional<SharedTile> inside(Plan plan, PlanSampling.State state) {
+        if (plan.channels().stream().allMatch(each -> each.solved().isEmpty())) {
+            return Optional.empty();
+        }
+        return Optional.of(plan.study().map(YieldTile::of).orElseGet(() -> YieldTile.without(state)));
     }
 
     private static String cost(Plan plan) {
@@ -146,8 +157,9 @@ public final class SharedStripModel {
                         + (taps.size() > 1 ? " and " + (taps.size() - 1) + " more" : "");
         return Optional.of(new SharedTile("Taps", value, OptionalDouble.empty(),
                 taps.stream().allMatch(each -> each.threshold().isPresent() || each.channels().isEmpty()), List.of())
-                .withDetails(taps.stream().map(each -> tap(each) + " from " + each.tap().source().word() + ", "
-                        + counted(each.channels())).toList()));
+                .withDetails(java.util.stream.Stream.concat(taps.stream().map(each -> tap(each) + " from "
+                        + each.tap().source().word() + ", " + counted(each.channels())),
+                        java.util.stream.Stream.of("Taps are made and changed in the board file.")).toList()));
     }
 
     private static String tap(TapPlan tap) {

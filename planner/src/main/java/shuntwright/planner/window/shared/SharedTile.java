@@ -11,13 +11,14 @@ import shuntwright.planner.entry.BoardField;
  *
  * @param title   what it is
  * @param value   used and limit, in words
+ * @param note    a little more; empty where there is none
  * @param share   used of the limit, 0 and more; empty without a limit
  * @param holds   whether the limit is kept
  * @param fields  what its editor offers
  * @param details more about it, a line each
  * @param wrong   why something typed into its editor could not be taken over
  */
-record SharedTile(String title, String value, OptionalDouble share, boolean holds, List<BoardField> fields,
+record SharedTile(String title, String value, String note, OptionalDouble share, boolean holds, List<BoardField> fields,
         List<String> details, Optional<String> wrong) {
     SharedTile {
         fields = List.copyOf(fields);
@@ -25,15 +26,19 @@ record SharedTile(String title, String value, OptionalDouble share, boolean hold
     }
 
     SharedTile(String title, String value, OptionalDouble share, boolean holds, List<BoardField> fields) {
-        this(title, value, share, holds, fields, List.of(), Optional.empty());
+        this(title, value, "", share, holds, fields, List.of(), Optional.empty());
     }
 
     SharedTile withDetails(List<String> lines) {
-        return new SharedTile(title, value, share, holds, fields, lines, wrong);
+        return new SharedTile(title, value, note, share, holds, fields, lines, wrong);
+    }
+
+    SharedTile withNote(String words) {
+        return new SharedTile(title, value, words, share, holds, fields, details, wrong);
     }
 
     SharedTile withWrong(Optional<String> reason) {
-        return new SharedTile(title, value, share, holds, fields, details, reason);
+        return new SharedTile(title, value, note, share, holds, fields, details, reason);
     }
 
     /** False where its limit is broken or an entry is wrong. */
@@ -44,6 +49,7 @@ record SharedTile(String title, String value, OptionalDouble share, boolean hold
     /** Everything in words. */
     String words() {
         StringBuilder words = new StringBuilder(title).append(": ").append(value)
+                .append(note.isEmpty() ? "" : ", " + note)
                 .append(holds ? "" : share.isPresent() ? ", over its limit" : ", does not hold");
         details.forEach(each -> words.append('\n').append(each));
         wrong.ifPresent(reason -> words.append("\nWrong entry: ").append(reason));

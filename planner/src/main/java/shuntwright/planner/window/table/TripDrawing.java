@@ -25,10 +25,10 @@ record TripDrawing(Range limits, Range coverage, double nominal, String lower, S
     static TripDrawing of(Assessment trip) {
         Range allowed = trip.allowed();
         String words = "Trips between " + show(trip.limits().min()) + " and " + show(trip.limits().max())
-                + " (coverage interval " + show(trip.combined().interval().min()) + " to "
-                + show(trip.combined().interval().max()) + ", nominal " + show(trip.nominal()) + "); allowed are "
+                + " (coverage interval " + show(trip.coverage().min()) + " to "
+                + show(trip.coverage().max()) + ", nominal " + show(trip.nominal()) + "); allowed are "
                 + show(allowed.min()) + " to " + show(allowed.max()) + ".";
-        return new TripDrawing(share(trip.limits(), allowed), share(trip.combined().interval(), allowed),
+        return new TripDrawing(share(trip.limits(), allowed), share(trip.coverage(), allowed),
                 share(trip.nominal(), allowed), show(trip.limits().min()), show(trip.limits().max()), words);
     }
 

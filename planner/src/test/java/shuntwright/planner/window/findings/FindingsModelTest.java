@@ -46,7 +46,8 @@ class FindingsModelTest {
     @Test
     void aCureOfAnEarlierStateIsNotApplied() {
         Queue<Runnable> background = new ArrayDeque<>();
-        BoardSession slow = new BoardSession(new Planning(HandMadePlans::plan, background::add, Runnable::run));
+        BoardSession slow = new BoardSession(new Planning(HandMadePlans::plan, background::add, Runnable::run),
+                Sessions.sampling(), Sessions.PATIENT);
         FindingsModel findings = new FindingsModel(slow);
         slow.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);
         background.remove().run();

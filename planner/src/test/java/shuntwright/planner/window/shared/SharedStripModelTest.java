@@ -22,7 +22,6 @@ import shuntwright.planner.Sessions;
 import shuntwright.planner.entry.BoardField;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Place;
-import shuntwright.planner.work.Planning;
 
 class SharedStripModelTest {
     private final BoardSession session = Sessions.of(HandMadeBoards.boat());
@@ -70,6 +69,33 @@ class SharedStripModelTest {
     }
 
     @Test
+    void theYieldStandsBesideWhatTheProductWouldClaim() {
+        // the anchor light is outside beyond two standard deviations, 4.55 %, the hand-made board half as often
+        assertThat(tile("Board yield").value()).isEqualTo("97.7 % [97.6 .. 97.8 %]");
+        assertThat(tile("Board yield").note()).isEqualTo("product 95.4 %, ambient costs 1.1 %");
+        assertThat(tile("Board yield").words()).contains("would have claimed").contains("ambient at its nominal value")
+                .contains("1,000,000 boards tried");
+    }
+
+    @Test
+    void aYieldWithoutAFailureIsABoundAndNoCertainty() {
+        BoardSession good = Sessions.of(HandMadeBoards.boat()
+                .withChannels(HandMadeBoards.boat().channels().subList(0, 2)));
+        SharedStripModel strip = new SharedStripModel(good);
+        assertThat(strip.tiles()).filteredOn(each -> each.title().equals("Board yield")).singleElement()
+                .satisfies(tile -> {
+                    assertThat(tile.value()).isEqualTo("above 99.9996 % (95 %)");
+                    assertThat(tile.note()).isEqualTo("product above 99.9992 %");
+                });
+    }
+
+    @Test
+    void withoutACircuitThereIsNoYield() {
+        session.start(Board.named("empty"), Catalogue.EMPTY, true);
+        assertThat(model.tiles()).noneMatch(each -> each.title().equals("Board yield"));
+    }
+
+    @Test
     void tapsAreShownWithTheirChannels() {
         assertThat(model.tiles()).noneMatch(each -> each.title().equals("Taps"));
         Tap tap = new Tap("low", new Source.Supply(), new Tap.Kind.Divider(OptionalDouble.empty(),
@@ -77,11 +103,11 @@ class SharedStripModelTest {
         Board board = HandMadeBoards.boat().withTaps(List.of(tap));
         TapPlan planned = new TapPlan(tap, List.of("radar", "windlass"), Optional.of(new Threshold.Divider(
                 new SourceVoltage(new Source.Supply(), board.supply().voltage(), 0, 0, 0), 10e3, 10e3, "low", 2)));
-        BoardSession tapped = new BoardSession(new Planning((asked, parts, progress) -> {
+        BoardSession tapped = Sessions.planned((asked, parts, progress) -> {
             Plan plan = HandMadePlans.plan(asked, parts, progress);
             return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(),
                     List.of(planned), plan.references(), plan.parts(), List.of(), Optional.empty());
-        }, Runnable::run, Runnable::run));
+        });
         SharedStripModel strip = new SharedStripModel(tapped);
         tapped.start(board, Catalogue.EMPTY, true);
         assertThat(strip.tiles()).filteredOn(each -> each.title().equals("Taps")).singleElement()
