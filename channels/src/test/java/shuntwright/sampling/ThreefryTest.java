@@ -49,7 +49,7 @@ class ThreefryTest {
             int[] low = new int[HALF];
             int[] high = new int[HALF];
             int counter = word(counter0);
-            long key = (long) word(key1) << 32 | Integer.toUnsignedLong(word(key0));
+            long key = ((long) word(key1) << 32) | Integer.toUnsignedLong(word(key0));
             Threefry.fill(key, Math.floorDiv(counter, HALF), word(counter1), low, high);
             int at = Math.floorMod(counter, HALF);
             assertThat(low[at]).isEqualTo(word(first));
@@ -100,10 +100,19 @@ class ThreefryTest {
         long[] counts = new long[500];
         for (int block = 0; block < blocks; block++) {
             for (double value : column(Draws.key(1, "x"), block, 0)) {
-                counts[(int) (value * counts.length)]++;
+                counts[share(value, counts.length)]++;
             }
         }
         checkChiSquare(counts, blocks * (double) Draws.BLOCK / counts.length, "one column");
+    }
+
+    private static int share(double value, int cells) {
+        return (int) (value * cells);
+    }
+
+    /** One of 400 for a pair. */
+    private static int cell(double a, double b) {
+        return 20 * share(a, 20) + share(b, 20);
     }
 
     @Test
@@ -116,7 +125,7 @@ class ThreefryTest {
                 // Pairs that do not overlap.
                 for (int j = 0; j + lag < column.length; j += 2 * lag) {
                     for (int i = j; i < Math.min(j + lag, column.length - lag); i++) {
-                        counts[((int) (column[i] * 20)) * 20 + (int) (column[i + lag] * 20)]++;
+                        counts[cell(column[i], column[i + lag])]++;
                     }
                 }
             }
@@ -137,7 +146,7 @@ class ThreefryTest {
         for (int block = 0; block < blocks; block++) {
             double[] column = column(Draws.key(3, "x"), block, 0);
             for (int j = 0; j < HALF; j++) {
-                counts[((int) (column[j] * 20)) * 20 + (int) (column[HALF + j] * 20)]++;
+                counts[cell(column[j], column[HALF + j])]++;
             }
         }
         checkChiSquare(counts, blocks * (double) HALF / 400, "words of one counter");
@@ -147,7 +156,7 @@ class ThreefryTest {
     void columnsOfLikeKeysStreamsAndSeedsAreUncorrelated() {
         long key = Draws.key(1, "x");
         for (int bit = 0; bit < Long.SIZE; bit++) {
-            checkUncorrelated(key, 0, key ^ 1L << bit, 0);
+            checkUncorrelated(key, 0, key ^ (1L << bit), 0);
         }
         for (int stream = 1; stream < 20; stream++) {
             checkUncorrelated(key, 0, key, stream);

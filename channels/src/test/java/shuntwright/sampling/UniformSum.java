@@ -36,10 +36,10 @@ record UniformSum(List<Double> halves) {
     private double powers(double s, int power) {
         int n = halves.size();
         double sum = 0;
-        for (int signs = 0; signs < 1 << n; signs++) {
+        for (int signs = 0; signs < (1 << n); signs++) {
             double at = s;
             for (int i = 0; i < n; i++) {
-                at += (signs >> i & 1) == 0 ? halves.get(i) : -halves.get(i);
+                at += ((signs >> i) & 1) == 0 ? halves.get(i) : -halves.get(i);
             }
             if (at > 0) {
                 sum += Math.pow(at, power) * (Integer.bitCount(signs) % 2 == 0 ? 1 : -1);

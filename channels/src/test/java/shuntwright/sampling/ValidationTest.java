@@ -94,7 +94,7 @@ class ValidationTest {
         int checks = 0;
         for (int run = 0; run < 200; run++) {
             double p = run % 2 == 0 ? 0.95 : 0.9;
-            int digits = 1 + run % 3 % 2;
+            int digits = 1 + (run % 3) % 2;
             Stability stability = new Stability(p, digits);
             List<double[]> results = new ArrayList<>();
             double scale = Math.pow(10, random.nextDouble(-4, 4));
