@@ -67,7 +67,7 @@ final class AmplifierTerms {
         InputErrors input = amplifier.input();
         for (int end = 0; end < 2; end++) {
             double ta = (end == 0 ? around.local().min() : around.local().max()) - REFERENCE_TEMPERATURE;
-            double relative = amplifier.gainError() + amplifier.gainDrift() * Math.abs(ta);
+            double relative = amplifier.gainError() + amplifier.gainDrift() * Math.abs(ta) + amplifier.gainAgeing();
             gainLow[end][j] = amplifier.gain() * (1 - relative);
             gainHigh[end][j] = amplifier.gain() * (1 + relative);
             Range rail = demand.commonMode().range();
@@ -78,8 +78,9 @@ final class AmplifierTerms {
             error[end][j] = input.offset() + input.offsetDrift() * Math.abs(ta) + common + supply
                     + input.biasCurrent() * around.rules().inputResistance() * around.rules().inputMismatch();
         }
-        double drift = amplifier.gainDrift() * ShuntTerms.spread(around.local());
-        gainVariance[j] = (amplifier.gainError() * amplifier.gainError() + drift * drift) / 3;
+        double drift = amplifier.gainDrift() * ShuntTerms.distance(around);
+        double ageing = amplifier.gainAgeing();
+        gainVariance[j] = (amplifier.gainError() * amplifier.gainError() + drift * drift + ageing * ageing) / 3;
         errorVariance[j] = input.offset() * input.offset() / 3;
     }
 

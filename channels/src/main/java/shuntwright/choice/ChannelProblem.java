@@ -35,7 +35,7 @@ public record ChannelProblem(Demand demand, Surroundings around, Catalogue catal
     }
 
     /**
-     * The same problem without what the choice does not depend on: name, note, zone and alert line of the channel. Channels
+     * The same problem without what the choice does not depend on: name, note, alert line of the channel, and which zone warms it. Channels
      * with the same demand have one anonymous problem, and so one choice.
      */
     public ChannelProblem anonymous() {
@@ -44,6 +44,9 @@ public record ChannelProblem(Demand demand, Surroundings around, Catalogue catal
                 Optional.empty(), Optional.empty(), c.diversity(), c.stress(), c.pins());
         Demand same = new Demand(bare, demand.commonMode(), demand.load(), demand.tripWindow(), demand.tripTarget(),
                 demand.rearm(), demand.fullScale());
-        return new ChannelProblem(same, around, catalogue, sources, tap, resistors, pullUp, acceptance, buildQuantity);
+        Surroundings nameless = around
+                .withZone(around.zone().map(each -> new Surroundings.ZoneRise("", each.most())));
+        return new ChannelProblem(same, nameless, catalogue, sources, tap, resistors, pullUp, acceptance,
+                buildQuantity);
     }
 }

@@ -137,11 +137,10 @@ final class CompletionFilter {
         double nominal = source.voltage().nominal();
         double tolerance = (source.voltage().tolerance().below() + source.voltage().tolerance().above()) / 2;
         double rest = 1 - Math.min(1, Math.max(0, window.high[0] / nominal));
-        double pair = rest * (resistors.tolerance() + resistors.ageing());
+        double pair = 2 * rest * rest * (resistors.tolerance() * resistors.tolerance() * (1 - resistors.correlation())
+                + resistors.ageing() * resistors.ageing());
         double offset = window.comparator.inputs().offset() / Math.max(middle, window.high[0]);
-        return (tolerance * tolerance + source.ageing() * source.ageing()
-                + 2 * pair * pair * (1 - resistors.correlation())
-                + offset * offset) / 3;
+        return (tolerance * tolerance + source.ageing() * source.ageing() + pair + offset * offset) / 3;
     }
 
     private static boolean feedsBack(Comparator comparator) {

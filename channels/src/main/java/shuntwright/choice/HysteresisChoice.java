@@ -89,8 +89,11 @@ final class HysteresisChoice {
                 double k = divider.bottom() / (divider.top() + divider.bottom());
                 Range bias = window.comparator.inputs().biasCurrent();
                 double load = divider.parallel() * divider.users();
-                yield Range.of(window.lowest(divider.source(), resistors, k, end) - bias.max() * load,
-                        window.highest(divider.source(), resistors, k, end) - bias.min() * load);
+                Range unloaded = divider.tap().isEmpty()
+                        ? Range.of(window.lowest(divider.source(), resistors, k, end),
+                                window.highest(divider.source(), resistors, k, end))
+                        : window.tap(divider.source(), resistors, k, end);
+                yield Range.of(unloaded.min() - bias.max() * load, unloaded.max() - bias.min() * load);
             }
             case Threshold.DacOutput dac -> {
                 double share = dac.code() / (double) (1 << dac.dac().bits());

@@ -1,15 +1,20 @@
 package shuntwright.choice;
 
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.OptionalDouble;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.accuracy.CombinedUncertainty;
+import shuntwright.accuracy.Outcome;
 import shuntwright.board.Acceptance;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.LimitRules;
 import shuntwright.circuit.SenseCircuit;
+import shuntwright.parts.SenseAmplifier;
+import shuntwright.parts.Shunt;
 import shuntwright.quantity.Range;
 import shuntwright.sampling.CoverageLook;
 
@@ -18,10 +23,19 @@ final class Judge {
 
     private final ChannelProblem problem;
     private final List<ChannelAccuracy.Asked> asked;
+    /** The same, what is soonest known to fail first. */
+    private final List<ChannelAccuracy.Asked> soonest;
+    private final Map<Read, Range> readings = new HashMap<>();
+
+    /** What the limits of a reading depend on; comparator and threshold have no part in them. */
+    private record Read(Outcome outcome, Shunt shunt, int count, SenseAmplifier amplifier) {}
 
     Judge(ChannelProblem problem) {
         this.problem = problem;
         this.asked = ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent());
+        // The search has sorted out readings that cannot hold, but for calibrated ones; their limits are remembered.
+        boolean calibrated = problem.demand().channel().reading().calibration().isPresent();
+        this.soonest = calibrated ? asked.reversed() : asked;
     }
 
     /** The limits of its threshold with their numbers. */
@@ -36,8 +50,8 @@ final class Judge {
         ChannelAccuracy accuracy = ChannelAccuracy.of(circuit, problem.around(), problem.demand());
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
         boolean open = false;
-        for (ChannelAccuracy.Asked each : asked) {
-            if (!each.allowed().contains(accuracy.limits(each))) {
+        for (ChannelAccuracy.Asked each : soonest) {
+            if (!each.allowed().contains(limits(each, circuit, accuracy))) {
                 open = true;
                 if (!coverage || hopeless(each, accuracy.combined(each, problem.acceptance().coverage()))) {
                     return false;
@@ -46,6 +60,15 @@ final class Judge {
         }
         return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(),
                 circuit.comparator(), problem.around())) && (!open || likely(circuit, accuracy));
+    }
+
+    private Range limits(ChannelAccuracy.Asked each, SenseCircuit circuit, ChannelAccuracy accuracy) {
+        return switch (each.outcome()) {
+            case TRIP, RELEASE -> accuracy.limits(each);
+            case READING_AT_LEAST, READING_AT_LOAD -> readings.computeIfAbsent(
+                    new Read(each.outcome(), circuit.shunt(), circuit.shuntCount(), circuit.amplifier()),
+                    _ -> accuracy.limits(each));
+        };
     }
 
     private static boolean hopeless(ChannelAccuracy.Asked asked, CombinedUncertainty combined) {
@@ -59,7 +82,7 @@ final class Judge {
                 problem.acceptance().coverage());
         for (int i = 0; i < asked.size(); i++) {
             Range allowed = asked.get(i).allowed();
-            if (!allowed.contains(intervals.get(i)) && !allowed.contains(accuracy.limits(asked.get(i)))) {
+            if (!allowed.contains(intervals.get(i)) && !allowed.contains(limits(asked.get(i), circuit, accuracy))) {
                 return false;
             }
         }
@@ -78,7 +101,7 @@ final class Judge {
         }
         double margin = Double.POSITIVE_INFINITY;
         for (ChannelAccuracy.Asked each : asked) {
-            Range reached = accuracy.limits(each);
+            Range reached = limits(each, circuit, accuracy);
             double slack = Math.min(reached.min() - each.allowed().min(), each.allowed().max() - reached.max());
             margin = Math.min(margin, slack / (each.allowed().width() / 2));
         }

@@ -5,6 +5,7 @@ import static shuntwright.circuit.Surroundings.COPPER_TEMPERATURE;
 import static shuntwright.circuit.Surroundings.REFERENCE_TEMPERATURE;
 
 import shuntwright.board.Demand;
+import shuntwright.circuit.Surroundings;
 import shuntwright.parts.Shunt;
 import shuntwright.quantity.Range;
 
@@ -35,14 +36,15 @@ final class ShuntTerms {
     /** Relative standard uncertainty of the resistance, squared. */
     final double variance;
 
-    private final Range ambient;
+    /** Temperatures around the shunts: the coldest and the hottest ambient with the zone's rise, °C. */
+    private final Range local;
     private final double heating;
 
     ShuntTerms(Shunt shunt, int count, ChannelProblem problem) {
         this.shunt = shunt;
         this.count = count;
         Demand demand = problem.demand();
-        this.ambient = problem.around().local();
+        this.local = problem.around().local();
         this.heating = shunt.rating().thermalResistance() / count;
         this.resistance = shunt.inParallel(count);
         this.heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
@@ -58,14 +60,18 @@ final class ShuntTerms {
         }
         double a = (shunt.tolerance().above() + shunt.tolerance().below()) / 2;
         // Self-heating may bring the middle to 25 °C; what ambient spreads by remains.
-        double tcr = shunt.temperatureCoefficient() * ambient.width() / Math.sqrt(12);
+        double tcr = shunt.temperatureCoefficient() * spread(problem.around());
         this.variance = (a * a + shunt.ageing() * shunt.ageing() + tcr * tcr) / 3 / count;
     }
 
-    /** Root mean square distance of a uniform ambient temperature from 25 °C, K. */
-    static double spread(Range ambient) {
-        double away = ambient.mid() - REFERENCE_TEMPERATURE;
-        return Math.sqrt(away * away + ambient.width() * ambient.width() / 12);
+    /** Standard deviation of the temperature around the channel's parts: ambient and rise of the zone, both uniform, K. */
+    private static double spread(Surroundings around) {
+        return Math.hypot(around.ambient().width(), around.rise()) / Math.sqrt(12);
+    }
+
+    /** Root mean square distance of that temperature from 25 °C, K. */
+    static double distance(Surroundings around) {
+        return Math.hypot(around.local().mid() - REFERENCE_TEMPERATURE, spread(around));
     }
 
     private static int saturated(int count, int boards) {
@@ -74,7 +80,7 @@ final class ShuntTerms {
 
     /** Extreme shunt voltage at a current, self-heating included, V; infinite in thermal runaway. */
     double voltage(double current, int end, boolean highest) {
-        double ta = (end == 0 ? ambient.min() : ambient.max()) - REFERENCE_TEMPERATURE;
+        double ta = (end == 0 ? local.min() : local.max()) - REFERENCE_TEMPERATURE;
         double tolerance = highest ? shunt.tolerance().above() : -shunt.tolerance().below();
         double ageing = highest ? shunt.ageing() : -shunt.ageing();
         double own = shunt.resistance() * (1 + tolerance) * (1 + ageing);

@@ -54,7 +54,7 @@ final class Window {
         int j = candidates.amplifier(candidate);
         double bottom = a.amplifiers[j].ranges().outputLow();
         for (int end = 0; end < 2; end++) {
-            offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * terms.distance[end];
+            offset[end] = comparator.inputs().offset() + comparator.inputs().offsetDrift() * terms.local[end];
             low[end] = Math.max(candidates.low(candidate, end), bottom);
             high[end] = candidates.high(candidate, end);
             if (rearms) {
@@ -94,9 +94,9 @@ final class Window {
         return (least - low[end]) / below;
     }
 
-    /** Relative movement of a resistor at an end of ambient. */
+    /** Relative movement of a resistor of the channel's own at an end of ambient. */
     double movement(ResistorSeries resistors, int end) {
-        return resistors.tolerance() + resistors.ageing() + resistors.temperatureCoefficient() * terms.distance[end];
+        return terms.movement(resistors, false, end);
     }
 
     Range source(SourceVoltage source, int end) {
@@ -184,7 +184,15 @@ final class Window {
         into[1] = most;
     }
 
-    /** Largest possible threshold at an end of ambient for a divider of ratio k without bias, V. */
+    /** Extremes of the threshold of a tap's divider of ratio k at an end of ambient without bias, V. */
+    Range tap(SourceVoltage source, ResistorSeries resistors, double k, int end) {
+        double t = terms.movement(resistors, true, end);
+        Range vx = source(source, end);
+        return Range.of(vx.min() * SourceTerms.moved(k, -t) - offset[end],
+                vx.max() * SourceTerms.moved(k, t) + offset[end]);
+    }
+
+    /** Largest possible threshold at an end of ambient for an own divider of ratio k without bias, V. */
     double highest(SourceVoltage source, ResistorSeries resistors, double k, int end) {
         return source(source, end).max() * SourceTerms.moved(k, movement(resistors, end)) + offset[end];
     }

@@ -8,7 +8,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 
+import shuntwright.board.AlertLine;
 import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
@@ -66,18 +68,19 @@ public final class BoardPlanner {
     }
 
     /**
-     * Chooses parts for every channel and judges the board.
+     * Chooses parts for every channel and judges the board. A zone that its own heat warms is planned with a rise that is raised
+     * until its choices do not exceed it, and judged at the rise they have.
      *
      * @throws Cancelled when progress says so
      */
     public Plan plan(Board board, Catalogue catalogue, Progress progress) {
+        forget();
         Map<String, Double> rises = Map.of();
         for (int pass = 1;; pass++) {
-            Plan plan = settled(board, catalogue, rises, progress);
-            Map<String, Double> needed = higher(rises,
-                    ZoneHeat.rises(board.zones(), plan.channels(), board.ambient().max()));
+            Chosen chosen = settled(board, catalogue, rises, progress);
+            Map<String, Double> needed = higher(rises, chosen.rises());
             if (needed.equals(rises) || pass == MOST_PASSES) {
-                return plan;
+                return finished(atItsRise(chosen), progress);
             }
             rises = needed;
         }
@@ -94,18 +97,80 @@ public final class BoardPlanner {
         return next;
     }
 
+    /**
+     * Channels with their circuits, before cures are tried.
+     *
+     * @param context with which they were chosen
+     */
+    private record Chosen(BoardContext context, List<ChannelPlan> channels, List<TapPlan> taps) {
+
+        /** The rise that each zone has with these circuits, K; infinite in thermal runaway. */
+        Map<String, Double> rises() {
+            Board board = context.board();
+            return ZoneHeat.rises(board.zones(), channels, board.ambient().max());
+        }
+    }
+
     /** With pull-ups that suit the outputs chosen. */
-    private Plan settled(Board board, Catalogue catalogue, Map<String, Double> rises, Progress progress) {
-        Plan first = planned(board, catalogue, Map.of(), rises, progress);
+    private Chosen settled(Board board, Catalogue catalogue, Map<String, Double> rises, Progress progress) {
+        Chosen first = chosen(new BoardContext(board, catalogue, Map.of(), rises), progress);
         Map<String, Double> pullUps = new HashMap<>();
         boolean again = false;
-        for (AlertPlan alert : first.alerts()) {
+        for (AlertPlan alert : alerts(first.context(), first.channels())) {
             pullUps.put(alert.line().name(), alert.pullUp());
             again |= alert.pullUp() != BoardContext.DEFAULT_PULL_UP && alert.line().pullUp().isEmpty()
                     && first.channels().stream().anyMatch(each -> alert.channels().contains(each.channel().name())
                             && feeds(each));
         }
-        return again ? planned(board, catalogue, pullUps, rises, progress) : first;
+        return again ? chosen(new BoardContext(board, catalogue, pullUps, rises), progress) : first;
+    }
+
+    /** The same circuits judged at the rise they have, which may be less than that they were chosen with. */
+    private Chosen atItsRise(Chosen chosen) {
+        Map<String, Double> actual = finite(chosen.rises());
+        Map<String, Double> counted = chosen.context().rises();
+        if (actual.entrySet().stream().noneMatch(each -> each.getValue() < counted.getOrDefault(each.getKey(), 0.0))) {
+            return chosen;
+        }
+        Map<String, Double> rises = new HashMap<>(counted);
+        actual.forEach((zone, rise) -> rises.merge(zone, rise, Math::min));
+        BoardContext context = chosen.context().withRises(rises);
+        List<ChannelPlan> channels = new ArrayList<>();
+        for (ChannelPlan each : chosen.channels()) {
+            ChannelPlan now = each.solved().map(solved -> judged(
+                    context.problem(solved.demand(), threshold(each.channel(), chosen.taps())), solved.circuit()))
+                    .orElse(each);
+            boolean reasonsChange = each.verdict() == Verdict.NO_FIT && each.solved().isEmpty();
+            if ((each.accepted() && !now.accepted()) || reasonsChange) {
+                return chosen;
+            }
+            channels.add(now);
+        }
+        return new Chosen(context, channels, chosen.taps());
+    }
+
+    private static Map<String, Double> finite(Map<String, Double> rises) {
+        Map<String, Double> finite = new HashMap<>(rises);
+        finite.values().removeIf(rise -> !(rise > 0 && Double.isFinite(rise)));
+        return finite;
+    }
+
+    /** The plan, with cures for the channels that need them. */
+    private Plan finished(Chosen chosen, Progress progress) {
+        List<ChannelPlan> channels = new ArrayList<>();
+        int done = 0;
+        int total = (int) chosen.channels().stream().filter(Cures::wanted).count();
+        for (ChannelPlan plan : chosen.channels()) {
+            if (Cures.wanted(plan) && Demand.of(plan.channel()) instanceof Demand.Reading.Complete(Demand demand)
+                    && ChannelSolver.unknownPins(plan.channel(), chosen.context().catalogue()).isEmpty()) {
+                step(progress, "trying cures", done++, total);
+                ChannelProblem problem = chosen.context().problem(demand, threshold(plan.channel(), chosen.taps()));
+                channels.add(withCures(plan, new BoardTrials(this, chosen.context(), problem)));
+            } else {
+                channels.add(plan);
+            }
+        }
+        return assembled(chosen.context(), channels, chosen.taps());
     }
 
     private static boolean feeds(ChannelPlan plan) {
@@ -119,15 +184,14 @@ public final class BoardPlanner {
      * @throws Cancelled when progress says so
      */
     public Plan check(Board board, Catalogue catalogue, Progress progress) {
-        BoardContext context = new BoardContext(board, catalogue, Map.of(), Map.of());
-        Plan atAmbient = checked(context, progress);
-        Map<String, Double> rises = new HashMap<>(
-                ZoneHeat.rises(board.zones(), atAmbient.channels(), board.ambient().max()));
-        rises.values().removeIf(rise -> !(rise > 0 && Double.isFinite(rise)));
-        return rises.isEmpty() ? atAmbient : checked(context.withRises(rises), progress);
+        forget();
+        Chosen atAmbient = asPinned(new BoardContext(board, catalogue, Map.of(), Map.of()), progress);
+        Map<String, Double> rises = finite(atAmbient.rises());
+        return finished(rises.isEmpty() ? atAmbient : asPinned(atAmbient.context().withRises(rises), progress),
+                progress);
     }
 
-    private Plan checked(BoardContext context, Progress progress) {
+    private Chosen asPinned(BoardContext context, Progress progress) {
         Board board = context.board();
         List<TapPlan> taps = taps(context);
         List<ChannelPlan> channels = new ArrayList<>();
@@ -136,21 +200,19 @@ public final class BoardPlanner {
             channels.add(switch (Demand.of(channel)) {
                 case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(channel, missing);
                 case Demand.Reading.Complete(Demand demand) -> {
-                    ChannelProblem problem = context.problem(demand, threshold(channel, taps));
                     List<String> unknown = ChannelSolver.unknownPins(channel, context.catalogue());
-                    yield unknown.isEmpty() ? checked(problem, context) : ChannelSolver.unknown(channel, unknown);
+                    yield unknown.isEmpty()
+                            ? asPinned(context.problem(demand, threshold(channel, taps)))
+                            : ChannelSolver.unknown(channel, unknown);
                 }
             });
         }
-        return assembled(context, channels, taps);
+        return new Chosen(context, channels, taps);
     }
 
-    private ChannelPlan checked(ChannelProblem problem, BoardContext context) {
+    private ChannelPlan asPinned(ChannelProblem problem) {
         return switch (ChannelSolver.pinned(problem)) {
-            case ChannelSolver.Pinned.Complete(SenseCircuit circuit) -> {
-                ChannelPlan plan = ChannelSolver.judged(problem, circuit);
-                yield withCures(plan, new BoardTrials(this, context, problem));
-            }
+            case ChannelSolver.Pinned.Complete(SenseCircuit circuit) -> judged(problem, circuit);
             case ChannelSolver.Pinned.Incomplete(List<String> missing) -> {
                 Channel channel = problem.demand().channel();
                 yield new ChannelPlan(channel, Verdict.INCOMPLETE, false, Optional.empty(),
@@ -162,26 +224,28 @@ public final class BoardPlanner {
         };
     }
 
-    private Plan planned(Board board, Catalogue catalogue, Map<String, Double> pullUps,
-            Map<String, Double> rises, Progress progress) {
+    private void forget() {
         if (choices.size() > MOST_KEPT || judgements.size() > MOST_KEPT) {
             choices.clear();
             judgements.clear();
             voltages.clear();
             acceptances.clear();
         }
-        BoardContext context = new BoardContext(board, catalogue, pullUps, rises);
+    }
+
+    private Chosen chosen(BoardContext context, Progress progress) {
+        List<Channel> all = context.board().channels();
         List<TapPlan> taps = taps(context);
         List<ChannelPlan> channels = new ArrayList<>();
         Set<String> used = new HashSet<>();
-        for (Channel channel : board.channels()) {
-            step(progress, "choosing parts", channels.size(), board.channels().size());
+        for (Channel channel : all) {
+            step(progress, "choosing parts", channels.size(), all.size());
             ChannelPlan plan = solve(context, channel, taps, used);
             plan.solved().ifPresent(solved -> used.addAll(numbers(solved.circuit())));
             channels.add(plan);
         }
-        step(progress, "choosing parts", channels.size(), board.channels().size());
-        return assembled(context, channels, taps);
+        step(progress, "choosing parts", channels.size(), all.size());
+        return new Chosen(context, channels, taps);
     }
 
     private static void step(Progress progress, String stage, int done, int total) {
@@ -198,10 +262,8 @@ public final class BoardPlanner {
         }
         return switch (Demand.of(channel)) {
             case Demand.Reading.Incomplete(List<String> missing) -> ChannelSolver.incomplete(channel, missing);
-            case Demand.Reading.Complete(Demand demand) -> {
-                ChannelProblem problem = context.problem(demand, threshold(channel, taps));
-                yield withCures(solve(problem, used), new BoardTrials(this, context, problem));
-            }
+            case Demand.Reading.Complete(Demand demand) ->
+                solve(context.problem(demand, threshold(channel, taps)), used);
         };
     }
 
@@ -320,6 +382,25 @@ public final class BoardPlanner {
         return taps;
     }
 
+    private static List<AlertPlan> alerts(BoardContext context, List<ChannelPlan> channels) {
+        List<AlertPlan> alerts = new ArrayList<>();
+        for (AlertLine line : context.board().alertLines()) {
+            List<String> names = on(context, channels, line).map(each -> each.channel().name()).toList();
+            alerts.add(AlertJudge.judge(line, context.lineVoltage(line), context.settledPullUp(line), names,
+                    outputs(context, channels, line)));
+        }
+        return alerts;
+    }
+
+    private static List<OpenDrainOutput> outputs(BoardContext context, List<ChannelPlan> channels, AlertLine line) {
+        return on(context, channels, line).flatMap(each -> each.solved().stream())
+                .map(each -> each.circuit().comparator().output()).toList();
+    }
+
+    private static Stream<ChannelPlan> on(BoardContext context, List<ChannelPlan> channels, AlertLine line) {
+        return channels.stream().filter(each -> context.line(each.channel()).filter(line::equals).isPresent());
+    }
+
     private static Plan assembled(BoardContext context, List<ChannelPlan> planned, List<TapPlan> taps) {
         Board board = context.board();
         List<Finding> findings = new ArrayList<>(context.findings());
@@ -328,16 +409,10 @@ public final class BoardPlanner {
                     "The board has no channels yet: add one for each output rail.", List.of()));
         }
         List<ChannelPlan> channels = TapFindings.added(planned, taps, findings);
-        List<AlertPlan> alerts = new ArrayList<>();
-        for (var line : board.alertLines()) {
-            List<ChannelPlan> on = channels.stream()
-                    .filter(each -> context.line(each.channel()).filter(line::equals).isPresent()).toList();
-            List<OpenDrainOutput> outputs = on.stream().flatMap(each -> each.solved().stream())
-                    .map(each -> each.circuit().comparator().output()).toList();
-            AlertPlan alert = AlertJudge.judge(line, context.lineVoltage(line), context.settledPullUp(line),
-                    on.stream().map(each -> each.channel().name()).toList(), outputs);
-            alerts.add(alert);
-            findings.addAll(AlertJudge.findings(alert, context.lineVoltage(line), outputs));
+        List<AlertPlan> alerts = alerts(context, channels);
+        for (AlertPlan alert : alerts) {
+            findings.addAll(AlertJudge.findings(alert, context.lineVoltage(alert.line()),
+                    outputs(context, channels, alert.line())));
         }
         SharedBudget budget = new SharedBudget(context, channels, taps, alerts);
         List<SharedUse> uses = budget.uses();

@@ -11,6 +11,7 @@ import java.util.OptionalInt;
 import java.util.function.DoubleFunction;
 
 import shuntwright.accuracy.Assessment;
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.board.Channel;
 import shuntwright.board.Channel.Currents;
 import shuntwright.board.Pins;
@@ -45,7 +46,7 @@ final class Cures {
 
     /** The changes tried, those that cure first, smallest first. */
     static List<Cure> of(ChannelPlan failing, Trials trials) {
-        if (failing.accepted() || failing.verdict() == Verdict.INCOMPLETE) {
+        if (!wanted(failing)) {
             return List.of();
         }
         Cures cures = new Cures(failing, trials);
@@ -64,6 +65,11 @@ final class Cures {
         }
         return cures.cures.stream()
                 .sorted(Comparator.comparing((Cure each) -> !each.cures()).thenComparingDouble(Cure::size)).toList();
+    }
+
+    /** True for channels to which cures are of use. */
+    static boolean wanted(ChannelPlan plan) {
+        return !plan.accepted() && plan.verdict() != Verdict.INCOMPLETE;
     }
 
     private void add(Cure.Lever lever, String change, double size, Channel edited) {
@@ -229,7 +235,7 @@ final class Cures {
 
     private void outcomes(SolvedChannel solved) {
         for (Assessment each : solved.assessments()) {
-            if (each.insideByLimits()) {
+            if (each.insideByLimits() || each.limits().max() >= ChannelAccuracy.BEYOND) {
                 continue;
             }
             switch (each.outcome()) {
@@ -268,12 +274,15 @@ final class Cures {
     private void reading(Assessment each) {
         double current = (each.allowed().min() + each.allowed().max()) / 2;
         double reached = rounded(Math.max(each.limits().max() / current - 1, 1 - each.limits().min() / current), true);
+        if (!(reached < 1)) {
+            return;
+        }
         double allowed = each.allowed().max() / current - 1;
         var reading = channel.reading();
         boolean least = each.outcome() == shuntwright.accuracy.Outcome.READING_AT_LEAST;
         Channel edited = channel.withReading(new Channel.ReadingDemand(
                 least ? OptionalDouble.of(reached) : reading.atLeast(),
-                least ? reading.atLoad() : OptionalDouble.of(reached), Optional.empty()));
+                least ? reading.atLoad() : OptionalDouble.of(reached), reading.calibration()));
         add(Cure.Lever.READING,
                 each.outcome().words() + " ±" + show(allowed, Dimension.RATIO, 3) + " → ±"
                         + show(reached, Dimension.RATIO, 3),
@@ -293,7 +302,7 @@ final class Cures {
                     channel.withCurrents(new Currents(c.load(), c.noTrip(), c.mustTrip(), c.tripTarget(),
                             OptionalDouble.empty(), c.fullScale()))
                             .withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
-                                    channel.reading().atLoad(), Optional.empty())));
+                                    channel.reading().atLoad(), channel.reading().calibration())));
         }
         Channel.Stress stress = channel.stress();
         if (stress.fault().isPresent()) {

@@ -126,22 +126,29 @@ final class Findings {
                 new Measure("margin", tightest.margin(), Dimension.RATIO));
     }
 
+    /** Says why an outcome has no limits. */
     private static void runaway(SolvedChannel solved, List<Finding> findings) {
         Channel channel = solved.demand().channel();
-        boolean calibrated = !solved.uncalibrated().isEmpty();
         for (Assessment each : solved.assessments()) {
-            boolean reading = each.outcome() == Outcome.READING_AT_LEAST || each.outcome() == Outcome.READING_AT_LOAD;
+            String what = Findings.capital(each.outcome().words()) + ": by limits ";
             if (each.limits().max() < ChannelAccuracy.BEYOND) {
                 continue;
             }
-            findings.add(calibrated && reading
-                    ? channel(Finding.Key.CALIBRATION_FAILS, channel, Findings.capital(each.outcome().words())
-                            + ": by limits the errors at the calibration currents may outweigh the signal, so that nothing can "
-                            + "be calibrated. Calibrate at a larger current, or at two that lie further apart.")
-                    : channel(Finding.Key.THERMAL_RUNAWAY, channel, Findings.capital(each.outcome().words())
-                            + ": by limits a shunt runs away thermally before it is reached, because its resistance rises "
-                            + "faster with its own heat than it can carry the heat away. A shunt of lower thermal "
-                            + "resistance, less resistance or smaller temperature coefficient would cure it."));
+            if (each.limits().min() <= -ChannelAccuracy.BEYOND) {
+                findings.add(channel(Finding.Key.CALIBRATION_FAILS, channel, what
+                        + "the errors at the calibration currents "
+                        + "may outweigh the signal, so that nothing can be calibrated. Calibrate at a larger current, or at "
+                        + "two that lie further apart."));
+                continue;
+            }
+            findings.add(channel(Finding.Key.THERMAL_RUNAWAY, channel, what + switch (each.outcome()) {
+                case TRIP, RELEASE ->
+                    "the resistance of the shunts falls with their own heat so far that their voltage never "
+                            + "reaches the threshold: it may never trip. ";
+                case READING_AT_LEAST, READING_AT_LOAD ->
+                    "the shunts run away thermally at this current: their resistance "
+                            + "rises faster with their own heat than they can give that heat away. ";
+            } + "Shunts of lower thermal resistance, less resistance or smaller temperature coefficient would cure it."));
         }
     }
 

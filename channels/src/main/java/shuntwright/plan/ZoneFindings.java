@@ -24,9 +24,11 @@ final class ZoneFindings {
                 findings.add(Findings.board(Finding.Key.THERMAL_RUNAWAY, "Zone \"" + zone
                         + "\" runs away thermally: with " + show(resistance, Dimension.THERMAL_RESISTANCE)
                         + " to ambient each kelvin of warming makes its shunts heat it by more than another. Its channels "
-                        + "are judged without its warmth. A lower thermal resistance or shunts of less resistance or "
-                        + "temperature coefficient would cure it.",
-                        List.of(new Measure("thermal resistance", resistance, Dimension.THERMAL_RESISTANCE))));
+                        + "are judged with " + show(counted, Dimension.TEMPERATURE_DIFFERENCE)
+                        + " of warmth only. A lower "
+                        + "thermal resistance, or shunts of less resistance or temperature coefficient, would cure it.",
+                        List.of(new Measure("thermal resistance", resistance, Dimension.THERMAL_RESISTANCE),
+                                new Measure("counted", counted, Dimension.TEMPERATURE_DIFFERENCE))));
             } else if (rise > counted * (1 + SAME)) {
                 findings.add(Findings.board(Finding.Key.THERMAL_RUNAWAY, "Zone \"" + zone + "\" warms by "
                         + show(rise, Dimension.TEMPERATURE_DIFFERENCE) + ", more than the "

@@ -52,6 +52,9 @@ final class ZoneHeat {
         for (SolvedChannel each : channels) {
             double load = each.demand().load();
             double square = load * load * each.demand().channel().diversity();
+            if (square == 0) {
+                continue;
+            }
             double[] line = resistance(each.circuit(), load, hottest);
             heat += square * line[0];
             perKelvin += square * line[1];

@@ -34,7 +34,7 @@ class ChannelPickerTest {
         }
         assertThat(disagreements).isEmpty();
         assertThat(accepted).as("accepted").isGreaterThan(problems(basis) / 8);
-        assertThat(nearest).as("nearest").isGreaterThan(problems(basis) / 8);
+        assertThat(nearest).as("nearest").isGreaterThan(problems(basis) / 12);
         assertThat(none).as("no fit").isGreaterThan(problems(basis) / 50);
     }
 

@@ -26,8 +26,8 @@ class HysteresisChoiceTest {
         double room = Double.POSITIVE_INFINITY;
         for (int end = 0; end < 2; end++) {
             double kelvin = Math.abs((end == 0
-                    ? problem.around().ambient().min()
-                    : problem.around().ambient().max()) - 25);
+                    ? problem.around().local().min()
+                    : problem.around().local().max()) - 25);
             double moves = series.tolerance() + series.ageing() + series.temperatureCoefficient() * kelvin;
             Range spread = HysteresisChoice.spread(window, threshold, series, end);
             double most = spread.max() - injected.builtIn().min() - injected.current().min() * ohm * (1 - moves);

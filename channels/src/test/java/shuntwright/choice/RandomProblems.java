@@ -8,11 +8,13 @@ import java.util.random.RandomGenerator;
 
 import shuntwright.board.Acceptance;
 import shuntwright.board.Adc;
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.board.DesignRules;
 import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Source;
+import shuntwright.board.StatedDistribution;
 import shuntwright.board.Tap;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Surroundings;
@@ -30,6 +32,7 @@ import shuntwright.parts.SenseAmplifier;
 import shuntwright.parts.Shunt;
 import shuntwright.parts.ShuntRating;
 import shuntwright.parts.Terminals;
+import shuntwright.quantity.Distribution;
 import shuntwright.quantity.ESeries;
 import shuntwright.quantity.Range;
 import shuntwright.quantity.Spread;
@@ -83,8 +86,11 @@ final class RandomProblems {
                 ? Optional.of(new Surroundings.Converter(
                         new Adc(bySupply.source(), 12, 0.001, 1e-3, 1), random.nextBoolean() ? bySupply : reference))
                 : Optional.empty();
+        Optional<Surroundings.ZoneRise> zone = random.nextBoolean()
+                ? Optional.of(new Surroundings.ZoneRise("port", between(1, 60)))
+                : Optional.empty();
         Surroundings around = new Surroundings(Range.of(low, low + between(10, 80)), bySupply.voltage(), rules, adc,
-                List.of(), Optional.empty());
+                stated(), zone);
         Optional<Threshold> tap = random.nextInt(4) == 0 ? Optional.of(tap(reference)) : Optional.empty();
         List<SourceVoltage> sources = tap.isPresent()
                 ? List.of()
@@ -94,6 +100,26 @@ final class RandomProblems {
                         ? new PullUp(10e3, bySupply.voltage(), true, random.nextInt(4) == 0)
                         : new PullUp(2.2e3, new Toleranced(3, Tolerance.symmetric(0.001)), false, false),
                 new Acceptance(basis, one(0.95, 0.9973)), one(1, 10, 100));
+    }
+
+    /** Mostly nothing beyond the limits; else what makes coverage intervals narrower or wider than uniform draws do. */
+    private List<StatedDistribution> stated() {
+        return switch (random.nextInt(5)) {
+            case 0 -> List.of(new StatedDistribution("shunt tolerance", Optional.empty(), new Distribution.Normal(3)));
+            case 1 -> List.of(new StatedDistribution("gain error", Optional.of("A*"), new Distribution.ArcSine()),
+                    new StatedDistribution("ambient temperature", Optional.empty(), new Distribution.Triangular()));
+            default -> List.of();
+        };
+    }
+
+    private Optional<Calibration> calibration() {
+        return switch (random.nextInt(3)) {
+            case 0 -> Optional.of(new Calibration(Calibration.Points.ONE, OptionalDouble.empty(),
+                    OptionalDouble.empty(), 1e-3, Calibration.DEFAULT_TEMPERATURE));
+            case 1 -> Optional.of(new Calibration(Calibration.Points.TWO, OptionalDouble.of(load * between(0.05, 0.3)),
+                    OptionalDouble.empty(), 5e-4, Range.exactly(23)));
+            default -> Optional.empty();
+        };
     }
 
     private Channel channel() {
@@ -115,7 +141,8 @@ final class RandomProblems {
                 .withRelease(release)
                 .withReading(new Channel.ReadingDemand(
                         reads ? OptionalDouble.of(between(0.01, 0.1)) : OptionalDouble.empty(),
-                        reads ? OptionalDouble.of(between(0.01, 0.05)) : OptionalDouble.empty(), Optional.empty()));
+                        reads ? OptionalDouble.of(between(0.01, 0.05)) : OptionalDouble.empty(),
+                        reads ? calibration() : Optional.empty()));
     }
 
     private Threshold tap(SourceVoltage source) {
@@ -127,7 +154,8 @@ final class RandomProblems {
     }
 
     private ResistorSeries series(String number, ESeries values, double tolerance) {
-        return new ResistorSeries(number, "", values, Range.of(2e3, 40e3), tolerance, 25e-6, one(0.0, 0.001), 0, 0.1,
+        return new ResistorSeries(number, "", values, Range.of(2e3, 40e3), tolerance, 25e-6, one(0.0, 0.001),
+                one(0.0, 0.5, 1.0), 0.1,
                 TrialParts.price(one(0.01, 0.02)));
     }
 
@@ -153,7 +181,7 @@ final class RandomProblems {
     private Shunt shunt(String number, double ohm) {
         boolean four = random.nextBoolean();
         return new Shunt(number, "", ohm, new Tolerance(one(0.001, 0.005, 0.01), one(0.001, 0.005, 0.01)),
-                one(15e-6, 100e-6), one(0.0, 0.002), 0, four ? Terminals.FOUR : Terminals.TWO,
+                one(15e-6, 100e-6), one(0.0, 0.002), one(0.0, 0.5, 1.0), four ? Terminals.FOUR : Terminals.TWO,
                 four ? Range.exactly(0) : Range.of(0, ohm * 0.01), one(0.0, 3e-6),
                 new ShuntRating(load * load * ohm * between(1.5, 8), 70, 170, between(5, 40), OptionalDouble.empty()),
                 TrialParts.price(one(0.5, 1.0, 1.5)));
@@ -161,7 +189,7 @@ final class RandomProblems {
 
     private SenseAmplifier amplifier(String number) {
         return new SenseAmplifier(number, "", one(20.0, 50.0, 100.0), one(0.001, 0.005, 0.01), 10e-6,
-                0, new InputErrors(one(10e-6, 100e-6, 300e-6), one(0.1e-6, 1e-6), 100, 12, 90, 3.3, 1e-6),
+                one(0.0, 0.002), new InputErrors(one(10e-6, 100e-6, 300e-6), one(0.1e-6, 1e-6), 100, 12, 90, 3.3, 1e-6),
                 new AmplifierRanges(Range.of(-0.2, 30), one(0.15, 0.3), 10, Range.of(2.7, 5.5), one(0.1, 0.3),
                         one(0.01, 0.05)),
                 100e3, 1e6, 1e-3, one(1, 2), TrialParts.price(one(1.0, 2.0)));

@@ -63,11 +63,11 @@ class ValueChoiceTest {
         Range bias = window.comparator.inputs().biasCurrent();
         double parallel = 1 / (1 / top + 1 / bottom);
         for (int end = 0; end < 2; end++) {
-            double kelvin = Math.abs((end == 0
-                    ? problem.around().ambient().min()
-                    : problem.around().ambient().max()) - 25);
+            Range ambient = problem.around().ambient();
+            double air = Math.abs((end == 0 ? ambient.min() : ambient.max()) - 25);
+            double kelvin = Math.abs((end == 0 ? ambient.min() : ambient.max() + problem.around().rise()) - 25);
             double moves = series.tolerance() + series.ageing() + series.temperatureCoefficient() * kelvin;
-            double drifts = source.drift() * kelvin + source.ageing();
+            double drifts = source.drift() * air + source.ageing();
             double least = source.voltage().min() - nominal * drifts - source.loadDrop();
             double most = source.voltage().max() + nominal * drifts;
             double down = least * bottom * (1 - moves) / (bottom * (1 - moves) + top * (1 + moves));

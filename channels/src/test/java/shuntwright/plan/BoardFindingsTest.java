@@ -2,26 +2,37 @@ package shuntwright.plan;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
 
 import org.junit.jupiter.api.Test;
 
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
 import shuntwright.board.Channel;
+import shuntwright.board.Pins;
+import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Sampling;
 import shuntwright.board.Source;
 import shuntwright.board.StatedDistribution;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.board.Uncertainty;
+import shuntwright.choice.TrialParts;
 import shuntwright.circuit.Limit;
 import shuntwright.circuit.LimitCheck;
+import shuntwright.fixture.Records;
 import shuntwright.parts.Catalogue;
+import shuntwright.parts.Hysteresis;
 import shuntwright.parts.Part;
 import shuntwright.parts.Reference;
 import shuntwright.parts.Shunt;
+import shuntwright.parts.ShuntRating;
 import shuntwright.quantity.Distribution;
+import shuntwright.quantity.ESeries;
 import shuntwright.quantity.Range;
 
 /** Findings that name what is wrong with the board or the catalogue instead of a consequence of it. */
@@ -36,7 +47,7 @@ class BoardFindingsTest {
     }
 
     private static Plan plan(Range supply) {
-        List<Part> parts = new java.util.ArrayList<>(TrialBoards.CATALOGUE.shunts());
+        List<Part> parts = new ArrayList<>(TrialBoards.CATALOGUE.shunts());
         parts.addAll(TrialBoards.CATALOGUE.amplifiers());
         parts.addAll(TrialBoards.CATALOGUE.comparators());
         parts.addAll(TrialBoards.CATALOGUE.resistors());
@@ -82,7 +93,7 @@ class BoardFindingsTest {
 
     @Test
     void saysWhatTheCatalogueLacks() {
-        List<Part> parts = new java.util.ArrayList<>(TrialBoards.CATALOGUE.amplifiers());
+        List<Part> parts = new ArrayList<>(TrialBoards.CATALOGUE.amplifiers());
         parts.addAll(TrialBoards.CATALOGUE.comparators());
         assertThat(firstFinding(CHANNEL, Catalogue.of("EUR", parts))).contains("no parts file holds a shunt",
                 "no parts file holds a resistor series").doesNotContain("amplifier", "comparator");
@@ -118,5 +129,26 @@ class BoardFindingsTest {
                 .filter(each -> each.nearMiss().limit() == Limit.COMMON_MODE_HIGH).findFirst().orElseThrow();
         assertThat(refusal.examined()).isEqualTo(TrialBoards.CATALOGUE.amplifiers().size());
         assertThat(TrialBoards.CATALOGUE.shunts()).hasAtLeastOneElementOfType(Shunt.class);
+    }
+
+    /** A resistance that falls by 0.2 % per kelvin holds no more than √(R/(4·α·θ)) = 0.25 V, less than the threshold asks. */
+    @Test
+    void aShuntThatFadesWithItsHeatMayNeverTrip() {
+        Shunt fading = Records.with(
+                Records.with(TrialParts.shunt("FADES", 0.02, 0.005), "temperatureCoefficient", 2e-3),
+                "rating", new ShuntRating(100, 70, 170, 40, OptionalDouble.empty()));
+        List<Part> parts = new ArrayList<>(List.of(fading, TrialParts.amplifier("A", 4, 0.002, 50e-6),
+                TrialParts.comparator("C", new Hysteresis.Latched()), TrialParts.series("S", ESeries.E96, 0.001)));
+        Channel pinned = TrialBoards.channel("c", 16, 25, 35).withRelease(new ReleaseDemand.Latch())
+                .withThreshold(new ThresholdDemand.OwnDivider(new Source.Supply()))
+                .withPins(new Pins(Optional.of("FADES"), OptionalInt.of(1), Optional.of("A"), Optional.of("C"),
+                        Optional.of("S"), OptionalDouble.of(10e3), OptionalDouble.of(27.4e3), OptionalDouble.empty()));
+        Plan plan = new BoardPlanner().check(Board.named("fades").withChannels(List.of(pinned)),
+                Catalogue.of("EUR", parts), Progress.SILENT);
+        ChannelPlan channel = plan.channels().getFirst();
+        assertThat(channel.accepted()).isFalse();
+        assertThat(channel.solved().orElseThrow().trip().limits().max()).isEqualTo(ChannelAccuracy.BEYOND);
+        assertThat(channel.findings()).filteredOn(each -> each.key() == Finding.Key.THERMAL_RUNAWAY).singleElement()
+                .satisfies(finding -> assertThat(finding.text()).contains("may never trip", "thermal resistance"));
     }
 }

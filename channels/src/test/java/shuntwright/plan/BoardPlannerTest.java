@@ -31,6 +31,7 @@ import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Source;
 import shuntwright.board.Tap;
 import shuntwright.board.ThresholdDemand;
+import shuntwright.board.Zone;
 import shuntwright.parts.Catalogue;
 
 class BoardPlannerTest {
@@ -42,6 +43,11 @@ class BoardPlannerTest {
         if (random.nextInt(4) == 0) {
             channel = channel.withRelease(new ReleaseDemand.Latch());
         }
+        channel = switch (random.nextInt(4)) {
+            case 0 -> channel;
+            case 1 -> channel.withZone(Optional.of("cold"));
+            default -> channel.withZone(Optional.of("warm"));
+        };
         return switch (random.nextInt(5)) {
             case 0 -> channel.withThreshold(new ThresholdDemand.OwnDivider(new Source.Supply()));
             case 1 -> channel.withThreshold(new ThresholdDemand.SharedTap("tap"));
@@ -58,7 +64,9 @@ class BoardPlannerTest {
         Board board = TrialBoards.withTaps(board(all.toArray(Channel[]::new)),
                 new Tap("tap", new Source.OfReference("quiet"),
                         new Tap.Kind.Divider(OptionalDouble.empty(), OptionalDouble.empty()), OptionalDouble.empty()));
-        return TrialBoards.withLines(board, AlertLine.named("alert"));
+        return TrialBoards.withLines(board, AlertLine.named("alert"))
+                .withZones(List.of(new Zone("warm", OptionalDouble.empty(), OptionalDouble.of(15)),
+                        new Zone("cold", OptionalDouble.empty(), OptionalDouble.empty())));
     }
 
     @Test
@@ -89,7 +97,11 @@ class BoardPlannerTest {
     private static Board edit(Board board, RandomGenerator random) {
         List<Channel> channels = new ArrayList<>(board.channels());
         int at = random.nextInt(channels.size());
-        switch (random.nextInt(6)) {
+        switch (random.nextInt(7)) {
+            case 6 -> {
+                return board.withZones(List.of(new Zone("warm", OptionalDouble.empty(),
+                        random.nextBoolean() ? OptionalDouble.of(random.nextDouble(1, 60)) : OptionalDouble.empty())));
+            }
             case 0 -> channels.remove(channels.size() > 2 ? at : 0);
             case 1 -> channels.add(random("channel new " + random.nextInt(1000), random));
             case 2 -> {

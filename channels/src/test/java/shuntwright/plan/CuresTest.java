@@ -20,6 +20,7 @@ import org.junit.jupiter.api.Test;
 
 import shuntwright.board.Adc;
 import shuntwright.board.Board;
+import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Source;
@@ -234,5 +235,23 @@ class CuresTest {
         assertThat(cure.lever()).isEqualTo(Cure.Lever.SIDE);
         assertThat(cure.cures()).isTrue();
         assertThat(plan(board(cure.edit().orElseThrow())).channels().getFirst().verdict()).isEqualTo(Verdict.INSIDE);
+    }
+
+    /** What is left after calibration is all that the reading needs to be allowed; the calibration itself stays. */
+    @Test
+    void aRelaxedReadingStaysCalibrated() {
+        Calibration calibration = new Calibration(Calibration.Points.TWO, OptionalDouble.empty(),
+                OptionalDouble.empty(), 0.002, Calibration.DEFAULT_TEMPERATURE);
+        Channel reads = channel("c", 10).withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
+                OptionalDouble.of(0.001), Optional.of(calibration)));
+        Board board = TrialBoards.withAdc(board(reads),
+                new Adc(new Source.OfReference("quiet"), 12, 0.01, 1e-3, 1));
+        assertThat(cures(board, Cure.Lever.READING)).singleElement().satisfies(cure -> {
+            assertThat(cure.cures()).isTrue();
+            Channel.ReadingDemand edited = cure.edit().orElseThrow().reading();
+            assertThat(edited.calibration()).contains(calibration);
+            // Without calibration the ADC's gain error of 1 % alone would need more.
+            assertThat(edited.atLoad().orElseThrow()).isBetween(0.002, 0.01);
+        });
     }
 }

@@ -20,7 +20,7 @@ import shuntwright.quantity.Range;
 class TailsTest {
 
     private static final NormalDistribution NORMAL = new NormalDistribution(0, 1);
-    private static final int SEEDS = 50;
+    private static final int SEEDS = 15;
     private static final int TRIALS = 100_000;
 
     /**

@@ -116,7 +116,7 @@ class ThreefryTest {
                 // Pairs that do not overlap.
                 for (int j = 0; j + lag < column.length; j += 2 * lag) {
                     for (int i = j; i < Math.min(j + lag, column.length - lag); i++) {
-                        counts[(int) (column[i] * 20) * 20 + (int) (column[i + lag] * 20)]++;
+                        counts[((int) (column[i] * 20)) * 20 + (int) (column[i + lag] * 20)]++;
                     }
                 }
             }
@@ -137,7 +137,7 @@ class ThreefryTest {
         for (int block = 0; block < blocks; block++) {
             double[] column = column(Draws.key(3, "x"), block, 0);
             for (int j = 0; j < HALF; j++) {
-                counts[(int) (column[j] * 20) * 20 + (int) (column[HALF + j] * 20)]++;
+                counts[((int) (column[j] * 20)) * 20 + (int) (column[HALF + j] * 20)]++;
             }
         }
         checkChiSquare(counts, blocks * (double) HALF / 400, "words of one counter");

@@ -85,8 +85,9 @@ final class StudyTables {
             .flag("inside", "whether the symmetric coverage interval is within that", Propagated::inside)
             .object("sampled", SAMPLED, "what the trials say", Propagated::sampled)
             .object("validation", VALIDATION, "of the combined uncertainty", Propagated::validation)
-            .list("effects", EFFECT, "by input, largest total first, inputs without any effect left out; empty where they were not "
-                    + "worked out",
+            .list("effects", EFFECT,
+                    "by input, largest total first, inputs without any effect left out; empty where they were not "
+                            + "worked out",
                     Propagated::effects)
             .form();
 
@@ -102,9 +103,13 @@ final class StudyTables {
     private static final Form<BoardYield.SharedCost> COST = ObjectTable.<BoardYield.SharedCost>named("shared cost",
             "What a shared thing costs of the yield.")
             .text("owner", "the shared thing, by the `ownerName` of its inputs", BoardYield.SharedCost::owner)
-            .number("without", Unit.FRACTION, "yield with all its inputs at their nominal values, same trials",
+            .number("without", Unit.FRACTION,
+                    "share of trials with every channel inside when all its inputs stand at their nominal "
+                            + "values",
                     BoardYield.SharedCost::without)
-            .number("cost", Unit.FRACTION, "`without_fraction` minus the yield; may be slightly negative by chance",
+            .number("cost", Unit.FRACTION,
+                    "`without_fraction` minus that share of the same trials as drawn, which may be fewer than "
+                            + "those of the yield; may be slightly negative by chance",
                     BoardYield.SharedCost::cost)
             .number("standardError", Unit.FRACTION, "of the cost", BoardYield.SharedCost::standardError).form();
 

@@ -57,7 +57,7 @@ final class BudgetInputsSheet {
             Column.wrapped("Input", 30, row -> switch (row) {
                 case Sum _ -> ALL;
                 case Line line -> line.input().slot().words();
-            }), words("Owner", 18, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
+            }), words("Owner", 22, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
             figure("From", Style.GENERAL, each -> each.limits().min()),
             figure("To", Style.GENERAL, each -> each.limits().max()),
             figure("Standard uncertainty", Style.EXPONENT, Input::standardUncertainty),
@@ -162,8 +162,9 @@ final class BudgetInputsSheet {
             return new Column.Content.Marked("not worked out", Style.TEXT);
         }
         // Inputs without any effect are not listed among the effects.
-        return line.together()
-                .<Column.Content>map(each -> new Column.Content.Marked("with " + each.owner().name(), Style.TEXT))
+        return line
+                .together().<Column.Content>map(
+                        each -> new Column.Content.Marked("with " + each.owner().name(), Style.TEXT))
                 .orElseGet(() -> Column.finite(100 * line.effect().map(get::applyAsDouble).orElse(0.0)));
     }
 
@@ -182,7 +183,7 @@ final class BudgetInputsSheet {
     }
 
     private static Column<InputRow> figure(String header, Style style, ToDoubleFunction<Input> get) {
-        return new Column<>(INPUT, header, 10, style, (row, _) -> row instanceof Line line
+        return new Column<>(INPUT, header, 12, style, (row, _) -> row instanceof Line line
                 ? Column.finite(get.applyAsDouble(line.input()))
                 : new Column.Content.Empty());
     }

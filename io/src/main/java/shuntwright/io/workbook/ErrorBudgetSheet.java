@@ -75,13 +75,12 @@ final class ErrorBudgetSheet {
         BudgetRows rows = BudgetRows.of(plan);
         // Formulas may name only sheets that exist, so the inputs come first and are then moved.
         TableSheet<InputRow> inputs = BudgetInputsSheet.add(book, look, rows);
-        new ErrorBudgetSheet(inputs).write(book, look, plan, rows);
+        new ErrorBudgetSheet(inputs).write(book, look, rows);
         book.setSheetOrder(BudgetInputsSheet.NAME, book.getNumberOfSheets() - 1);
     }
 
-    private void write(XSSFWorkbook book, Look look, Plan plan, BudgetRows rows) {
-        TableSheet<OutcomeRow> table = new TableSheet<>(book.createSheet(NAME), look,
-                NAME + ": " + plan.board().name(), columns(), 1);
+    private void write(XSSFWorkbook book, Look look, BudgetRows rows) {
+        TableSheet<OutcomeRow> table = new TableSheet<>(book.createSheet(NAME), look, NAME, columns(), 1);
         table.keep(2, PAGES);
         table.add(rows.outcomes());
     }

@@ -39,6 +39,24 @@ final class Cells {
         return row(sheet, line).getCell(column(sheet, group, header));
     }
 
+    /** The row whose first cells hold these texts. */
+    static XSSFRow line(XSSFSheet sheet, String... firsts) {
+        for (var row : sheet) {
+            boolean same = true;
+            for (int index = 0; index < firsts.length; index++) {
+                same &= row.getCell(index) instanceof XSSFCell cell && cell.toString().equals(firsts[index]);
+            }
+            if (same) {
+                return (XSSFRow) row;
+            }
+        }
+        throw new AssertionError("no row " + String.join(", ", firsts) + " in " + sheet.getSheetName());
+    }
+
+    static XSSFCell at(XSSFRow row, String group, String header) {
+        return row.getCell(column(row.getSheet(), group, header));
+    }
+
     private static int column(XSSFSheet sheet, String group, String header) {
         int headers = sheet.getRepeatingRows().getLastRow();
         String current = "";

@@ -13,22 +13,27 @@ import java.util.concurrent.TimeUnit;
 import java.util.regex.Pattern;
 
 import org.apache.poi.openxml4j.exceptions.InvalidFormatException;
+import org.apache.poi.xssf.usermodel.XSSFRow;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
+import shuntwright.accuracy.Assessment;
 import shuntwright.io.fixture.PlanFixtures;
 import shuntwright.parts.Purchase;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.PartUse;
 import shuntwright.plan.Plan;
+import shuntwright.plan.SolvedChannel;
+import shuntwright.sampling.ChannelStudy;
 
 /** Lets another spreadsheet program compute the workbook; runs only where LibreOffice is on the path. */
 class LibreOfficeTest {
 
     private static final Plan PLAN = PlanFixtures.full();
     private static final int BOARDS = 997;
+    private static final double FACTOR = 40;
     /** A profile that computes every formula on opening instead of showing stored results. */
     private static final String ALWAYS_COMPUTE = """
             <?xml version="1.0" encoding="UTF-8"?>
@@ -46,6 +51,8 @@ class LibreOfficeTest {
         try (XSSFWorkbook book = Cells.open(PLAN)) {
             // The cached results now belong to another build quantity, so only a fresh computation gives the right ones.
             Cells.row(book.getSheet(PartsSheet.NAME), "Build quantity, boards").getCell(1).setCellValue(BOARDS);
+            Cells.at(Cells.line(book.getSheet(ErrorBudgetSheet.NAME), "Latch", "trip current"), "Combined", "k")
+                    .setCellValue(FACTOR);
             try (var out = Files.newOutputStream(changed)) {
                 book.write(out);
             }
@@ -70,6 +77,7 @@ class LibreOfficeTest {
                             .getNumericCellValue()).isCloseTo(trip, within(1e-9 * trip));
                 }
             }
+            checkBudgets(book);
         } catch (InvalidFormatException unreadable) {
             throw new AssertionError("LibreOffice wrote what cannot be read", unreadable);
         }
@@ -90,6 +98,35 @@ class LibreOfficeTest {
         assertThat(Cells.row(sheet, "Order total, EUR").getCell(1).getNumericCellValue()).isCloseTo(total,
                 within(1e-6));
         assertThat(Cells.row(sheet, "Lines without price").getCell(1).getNumericCellValue()).isEqualTo(1);
+    }
+
+    private static void checkBudgets(XSSFWorkbook book) {
+        XSSFSheet outcomes = book.getSheet(ErrorBudgetSheet.NAME);
+        XSSFSheet inputs = book.getSheet(BudgetInputsSheet.NAME);
+        for (ChannelPlan channel : PLAN.channels()) {
+            String name = channel.channel().name();
+            for (Assessment each : channel.solved().map(SolvedChannel::assessments).orElse(List.of())) {
+                XSSFRow row = Cells.line(outcomes, name, each.outcome().words());
+                ChannelStudy study = PLAN.study().orElseThrow().channel(name).orElseThrow();
+                if (name.equals("Latch")) {
+                    double expanded = FACTOR * each.combined().standard();
+                    assertThat(Cells.at(row, "Combined", "y + U").getNumericCellValue())
+                            .isCloseTo(each.combined().estimate() + expanded, within(1e-9));
+                    assertThat(Cells.at(row, "Combined", "Inside").getStringCellValue()).isEqualTo("no");
+                    continue;
+                }
+                ErrorBudgetSheetTest.checkLimitsAndCombined(row, each);
+                ErrorBudgetSheetTest.checkPropagated(row, study, study.outcome(each.outcome()).orElseThrow());
+                XSSFRow sum = Cells.line(inputs, name, each.outcome().words(), BudgetInputsSheet.ALL);
+                assertThat(Cells.at(sum, "Part", "Share").getNumericCellValue()).isCloseTo(100, within(1e-9));
+                XSSFRow first = inputs.getRow(sum.getRowNum() + 1);
+                double target = channel.solved().orElseThrow().demand().tripTarget();
+                assertThat(Cells.at(first, "Contribution", "Lowest, %").getNumericCellValue())
+                        .isCloseTo(100 * each.budget().getFirst().towardsLow() / target, within(1e-9));
+            }
+        }
+        assertThat(Cells.at(book.getSheet(YieldSheet.NAME), "supply", "It costs").getNumericCellValue())
+                .isCloseTo(0.1, within(1e-9));
     }
 
     private static boolean onPath(String program) {

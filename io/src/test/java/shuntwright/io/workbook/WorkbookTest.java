@@ -133,7 +133,17 @@ class WorkbookTest {
             assertThat(texts).anyMatch(it -> it.contains("fuse or circuit breaker that codes require"))
                     .anyMatch(it -> it.contains("both ends of the ambient")).anyMatch(it -> it.contains("licensed"))
                     .anyMatch(it -> it.contains("cannot be bought"))
-                    .contains("Ambient temperature", "Sense supply, limits", "Reference quiet");
+                    .contains("Ambient temperature", "Sense supply, limits", "Reference quiet")
+                    .contains("Propagated distribution", "1,000,000 trials of each channel, seed 7",
+                            "Coverage probability", "Stated: shunt tolerance of 1E3", "normal, k = 3",
+                            "Stated: gain error", "t, ν = 9, k = 2", "Zone port warms its parts above ambient by",
+                            "at 1 A and 8 A, current known to 0.2 %, at 20 .. 30 °C");
+        }
+        try (XSSFWorkbook book = Cells.open(PlanFixtures.unsampled())) {
+            List<String> texts = new ArrayList<>();
+            book.getSheet(AssumptionsSheet.NAME).forEach(row -> row.forEach(cell -> texts.add(cell.toString())));
+            assertThat(texts).contains("not sampled; asked for: trials of each channel until 2 digits of the standard "
+                    + "deviation settled, at most 10,000,000, seed 7");
         }
     }
 

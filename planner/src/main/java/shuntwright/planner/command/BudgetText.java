@@ -13,6 +13,7 @@ import shuntwright.io.planfile.Cautions;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Plan;
 import shuntwright.plan.SolvedChannel;
+import shuntwright.planner.work.TrialWords;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 import shuntwright.sampling.CoverageInterval;
@@ -30,6 +31,9 @@ final class BudgetText {
     private static final int DIGITS = 3;
     private static final int NOT_PAINTED = -1;
     private static final String NONE = "-";
+    /** Shares and errors that the last digit shown would make 0. */
+    private static final double LEAST = 0.0005;
+    private static final String LITTLE = "< 0.1 %";
 
     private final List<String> lines = new ArrayList<>();
 
@@ -88,15 +92,15 @@ final class BudgetText {
         readers.add(interval("  sampled, symmetric", sampled.symmetric()));
         readers.add(interval("  sampled, shortest", sampled.shortest()));
         readers.add(List.of("  mean", ampere(sampled.mean()), "standard deviation " + brief(sampled.standard()) + ", "
-                + StudyText.count(sampled.trials()) + " trials"));
+                + TrialWords.count(sampled.trials()) + " trials"));
         readers.add(List.of("  outside", ProbabilityWords.of(sampled.outside()), sampled.outside().method().word()));
         if (sampled.runaways() > 0) {
-            readers.add(List.of("  thermal runaway", "in " + StudyText.count(sampled.runaways()),
+            readers.add(List.of("  thermal runaway", "in " + TrialWords.count(sampled.runaways()),
                     "trials, counted as outside"));
         }
         Validation validation = propagated.validation();
         readers.add(List.of("  JCGM 101, clause 8", validation.valid() ? "valid" : "not valid",
-                "the ends of the first two intervals differ by " + brief(validation.lowDifference()) + " and "
+                "ends differ by " + brief(validation.lowDifference()) + " and "
                         + brief(validation.highDifference()) + ", tolerance " + brief(validation.tolerance())));
     }
 
@@ -128,11 +132,14 @@ final class BudgetText {
     }
 
     private static String withError(double share, double error) {
-        return String.format(Locale.ROOT, "%.1f ±%.1f %%", 100 * share, 100 * error);
+        String value = percent(share);
+        return error < LEAST || value.equals(LITTLE)
+                ? value
+                : String.format(Locale.ROOT, "%.1f ±%.1f %%", 100 * share, 100 * error);
     }
 
     private static String percent(double share) {
-        return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+        return Math.abs(share) < LEAST ? LITTLE : String.format(Locale.ROOT, "%.1f %%", 100 * share);
     }
 
     private static String signed(double value) {

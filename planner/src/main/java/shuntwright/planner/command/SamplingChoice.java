@@ -1,45 +1,44 @@
 package shuntwright.planner.command;
 
-import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.OptionalLong;
+import java.util.List;
 
-import shuntwright.board.Acceptance;
 import shuntwright.board.Board;
-import shuntwright.board.Sampling;
+import shuntwright.planner.entry.BoardField;
+import shuntwright.quantity.Reading;
 
 /**
- * What the command line says of sampling; what is empty is as the board has it.
+ * What the command line says of sampling; what it does not say is as the board has it.
  *
- * @param trials   of each channel; {@link #ADAPTIVE} stands for what the board says of adaptive trials, if it does
- * @param seed     of all draws
- * @param coverage coverage probability
- * @param skipped  true for not at all
+ * @param entries of fields of the board, all of them readable
+ * @param skipped true for not sampling at all
  */
-record SamplingChoice(Optional<Sampling.Trials> trials, OptionalLong seed, OptionalDouble coverage, boolean skipped) {
+record SamplingChoice(List<Entry> entries, boolean skipped) {
 
     /** As the board has it. */
-    static final SamplingChoice OF_THE_BOARD = new SamplingChoice(Optional.empty(), OptionalLong.empty(),
-            OptionalDouble.empty(), false);
+    static final SamplingChoice OF_THE_BOARD = new SamplingChoice(List.of(), false);
 
-    /** Adaptive as a board file's defaults are. */
-    static final Sampling.Trials ADAPTIVE = new Sampling.Trials.Adaptive(2, 10_000_000);
+    /**
+     * One option.
+     *
+     * @param field of the board, typed as in the window
+     * @param text  typed
+     */
+    record Entry(BoardField field, String text) {}
+
+    SamplingChoice {
+        entries = List.copyOf(entries);
+    }
 
     /** The board for this run. */
     Board applied(Board board) {
-        Sampling own = board.uncertainty().sampling();
-        Sampling sampling = new Sampling(trials.map(each -> settled(each, own.trials())).orElse(own.trials()),
-                seed.orElse(own.seed()));
-        Acceptance acceptance = new Acceptance(board.acceptance().basis(),
-                coverage.orElse(board.acceptance().coverage()));
-        return board.withUncertainty(board.uncertainty().withSampling(sampling)).withAcceptance(acceptance);
-    }
-
-    private static Sampling.Trials settled(Sampling.Trials wanted, Sampling.Trials own) {
-        return switch (wanted) {
-            case Sampling.Trials.Fixed fixed -> fixed;
-            case Sampling.Trials.Adaptive adaptive -> own instanceof Sampling.Trials.Adaptive ? own : adaptive;
-        };
+        Board result = board;
+        for (Entry each : entries) {
+            result = switch (each.field().read(each.text(), result)) {
+                case Reading.Value<Board>(Board changed) -> changed;
+                case Reading.Misread<Board>(String problem) -> throw new IllegalArgumentException(problem);
+            };
+        }
+        return result;
     }
 
     /** The board of this run with what it had of its own, for a file that outlives the run. */

@@ -1,38 +1,27 @@
 package shuntwright.planner.command;
 
-import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.OptionalLong;
 
 import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.TypeConversionException;
-import shuntwright.board.Sampling;
-import shuntwright.quantity.Dimension;
-import shuntwright.quantity.QuantityReader;
-import shuntwright.quantity.Range;
+import shuntwright.board.Board;
+import shuntwright.planner.entry.BoardField;
 import shuntwright.quantity.Reading;
 
 /** How a plan is sampled, for this run only. */
 final class SamplingOptions {
-    private static final String ADAPTIVE = "adaptive";
-    /** Signs of a wrong value that are repeated to the user. */
-    private static final int LONGEST = 40;
 
-    /** What a coverage probability may be, as the board file has it; the upper end is excluded. */
-    private static final Range COVERAGE = Range.of(0.5, 1);
+    @Option(names = "--trials", paramLabel = "N|adaptive", converter = Trials.class, description = "Trials of each channel, 10,000 to 100,000,000, or adaptive: until the results are stable. For this run, instead of the board's.")
+    private Optional<SamplingChoice.Entry> trials = Optional.empty();
 
-    @Option(names = "--trials", paramLabel = "N|adaptive", converter = TrialsReader.class, description = "Trials of each channel, 10000 to 100000000, or adaptive: until the results are stable. Instead of what the board says, for this run only.")
-    private Optional<Sampling.Trials> trials = Optional.empty();
+    @Option(names = "--seed", paramLabel = "N", converter = Seed.class, description = "Seed of all draws, a whole number. The same seed gives the same results to the last digit on any number of threads. For this run, instead of the board's.")
+    private Optional<SamplingChoice.Entry> seed = Optional.empty();
 
-    @Option(names = "--seed", paramLabel = "N", converter = SeedReader.class, description = "Seed of all draws, a whole number. The same seed gives the same results to the last digit on any number of threads.")
-    private Optional<Long> seed = Optional.empty();
-
-    @Option(names = "--coverage", paramLabel = "P", converter = CoverageReader.class, description = "Coverage probability of the coverage intervals, from 50 %% to below 100 %%: 99.9%% or 0.999. Instead of the board's, for this run only.")
-    private Optional<Double> coverage = Optional.empty();
+    @Option(names = "--coverage", paramLabel = "P", converter = Coverage.class, description = "Coverage probability of the coverage intervals, from 50 %% to below 100 %%: 99.9%% or 0.999. For this run, instead of the board's.")
+    private Optional<SamplingChoice.Entry> coverage = Optional.empty();
 
     @Option(names = "--no-sampling", description = "Do not sample: faster, but without probabilities and yield, and coverage intervals rest on a first look.")
     private boolean skipped;
@@ -46,65 +35,48 @@ final class SamplingOptions {
             throw new BadInput("With --no-sampling nothing is drawn, so " + String.join(" and ", idle)
                     + " can have no effect; leave out one or the other.");
         }
-        return new SamplingChoice(trials,
-                seed.map(OptionalLong::of).orElseGet(OptionalLong::empty),
-                coverage.map(OptionalDouble::of).orElseGet(OptionalDouble::empty), skipped);
+        List<SamplingChoice.Entry> entries = new ArrayList<>();
+        List.of(trials, seed, coverage).forEach(each -> each.ifPresent(entries::add));
+        return new SamplingChoice(entries, skipped);
     }
 
-    /** Reads "adaptive" or a whole number, "1e6" too. */
-    static final class TrialsReader implements ITypeConverter<Sampling.Trials> {
+    /** Reads what can be typed into a field of the board in the window. */
+    private abstract static class Typed implements ITypeConverter<SamplingChoice.Entry> {
+        private static final Board ANY = Board.named("any");
+
+        private final BoardField field;
+
+        Typed(BoardField field) {
+            this.field = field;
+        }
+
         @Override
-        public Sampling.Trials convert(String text) {
-            if (text.equals(ADAPTIVE)) {
-                return SamplingChoice.ADAPTIVE;
-            }
-            try {
-                int count = new BigDecimal(text).intValueExact();
-                if (count >= Sampling.LEAST && count <= Sampling.MOST) {
-                    return new Sampling.Trials.Fixed(count);
-                }
-            } catch (ArithmeticException | NumberFormatException _) {
-                // Said below: no such number can be drawn.
-            }
-            throw new TypeConversionException(quoted(text) + " is no number of trials; allowed is a whole number from "
-                    + Sampling.LEAST + " to " + Sampling.MOST + ", or " + ADAPTIVE + ", for example "
-                    + "1000000.");
+        public SamplingChoice.Entry convert(String text) {
+            return switch (field.read(text, ANY)) {
+                case Reading.Value<Board> _ -> new SamplingChoice.Entry(field, text);
+                case Reading.Misread<Board>(String problem) -> throw new TypeConversionException(problem);
+            };
+        }
+    }
+
+    /** Reads a number of trials. */
+    static final class Trials extends Typed {
+        Trials() {
+            super(BoardField.TRIALS);
         }
     }
 
     /** Reads a seed. */
-    static final class SeedReader implements ITypeConverter<Long> {
-        @Override
-        public Long convert(String text) {
-            try {
-                return Long.valueOf(text);
-            } catch (NumberFormatException _) {
-                throw new TypeConversionException(quoted(text) + " is no seed; allowed is a whole number from "
-                        + Long.MIN_VALUE + " to " + Long.MAX_VALUE + ", for example 1.");
-            }
+    static final class Seed extends Typed {
+        Seed() {
+            super(BoardField.SEED);
         }
     }
 
     /** Reads a coverage probability. */
-    static final class CoverageReader implements ITypeConverter<Double> {
-        @Override
-        public Double convert(String text) {
-            return switch (QuantityReader.number(text, Dimension.RATIO)) {
-                case Reading.Misread<Double>(String problem) -> throw new TypeConversionException(problem);
-                case Reading.Value<Double>(Double value) when value >= COVERAGE.min() && value < COVERAGE.max() ->
-                    value;
-                case Reading.Value<Double>(Double value) -> throw new TypeConversionException(quoted(text)
-                        + " is no coverage probability; allowed is from 50 % to below 100 %, for example 99.9% or "
-                        + "0.999." + (forgotten(text, value) ? " Maybe " + text.strip() + "% was meant." : ""));
-            };
+    static final class Coverage extends Typed {
+        Coverage() {
+            super(BoardField.COVERAGE);
         }
-
-        private static boolean forgotten(String text, double value) {
-            return !text.contains("%") && COVERAGE.contains(value / 100) && value < 100;
-        }
-    }
-
-    private static String quoted(String text) {
-        return "\"" + (text.length() > LONGEST ? text.substring(0, LONGEST) + "…" : text) + "\"";
     }
 }

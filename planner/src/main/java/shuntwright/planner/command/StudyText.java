@@ -2,10 +2,10 @@ package shuntwright.planner.command;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Sampling;
+import shuntwright.planner.work.TrialWords;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Range;
@@ -60,14 +60,9 @@ final class StudyText {
         String count = drawn.isEmpty()
                 ? "no circuit, so no"
                 : drawn.size() == 1
-                        ? count(drawn.getFirst())
-                        : count(drawn.getFirst()) + " to " + count(drawn.getLast());
+                        ? TrialWords.count(drawn.getFirst())
+                        : TrialWords.count(drawn.getFirst()) + " to " + TrialWords.count(drawn.getLast());
         return count + " trials of each channel" + kind + ", seed " + study.sampling().seed();
-    }
-
-    /** "1,000,000". */
-    static String count(long number) {
-        return String.format(Locale.ROOT, "%,d", number);
     }
 
     private static String names(List<String> channels) {

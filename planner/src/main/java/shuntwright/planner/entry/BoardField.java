@@ -60,7 +60,8 @@ public enum BoardField {
             (text, board) -> QuantityReader.number(text, Dimension.RATIO).then(value -> value >= 0.5 && value < 1
                     ? Reading.value(board.withAcceptance(new Acceptance(board.acceptance().basis(), value)))
                     : Reading.misread("The coverage probability must be from 50 % to below 100 %, got "
-                            + QuantityWriter.show(value, Dimension.RATIO) + "."))),
+                            + QuantityWriter.show(value, Dimension.RATIO) + "."
+                            + (value >= 50 && value < 100 ? " Maybe " + text.strip() + " % was meant." : "")))),
     BUILD_QUANTITY("Boards built at once", "decides the price breaks, such as 100",
             board -> Integer.toString(board.buildQuantity()),
             (text, board) -> whole(text, 1, 10_000_000).then(count -> Reading.value(board.withBuildQuantity(count)))),

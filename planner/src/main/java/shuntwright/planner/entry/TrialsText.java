@@ -10,7 +10,7 @@ import shuntwright.quantity.Reading;
 
 /** Trials and seed of a board as text. */
 final class TrialsText {
-    private static final Pattern FIXED = Pattern.compile("\\d[\\d, ]*");
+    private static final Pattern FIXED = Pattern.compile("\\d[\\d, ]*|\\d+(?:\\.\\d+)?e\\d{1,2}");
     private static final Pattern ADAPTIVE = Pattern
             .compile("adaptive,?( ([12]) digits?)?,?( (?:at )?most (\\d[\\d, ]*))?");
     private static final int DIGITS = 2;
@@ -42,8 +42,8 @@ final class TrialsText {
                     .then(most -> with(board, new Sampling.Trials.Adaptive(digits, most)));
         }
         return Reading
-                .misread("Type a number of trials, such as 1,000,000, or adaptive, 2 digits, most 10,000,000; got \""
-                        + text.strip() + "\".");
+                .misread("Type a number of trials from " + grouped(Sampling.LEAST) + " to " + grouped(Sampling.MOST)
+                        + ", such as 1,000,000, or adaptive, 2 digits, most 10,000,000; got \"" + text.strip() + "\".");
     }
 
     private static Reading<Board> with(Board board, Sampling.Trials trials) {
@@ -54,9 +54,9 @@ final class TrialsText {
     private static Reading<Integer> count(String text) {
         String plain = text.replaceAll("[, ]", "");
         double count = Double.parseDouble(plain);
-        return count >= Sampling.LEAST && count <= Sampling.MOST
+        return count >= Sampling.LEAST && count <= Sampling.MOST && count == Math.rint(count)
                 ? Reading.value((int) count)
-                : Reading.misread("The number of trials must be from " + grouped(Sampling.LEAST) + " to "
+                : Reading.misread("The number of trials must be a whole number from " + grouped(Sampling.LEAST) + " to "
                         + grouped(Sampling.MOST) + ", got " + text.strip() + ".");
     }
 
@@ -69,7 +69,8 @@ final class TrialsText {
             Sampling sampling = new Sampling(board.uncertainty().sampling().trials(), Long.parseLong(text.strip()));
             return Reading.value(board.withUncertainty(board.uncertainty().withSampling(sampling)));
         } catch (NumberFormatException _) {
-            return Reading.misread("The seed must be a whole number of at most 18 digits, such as 1, got \""
+            return Reading.misread("The seed must be a whole number from " + Long.MIN_VALUE + " to " + Long.MAX_VALUE
+                    + ", such as 1, got \""
                     + text.strip() + "\".");
         }
     }

@@ -165,7 +165,7 @@ public final class PlanSampling {
                 }
                 job.step = step;
                 Plan sampled = sampler.sample(plan, step.sampling(), step.depth(), job);
-                boolean last = step == steps.getLast();
+                boolean last = step.equals(steps.getLast());
                 publisher.execute(() -> publish(job, last, () -> reached.accept(sampled)));
             }
         } catch (BoardPlanner.Cancelled _) {

@@ -48,6 +48,11 @@ class BudgetTextTest {
     }
 
     @Test
+    void what_would_round_to_nothing_is_said_to_be_little() {
+        assertThat(line("amplifier offset (amplifier)")).matches(".* < 0\\.1 % +< 0\\.1 % +0\\.1 %");
+    }
+
+    @Test
     void trials_without_a_value_are_said() {
         assertThat(BudgetText.of(plan, plan.channels().get(2), false)).anySatisfy(
                 each -> assertThat(each).contains("thermal runaway", "in 12", "counted as outside"));

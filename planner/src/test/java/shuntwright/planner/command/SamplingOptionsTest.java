@@ -2,10 +2,6 @@ package shuntwright.planner.command;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.OptionalLong;
-
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -47,41 +43,42 @@ class SamplingOptionsTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"10000, 10000", "100000000, 100000000", "2.5e5, 250000", "1000000.0, 1000000"})
+    @CsvSource({"10000, 10000", "100000000, 100000000", "2.5e5, 250000", "'1,000,000', 1000000"})
     void a_number_of_trials_is_read_however_it_is_typed(String typed, int trials) {
-        assertThat(chosen("--trials", typed).trials()).contains(new Trials.Fixed(trials));
+        assertThat(chosen("--trials", typed).applied(BOARD).uncertainty().sampling().trials())
+                .isEqualTo(new Trials.Fixed(trials));
     }
 
     @ParameterizedTest
     @CsvSource({"99.9%, 0.999", "0.999, 0.999", "50 %, 0.5", "99.9937 %, 0.999937"})
     void a_coverage_probability_is_a_share_or_a_percentage(String typed, double coverage) {
-        assertThat(chosen("--coverage", typed).coverage()).isEqualTo(OptionalDouble.of(coverage));
+        assertThat(chosen("--coverage", typed).applied(BOARD).acceptance().coverage()).isEqualTo(coverage);
     }
 
-    @Test
-    void adaptive_trials_are_the_boards_where_it_has_some() {
-        Sampling own = new Sampling(new Trials.Adaptive(1, 500_000), 1);
-        Board adaptive = BOARD.withUncertainty(Uncertainty.DEFAULT.withSampling(own));
-
-        assertThat(chosen("--trials", "adaptive").applied(adaptive).uncertainty().sampling()).isEqualTo(own);
-        assertThat(chosen("--trials", "adaptive").applied(BOARD).uncertainty().sampling().trials())
-                .isEqualTo(SamplingChoice.ADAPTIVE);
+    @ParameterizedTest
+    @CsvSource({"adaptive, 2, 10000000", "'adaptive, 1 digit, most 500,000', 1, 500000"})
+    void trials_may_be_adaptive(String typed, int digits, int most) {
+        assertThat(chosen("--trials", typed).applied(BOARD).uncertainty().sampling().trials())
+                .isEqualTo(new Trials.Adaptive(digits, most));
     }
 
     @Test
     void sampling_can_be_left_out() {
-        assertThat(chosen("--no-sampling", "--coverage", "0.9")).isEqualTo(
-                new SamplingChoice(Optional.empty(), OptionalLong.empty(), OptionalDouble.of(0.9), true));
+        SamplingChoice choice = chosen("--no-sampling", "--coverage", "0.9");
+
+        assertThat(choice.skipped()).isTrue();
+        assertThat(choice.applied(BOARD).acceptance().coverage()).isEqualTo(0.9);
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"9999", "100000001", "0", "-5", "1e99999", "10000.5", "many", "Adaptive", "", "NaN"})
+    @ValueSource(strings = {"9999", "100000001", "0", "-5", "1e99999", "10000.5", "1.00005e4", "many", "adaptif", "",
+            "NaN"})
     void a_wrong_number_of_trials_is_refused_with_the_range(String typed) {
         Run run = Run.of("plan", Run.WREN, "--trials", typed);
 
         assertThat(run.code()).isEqualTo(2);
         assertThat(run.out()).isEmpty();
-        assertThat(run.err()).contains("--trials", "\"" + typed + "\"", "10000 to 100000000", "adaptive");
+        assertThat(run.err()).contains("--trials", typed, "from 10,000 to 100,000,000");
     }
 
     @ParameterizedTest
@@ -99,13 +96,13 @@ class SamplingOptionsTest {
         Run run = Run.of("plan", Run.WREN, "--coverage", typed);
 
         assertThat(run.code()).isEqualTo(2);
-        assertThat(run.err()).contains("--coverage", "\"" + typed + "\"", "from 50 % to below 100 %")
+        assertThat(run.err()).contains("--coverage", "from 50 % to below 100 %")
                 .doesNotContain("Maybe");
     }
 
     @Test
     void a_percentage_without_its_sign_is_guessed() {
-        assertThat(Run.of("plan", Run.WREN, "--coverage", "99.9").err()).contains("Maybe 99.9% was meant");
+        assertThat(Run.of("plan", Run.WREN, "--coverage", "99.9").err()).contains("Maybe 99.9 % was meant");
     }
 
     @ParameterizedTest

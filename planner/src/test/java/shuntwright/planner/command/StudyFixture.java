@@ -31,6 +31,7 @@ import shuntwright.sampling.Validation;
 final class StudyFixture {
     static final Input SUPPLY = input(Slot.SUPPLY, new Owner.Shared("supply"));
     static final Input TOLERANCE = input(Slot.SHUNT_TOLERANCE, new Owner.Own("shunt 1"));
+    static final Input OFFSET = input(Slot.OFFSET, new Owner.Own("amplifier"));
     static final Input EMF = input(Slot.THERMAL_EMF, new Owner.Own("shunt 1"));
 
     /** Of 0 in a million trials at most this share, by 95 %: 1 − 0.025^(1/10⁶) (Clopper-Pearson). */
@@ -88,7 +89,8 @@ final class StudyFixture {
         return new ChannelStudy(name, 0.9973, settled, List.of(new Propagated(Outcome.TRIP, Range.of(11, 12), trip,
                 new Validation(valid, 2, 5e-4, 1.5e-3, 2e-4),
                 List.of(new EffectIndex(SUPPLY, 0.7, 0.003, 0.71, 0.002),
-                        new EffectIndex(TOLERANCE, 0.28, 0.002, 0.281, 0.001)))),
+                        new EffectIndex(TOLERANCE, 0.28, 0.002, 0.281, 0.001),
+                        new EffectIndex(OFFSET, -4e-4, 9e-4, 6e-4, 3e-4)))),
                 outside);
     }
 
@@ -98,6 +100,7 @@ final class StudyFixture {
         Assessment budgeted = new Assessment(trip.outcome(), trip.nominal(), trip.limits(), trip.combined(),
                 trip.allowed(), List.of(new BudgetLine(SUPPLY, 1, -0.2, 0.21, 0.08, 0.7),
                         new BudgetLine(TOLERANCE, 1, -0.1, 0.11, 0.05, 0.28),
+                        new BudgetLine(OFFSET, 1, -0.02, 0.02, 1e-3, 4e-4),
                         new BudgetLine(EMF, 1, -0.01, 0.01, 0.002, 0.02)),
                 trip.propagated());
         SolvedChannel solved = new SolvedChannel(old.demand(), old.circuit(), old.around(), old.settings(),

@@ -35,7 +35,7 @@ class BoardFieldTest {
             "AMBIENT|-20..60|-20 .. 60 °C", "HEAT_LIMIT|''|''", "HEAT_LIMIT|4|4 W", "BASIS|coverage|coverage",
             "BUILD_QUANTITY|12|12", "REFERENCES|quiet = REF-1, adc=REF-2|quiet = REF-1, adc = REF-2",
             "ALERT_LINES|alert, pumps|alert, pumps", "PARALLEL_SHUNTS|4|4", "POWER_MARGIN|50 %|50 %",
-            "TRIALS|250000|250,000", "TRIALS|2 000 000|2,000,000",
+            "TRIALS|250000|250,000", "TRIALS|2.5e5|250,000", "TRIALS|2 000 000|2,000,000",
             "TRIALS|Adaptive|'adaptive, 2 digits, most 10,000,000'",
             "TRIALS|adaptive 1 digit, at most 50,000|'adaptive, 1 digit, most 50,000'", "SEED|-7|-7"})
     void takesWhatEngineersWrite(BoardField field, String typed, String shown) {
@@ -49,7 +49,8 @@ class BoardFieldTest {
             "COVERAGE|0.3|50 %", "BASIS|luck|limits", "REFERENCES|quiet|name = part number",
             "REFERENCES|supply = X|cannot be called", "ZONES|a, a|twice", "PARALLEL_SHUNTS|9|1 to 8",
             "POWER_MARGIN|70|above 100 %", "SUPPLY_VOLTAGE|-3|above 0 V", "TRIALS|1000|from 10,000 to 100,000,000",
-            "TRIALS|lots|such as 1,000,000",
+            "TRIALS|lots|such as 1,000,000", "TRIALS|1e9|from 10,000", "TRIALS|1.23456e4|whole number",
+            "COVERAGE|99.9|Maybe 99.9 % was meant",
             "TRIALS|adaptive 3 digits|such as 1,000,000", "TRIALS|99999999999|from 10,000", "SEED|1.5|whole number",
             "AMBIENT|-300..20|-273"})
     void refusesWithAReason(BoardField field, String typed, String reason) {
