@@ -131,7 +131,7 @@ final class BudgetColumns {
             BudgetRow.Share shown = share.apply(row);
             bar.show(shown);
             setGraphic(bar);
-            String words = title + " " + (shown.known() ? shown.text() : "not sampled yet")
+            String words = title + " " + (shown.equals(BudgetRow.Share.OPEN) ? "not sampled yet" : shown.text())
                     + (shown.note().isEmpty() ? "" : " " + shown.note());
             tip.setText(words);
             setTooltip(tip);

@@ -1,8 +1,10 @@
 package shuntwright.planner.window.budget;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 
 import shuntwright.accuracy.Assessment;
@@ -29,33 +31,47 @@ final class BudgetRows {
     static List<BudgetRow> of(Assessment assessment, Optional<Propagated> propagated, double target) {
         List<EffectIndex> effects = propagated.map(Propagated::effects).orElse(List.of());
         double longest = assessment.budget().stream().mapToDouble(BudgetLine::widest).max().orElse(0);
-        List<BudgetRow> rows = new ArrayList<>();
-        for (BudgetLine line : assessment.budget()) {
-            rows.add(row(line, effect(effects, line.input()), target, longest > 0 ? longest : 1));
-        }
+        List<BudgetLine> lines = new ArrayList<>(assessment.budget());
         for (EffectIndex effect : effects) {
             if (assessment.budget().stream().noneMatch(line -> line.input().equals(effect.input()))) {
-                rows.add(row(new BudgetLine(effect.input(), 0, 0, 0, 0, 0), Optional.of(effect), target, 1));
+                lines.add(new BudgetLine(effect.input(), 0, 0, 0, 0, 0));
             }
+        }
+        Map<String, Input> reels = new HashMap<>();
+        List<BudgetRow> rows = new ArrayList<>();
+        for (BudgetLine line : lines) {
+            Input piece = line.input().reel().map(reel -> reels.computeIfAbsent(reel.name() + line.input().slot().unit(),
+                    _ -> line.input())).orElse(line.input());
+            Effects shown = piece.equals(line.input()) ? effects(effects, line.input()) : Effects.with(piece);
+            rows.add(row(line, shown, target, longest > 0 ? longest : 1));
         }
         return rows;
     }
 
-    private static Optional<EffectIndex> effect(List<EffectIndex> effects, Input input) {
-        return effects.stream().filter(each -> each.input().equals(input)).findFirst();
+    /** Both indices of an input. */
+    private record Effects(Share first, Share total) {
+        /** Pieces of one reel move together and have one index, which stands with the first of them. */
+        static Effects with(Input piece) {
+            Share share = new Share("with " + piece.owner().name(), "pieces of one reel have one index", -1, 0);
+            return new Effects(share, share);
+        }
     }
 
-    private static BudgetRow row(BudgetLine line, Optional<EffectIndex> effect, double target, double longest) {
+    private static Effects effects(List<EffectIndex> effects, Input input) {
+        String reel = input.reel().map(each -> ", of all pieces of " + each.name() + " together").orElse("");
+        Optional<EffectIndex> found = effects.stream().filter(each -> each.input().equals(input)).findFirst();
+        Share none = effects.isEmpty() ? Share.OPEN : new Share(share(0), "no effect in the trials", 0, 0);
+        return new Effects(found.map(each -> share(each.first(), each.firstError(), reel)).orElse(none),
+                found.map(each -> share(each.total(), each.totalError(), reel)).orElse(none));
+    }
+
+    private static BudgetRow row(BudgetLine line, Effects effects, double target, double longest) {
         Input input = line.input();
-        String reel = input.reel().map(each -> ". Pieces of " + each.name()
-                + " move together and have one index").orElse("");
-        Share first = effect.map(each -> share(each.first(), each.firstError(), reel)).orElse(Share.OPEN);
-        Share total = effect.map(each -> share(each.total(), each.totalError(), reel)).orElse(Share.OPEN);
         return new BudgetRow(input.slot().words(), owner(input.owner()), distribution(input.distribution()),
                 new BudgetRow.Limits(signed(line.towardsLow()), signed(line.towardsHigh()),
                         percent(line.towardsLow() / target, line.towardsHigh() / target),
                         line.towardsLow() / longest, line.towardsHigh() / longest, line.widest()),
-                new Share(share(line.varianceShare()), "", line.varianceShare(), 0), first, total);
+                new Share(share(line.varianceShare()), "", line.varianceShare(), 0), effects.first(), effects.total());
     }
 
     private static String owner(Owner owner) {

@@ -47,6 +47,10 @@ final class ShareBar extends Region {
 
     @Override
     protected void layoutChildren() {
+        if (!shown.known()) {
+            text.resizeRelocate(0, 0, getWidth(), getHeight());
+            return;
+        }
         double room = Math.max(8, getWidth() - Math.max(TEXT, text.prefWidth(-1)) - 4);
         double height = getHeight();
         double end = at(shown.value(), room);

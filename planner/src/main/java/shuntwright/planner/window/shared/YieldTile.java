@@ -17,13 +17,17 @@ final class YieldTile {
 
     private static final List<BoardField> FIELDS = List.of(BoardField.TRIALS, BoardField.SEED);
 
+    /** A cost of fewer standard errors than this may be chance (common practice: two for about 95 %). */
+    private static final double ERRORS = 2;
+
     private YieldTile() {
     }
 
     static SharedTile of(BoardStudy study) {
         BoardYield yield = study.yield();
         String product = product(study);
-        String costly = yield.shared().stream().filter(each -> each.cost() > 0).findFirst()
+        String costly = yield.shared().stream().filter(each -> each.cost() > ERRORS * each.standardError())
+                .findFirst()
                 .map(each -> ", " + each.owner() + " costs " + Chance.difference(each.cost()))
                 .orElse("");
         return new SharedTile(TITLE, Chance.of(yield.inside()), OptionalDouble.empty(), true, FIELDS)

@@ -10,7 +10,14 @@ import java.util.Queue;
 
 import org.junit.jupiter.api.Test;
 
+import shuntwright.accuracy.Assessment;
+import shuntwright.accuracy.BudgetLine;
+import shuntwright.accuracy.CombinedUncertainty;
+import shuntwright.accuracy.Input;
 import shuntwright.accuracy.Outcome;
+import shuntwright.accuracy.Owner;
+import shuntwright.accuracy.Reel;
+import shuntwright.accuracy.Slot;
 import shuntwright.board.Board;
 import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
@@ -24,6 +31,15 @@ import shuntwright.planner.Sessions;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
+import shuntwright.quantity.Distribution;
+import shuntwright.quantity.Range;
+import shuntwright.sampling.CoverageInterval;
+import shuntwright.sampling.EffectIndex;
+import shuntwright.sampling.Histogram;
+import shuntwright.sampling.Probability;
+import shuntwright.sampling.Propagated;
+import shuntwright.sampling.Sampled;
+import shuntwright.sampling.Validation;
 
 class BudgetModelTest {
     private final BoardSession session = Sessions.of(HandMadeBoards.boat());
@@ -101,6 +117,37 @@ class BudgetModelTest {
         assertThat(fact(model, "propagated")).startsWith("not sampled: trials are of the calibrated reading");
         assertThat(model.rows()).allMatch(row -> !row.first().known());
     }
+
+    @Test
+    void piecesOfOneReelHaveOneIndex() {
+        Reel reel = new Reel("reel of SH-4", 0.5);
+        Assessment trip = new Assessment(Outcome.TRIP, 10, Range.of(9, 11),
+                new CombinedUncertainty(10, 0.1, Double.POSITIVE_INFINITY, 0.9973, 3), Range.of(8, 12),
+                List.of(line("shunt 1", Optional.of(reel)), line("shunt 2", Optional.of(reel)),
+                        line("amplifier", Optional.empty())),
+                Optional.empty());
+        List<EffectIndex> effects = trip.budget().stream().limit(2)
+                .map(each -> new EffectIndex(each.input(), 0.6, 0.01, 0.62, 0.01)).toList();
+        Propagated propagated = new Propagated(Outcome.TRIP, trip.allowed(), SAMPLED,
+                new Validation(true, 2, 1, 0, 0), effects);
+        List<BudgetRow> rows = BudgetRows.of(trip, Optional.of(propagated), 10);
+        assertThat(rows).extracting(row -> row.total().text()).containsExactly("62.0 %", "with shunt 1", "0.0 %");
+        assertThat(rows.getFirst().total().note()).contains("of all pieces of reel of SH-4 together");
+        assertThat(BudgetRows.of(trip, Optional.empty(), 10)).as("before trials")
+                .allMatch(row -> !row.total().known());
+    }
+
+    private static BudgetLine line(String owner, Optional<Reel> reel) {
+        return new BudgetLine(new Input(Slot.SHUNT_TOLERANCE, 0, new Owner.Own(owner), 0, Range.of(-0.01, 0.01),
+                new Distribution.Uniform(), reel), 1, -0.1, 0.1, 0.05, 0.3);
+    }
+
+    private static final CoverageInterval NINE_TO_ELEVEN = new CoverageInterval(Range.of(9, 11),
+            new CoverageInterval.Ends(0.1, 0.1));
+
+    private static final Sampled SAMPLED = new Sampled(10_000, 0, 10, 0.1, NINE_TO_ELEVEN, NINE_TO_ELEVEN,
+            new Probability(0, Range.of(0, 4e-4), 0, Probability.Method.COUNTED, 10_000),
+            new Histogram(Range.of(9, 11), List.of(10_000L), 10_000));
 
     @Test
     void anIncompleteChannelHasNoBudget() {
