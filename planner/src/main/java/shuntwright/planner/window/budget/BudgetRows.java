@@ -40,8 +40,10 @@ final class BudgetRows {
         Map<String, Input> reels = new HashMap<>();
         List<BudgetRow> rows = new ArrayList<>();
         for (BudgetLine line : lines) {
-            Input piece = line.input().reel().map(reel -> reels.computeIfAbsent(reel.name() + line.input().slot().unit(),
-                    _ -> line.input())).orElse(line.input());
+            Input piece = line.input().reel()
+                    .map(reel -> reels.computeIfAbsent(reel.name() + line.input().slot().unit(),
+                            _ -> line.input()))
+                    .orElse(line.input());
             Effects shown = piece.equals(line.input()) ? effects(effects, line.input()) : Effects.with(piece);
             rows.add(row(line, shown, target, longest > 0 ? longest : 1));
         }
