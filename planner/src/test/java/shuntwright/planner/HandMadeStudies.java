@@ -73,8 +73,8 @@ public final class HandMadeStudies {
         Verdict verdict = assessments.stream().allMatch(Assessment::insideByLimits)
                 ? Verdict.INSIDE
                 : assessments.stream().allMatch(Assessment::insideByCoverage) ? Verdict.LIKELY : Verdict.OUTSIDE;
-        boolean accepted = verdict == Verdict.INSIDE || verdict == Verdict.LIKELY
-                && board.board().acceptance().basis() == Acceptance.Basis.COVERAGE;
+        boolean accepted = verdict == Verdict.INSIDE
+                || (verdict == Verdict.LIKELY && board.board().acceptance().basis() == Acceptance.Basis.COVERAGE);
         return new ChannelPlan(plan.channel(), verdict, accepted, Optional.of(new SolvedChannel(solved.demand(),
                 solved.circuit(), solved.around(), solved.settings(), solved.inputs(), assessments,
                 solved.uncalibrated(), solved.limits(), solved.heat(), solved.cost())), plan.findings(), plan.cures(),
@@ -99,7 +99,7 @@ public final class HandMadeStudies {
         double width = cells.width() / CELLS;
         List<Long> counts = IntStream.range(0, CELLS).mapToObj(cell -> Math.round(trials * normal
                 .probability(cells.min() + cell * width, cells.min() + (cell + 1) * width))).toList();
-        double error = standard / Math.sqrt(trials) * 5;
+        double error = standard / Math.sqrt((double) trials) * 5;
         CoverageInterval interval = new CoverageInterval(assessment.combined().interval(),
                 new CoverageInterval.Ends(error, error));
         List<EffectIndex> effects = new ArrayList<>();

@@ -41,7 +41,7 @@ final class SamplingOptions {
     }
 
     /** Reads what can be typed into a field of the board in the window. */
-    private abstract static class Typed implements ITypeConverter<SamplingChoice.Entry> {
+    abstract static class Typed implements ITypeConverter<SamplingChoice.Entry> {
         private static final Board ANY = Board.named("any");
 
         private final BoardField field;
