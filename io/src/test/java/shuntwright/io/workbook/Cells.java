@@ -30,7 +30,7 @@ final class Cells {
         throw new AssertionError("no row " + first + " in " + sheet.getSheetName());
     }
 
-    /** The cell of that line under a header that starts with a text, in a group where one is given. */
+    /** The cell of that line under a header that starts with a text, in a group that starts so where one is given. */
     static XSSFCell at(XSSFSheet sheet, String line, String header) {
         return row(sheet, line).getCell(column(sheet, "", header));
     }
@@ -66,7 +66,7 @@ final class Cells {
             if (!group.isEmpty() && above != null) {
                 current = above.getStringCellValue();
             }
-            if (cell.getStringCellValue().startsWith(header) && current.equals(group)) {
+            if (cell.getStringCellValue().startsWith(header) && current.startsWith(group)) {
                 return index;
             }
         }
