@@ -30,7 +30,7 @@ final class Cells {
         throw new AssertionError("no row " + first + " in " + sheet.getSheetName());
     }
 
-    /** The cell of that line under a header that starts with a text, in a group that starts with one where it is given. */
+    /** The cell of that line under a header that starts with a text, in a group that starts so where one is given. */
     static XSSFCell at(XSSFSheet sheet, String line, String header) {
         return row(sheet, line).getCell(column(sheet, "", header));
     }
