@@ -22,6 +22,8 @@ import shuntwright.board.ThresholdDemand;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.Threshold;
 import shuntwright.io.workplace.Workplace;
+import shuntwright.parts.Catalogue;
+import shuntwright.parts.ResistorSeries;
 import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Progress;
@@ -47,13 +49,24 @@ public class SampledChannel {
     public void planOnce() {
         Workplace lantern = Workplace.open(Path.of("demo-boards", "camp-lantern.board.json"), List.of()).ifOpened()
                 .orElseThrow();
-        plan = new BoardPlanner().plan(lantern.board(), lantern.catalogue(), Progress.SILENT);
+        Catalogue catalogue = withoutReels(lantern.catalogue());
+        plan = new BoardPlanner().plan(lantern.board(), catalogue, Progress.SILENT);
         SolvedChannel chosen = plan().channels().stream().flatMap(each -> each.solved().stream())
                 .filter(SampledChannel::plain).findFirst().orElseThrow();
         full = chosen;
         Board alone = lantern.board().withChannels(List.of(tripOnly(chosen.demand().channel())));
-        lean = new BoardPlanner().plan(alone, lantern.catalogue(), Progress.SILENT).channels().getFirst().solved()
+        lean = new BoardPlanner().plan(alone, catalogue, Progress.SILENT).channels().getFirst().solved()
                 .filter(SampledChannel::plain).orElseThrow();
+    }
+
+    /** Pieces of a reel take three draws each, which plain loops do not have. */
+    private static Catalogue withoutReels(Catalogue catalogue) {
+        return Catalogue.of(catalogue.currency(), catalogue.parts().stream()
+                .map(part -> part instanceof ResistorSeries r
+                        ? new ResistorSeries(r.partNumber(), r.description(), r.series(), r.values(), r.tolerance(),
+                                r.temperatureCoefficient(), r.ageing(), 0, r.power(), r.purchase())
+                        : part)
+                .toList());
     }
 
     /** One shunt, a divider of its own at the supply, all inputs uniform: what {@link PlainTrials} can do. */
