@@ -20,6 +20,14 @@ public record Sampling(Trials trials, long seed) {
     /** How many trials. */
     public sealed interface Trials {
 
+        /** At most so many of each channel. */
+        default int atMost() {
+            return switch (this) {
+                case Fixed(int count) -> count;
+                case Adaptive(int _, int most) -> most;
+            };
+        }
+
         /** @param count of each channel, 10,000 to 100 million */
         record Fixed(int count) implements Trials {
             /** @throws IllegalArgumentException unless count is within the range */

@@ -176,10 +176,7 @@ public final class BoardSampler {
 
         Counter(Progress progress, Sampling sampling, int channels) {
             this.progress = progress;
-            this.perChannel = switch (sampling.trials()) {
-                case Sampling.Trials.Fixed(int count) -> count;
-                case Sampling.Trials.Adaptive(int _, int most) -> most;
-            };
+            this.perChannel = sampling.trials().atMost();
             this.total = perChannel * channels;
         }
 

@@ -73,8 +73,7 @@ final class ChannelSolver {
         for (int i = 0; i < intervals.size(); i++) {
             assessments.add(solved.assessments().get(i).withPropagated(intervals.get(i)));
         }
-        return new SolvedChannel(solved.demand(), solved.circuit(), solved.around(), solved.settings(),
-                solved.inputs(), assessments, solved.uncalibrated(), solved.limits(), solved.heat(), solved.cost());
+        return solved.withAssessments(assessments);
     }
 
     static Verdict verdict(SolvedChannel solved) {

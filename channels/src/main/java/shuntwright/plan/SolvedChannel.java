@@ -36,6 +36,11 @@ public record SolvedChannel(Demand demand, SenseCircuit circuit, Surroundings ar
         limits = List.copyOf(limits);
     }
 
+    public SolvedChannel withAssessments(List<Assessment> newAssessments) {
+        return new SolvedChannel(demand, circuit, around, settings, inputs, newAssessments, uncalibrated, limits, heat,
+                cost);
+    }
+
     public Assessment trip() {
         return assessments.getFirst();
     }

@@ -34,9 +34,7 @@ final class Studied {
                 .map(each -> study.outcome(each.outcome())
                         .map(found -> each.withPropagated(found.sampled().symmetric().range())).orElse(each))
                 .toList();
-        SolvedChannel sampled = new SolvedChannel(solved.demand(), solved.circuit(), solved.around(),
-                solved.settings(), solved.inputs(), assessments, solved.uncalibrated(), solved.limits(), solved.heat(),
-                solved.cost());
+        SolvedChannel sampled = solved.withAssessments(assessments);
         Verdict verdict = ChannelSolver.verdict(sampled);
         boolean accepted = ChannelSolver.accepted(verdict, acceptance);
         List<Finding> findings = new ArrayList<>();

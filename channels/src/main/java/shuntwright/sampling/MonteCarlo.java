@@ -38,6 +38,9 @@ public final class MonteCarlo {
     private final double[][] x;
     private final double[][] y;
     private final OutsideTrials outside;
+    /** Outputs of the first blocks, which are looked at before they are counted. */
+    private final List<double[][]> pilot = new ArrayList<>();
+    private final List<List<Range>> shortestOfParts = new ArrayList<>();
     private long trials;
 
     private MonteCarlo(Model model, List<Variable> variables, List<Range> allowed, double coverage, Sampling sampling,
@@ -55,11 +58,7 @@ public final class MonteCarlo {
         this.watch = watch;
         this.x = columns.allocate();
         this.y = new double[model.outputs()][Draws.BLOCK];
-        int most = switch (sampling.trials()) {
-            case Sampling.Trials.Fixed(int count) -> count;
-            case Sampling.Trials.Adaptive(int _, int limit) -> limit;
-        };
-        this.outside = new OutsideTrials(allowed, Math.min(REMEMBERED, most));
+        this.outside = new OutsideTrials(allowed, Math.min(REMEMBERED, sampling.trials().atMost()));
     }
 
     /** Thrown out of a run that its {@link Watch} cancelled. */
@@ -117,11 +116,7 @@ public final class MonteCarlo {
             Sampling sampling) {
         MonteCarlo monteCarlo = new MonteCarlo(model, variables, allowed, coverage, sampling, Watch.NONE);
         List<Tally> tallies = monteCarlo.tallies();
-        int trials = switch (sampling.trials()) {
-            case Sampling.Trials.Fixed(int count) -> count;
-            case Sampling.Trials.Adaptive(int _, int most) -> most;
-        };
-        monteCarlo.count(0, trials, tallies);
+        monteCarlo.count(0, sampling.trials().atMost(), tallies);
         return tallies.stream().map(each -> each.symmetric(coverage)).toList();
     }
 
@@ -172,6 +167,7 @@ public final class MonteCarlo {
         double[] origin = new double[model.outputs()];
         for (int block = 0; block < PILOT_BLOCKS; block++) {
             evaluate(block, Draws.BLOCK);
+            pilot.add(Arrays.stream(y).map(double[]::clone).toArray(double[][]::new));
             for (int i = 0; i < y.length; i++) {
                 for (double value : y[i]) {
                     if (Double.isFinite(value)) {
@@ -194,6 +190,13 @@ public final class MonteCarlo {
     }
 
     private void evaluate(int block, int count) {
+        if (block < pilot.size()) {
+            double[][] known = pilot.get(block);
+            for (int i = 0; i < y.length; i++) {
+                System.arraycopy(known[i], 0, y[i], 0, count);
+            }
+            return;
+        }
         columns.draw(block, 0, draws, scratch, x);
         model.evaluate(x, count, y, scratch);
     }
@@ -219,8 +222,6 @@ public final class MonteCarlo {
         }
     }
 
-    private final List<List<Range>> shortestOfParts = new ArrayList<>();
-
     private void fixed(int total, List<Tally> whole) {
         int blocks = (total + Draws.BLOCK - 1) / Draws.BLOCK;
         int from = 0;
@@ -237,12 +238,15 @@ public final class MonteCarlo {
         }
         List<Tally> some = whole.stream().map(Tally::another).toList();
         count(from, to, some);
-        List<Range> shortest = new ArrayList<>();
-        for (int i = 0; i < some.size(); i++) {
-            shortest.add(some.get(i).shortest(coverage));
-            whole.get(i).add(some.get(i));
+        take(some, whole);
+    }
+
+    /** Adds a part of the trials to the whole, and remembers its shortest intervals. */
+    private void take(List<Tally> part, List<Tally> whole) {
+        shortestOfParts.add(part.stream().map(each -> each.shortest(coverage)).toList());
+        for (int i = 0; i < part.size(); i++) {
+            whole.get(i).add(part.get(i));
         }
-        shortestOfParts.add(shortest);
     }
 
     private boolean adaptive(int digits, int most, List<Tally> whole) {
@@ -265,17 +269,14 @@ public final class MonteCarlo {
                     }
                 }
             }
+            take(some, whole);
             stable = true;
-            List<Range> shortest = new ArrayList<>();
             for (int i = 0; i < y.length; i++) {
-                shortest.add(some.get(i).shortest(coverage));
-                whole.get(i).add(some.get(i));
                 if (kept[i] > 1) {
                     stabilities.get(i).add(Arrays.copyOf(values[i], kept[i]));
                     stable &= stabilities.get(i).stable(whole.get(i).standard());
                 }
             }
-            shortestOfParts.add(shortest);
         }
         return stable;
     }

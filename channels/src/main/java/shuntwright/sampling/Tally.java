@@ -3,6 +3,7 @@ package shuntwright.sampling;
 import java.util.ArrayList;
 import java.util.List;
 
+import shuntwright.accuracy.ChannelAccuracy;
 import shuntwright.quantity.Range;
 
 /**
@@ -40,8 +41,7 @@ final class Tally {
 
     /** An empty one with the same cells. */
     Tally another() {
-        Tally tally = new Tally(centre, width * CELLS / (2 * HALF_REACH));
-        return tally;
+        return new Tally(centre, width * CELLS / (2 * HALF_REACH));
     }
 
     /** Counts a block. */
@@ -181,7 +181,7 @@ final class Tally {
     }
 
     /** Stands for the current of a trial without one, A. */
-    static final double NO_VALUE = 1e9;
+    static final double NO_VALUE = ChannelAccuracy.BEYOND;
 
     private static Range range(double low, double high) {
         return Range.of(finite(low), Math.max(finite(low), finite(high)));

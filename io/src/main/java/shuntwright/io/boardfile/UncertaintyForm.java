@@ -13,13 +13,13 @@ import shuntwright.io.form.Kinds;
 import shuntwright.io.form.Sheet;
 
 final class UncertaintyForm extends Form<Uncertainty> {
-    private static final int DEFAULT_TRIALS = 1_000_000;
     private static final int DEFAULT_DIGITS = 2;
     private static final int DEFAULT_MOST = 10_000_000;
 
     final DistributionForm distributionForm = new DistributionForm();
 
-    private final Key<OptionalInt> trials = withDefault("trials", new TrialsKind(), OptionalInt.of(DEFAULT_TRIALS),
+    private final Key<OptionalInt> trials = withDefault("trials", new TrialsKind(),
+            OptionalInt.of(Sampling.DEFAULT.trials().atMost()),
             "of each channel: a fixed number, or until the results are stable");
     private final Key<Integer> digits = withDefault("digits", Kinds.whole(1, 2), DEFAULT_DIGITS,
             "significant digits of the standard uncertainty that must be stable; with `adaptive` only");

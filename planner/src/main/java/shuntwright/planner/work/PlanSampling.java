@@ -138,23 +138,16 @@ public final class PlanSampling {
 
     private static List<Step> steps(Plan plan) {
         Sampling asked = plan.board().uncertainty().sampling();
-        int drawn = plan.study().map(study -> most(study.sampling())).orElse(0);
+        int drawn = plan.study().map(study -> study.sampling().trials().atMost()).orElse(0);
         List<Step> steps = new ArrayList<>();
         for (int count : SKETCHES) {
-            if (count > drawn && count < most(asked)) {
+            if (count > drawn && count < asked.trials().atMost()) {
                 steps.add(new Step(new Sampling(new Sampling.Trials.Fixed(count), asked.seed()),
                         BoardSampler.Depth.SKETCH));
             }
         }
         steps.add(new Step(asked, BoardSampler.Depth.FULL));
         return steps;
-    }
-
-    private static int most(Sampling sampling) {
-        return switch (sampling.trials()) {
-            case Sampling.Trials.Fixed(int count) -> count;
-            case Sampling.Trials.Adaptive(int _, int most) -> most;
-        };
     }
 
     private void work(Job job, Plan plan, List<Step> steps, Consumer<Plan> reached, Consumer<String> failed) {
