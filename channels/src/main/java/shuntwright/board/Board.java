@@ -25,12 +25,13 @@ import shuntwright.quantity.Range;
  * @param acceptance    when a channel counts as accepted
  * @param rules         design rules for every channel
  * @param uncertainty   what is known of the inputs beyond their limits, and how distributions are propagated
+ * @param preference    what is wanted of all choices that serve, and how long it is looked for
  * @param channels      one for each output rail
  */
 public record Board(String name, String description, List<String> partsFiles, int buildQuantity, Range ambient,
         SenseSupply supply, List<BoardReference> references, Optional<Adc> adc, List<AlertLine> alertLines,
         List<Tap> taps, List<Zone> zones, OptionalDouble heatLimit, Acceptance acceptance, DesignRules rules,
-        Uncertainty uncertainty, List<Channel> channels) {
+        Uncertainty uncertainty, Preference preference, List<Channel> channels) {
 
     /** Common practice for equipment in a housing. */
     public static final Range DEFAULT_AMBIENT = Range.of(-20, 60);
@@ -55,77 +56,82 @@ public record Board(String name, String description, List<String> partsFiles, in
     public static Board named(String name) {
         return new Board(name, "", List.of(), 1, DEFAULT_AMBIENT, SenseSupply.DEFAULT, List.of(), Optional.empty(),
                 List.of(), List.of(), List.of(), OptionalDouble.empty(), Acceptance.DEFAULT, DesignRules.DEFAULT,
-                Uncertainty.DEFAULT, List.of());
+                Uncertainty.DEFAULT, Preference.DEFAULT, List.of());
     }
 
     public Board withChannels(List<Channel> newChannels) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, newChannels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, newChannels);
     }
 
     public Board withName(String newName) {
         return new Board(newName, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withPartsFiles(List<String> newPartsFiles) {
         return new Board(name, description, newPartsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withBuildQuantity(int newBuildQuantity) {
         return new Board(name, description, partsFiles, newBuildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withAmbient(Range newAmbient) {
         return new Board(name, description, partsFiles, buildQuantity, newAmbient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withSupply(SenseSupply newSupply) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, newSupply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withReferences(List<BoardReference> newReferences) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, newReferences, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withAlertLines(List<AlertLine> newAlertLines) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, newAlertLines,
-                taps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withTaps(List<Tap> newTaps) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                newTaps, zones, heatLimit, acceptance, rules, uncertainty, channels);
+                newTaps, zones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withZones(List<Zone> newZones) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, newZones, heatLimit, acceptance, rules, uncertainty, channels);
+                taps, newZones, heatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withHeatLimit(OptionalDouble newHeatLimit) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, newHeatLimit, acceptance, rules, uncertainty, channels);
+                taps, zones, newHeatLimit, acceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withAcceptance(Acceptance newAcceptance) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, newAcceptance, rules, uncertainty, channels);
+                taps, zones, heatLimit, newAcceptance, rules, uncertainty, preference, channels);
     }
 
     public Board withRules(DesignRules newRules) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, newRules, uncertainty, channels);
+                taps, zones, heatLimit, acceptance, newRules, uncertainty, preference, channels);
     }
 
     public Board withUncertainty(Uncertainty newUncertainty) {
         return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
-                taps, zones, heatLimit, acceptance, rules, newUncertainty, channels);
+                taps, zones, heatLimit, acceptance, rules, newUncertainty, preference, channels);
+    }
+
+    public Board withPreference(Preference newPreference) {
+        return new Board(name, description, partsFiles, buildQuantity, ambient, supply, references, adc, alertLines,
+                taps, zones, heatLimit, acceptance, rules, uncertainty, newPreference, channels);
     }
 
     public Optional<Tap> tap(String wanted) {

@@ -42,12 +42,44 @@ public record Purchase(String body, List<PriceBreak> prices, int packSize, int m
         return price;
     }
 
-    /** Pieces to order so that {@code needed} are there: at least the minimum order, in whole packs. */
+    /** Pieces to order so that {@code needed} are there: at least the minimum order, in whole packs; at most the largest whole number. */
     public int orderQuantity(int needed) {
         if (needed <= 0) {
             return 0;
         }
         int least = Math.max(needed, minimumOrder);
-        return Math.toIntExact(((long) least + packSize - 1) / packSize * packSize);
+        return (int) Math.min(Integer.MAX_VALUE, ((long) least + packSize - 1) / packSize * packSize);
+    }
+
+    /**
+     * An order.
+     *
+     * @param quantity pieces
+     * @param price    of one piece
+     */
+    public record Order(int quantity, double price) {
+
+        public double cost() {
+            return quantity * price;
+        }
+    }
+
+    /**
+     * The cheapest order that covers what is needed: at least the minimum order, in whole packs, and more than needed where a price
+     * break makes that cheaper; of equally cheap ones the smallest.
+     */
+    public Order cheapestOrder(int needed) {
+        int least = orderQuantity(needed);
+        Order best = new Order(least, unitPriceAt(least));
+        for (PriceBreak each : prices) {
+            if (each.quantity() > least) {
+                int quantity = orderQuantity(each.quantity());
+                Order order = new Order(quantity, unitPriceAt(quantity));
+                if (needed > 0 && order.cost() < best.cost()) {
+                    best = order;
+                }
+            }
+        }
+        return best;
     }
 }

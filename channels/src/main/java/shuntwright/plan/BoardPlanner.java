@@ -422,7 +422,7 @@ public final class BoardPlanner {
                 context.tapResistors(), context.pullUpResistors());
         return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,
                 budget.references(), parts,
-                Findings.sorted(findings), Optional.empty());
+                Findings.sorted(findings), Optional.empty(), Optional.empty());
     }
 
     /** The board with every choice of the plan pinned, so that {@link #check} judges exactly this plan. */

@@ -18,11 +18,13 @@ import shuntwright.sampling.BoardStudy;
  * @param references with their parts
  * @param parts    the consolidated parts list, by designator letter and part number
  * @param findings about the board as a whole
+ * @param choice   how all channels were chosen together; empty for a board that was only checked
  * @param study    propagated distributions; empty until sampled
  */
 public record Plan(Board board, String currency, List<ChannelPlan> channels, List<SharedUse> shared,
         List<AlertPlan> alerts, List<TapPlan> taps,
-        List<ReferencePlan> references, List<PartUse> parts, List<Finding> findings, Optional<BoardStudy> study) {
+        List<ReferencePlan> references, List<PartUse> parts, List<Finding> findings, Optional<BoardChoice> choice,
+        Optional<BoardStudy> study) {
 
     public Plan {
         channels = List.copyOf(channels);
@@ -47,6 +49,20 @@ public record Plan(Board board, String currency, List<ChannelPlan> channels, Lis
     /** Cost of the parts of one board at the prices of the build quantity. */
     public double costPerBoard() {
         return parts.stream().mapToDouble(
-                each -> each.quantity() * each.purchase().unitPriceAt(each.quantity() * board.buildQuantity())).sum();
+                each -> each.quantity() * each.purchase().unitPriceAt(pieces(each))).sum();
+    }
+
+    /** Cost of the whole build: the cheapest orders for it, and the cost of each distinct part number. */
+    public double buildCost() {
+        double cost = parts.size() * board.preference().partNumberCost();
+        for (PartUse each : parts) {
+            cost += each.purchase().cheapestOrder(pieces(each)).cost();
+        }
+        return cost;
+    }
+
+    /** Pieces of a part that the whole build needs, at most the largest whole number. */
+    private int pieces(PartUse use) {
+        return (int) Math.min(Integer.MAX_VALUE, (long) use.quantity() * board.buildQuantity());
     }
 }

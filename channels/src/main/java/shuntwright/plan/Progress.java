@@ -24,6 +24,14 @@ public interface Progress {
      */
     void reached(String stage, int done, int total);
 
+    /**
+     * A better choice for the board was found while it is still looked for. Called from the working thread.
+     *
+     * @param best what it reaches so far
+     */
+    default void better(BoardChoice best) {
+    }
+
     /** True when the work should stop at the next step. */
     boolean cancelled();
 }

@@ -25,7 +25,7 @@ final class Studied {
             channels.add(found.map(one -> with(each, one, plan.board().acceptance())).orElse(each));
         }
         return new Plan(plan.board(), plan.currency(), channels, plan.shared(), plan.alerts(), plan.taps(),
-                plan.references(), plan.parts(), plan.findings(), Optional.of(study));
+                plan.references(), plan.parts(), plan.findings(), plan.choice(), Optional.of(study));
     }
 
     private static ChannelPlan with(ChannelPlan plan, ChannelStudy study, Acceptance acceptance) {

@@ -90,50 +90,51 @@ final class TrialBoards {
     static Board withReferences(Board b, BoardReference... references) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 List.of(references), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(),
-                b.rules(), Uncertainty.DEFAULT, b.channels());
+                b.rules(), Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withAdc(Board b, Adc adc) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), Optional.of(adc), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(),
-                b.rules(), Uncertainty.DEFAULT, b.channels());
+                b.rules(), Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withTaps(Board b, Tap... taps) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), b.adc(), b.alertLines(), List.of(taps), b.zones(), b.heatLimit(), b.acceptance(),
-                b.rules(), Uncertainty.DEFAULT, b.channels());
+                b.rules(), Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withLines(Board b, AlertLine... lines) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), b.adc(), List.of(lines), b.taps(), b.zones(), b.heatLimit(), b.acceptance(),
-                b.rules(), Uncertainty.DEFAULT, b.channels());
+                b.rules(), Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withZones(Board b, OptionalDouble heatLimit, Zone... zones) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), b.adc(), b.alertLines(), b.taps(), List.of(zones), heatLimit, b.acceptance(),
-                b.rules(), Uncertainty.DEFAULT, b.channels());
+                b.rules(), Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withSupply(Board b, double volt, double tolerance, double ampere) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(),
                 new SenseSupply(new Toleranced(volt, Tolerance.symmetric(tolerance)), ampere), b.references(), b.adc(),
                 b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(), b.rules(), Uncertainty.DEFAULT,
+                b.preference(),
                 b.channels());
     }
 
     static Board withRules(Board b, DesignRules rules, int buildQuantity) {
         return new Board(b.name(), b.description(), b.partsFiles(), buildQuantity, b.ambient(), b.supply(),
                 b.references(), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), b.acceptance(), rules,
-                Uncertainty.DEFAULT, b.channels());
+                Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Board withAcceptance(Board b, Acceptance acceptance) {
         return new Board(b.name(), b.description(), b.partsFiles(), b.buildQuantity(), b.ambient(), b.supply(),
                 b.references(), b.adc(), b.alertLines(), b.taps(), b.zones(), b.heatLimit(), acceptance, b.rules(),
-                Uncertainty.DEFAULT, b.channels());
+                Uncertainty.DEFAULT, b.preference(), b.channels());
     }
 
     static Plan plan(Board board) {

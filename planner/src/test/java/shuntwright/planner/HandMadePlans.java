@@ -75,7 +75,7 @@ public final class HandMadePlans {
                         channels.size(), designators(channels.size()),
                         channels.stream().map(each -> each.channel().name()).toList(), HandMadeParts.PURCHASE));
         return new Plan(board, "EUR", channels, shared, alerts, List.of(), List.of(), parts, List.of(),
-                Optional.empty());
+                Optional.empty(), Optional.empty());
     }
 
     private static List<String> designators(int count) {

@@ -60,7 +60,7 @@ public final class HandMadeStudies {
                 : List.of());
         return new Plan(plan.board(), plan.currency(), channels, plan.shared(), plan.alerts(), plan.taps(),
                 plan.references(), plan.parts(), plan.findings(),
-                Optional.of(new BoardStudy(sampling, studies, yield)));
+                plan.choice(), Optional.of(new BoardStudy(sampling, studies, yield)));
     }
 
     private static ChannelPlan judged(ChannelPlan plan, Plan board) {

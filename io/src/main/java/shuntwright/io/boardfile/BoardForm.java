@@ -9,6 +9,7 @@ import shuntwright.board.Board;
 import shuntwright.board.BoardReference;
 import shuntwright.board.Channel;
 import shuntwright.board.DesignRules;
+import shuntwright.board.Preference;
 import shuntwright.board.SenseSupply;
 import shuntwright.board.Tap;
 import shuntwright.board.Uncertainty;
@@ -35,6 +36,7 @@ final class BoardForm extends Form<Board> {
     private final AcceptanceForm acceptanceForm = new AcceptanceForm();
     private final RulesForm rulesForm = new RulesForm();
     private final UncertaintyForm uncertaintyForm = new UncertaintyForm();
+    private final PreferenceForm preferenceForm = new PreferenceForm();
     private final ChannelForm channelForm = new ChannelForm();
 
     private final Key<String> format = required("format", BoardFiles.FORMAT.kind(), "kind and version of the file");
@@ -66,6 +68,8 @@ final class BoardForm extends Form<Board> {
             "design rules for every channel");
     private final Key<Uncertainty> uncertainty = withDefault("uncertainty", uncertaintyForm, Uncertainty.DEFAULT,
             "what is known of the inputs beyond their limits, and how distributions are propagated");
+    private final Key<Preference> preference = withDefault("preference", preferenceForm, Preference.DEFAULT,
+            "what is wanted of all choices that serve, and how long it is looked for");
     private final Key<List<Channel>> channels = withDefault("channels", Kinds.list(channelForm), List.of(),
             "one for each output rail");
 
@@ -76,6 +80,7 @@ final class BoardForm extends Form<Board> {
     List<Form<?>> all() {
         return List.of(this, supplyForm, referenceForm, adcForm, alertLineForm, tapForm, tapForm.dividerForm,
                 tapForm.dacForm, zoneForm, acceptanceForm, rulesForm, uncertaintyForm, uncertaintyForm.distributionForm,
+                preferenceForm,
                 channelForm, channelForm.calibrationForm, channelForm.withstandForm,
                 channelForm.withstandForm.conductorForm,
                 channelForm.pinsForm);
@@ -86,7 +91,8 @@ final class BoardForm extends Form<Board> {
         return new Board(fields.get(name), fields.get(description), fields.get(parts), fields.get(buildQuantity),
                 fields.get(ambient), fields.get(supply), fields.get(references), fields.find(adc),
                 fields.get(alertLines), fields.get(taps), fields.get(zones), fields.number(heatLimit),
-                fields.get(acceptance), fields.get(rules), fields.get(uncertainty), fields.get(channels));
+                fields.get(acceptance), fields.get(rules), fields.get(uncertainty), fields.get(preference),
+                fields.get(channels));
     }
 
     @Override
@@ -107,6 +113,7 @@ final class BoardForm extends Form<Board> {
         sheet.put(acceptance, value.acceptance());
         sheet.put(rules, value.rules());
         sheet.put(uncertainty, value.uncertainty());
+        sheet.put(preference, value.preference());
         sheet.put(channels, value.channels());
     }
 }

@@ -1,6 +1,7 @@
 package shuntwright.io.boardfile;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -17,7 +18,9 @@ import shuntwright.board.BoardReference;
 import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
 import shuntwright.board.DesignRules;
+import shuntwright.board.Objective;
 import shuntwright.board.Pins;
+import shuntwright.board.Preference;
 import shuntwright.board.ReleaseDemand;
 import shuntwright.board.Sampling;
 import shuntwright.board.SenseSupply;
@@ -65,7 +68,15 @@ final class RandomBoards {
                 new DesignRules(random.nextInt(1, 9), random.nextDouble(0.01, 1), positive(),
                         random.nextDouble(0.01, 1), maybe(this::name), positive(), positive(), positive(),
                         random.nextDouble()),
-                uncertainty(), channels);
+                uncertainty(), preference(), channels);
+    }
+
+    private Preference preference() {
+        List<Objective> order = new ArrayList<>(List.of(Objective.values()));
+        Collections.shuffle(order, random);
+        return new Preference(order.subList(0, 1 + random.nextInt(order.size())), random.nextDouble(),
+                random.nextInt(1000),
+                maybeNumber(), random.nextInt());
     }
 
     private Uncertainty uncertainty() {

@@ -62,7 +62,7 @@ class BudgetTextTest {
     @Test
     void without_sampling_two_readers_remain() {
         Plan plain = new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(), plan.taps(),
-                plan.references(), plan.parts(), plan.findings(), Optional.empty());
+                plan.references(), plan.parts(), plan.findings(), plan.choice(), Optional.empty());
         List<String> two = BudgetText.of(plain, plain.channels().get(1), false);
 
         assertThat(two).noneMatch(each -> each.contains("sampled") || each.contains("first order"))

@@ -76,7 +76,7 @@ final class PlanFixture {
                 List.of(), List.of(), List.of(), List.of(),
                 List.of(new Finding(Finding.Key.HEAT_OVER_LIMIT, Optional.empty(),
                         "zone rear edge is over its limit by 50 mW", List.of())),
-                Optional.empty());
+                Optional.empty(), Optional.empty());
     }
 
     private static Finding finding(Finding.Key key, Channel channel, String text) {

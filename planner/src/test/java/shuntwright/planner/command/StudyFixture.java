@@ -54,7 +54,7 @@ final class StudyFixture {
 
     static Plan with(Plan plan, List<ChannelPlan> channels, BoardStudy study) {
         return new Plan(plan.board(), plan.currency(), channels, plan.shared(), plan.alerts(), plan.taps(),
-                plan.references(), plan.parts(), plan.findings(), Optional.of(study));
+                plan.references(), plan.parts(), plan.findings(), plan.choice(), Optional.of(study));
     }
 
     static BoardStudy study(Plan plan, Sampling.Trials trials, boolean settled) {

@@ -45,7 +45,7 @@ class StatusModelTest {
             Plan plan = HandMadePlans.plan(board, parts, progress);
             return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(), plan.taps(),
                     plan.references(),
-                    plan.parts(), List.of(fault), Optional.empty());
+                    plan.parts(), List.of(fault), plan.choice(), Optional.empty());
         });
         StatusModel words = new StatusModel(overloaded);
         overloaded.start(HandMadeBoards.boat(), Catalogue.EMPTY, true);

@@ -106,7 +106,7 @@ class SharedStripModelTest {
         BoardSession tapped = Sessions.planned((asked, parts, progress) -> {
             Plan plan = HandMadePlans.plan(asked, parts, progress);
             return new Plan(plan.board(), plan.currency(), plan.channels(), plan.shared(), plan.alerts(),
-                    List.of(planned), plan.references(), plan.parts(), List.of(), Optional.empty());
+                    List.of(planned), plan.references(), plan.parts(), List.of(), plan.choice(), Optional.empty());
         });
         SharedStripModel strip = new SharedStripModel(tapped);
         tapped.start(board, Catalogue.EMPTY, true);
