@@ -4,6 +4,8 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.OptionalDouble;
 
+import shuntwright.quantity.Finite;
+
 /**
  * What is wanted of all choices that serve the whole board, and how long it is looked for. The same board, rounds and seed give the
  * same plan unless the time limit cuts the search short.
