@@ -11,6 +11,7 @@ import java.util.OptionalDouble;
 import java.util.function.Function;
 
 import shuntwright.accuracy.Assessment;
+import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
 import shuntwright.board.Objective;
@@ -28,6 +29,7 @@ import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Threshold;
 import shuntwright.selection.Aim;
 import shuntwright.selection.Answer;
+import shuntwright.selection.Conflicts;
 import shuntwright.selection.Prover;
 import shuntwright.selection.Selector;
 
@@ -293,6 +295,35 @@ final class BoardChooser {
         LinkedHashSet<SenseCircuit> all = new LinkedHashSet<>(base.circuits());
         all.addAll(maker.menu(key, breadth, more).circuits());
         return new ChannelMenu(new ArrayList<>(all), base.candidates());
+    }
+
+    /** What cannot be met together where a choice breaks shared limits. */
+    Optional<Conflict> conflict(BoardContext context, Chosen chosen, Progress progress) {
+        if (chosen.answer().keepsLimits()) {
+            return Optional.empty();
+        }
+        Wish wish = Wish.of(context.board().preference()).withRounds(0);
+        return ConflictWords.of(context.board(), chosen.model(), prover, (before, after) -> {
+            if (progress.cancelled()) {
+                throw new BoardPlanner.Cancelled();
+            }
+            Board changed = context.board().withChannels(
+                    context.board().channels().stream().map(each -> each.equals(before) ? after : each).toList());
+            BoardContext with = context.with(changed);
+            List<Open> open = open(with, changed.taps());
+            Chosen again = chosen(with, wish, open, tapEntries(with, changed.taps(), open), ChannelMenu.Breadth.WIDE,
+                    List.of(), Map.of(), progress);
+            return again.answer().keepsLimits() || Conflicts.possible(again.model().selection(), changed.preference().seed(),
+                    shuntwright.selection.Watch.NONE);
+        }, new shuntwright.selection.Watch() {
+            @Override
+            public boolean ended() {
+                if (progress.cancelled()) {
+                    throw new BoardPlanner.Cancelled();
+                }
+                return false;
+            }
+        });
     }
 
     /** What may be chosen for one channel, by ascending heat. */

@@ -89,10 +89,18 @@ public final class BoardPlanner {
      * @throws Cancelled when progress says so
      */
     public Plan plan(Board board, Catalogue catalogue, Progress progress) {
-        return plan(board, catalogue, BoardChooser.Wish.of(board.preference()), progress);
+        Chosen chosen = chosen(board, catalogue, BoardChooser.Wish.of(board.preference()), progress);
+        Plan plan = finished(chosen, progress);
+        Optional<Conflict> conflict = chosen.choice()
+                .flatMap(together -> chooser.conflict(chosen.context(), together, progress));
+        return conflict.isEmpty() ? plan : plan.withChoice(plan.choice().orElseThrow().withConflict(conflict));
     }
 
     Plan plan(Board board, Catalogue catalogue, BoardChooser.Wish wish, Progress progress) {
+        return finished(chosen(board, catalogue, wish, progress), progress);
+    }
+
+    private Chosen chosen(Board board, Catalogue catalogue, BoardChooser.Wish wish, Progress progress) {
         forget();
         chooser.forget();
         // Rises by a choice without search first; the search seldom changes them.
@@ -109,7 +117,7 @@ public final class BoardPlanner {
             Chosen chosen = settled(board, catalogue, rises, wish, progress);
             Map<String, Double> needed = higher(rises, chosen.rises());
             if (needed.equals(rises) || pass >= MOST_PASSES) {
-                return finished(atItsRise(chosen), progress);
+                return atItsRise(chosen);
             }
             rises = needed;
         }
@@ -133,7 +141,7 @@ public final class BoardPlanner {
      * @param choice  how they were chosen together; empty when they were only checked
      */
     private record Chosen(BoardContext context, List<ChannelPlan> channels, List<TapPlan> taps,
-            Optional<BoardChoice> choice) {
+            Optional<BoardChooser.Chosen> choice) {
 
         /** The rise that each zone has with these circuits, K; infinite in thermal runaway. */
         Map<String, Double> rises() {
@@ -202,7 +210,9 @@ public final class BoardPlanner {
                 channels.add(plan);
             }
         }
-        return assembled(chosen.context(), channels, chosen.taps(), chosen.choice());
+        Optional<BoardChoice> choice = chosen.choice()
+                .map(together -> together.report(chosen.context().board().preference()));
+        return assembled(chosen.context(), channels, chosen.taps(), choice);
     }
 
     private static boolean feeds(ChannelPlan plan) {
@@ -285,7 +295,7 @@ public final class BoardPlanner {
             plan.solved().ifPresent(solved -> used.addAll(numbers(solved.circuit())));
             channels.add(plan);
         }
-        return new Chosen(context, channels, taps, Optional.of(together.report(context.board().preference())));
+        return new Chosen(context, channels, taps, Optional.of(together));
     }
 
     private static void step(Progress progress, String stage, int done, int total) {

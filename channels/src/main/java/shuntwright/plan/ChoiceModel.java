@@ -251,6 +251,16 @@ final class ChoiceModel {
         return selection;
     }
 
+    /** True for a channel's slot, false for a tap's. */
+    boolean isChannel(int slot) {
+        return slot < entries.size();
+    }
+
+    /** True for heat, false for current. */
+    boolean isHeat(int resource) {
+        return resource == HEAT || zones.containsValue(resource);
+    }
+
     /** Options of all kinds of channels together. */
     int kept() {
         return menus.stream().mapToInt(List::size).sum();

@@ -36,7 +36,7 @@ import shuntwright.parts.Catalogue;
 
 class BoardPlannerTest {
 
-    private static Channel random(String name, RandomGenerator random) {
+    static Channel random(String name, RandomGenerator random) {
         double load = Math.exp(random.nextDouble(Math.log(0.5), Math.log(20)));
         double noTrip = load * random.nextDouble(1.2, 1.6);
         Channel channel = channel(name, load, noTrip, noTrip * random.nextDouble(1.03, 1.5));
