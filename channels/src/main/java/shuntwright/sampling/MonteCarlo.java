@@ -23,6 +23,8 @@ public final class MonteCarlo {
     private static final int PARTS = 10;
     /** With fewer trials beyond an end or a bound than this, weighted trials say more. */
     private static final int FEW = 100;
+    /** Trials of the longest sequence that is kept whole, to be looked at for stability. */
+    private static final int LONGEST = 1 << 22;
     /** A first picture of fewer trials than this does without weighted ones. */
     private static final int ENOUGH = 100_000;
 
@@ -250,12 +252,17 @@ public final class MonteCarlo {
     }
 
     private boolean adaptive(int digits, int most, List<Tally> whole) {
-        int blocks = (Stability.sequence(coverage) + Draws.BLOCK - 1) / Draws.BLOCK;
-        int sequence = blocks * Draws.BLOCK;
+        long wanted = Stability.sequence(coverage);
+        if (wanted > LONGEST || 2 * wanted > most) {
+            // Stable after two sequences at the earliest: as many as may be, and nothing is said of stability.
+            fixed(most, whole);
+            return false;
+        }
+        int sequence = (int) ((wanted + Draws.BLOCK - 1) / Draws.BLOCK) * Draws.BLOCK;
         List<Stability> stabilities = new ArrayList<>();
         whole.forEach(_ -> stabilities.add(new Stability(coverage, digits)));
         boolean stable = false;
-        for (int from = 0; !stable && from + sequence <= Math.max(most, sequence); from += sequence) {
+        for (int from = 0; !stable && from + sequence <= most; from += sequence) {
             double[][] values = new double[y.length][sequence];
             List<Tally> some = whole.stream().map(Tally::another).toList();
             int[] kept = new int[y.length];
