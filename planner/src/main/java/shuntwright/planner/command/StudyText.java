@@ -3,6 +3,7 @@ package shuntwright.planner.command;
 import java.util.ArrayList;
 import java.util.List;
 
+import shuntwright.accuracy.LimitWords;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Sampling;
 import shuntwright.planner.work.TrialWords;
@@ -108,6 +109,6 @@ final class StudyText {
     }
 
     static String range(Range range) {
-        return QuantityWriter.show(range, Dimension.CURRENT, DIGITS);
+        return LimitWords.show(range, DIGITS);
     }
 }
