@@ -38,10 +38,13 @@ public final class MenuMaker {
         known.clear();
     }
 
+    private Known known(ChannelProblem problem) {
+        return known.computeIfAbsent(problem, key -> new Known(new Judge(key), new HashMap<>()));
+    }
+
     /** The menu; depends on nothing but its arguments. */
     public ChannelMenu menu(ChannelProblem problem, ChannelMenu.Breadth breadth, List<Prices> prices) {
-        Known there = known.computeIfAbsent(problem, key -> new Known(new Judge(key), new HashMap<>()));
-        return new Maker(problem, there, tables, breadth, prices).make();
+        return new Maker(problem, known(problem), tables, breadth, prices).make();
     }
 
     private static final class Maker {

@@ -219,6 +219,23 @@ class BoardChoiceTest {
         assertThat(better).isNotEmpty();
     }
 
+    /** An edit starts from the plan before it and ends with nothing worse than a new planner's. */
+    @Test
+    void startsFromThePlanBefore() {
+        Board board = random(9, 6, Objective.LEAST_COST, Objective.LEAST_HEAT);
+        BoardPlanner planner = new BoardPlanner();
+        Plan plan = planner.plan(board, CATALOGUE, Progress.SILENT);
+        planner.startFrom(plan);
+        Plan same = planner.plan(board.withPreference(board.preference().withRounds(0)), CATALOGUE, Progress.SILENT);
+        assertThat(same.buildCost()).isLessThanOrEqualTo(plan.buildCost() * (1 + 1e-9));
+        List<Channel> fewer = board.channels().subList(1, 6);
+        Plan edited = planner.plan(board.withChannels(fewer), CATALOGUE, Progress.SILENT);
+        Plan anew = plan(board.withChannels(fewer));
+        assertThat(edited.buildCost()).isLessThanOrEqualTo(anew.buildCost() * 1.02);
+        assertThat(edited.channels()).extracting(ChannelPlan::accepted)
+                .isEqualTo(anew.channels().stream().map(ChannelPlan::accepted).toList());
+    }
+
     @Test
     void enoughEndsWithTheBestSoFar() {
         Board board = random(8, 6, Objective.LEAST_COST);
