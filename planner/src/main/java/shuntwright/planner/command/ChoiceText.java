@@ -32,8 +32,9 @@ final class ChoiceText {
         lines.add(List.of("chosen for",
                 ChoiceWords.order(choice.reached().stream().map(Reached::objective).toList())));
         for (Reached each : choice.reached()) {
-            lines.add(List.of(each.objective().word(), ChoiceWords.value(each.objective(), each.value(), currency) + ", "
-                    + ChoiceWords.proof(each, currency)));
+            lines.add(
+                    List.of(each.objective().word(), ChoiceWords.value(each.objective(), each.value(), currency) + ", "
+                            + ChoiceWords.proof(each, currency)));
         }
         lines.add(List.of("among", ChoiceWords.among(choice)));
         lines.add(List.of("search", took.map(time -> words(time) + ", ").orElse("") + ChoiceWords.search(choice)));

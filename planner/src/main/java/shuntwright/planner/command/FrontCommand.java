@@ -72,7 +72,8 @@ final class FrontCommand implements Callable<Integer> {
         Question.Answered<Front> answered = question.answered(solvers, terminal, json,
                 (explorer, board, catalogue, progress) -> explorer.front(board, catalogue, first, second, points,
                         progress));
-        List<Path> written = files.map(each -> each.write(answered.answer(), question, input.parts())).orElse(List.of());
+        List<Path> written = files.map(each -> each.write(answered.answer(), question, input.parts()))
+                .orElse(List.of());
         if (json) {
             terminal.printBytes(AnswerFile.front(answered.plan(), answered.answer()));
         } else {

@@ -33,8 +33,12 @@ final class FrontText {
             lines.add("");
             lines.addAll(table(front, now));
             lines.add("");
-            lines.add("From bound: nothing is better by more while the other is no worse than in that plan; \"open\" where");
-            lines.add("nothing is known. Plans that were not found may lie between. Nothing here is sampled.");
+            lines.add("From bound: while " + front.first().word()
+                    + " is no worse than in that plan, nothing is better in "
+                    + front.second().word());
+            lines.add(
+                    "by more; \"open\" where nothing is known. Plans that were not found may lie between. Nothing here is");
+            lines.add("sampled. Now: the board's own plan, for what the board file wants.");
         }
         lines.add("");
         lines.add(Cautions.LINE);
@@ -43,21 +47,21 @@ final class FrontText {
 
     private static List<String> table(Front front, Plan now) {
         Columns table = new Columns(NOT_PAINTED);
-        table.add(List.of("plan", front.first().word(), "from bound", front.second().word(), "from bound",
+        table.add(List.of("plan", front.first().word(), front.second().word(), "from bound",
                 "whole build", "part numbers", "all accepted"));
         int number = 0;
         for (Front.Point each : front.points()) {
-            table.add(row(Integer.toString(++number), each.plan(), front,
+            table.add(row(Integer.toString(++number), each.plan(), distance(each.plan(), front.second()),
                     ChoiceWords.value(front.first(), each.first(), now.currency()),
                     ChoiceWords.value(front.second(), each.second(), now.currency())));
         }
-        table.add(row("now", now, front, own(now, front.first()), own(now, front.second())));
+        table.add(row("now", now, "-", own(now, front.first()), own(now, front.second())));
         return table.lines();
     }
 
-    private static List<String> row(String name, Plan plan, Front front, String first, String second) {
-        return List.of(name, first, distance(plan, front.first()), second, distance(plan, front.second()),
-                ChoiceWords.money(plan.buildCost(), plan.currency()), Integer.toString(plan.parts().size()),
+    private static List<String> row(String name, Plan plan, String distance, String first, String second) {
+        return List.of(name, first, second, distance, ChoiceWords.money(plan.buildCost(), plan.currency()),
+                Integer.toString(plan.parts().size()),
                 plan.accepted() ? "yes" : "no");
     }
 

@@ -29,7 +29,8 @@ import shuntwright.plan.Plan;
  * @param output   what to make of the plan
  * @param pinned   where to write the board with every choice pinned
  */
-record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, SamplingChoice sampling, Output output, Optional<Path> pinned) {
+record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, SamplingChoice sampling, Output output,
+        Optional<Path> pinned) {
 
     /** What is done with the board. */
     enum Kind {
@@ -71,7 +72,8 @@ record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, Sampli
         } else {
             output.budget().flatMap(plan::channel)
                     .map(each -> BudgetText.of(plan, each, terminal.colour()))
-                    .orElseGet(() -> PlanText.of(plan, Optional.of(judged.choosing()), terminal.colour())).forEach(terminal::print);
+                    .orElseGet(() -> PlanText.of(plan, Optional.of(judged.choosing()), terminal.colour()))
+                    .forEach(terminal::print);
         }
         if (!failed.isEmpty()) {
             throw new BadInput(failed);

@@ -50,8 +50,11 @@ final class OthersText {
         if (answered.answer().isEmpty()) {
             lines.add("No other circuit of the catalogue serves this channel.");
         } else {
-            lines.add("From bound: nothing is better by more with that circuit; \"open\" where nothing is known. Nothing here");
-            lines.add("is sampled: pin a choice in the board file and plan it to see its probabilities.");
+            lines.add(
+                    "From bound: nothing is better by more with that circuit; \"within step\" of the board's heat step, within");
+            lines.add(
+                    "which heats count as equal; \"open\" where nothing is known. Nothing here is sampled: pin a choice in");
+            lines.add("the board file and plan it to see its probabilities.");
         }
         lines.add("");
         lines.add(Cautions.LINE);

@@ -43,7 +43,8 @@ final class PlanCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         return new Job(Job.Kind.PLAN, input.board(), input.parts(),
-                Stream.of(wanted.chosen(), search.chosen(), price.chosen()).flatMap(List::stream).toList(), sampling.chosen(), output.chosen(), pinned)
+                Stream.of(wanted.chosen(), search.chosen(), price.chosen()).flatMap(List::stream).toList(),
+                sampling.chosen(), output.chosen(), pinned)
                 .run(terminal)
                 .number();
     }

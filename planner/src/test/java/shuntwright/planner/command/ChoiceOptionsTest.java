@@ -47,7 +47,8 @@ class ChoiceOptionsTest {
     @ParameterizedTest
     @CsvSource({"--prefer, least heet, 'least heat, most even heat'", "--prefer, 'least heat, least heat', twice",
             "--prefer, '', At least one", "--rounds, -1, from 0 to 1000000", "--rounds, 1000001, from 0 to 1000000",
-            "--rounds, many, 'from 0 to 1000000, got \"many\"'", "--time-limit, 0 s, above 0 s", "--time-limit, -3s, got -3 s",
+            "--rounds, many, 'from 0 to 1000000, got \"many\"'", "--time-limit, 0 s, above 0 s",
+            "--time-limit, -3s, got -3 s",
             "--time-limit, 3 W, 3 W", "--choice-seed, 1.5, -9223372036854775808 to 9223372036854775807",
             "--part-number-cost, -1, from 0", "--part-number-cost, NaN, from 0", "--part-number-cost, dear, from 0"})
     void a_wrong_value_is_refused_with_what_is_allowed(String option, String value, String allowed) {

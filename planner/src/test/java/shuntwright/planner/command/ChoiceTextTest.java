@@ -45,7 +45,8 @@ class ChoiceTextTest {
         BoardChoice kept = ChoiceFixture.choice(plan.choice().orElseThrow().reached(), List.of(), Optional.empty());
 
         assertThat(ChoiceText.of(kept, "EUR", Optional.empty())).hasSize(5)
-                .noneMatch(line -> line.contains("broken")).last().asString().isEqualTo("search      300 rounds, seed 1");
+                .noneMatch(line -> line.contains("broken")).last().asString()
+                .isEqualTo("search      300 rounds, seed 1");
     }
 
     @Test
