@@ -325,8 +325,9 @@ final class BoardChooser {
             List<Open> open = open(with, changed.taps());
             Chosen again = chosen(with, wish, open, tapEntries(with, changed.taps(), open), ChannelMenu.Breadth.WIDE,
                     List.of(), Map.of(), progress);
-            return again.answer().keepsLimits() || Conflicts.possible(again.model().selection(), changed.preference().seed(),
-                    shuntwright.selection.Watch.NONE);
+            return again.answer().keepsLimits()
+                    || Conflicts.possible(again.model().selection(), changed.preference().seed(),
+                            shuntwright.selection.Watch.NONE);
         }, new shuntwright.selection.Watch() {
             @Override
             public boolean ended() {

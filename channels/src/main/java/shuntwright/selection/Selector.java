@@ -137,7 +137,8 @@ public final class Selector {
                 filled[slot] = start.get(slot);
             } else if (group >= 0 && values[group] >= 0 && state.options(slot)[filled[slot]].value != values[group]) {
                 Option[] options = state.options(slot);
-                filled[slot] = IntStream.range(0, options.length).filter(o -> options[o].value == values[group]).findFirst()
+                filled[slot] = IntStream.range(0, options.length).filter(o -> options[o].value == values[group])
+                        .findFirst()
                         .orElse(-1);
                 if (filled[slot] < 0) {
                     return Optional.empty();
