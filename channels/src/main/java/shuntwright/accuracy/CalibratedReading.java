@@ -10,7 +10,8 @@ import shuntwright.board.Calibration;
  * one point I = r·I₂(1+e)/r₂; two points I = (1+e)·(I₁ + (I₂−I₁)·(r−r₁)/(r₂−r₁)).
  *
  * <p>At calibration the parts are new, at the calibration temperature, not warmed by their zone, at supply and rail of their own;
- * the ADC's non-linearity is another at each point. So whatever is the same in both places cancels by itself.
+ * the ADC's non-linearity is another at each point, and so is the shunt's thermal EMF, since other heat flows through it. So
+ * whatever is the same in both places cancels by itself.
  *
  * <p>Where errors outweigh the signal so far that the readings at calibration do not rise with the current, or a shunt runs away
  * there, nothing can be calibrated, and the value is infinite.
@@ -23,6 +24,20 @@ import shuntwright.board.Calibration;
 record CalibratedReading(ChannelEquations equations, Calibration calibration, double load, double current)
         implements
             Equation {
+
+    /** A point of the calibration and what is drawn anew there. */
+    private enum Point {
+        LOWER(Slot.CALIBRATION_STEP_LOWER, Slot.CALIBRATION_EMF_LOWER), UPPER(Slot.CALIBRATION_STEP_UPPER,
+                Slot.CALIBRATION_EMF_UPPER);
+
+        private final Slot step;
+        private final Slot emf;
+
+        Point(Slot step, Slot emf) {
+            this.step = step;
+            this.emf = emf;
+        }
+    }
 
     @Override
     public double value(double[] x) {
@@ -56,13 +71,13 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
 
     private double rise(double[] x, double[] g) {
         double[] slopes = g.clone();
-        double upper = reading(calibration.upperCurrent(load), atCalibration(x, Slot.CALIBRATION_STEP_UPPER), slopes);
-        addFromCalibration(slopes, 1, Slot.CALIBRATION_STEP_UPPER, g);
+        double upper = reading(calibration.upperCurrent(load), atCalibration(x, Point.UPPER), slopes);
+        addFromCalibration(slopes, 1, Point.UPPER, g);
         if (calibration.points() == Calibration.Points.ONE || Double.isInfinite(upper)) {
             return upper;
         }
-        double lower = reading(calibration.lowerCurrent(load), atCalibration(x, Slot.CALIBRATION_STEP_LOWER), slopes);
-        addFromCalibration(slopes, -1, Slot.CALIBRATION_STEP_LOWER, g);
+        double lower = reading(calibration.lowerCurrent(load), atCalibration(x, Point.LOWER), slopes);
+        addFromCalibration(slopes, -1, Point.LOWER, g);
         return Double.isInfinite(lower) ? lower : upper - lower;
     }
 
@@ -73,7 +88,7 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         double[] service = slopes ? new double[g.length] : none;
         double[] upper = slopes ? new double[g.length] : none;
         double r = reading(current, x, service);
-        double[] atUpper = atCalibration(x, Slot.CALIBRATION_STEP_UPPER);
+        double[] atUpper = atCalibration(x, Point.UPPER);
         double i2 = calibration.upperCurrent(load);
         double r2 = reading(i2, atUpper, upper);
         if (!rises(0, r2)) {
@@ -83,14 +98,14 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
             double scale = i2 * error / r2;
             if (slopes) {
                 add(service, scale, g);
-                addFromCalibration(upper, -r * scale / r2, Slot.CALIBRATION_STEP_UPPER, g);
+                addFromCalibration(upper, -r * scale / r2, Point.UPPER, g);
                 g[Slot.CALIBRATION_CURRENT.place()] += r * i2 / r2;
             }
             return r * scale;
         }
         double i1 = calibration.lowerCurrent(load);
         double[] lower = slopes ? new double[g.length] : none;
-        double r1 = reading(i1, atCalibration(x, Slot.CALIBRATION_STEP_LOWER), lower);
+        double r1 = reading(i1, atCalibration(x, Point.LOWER), lower);
         if (!rises(r1, r2)) {
             return Double.POSITIVE_INFINITY;
         }
@@ -99,8 +114,8 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         double plain = i1 + slope * (r - r1);
         if (slopes) {
             add(service, error * slope, g);
-            addFromCalibration(lower, error * slope * (r - r2) / span, Slot.CALIBRATION_STEP_LOWER, g);
-            addFromCalibration(upper, -error * slope * (r - r1) / span, Slot.CALIBRATION_STEP_UPPER, g);
+            addFromCalibration(lower, error * slope * (r - r2) / span, Point.LOWER, g);
+            addFromCalibration(upper, -error * slope * (r - r1) / span, Point.UPPER, g);
             g[Slot.CALIBRATION_CURRENT.place()] += plain;
         }
         return error * plain;
@@ -115,8 +130,8 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         return g.length > 0 ? plain.gradient(x, g) : plain.value(x);
     }
 
-    /** x as it was at calibration, with the ADC's error in {@code step}. */
-    private double[] atCalibration(double[] x, Slot step) {
+    /** x as it was at a point of the calibration. */
+    private double[] atCalibration(double[] x, Point point) {
         double[] then = x.clone();
         for (Slot aged : AGEING) {
             then[aged.place()] = 0;
@@ -128,7 +143,8 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         then[Slot.AMBIENT.place()] = x[Slot.CALIBRATION_TEMPERATURE.place()];
         then[Slot.SUPPLY.place()] = x[Slot.CALIBRATION_SUPPLY.place()];
         then[Slot.RAIL.place()] = x[Slot.CALIBRATION_RAIL.place()];
-        then[Slot.ADC_STEP.place()] = x[step.place()];
+        then[Slot.ADC_STEP.place()] = x[point.step.place()];
+        then[Slot.THERMAL_EMF.place()] = x[point.emf.place()];
         return then;
     }
 
@@ -141,7 +157,7 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
     }
 
     /** Adds slopes by the inputs at calibration: what stood elsewhere goes back there, what was set to 0 is left out. */
-    private void addFromCalibration(double[] slopes, double weight, Slot step, double[] g) {
+    private void addFromCalibration(double[] slopes, double weight, Point point, double[] g) {
         if (g.length == 0) {
             return;
         }
@@ -155,7 +171,8 @@ record CalibratedReading(ChannelEquations equations, Calibration calibration, do
         move(slopes, weight, Slot.AMBIENT, Slot.CALIBRATION_TEMPERATURE, g);
         move(slopes, weight, Slot.SUPPLY, Slot.CALIBRATION_SUPPLY, g);
         move(slopes, weight, Slot.RAIL, Slot.CALIBRATION_RAIL, g);
-        move(slopes, weight, Slot.ADC_STEP, step, g);
+        move(slopes, weight, Slot.ADC_STEP, point.step, g);
+        move(slopes, weight, Slot.THERMAL_EMF, point.emf, g);
         add(slopes, weight, g);
     }
 

@@ -60,7 +60,8 @@ final class InputDescription {
     static InputDescription of(SenseCircuit circuit, Surroundings around, Demand demand) {
         InputDescription d = new InputDescription(Layout.size(circuit.shuntCount()), around.stated());
         d.surroundings(around, demand.commonMode());
-        d.shunts(circuit.shunt(), circuit.shuntCount(), around);
+        d.shunts(circuit.shunt(), circuit.shuntCount());
+        d.thermalEmf(circuit.shunt(), around, demand);
         d.amplifier(circuit, around);
         d.threshold(circuit);
         d.comparator(circuit);
@@ -116,7 +117,7 @@ final class InputDescription {
                 : temperature.mid();
     }
 
-    private void shunts(Shunt shunt, int count, Surroundings around) {
+    private void shunts(Shunt shunt, int count) {
         part = shunt.partNumber();
         Optional<Reel> reel = reel("reel of " + shunt.partNumber(), shunt.correlation());
         for (int i = 0; i < count; i++) {
@@ -130,7 +131,20 @@ final class InputDescription {
                 add(Slot.MOUNTING, i, owner, shunt.mountingResistance().mid(), shunt.mountingResistance());
             }
         }
-        plusMinus(Slot.THERMAL_EMF, 0, new Owner.Own("shunt"), shunt.thermalEmf() * around.rules().shuntGradient());
+    }
+
+    /** In service and at each point of a calibration another part of the gradient's limit, as other heat flows. */
+    private void thermalEmf(Shunt shunt, Surroundings around, Demand demand) {
+        Owner owner = new Owner.Own("shunt");
+        double most = shunt.thermalEmf() * around.rules().shuntGradient();
+        plusMinus(Slot.THERMAL_EMF, 0, owner, most);
+        Optional<Calibration> calibration = demand.channel().reading().calibration();
+        if (around.adc().isPresent() && calibration.isPresent()) {
+            plusMinus(Slot.CALIBRATION_EMF_UPPER, 0, owner, most);
+            if (calibration.get().points() == Calibration.Points.TWO) {
+                plusMinus(Slot.CALIBRATION_EMF_LOWER, 0, owner, most);
+            }
+        }
     }
 
     private void amplifier(SenseCircuit circuit, Surroundings around) {

@@ -8,7 +8,8 @@ import org.hipparchus.distribution.continuous.TDistribution;
 
 /**
  * Propagation of uncertainty by JCGM 100:2008, first order with correlation (eq. 13) and, where asked, the next terms of
- * the Taylor series for independent inputs (5.1.2, note).
+ * the Taylor series (5.1.2, note); of correlated inputs these with their covariances, as they are for normal ones, where half a
+ * quadratic form of matrix H has the variance ½·tr((HΣ)²) (A. M. Mathai, S. B. Provost, Quadratic Forms in Random Variables, 1992).
  *
  * <p>The next terms matter here: a drift multiplies a temperature difference whose expectation may be zero, so its first
  * order sensitivity is zero although its effect is not.
@@ -43,7 +44,7 @@ public final class Propagation {
         return of(f, inputs, new double[0][], true);
     }
 
-    /** With the next terms of the Taylor series; correlation counts in the first order. */
+    /** With the next terms of the Taylor series and correlation coefficients r[i][j], none if empty. */
     public static Propagation secondOrder(Equation f, List<Estimate> inputs, double[][] correlation) {
         return of(f, inputs, correlation, true);
     }
@@ -81,7 +82,7 @@ public final class Propagation {
         // The Welch-Satterthwaite formula is for the first order combination of independent inputs (G.4.1).
         double degrees = fourth > 0 ? first * first / fourth : Double.POSITIVE_INFINITY;
         if (second) {
-            double[] next = nextTerms(f, x, u, c);
+            double[] next = nextTerms(f, x, u, c, correlation);
             for (int i = 0; i < n; i++) {
                 parts[i] += next[i];
                 variance += next[i];
@@ -108,8 +109,11 @@ public final class Propagation {
      * The terms [½ (∂²f/∂xi∂xj)² + ∂f/∂xi ∂³f/∂xi∂xj²] u²(xi) u²(xj), summed over j, by differences of the gradient over
      * ± u(xj).
      */
-    private static double[] nextTerms(Equation f, double[] x, double[] u, double[] c) {
+    private static double[] nextTerms(Equation f, double[] x, double[] u, double[] c, double[][] correlation) {
         int n = x.length;
+        boolean correlated = correlation.length > 0;
+        double[][] curvature = new double[correlation.length][correlation.length];
+        double[] along = covariances(c, u, correlation);
         double[] terms = new double[n];
         double[] above = new double[n];
         double[] below = new double[n];
@@ -130,10 +134,52 @@ public final class Propagation {
                 // Both differences already carry one factor of u(xj) each: h = u(xj).
                 double mixed = (above[i] - below[i]) / 2;
                 double third = above[i] - 2 * c[i] + below[i];
-                terms[i] += (0.5 * mixed * mixed + c[i] * third) * u[i] * u[i];
+                terms[i] += 0.5 * mixed * mixed * u[i] * u[i] + third * u[i] * along[i];
+                if (correlated) {
+                    curvature[i][j] = mixed * u[i];
+                }
             }
         }
+        if (correlated) {
+            addCovariances(curvature, correlation, terms);
+        }
         return terms;
+    }
+
+    /** The covariance of the first order with each input, over u(xi): of independent inputs ∂f/∂xi·u(xi). */
+    private static double[] covariances(double[] c, double[] u, double[][] correlation) {
+        double[] along = new double[c.length];
+        for (int i = 0; i < c.length; i++) {
+            along[i] = c[i] * u[i];
+            for (int j = 0; j < correlation.length; j++) {
+                along[i] += j == i ? 0 : correlation[i][j] * c[j] * u[j];
+            }
+        }
+        return along;
+    }
+
+    /** What ½·tr((MR)²) is more than ½·tr(M²), with M = ∂²f/∂xi∂xj·u(xi)·u(xj) and R the correlation. */
+    private static void addCovariances(double[][] m, double[][] correlation, double[] terms) {
+        int n = m.length;
+        double[][] product = new double[n][];
+        for (int i = 0; i < n; i++) {
+            product[i] = m[i].clone();
+        }
+        for (int k = 0; k < n; k++) {
+            for (int j = 0; j < n; j++) {
+                double r = correlation[k][j];
+                if (j != k && r != 0) {
+                    for (int i = 0; i < n; i++) {
+                        product[i][j] += m[i][k] * r;
+                    }
+                }
+            }
+        }
+        for (int i = 0; i < n; i++) {
+            for (int j = 0; j < n; j++) {
+                terms[i] += 0.5 * (product[i][j] * product[j][i] - m[i][j] * m[j][i]);
+            }
+        }
     }
 
     /** y = f(expectations). */

@@ -58,6 +58,8 @@ public enum Slot {
     CALIBRATION_RAIL("rail voltage at calibration", "V"),
     CALIBRATION_STEP_LOWER("ADC non-linearity at the lower calibration point", "V"),
     CALIBRATION_STEP_UPPER("ADC non-linearity at the upper calibration point", "V"),
+    CALIBRATION_EMF_LOWER("thermal EMF at the lower calibration point", "V"),
+    CALIBRATION_EMF_UPPER("thermal EMF at the upper calibration point", "V"),
     /** From here on one slot for each shunt in parallel. */
     SHUNT_TOLERANCE("shunt tolerance", "1"),
     SHUNT_DRIFT("shunt temperature coefficient", "1/K"),
@@ -84,7 +86,9 @@ public enum Slot {
     /** The kind of part that owns such an input; empty where it belongs to the board, a reference, a tap or a converter. */
     public Optional<PartKind> part() {
         return switch (this) {
-            case SHUNT_TOLERANCE, SHUNT_DRIFT, SHUNT_AGEING, MOUNTING, THERMAL_EMF -> Optional.of(PartKind.SHUNT);
+            case SHUNT_TOLERANCE, SHUNT_DRIFT, SHUNT_AGEING, MOUNTING, THERMAL_EMF, CALIBRATION_EMF_LOWER,
+                    CALIBRATION_EMF_UPPER ->
+                Optional.of(PartKind.SHUNT);
             case GAIN_ERROR, GAIN_DRIFT, GAIN_AGEING, OFFSET, OFFSET_DRIFT, COMMON_MODE, SUPPLY_REJECTION, INPUT_BIAS ->
                 Optional.of(PartKind.AMPLIFIER);
             case OUTPUT_LOW, COMPARATOR_BIAS, SENSE_BIAS, COMPARATOR_OFFSET, COMPARATOR_DRIFT, BUILT_IN,

@@ -32,8 +32,6 @@ final class AmplifierTerms {
     final double[] gainVariance;
     /** Standard uncertainty of the input error, squared, V². */
     final double[] errorVariance;
-    /** Price of one section. */
-    final double[] cost;
 
     AmplifierTerms(List<SenseAmplifier> chosen, ChannelProblem problem) {
         int n = chosen.size();
@@ -47,7 +45,6 @@ final class AmplifierTerms {
         error = new double[2][n];
         gainVariance = new double[n];
         errorVariance = new double[n];
-        cost = new double[n];
         for (int j = 0; j < n; j++) {
             fill(j, problem);
         }
@@ -63,7 +60,6 @@ final class AmplifierTerms {
                 ? amplifier.ranges().outputLow() / amplifier.gain() * (1 - LimitCheck.ROUNDING)
                 : 0;
         mostAtFault[j] = amplifier.ranges().survival() * (1 + LimitCheck.ROUNDING);
-        cost[j] = amplifier.purchase().unitPriceAt(problem.buildQuantity()) / amplifier.sections();
         InputErrors input = amplifier.input();
         for (int end = 0; end < 2; end++) {
             double ta = (end == 0 ? around.local().min() : around.local().max()) - REFERENCE_TEMPERATURE;

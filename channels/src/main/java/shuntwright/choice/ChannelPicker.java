@@ -89,7 +89,8 @@ public final class ChannelPicker {
     private Optional<ChannelChoice> accepted(ChannelProblem problem, CandidateSearch search,
             List<shuntwright.parts.Comparator> comparators, Judge judge) {
         Candidates found = new Candidates();
-        Completions completions = new Completions(problem, search, found, comparators, tables);
+        Completions completions = new Completions(problem, search, found, comparators, tables,
+                Prices.ofOneChannel(problem.buildQuantity()));
         int from = 0;
         while (from < search.shunts()) {
             int to = within(search, from, search.shunt(from).heat);
@@ -144,7 +145,8 @@ public final class ChannelPicker {
     private Optional<SenseCircuit> nearest(ChannelProblem problem, CandidateSearch search,
             List<shuntwright.parts.Comparator> comparators, Judge judge) {
         Candidates found = search.nearest(NEAREST_PAIRS);
-        Completions completions = new Completions(problem, search, found, comparators, tables);
+        Completions completions = new Completions(problem, search, found, comparators, tables,
+                Prices.ofOneChannel(problem.buildQuantity()));
         List<Completions.Option> options = completions.all();
         options.sort(Comparator.comparingDouble(Completions.Option::room).reversed());
         SenseCircuit best = null;

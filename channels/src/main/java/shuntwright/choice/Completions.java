@@ -11,6 +11,7 @@ import shuntwright.circuit.SenseCircuit;
 import shuntwright.circuit.SourceVoltage;
 import shuntwright.parts.Hysteresis;
 import shuntwright.parts.ResistorSeries;
+import shuntwright.parts.SenseAmplifier;
 
 /**
  * The ways to complete candidates with a comparator, a resistor series and a source for the threshold; cheapest first
@@ -23,6 +24,8 @@ final class Completions {
     private final Candidates found;
     private final CompletionFilter filter;
     private final CircuitBuilder builder;
+    private final double[] shuntPrice;
+    private final double[] amplifierPrice;
     /** Comparators with resistor series, by ascending cost. */
     private final List<Tail> tails = new ArrayList<>();
 
@@ -39,20 +42,29 @@ final class Completions {
             ResistorSeries resistors, double cost, double room) {}
 
     Completions(ChannelProblem problem, CandidateSearch search, Candidates found,
-            List<shuntwright.parts.Comparator> comparators, DividerTables tables) {
+            List<shuntwright.parts.Comparator> comparators, DividerTables tables, Prices prices) {
         this.problem = problem;
         this.search = search;
         this.found = found;
         this.filter = new CompletionFilter(problem, search, found, comparators, tables);
         this.builder = new CircuitBuilder(problem, tables);
         for (shuntwright.parts.Comparator comparator : comparators) {
-            double own = comparator.purchase().unitPriceAt(problem.buildQuantity()) / comparator.sections();
+            double own = prices.of(comparator) / comparator.sections();
             for (ResistorSeries resistors : problem.resistors()) {
-                tails.add(new Tail(comparator, resistors, own + resistorCount(comparator)
-                        * resistors.purchase().unitPriceAt(problem.buildQuantity())));
+                tails.add(new Tail(comparator, resistors, own + resistorCount(comparator) * prices.of(resistors)));
             }
         }
         tails.sort(Comparator.comparingDouble(Tail::cost));
+        shuntPrice = new double[search.shunts()];
+        for (int i = 0; i < shuntPrice.length; i++) {
+            ShuntTerms term = search.shunt(i);
+            shuntPrice[i] = prices.of(term.shunt, term.count);
+        }
+        amplifierPrice = new double[search.amplifiers().size()];
+        for (int i = 0; i < amplifierPrice.length; i++) {
+            SenseAmplifier amplifier = search.amplifiers().amplifiers[i];
+            amplifierPrice[i] = prices.of(amplifier) / amplifier.sections();
+        }
     }
 
     private int resistorCount(shuntwright.parts.Comparator comparator) {
@@ -111,7 +123,7 @@ final class Completions {
     }
 
     private double base(int candidate) {
-        return search.shunt(found.shunt(candidate)).cost + search.amplifiers().cost[found.amplifier(candidate)];
+        return shuntPrice[found.shunt(candidate)] + amplifierPrice[found.amplifier(candidate)];
     }
 
     /** Options by ascending cost; those of one cost by candidate, then by descending room. */

@@ -1,5 +1,6 @@
 package shuntwright.choice;
 
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -78,15 +79,13 @@ final class Judge {
 
     /** True when every outcome is inside by limits or by a first look at its coverage interval. */
     private boolean likely(SenseCircuit circuit, ChannelAccuracy accuracy) {
-        List<Range> intervals = CoverageLook.intervals(circuit, problem.around(), problem.demand(),
-                problem.acceptance().coverage());
+        List<Integer> open = new ArrayList<>();
         for (int i = 0; i < asked.size(); i++) {
-            Range allowed = asked.get(i).allowed();
-            if (!allowed.contains(intervals.get(i)) && !allowed.contains(limits(asked.get(i), circuit, accuracy))) {
-                return false;
+            if (!asked.get(i).allowed().contains(limits(asked.get(i), circuit, accuracy))) {
+                open.add(i);
             }
         }
-        return true;
+        return CoverageLook.within(circuit, problem.around(), problem.demand(), problem.acceptance().coverage(), open);
     }
 
     /**

@@ -21,8 +21,6 @@ final class ShuntTerms {
     final double resistance;
     /** I_L²·R_s times diversity, W. */
     final double heat;
-    /** Price of all, currency of the catalogue. */
-    final double cost;
     /** Thermal EMF limit, V. */
     final double emf;
     /** Largest shunt voltage at the no-trip current, V. */
@@ -48,7 +46,6 @@ final class ShuntTerms {
         this.heating = shunt.rating().thermalResistance() / count;
         this.resistance = shunt.inParallel(count);
         this.heat = demand.load() * demand.load() * resistance * demand.channel().diversity();
-        this.cost = count * shunt.purchase().unitPriceAt(saturated(count, problem.buildQuantity()));
         this.emf = shunt.thermalEmf() * problem.around().rules().shuntGradient();
         for (int end = 0; end < 2; end++) {
             noTripHigh[end] = voltage(demand.tripWindow().min(), end, true);
@@ -72,10 +69,6 @@ final class ShuntTerms {
     /** Root mean square distance of that temperature from 25 °C, K. */
     static double distance(Surroundings around) {
         return Math.hypot(around.local().mid() - REFERENCE_TEMPERATURE, spread(around));
-    }
-
-    private static int saturated(int count, int boards) {
-        return (int) Math.min(Integer.MAX_VALUE, (long) count * boards);
     }
 
     /** Extreme shunt voltage at a current, self-heating included, V; infinite in thermal runaway. */

@@ -2,8 +2,10 @@ package shuntwright.choice;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 import shuntwright.board.Tap;
 import shuntwright.circuit.SourceVoltage;
@@ -38,10 +40,29 @@ public final class TapPicker {
      * @param users    comparators that load it
      */
     public Optional<Threshold> pick(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users) {
+        return several(tap, source, problems, users, 1).stream().findFirst();
+    }
+
+    /**
+     * Thresholds that serve most of the channels, the one that {@link #pick} takes first, then others spread over all voltages that serve
+     * as many.
+     *
+     * @param most how many, ≥ 1
+     */
+    public List<Threshold> several(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users, int most) {
         double nominal = source.voltage().nominal();
-        double ratio = tap.voltage().isPresent()
-                ? tap.voltage().getAsDouble() / nominal
-                : best(tap.kind(), source, problems);
+        List<Double> ratios = tap.voltage().isPresent()
+                ? List.of(tap.voltage().getAsDouble() / nominal)
+                : best(tap.kind(), source, problems, most);
+        Set<Threshold> thresholds = new LinkedHashSet<>();
+        for (double ratio : ratios) {
+            threshold(tap, source, problems, users, ratio).ifPresent(thresholds::add);
+        }
+        return List.copyOf(thresholds);
+    }
+
+    private Optional<Threshold> threshold(Tap tap, SourceVoltage source, List<ChannelProblem> problems, int users,
+            double ratio) {
         return switch (tap.kind()) {
             case Tap.Kind.Dac dac -> {
                 int steps = 1 << dac.bits();
@@ -51,14 +72,15 @@ public final class TapPicker {
             case Tap.Kind.Divider divider -> problems.isEmpty()
                     ? Optional.empty()
                     : new ValueChoice(tables)
-                            .nearest(source, ratio * nominal, problems.getFirst().resistors().getFirst(),
+                            .nearest(source, ratio * source.voltage().nominal(),
+                                    problems.getFirst().resistors().getFirst(),
                                     problems.getFirst().around().rules(), tap.name(), users, divider.top(),
                                     divider.bottom())
                             .map(Threshold.class::cast);
         };
     }
 
-    private static double best(Tap.Kind kind, SourceVoltage source, List<ChannelProblem> problems) {
+    private static List<Double> best(Tap.Kind kind, SourceVoltage source, List<ChannelProblem> problems, int wanted) {
         int[] served = new int[STEPS];
         double[] heat = new double[STEPS];
         for (ChannelProblem problem : problems) {
@@ -81,7 +103,18 @@ public final class TapPicker {
                 least = Math.min(least, heat[i]);
             }
         }
-        return ratio(middleOfWidest(served, heat, most, least * (1 + 1e-9) + step));
+        List<Double> ratios = new ArrayList<>(
+                List.of(ratio(middleOfWidest(served, heat, most, least * (1 + 1e-9) + step))));
+        List<Integer> serving = new ArrayList<>();
+        for (int i = 0; i < STEPS; i++) {
+            if (served[i] == most && most > 0) {
+                serving.add(i);
+            }
+        }
+        for (int i = 1; i < wanted && !serving.isEmpty(); i++) {
+            ratios.add(ratio(serving.get((int) ((2L * i - 1) * serving.size() / (2L * (wanted - 1))))));
+        }
+        return ratios;
     }
 
     /** Middle of the widest run of steps that serve {@code most} channels with no more than {@code allowed} heat. */

@@ -14,6 +14,7 @@ import shuntwright.board.AlertLine;
 import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Demand;
+import shuntwright.board.Objective;
 import shuntwright.board.Tap;
 import shuntwright.board.ThresholdDemand;
 import shuntwright.choice.ChannelChoice;
@@ -27,6 +28,7 @@ import shuntwright.circuit.SourceVoltage;
 import shuntwright.circuit.Threshold;
 import shuntwright.parts.Catalogue;
 import shuntwright.parts.OpenDrainOutput;
+import shuntwright.selection.Prover;
 
 /**
  * Plans boards. Keeps what it worked out for each channel, so that planning again after an edit works out only what the
@@ -46,10 +48,23 @@ public final class BoardPlanner {
     private static final DividerTables TABLES = new DividerTables();
 
     private final ChannelPicker picker = new ChannelPicker(TABLES);
+    private final BoardChooser chooser;
     private final Map<ChannelProblem, ChannelChoice> choices = new HashMap<>();
     private final Map<Judged, ChannelPlan> judgements = new HashMap<>();
     private final Map<ChannelProblem, Boolean> acceptances = new HashMap<>();
     private final Map<TapProblem, Optional<Threshold>> voltages = new HashMap<>();
+    /** Circuits of the last plan, by channel: what the next one starts from. */
+    private Map<String, SenseCircuit> last = Map.of();
+
+    /** With bounds of its own only. */
+    public BoardPlanner() {
+        this(Prover.NONE);
+    }
+
+    /** @param prover asked where the own bounds do not prove a choice best */
+    public BoardPlanner(Prover prover) {
+        chooser = new BoardChooser(TABLES, prover, this::nearest);
+    }
 
     private record Judged(ChannelProblem problem, SenseCircuit circuit) {}
 
@@ -74,13 +89,35 @@ public final class BoardPlanner {
      * @throws Cancelled when progress says so
      */
     public Plan plan(Board board, Catalogue catalogue, Progress progress) {
+        Chosen chosen = chosen(board, catalogue, BoardChooser.Wish.of(board.preference()), progress);
+        Plan plan = finished(chosen, progress);
+        Optional<Conflict> conflict = chosen.choice()
+                .flatMap(together -> chooser.conflict(chosen.context(), together, progress));
+        return conflict.isEmpty() ? plan : plan.withChoice(plan.choice().orElseThrow().withConflict(conflict));
+    }
+
+    Plan plan(Board board, Catalogue catalogue, BoardChooser.Wish wish, Progress progress) {
+        return finished(chosen(board, catalogue, wish, progress), progress);
+    }
+
+    private Chosen chosen(Board board, Catalogue catalogue, BoardChooser.Wish wish, Progress progress) {
         forget();
+        chooser.forget();
+        // Rises by a choice without search first; the search seldom changes them.
+        boolean warms = board.zones().stream().anyMatch(each -> each.thermalResistance().isPresent());
         Map<String, Double> rises = Map.of();
-        for (int pass = 1;; pass++) {
-            Chosen chosen = settled(board, catalogue, rises, progress);
+        int pass = 1;
+        for (boolean quick = warms && wish.rounds() > 0; quick && pass < MOST_PASSES / 2; pass++) {
+            Map<String, Double> needed = higher(rises,
+                    chosen(new BoardContext(board, catalogue, Map.of(), rises), wish.withRounds(0), progress).rises());
+            quick = !needed.equals(rises);
+            rises = needed;
+        }
+        for (;; pass++) {
+            Chosen chosen = settled(board, catalogue, rises, wish, progress);
             Map<String, Double> needed = higher(rises, chosen.rises());
-            if (needed.equals(rises) || pass == MOST_PASSES) {
-                return finished(atItsRise(chosen), progress);
+            if (needed.equals(rises) || pass >= MOST_PASSES) {
+                return atItsRise(chosen);
             }
             rises = needed;
         }
@@ -101,8 +138,10 @@ public final class BoardPlanner {
      * Channels with their circuits, before cures are tried.
      *
      * @param context with which they were chosen
+     * @param choice  how they were chosen together; empty when they were only checked
      */
-    private record Chosen(BoardContext context, List<ChannelPlan> channels, List<TapPlan> taps) {
+    private record Chosen(BoardContext context, List<ChannelPlan> channels, List<TapPlan> taps,
+            Optional<BoardChooser.Chosen> choice) {
 
         /** The rise that each zone has with these circuits, K; infinite in thermal runaway. */
         Map<String, Double> rises() {
@@ -112,8 +151,9 @@ public final class BoardPlanner {
     }
 
     /** With pull-ups that suit the outputs chosen. */
-    private Chosen settled(Board board, Catalogue catalogue, Map<String, Double> rises, Progress progress) {
-        Chosen first = chosen(new BoardContext(board, catalogue, Map.of(), rises), progress);
+    private Chosen settled(Board board, Catalogue catalogue, Map<String, Double> rises, BoardChooser.Wish wish,
+            Progress progress) {
+        Chosen first = chosen(new BoardContext(board, catalogue, Map.of(), rises), wish, progress);
         Map<String, Double> pullUps = new HashMap<>();
         boolean again = false;
         for (AlertPlan alert : alerts(first.context(), first.channels())) {
@@ -122,7 +162,7 @@ public final class BoardPlanner {
                     && first.channels().stream().anyMatch(each -> alert.channels().contains(each.channel().name())
                             && feeds(each));
         }
-        return again ? chosen(new BoardContext(board, catalogue, pullUps, rises), progress) : first;
+        return again ? chosen(new BoardContext(board, catalogue, pullUps, rises), wish, progress) : first;
     }
 
     /** The same circuits judged at the rise they have, which may be less than that they were chosen with. */
@@ -146,7 +186,7 @@ public final class BoardPlanner {
             }
             channels.add(now);
         }
-        return new Chosen(context, channels, chosen.taps());
+        return new Chosen(context, channels, chosen.taps(), chosen.choice());
     }
 
     private static Map<String, Double> finite(Map<String, Double> rises) {
@@ -170,7 +210,9 @@ public final class BoardPlanner {
                 channels.add(plan);
             }
         }
-        return assembled(chosen.context(), channels, chosen.taps());
+        Optional<BoardChoice> choice = chosen.choice()
+                .map(together -> together.report(chosen.context().board().preference()));
+        return assembled(chosen.context(), channels, chosen.taps(), choice);
     }
 
     private static boolean feeds(ChannelPlan plan) {
@@ -207,7 +249,7 @@ public final class BoardPlanner {
                 }
             });
         }
-        return new Chosen(context, channels, taps);
+        return new Chosen(context, channels, taps, Optional.empty());
     }
 
     private ChannelPlan asPinned(ChannelProblem problem) {
@@ -233,19 +275,27 @@ public final class BoardPlanner {
         }
     }
 
-    private Chosen chosen(BoardContext context, Progress progress) {
+    private Chosen chosen(BoardContext context, BoardChooser.Wish wish, Progress progress) {
         List<Channel> all = context.board().channels();
-        List<TapPlan> taps = taps(context);
+        BoardChooser.Chosen together = chooser.choose(context, wish, last, progress);
+        Map<String, SenseCircuit> circuits = together.circuits();
+        List<TapPlan> taps = new ArrayList<>();
+        for (TapPlan each : taps(context)) {
+            taps.add(together.threshold(each.tap().name())
+                    .map(threshold -> new TapPlan(each.tap(), each.channels(), Optional.of(threshold))).orElse(each));
+        }
         List<ChannelPlan> channels = new ArrayList<>();
         Set<String> used = new HashSet<>();
         for (Channel channel : all) {
-            step(progress, "choosing parts", channels.size(), all.size());
-            ChannelPlan plan = solve(context, channel, taps, used);
+            step(progress, "judging channels", channels.size(), all.size());
+            SenseCircuit circuit = circuits.get(channel.name());
+            ChannelPlan plan = circuit != null && Demand.of(channel) instanceof Demand.Reading.Complete(Demand demand)
+                    ? judged(context.problem(demand, threshold(channel, taps)), circuit)
+                    : solve(context, channel, taps, used);
             plan.solved().ifPresent(solved -> used.addAll(numbers(solved.circuit())));
             channels.add(plan);
         }
-        step(progress, "choosing parts", channels.size(), all.size());
-        return new Chosen(context, channels, taps);
+        return new Chosen(context, channels, taps, Optional.of(together));
     }
 
     private static void step(Progress progress, String stage, int done, int total) {
@@ -301,6 +351,14 @@ public final class BoardPlanner {
             case ChannelChoice.Accepted(List<SenseCircuit> circuits) -> judged(problem, preferred(circuits, used));
             case ChannelChoice.Nearest(SenseCircuit circuit) -> judged(problem, circuit);
             case ChannelChoice.NoFit none -> ChannelSolver.noFit(problem, none);
+        };
+    }
+
+    private Optional<SenseCircuit> nearest(ChannelProblem problem) {
+        return switch (choices.computeIfAbsent(problem.anonymous(), picker::pick)) {
+            case ChannelChoice.Accepted(List<SenseCircuit> circuits) -> Optional.of(circuits.getFirst());
+            case ChannelChoice.Nearest(SenseCircuit circuit) -> Optional.of(circuit);
+            case ChannelChoice.NoFit _ -> Optional.empty();
         };
     }
 
@@ -401,7 +459,8 @@ public final class BoardPlanner {
         return channels.stream().filter(each -> context.line(each.channel()).filter(line::equals).isPresent());
     }
 
-    private static Plan assembled(BoardContext context, List<ChannelPlan> planned, List<TapPlan> taps) {
+    private static Plan assembled(BoardContext context, List<ChannelPlan> planned, List<TapPlan> taps,
+            Optional<BoardChoice> choice) {
         Board board = context.board();
         List<Finding> findings = new ArrayList<>(context.findings());
         if (planned.isEmpty()) {
@@ -420,9 +479,56 @@ public final class BoardPlanner {
         findings.addAll(ZoneFindings.of(context, channels));
         List<PartUse> parts = PartsList.of(channels, new LinkedHashMap<>(context.referenceParts()), taps, alerts,
                 context.tapResistors(), context.pullUpResistors());
-        return new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,
+        Plan plan = new Plan(board, context.catalogue().currency(), channels, uses, alerts, taps,
                 budget.references(), parts,
-                Findings.sorted(findings), Optional.empty(), Optional.empty());
+                Findings.sorted(findings), choice, Optional.empty());
+        return choice.isEmpty() ? plan : plan.withChoice(choice.get().measured(plan));
+    }
+
+    /**
+     * Plans of which none is better in one of two objectives without being worse in the other.
+     *
+     * @param points at most so many, ≥ 2; equal ones are left out
+     * @throws Cancelled                when progress says so
+     * @throws IllegalArgumentException when the objectives are the same or points are fewer than 2
+     */
+    public Front front(Board board, Catalogue catalogue, Objective first, Objective second, int points,
+            Progress progress) {
+        return new BoardQuestions(this, board, catalogue, progress).front(first, second, points);
+    }
+
+    /**
+     * Other circuits for a channel, the whole board chosen again around each; best first.
+     *
+     * @param most how many
+     * @throws Cancelled                when progress says so
+     * @throws IllegalArgumentException when the board has no such channel
+     */
+    public List<OtherChoice> others(Board board, Catalogue catalogue, String channel, int most, Progress progress) {
+        return new BoardQuestions(this, board, catalogue, progress).others(channel, most);
+    }
+
+    /**
+     * The board planned at each value of one of its limits.
+     *
+     * @param zone   whose heat limit is varied; empty for the others
+     * @param values W, A or boards, each &gt; 0
+     * @throws Cancelled                when progress says so
+     * @throws IllegalArgumentException when the board has no such zone or a value is not allowed
+     */
+    public WhatIf whatIf(Board board, Catalogue catalogue, WhatIf.Varied varied, String zone, List<Double> values,
+            Progress progress) {
+        return new BoardQuestions(this, board, catalogue, progress).whatIf(varied, zone, values);
+    }
+
+    /** The circuits that may be chosen for a channel on its board as planned. */
+    List<SenseCircuit> menu(Board board, Catalogue catalogue, Channel channel, Plan plan) {
+        BoardContext context = new BoardContext(board, catalogue, Map.of(), finite(ZoneHeat.rises(board.zones(),
+                plan.channels(), board.ambient().max())));
+        return Demand.of(channel) instanceof Demand.Reading.Complete(Demand demand)
+                && ChannelSolver.unknownPins(channel, catalogue).isEmpty()
+                        ? chooser.circuits(context, context.problem(demand, threshold(channel, plan.taps())))
+                        : List.of();
     }
 
     /** The board with every choice of the plan pinned, so that {@link #check} judges exactly this plan. */

@@ -1,16 +1,15 @@
 package shuntwright.plan;
 
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Supplier;
-
-import org.jspecify.annotations.Nullable;
 
 import shuntwright.accuracy.Assessment;
 import shuntwright.board.Demand;
@@ -25,8 +24,9 @@ import shuntwright.sampling.Watch;
 import shuntwright.sampling.YieldSampler;
 
 /**
- * Samples planned boards. Keeps what it sampled of each channel, so that sampling again after an edit samples only what the edit
- * touched; the answer is the same as a new sampler's. Not safe for use by several threads at once.
+ * Samples planned boards. Keeps what it sampled of each channel, also when it is cancelled before the others are done, so that
+ * sampling again after an edit samples only what the edit touched; the full answer is the same as a new sampler's, and a first
+ * picture has the channels that were sampled better before as they were. Not safe for use by several threads at once.
  */
 public final class BoardSampler {
 
@@ -34,15 +34,20 @@ public final class BoardSampler {
     private static final int MOST_KEPT = 6;
 
     private final int threads;
-    private final Map<Key, ChannelSampler.Result> kept = new HashMap<>();
-    private final Map<Key, ChannelSampler.Result> withEffects = new HashMap<>();
+    private final Map<Key, ChannelSampler.Result> kept = new ConcurrentHashMap<>();
+    private final Map<Key, ChannelSampler.Result> withEffects = new ConcurrentHashMap<>();
+    /** Of the most trials, whatever their number was to be. */
+    private final Map<Key.Subject, ChannelSampler.Result> best = new ConcurrentHashMap<>();
 
     /** Everything a channel's distributions depend on. */
-    private record Key(Demand demand, SenseCircuit circuit, Surroundings around, double coverage, Sampling sampling) {}
+    private record Key(Subject subject, Sampling sampling) {
+        /** The same without the number of trials. */
+        private record Subject(Demand demand, SenseCircuit circuit, Surroundings around, double coverage, long seed) {}
+    }
 
     /** How much is worked out. */
     public enum Depth {
-        /** Distributions and yield: a first picture. */
+        /** Distributions and yield: a first picture. Channels that were sampled before with more trials keep those. */
         SKETCH,
         /** Also effect indices and what shared inputs cost. */
         FULL
@@ -74,20 +79,19 @@ public final class BoardSampler {
                             each.demand()))
                     .toList());
             List<Supplier<ChannelSampler.Result>> work = new ArrayList<>();
-            List<Key> keys = new ArrayList<>();
             for (int i = 0; i < solved.size(); i++) {
                 SolvedChannel each = solved.get(i);
                 ChannelSampler sampler = samplers.get(i);
-                Key key = new Key(each.demand(), each.circuit(), each.around(), coverage, sampling);
-                keys.add(key);
-                ChannelSampler.Result known = kept.get(key);
-                ChannelSampler.Result complete = withEffects.get(key);
-                work.add(() -> result(each, sampler, known, complete, coverage, sampling, depth, counter));
+                Key key = new Key(new Key.Subject(each.demand(), each.circuit(), each.around(), coverage,
+                        sampling.seed()), sampling);
+                work.add(() -> {
+                    ChannelSampler.Result result = known(key, depth)
+                            .orElseGet(() -> result(each, sampler, key, depth, counter));
+                    counter.channelDone();
+                    return result;
+                });
             }
             List<ChannelSampler.Result> results = all(pool, work);
-            for (int i = 0; i < keys.size(); i++) {
-                (depth == Depth.FULL ? withEffects : kept).put(keys.get(i), results.get(i));
-            }
             BoardYield together = together(pool, solved, samplers, results, sampling, depth, counter);
             return Studied.with(plan, new BoardStudy(sampling,
                     results.stream().map(ChannelSampler.Result::study).toList(), together));
@@ -101,25 +105,38 @@ public final class BoardSampler {
         if (kept.size() > most || withEffects.size() > most) {
             kept.clear();
             withEffects.clear();
+            best.clear();
         }
     }
 
-    private static ChannelSampler.Result result(SolvedChannel solved, ChannelSampler sampler,
-            ChannelSampler.@Nullable Result known,
-            ChannelSampler.@Nullable Result complete, double coverage, Sampling sampling,
-            Depth depth, Counter counter) {
-        if (complete != null) {
-            counter.channelDone();
-            return complete;
+    /** What needs no work. */
+    private Optional<ChannelSampler.Result> known(Key key, Depth depth) {
+        ChannelSampler.Result complete = withEffects.get(key);
+        if (complete != null || depth == Depth.FULL) {
+            return Optional.ofNullable(complete);
         }
-        ChannelSampler.Result result = known != null
-                ? known
-                : sampler.sample(solved.assessments(), coverage, sampling, counter);
-        ChannelSampler.Result all = depth == Depth.FULL
-                ? sampler.withEffects(result, sampling.seed(), counter)
-                : result;
-        counter.channelDone();
-        return all;
+        return Optional.ofNullable(kept.get(key)).or(() -> Optional.ofNullable(best.get(key.subject()))
+                .filter(each -> each.study().trials() >= key.sampling().trials().atMost()));
+    }
+
+    private void keep(Map<Key, ChannelSampler.Result> where, Key key, ChannelSampler.Result result) {
+        where.put(key, result);
+        best.merge(key.subject(), result,
+                (former, now) -> now.study().trials() >= former.study().trials() ? now : former);
+    }
+
+    private ChannelSampler.Result result(SolvedChannel solved, ChannelSampler sampler, Key key, Depth depth,
+            Watch watch) {
+        ChannelSampler.Result result = kept.get(key);
+        if (result == null) {
+            result = sampler.sample(solved.assessments(), key.subject().coverage(), key.sampling(), watch);
+            keep(kept, key, result);
+        }
+        if (depth == Depth.FULL) {
+            result = sampler.withEffects(result, key.sampling().seed(), watch);
+            keep(withEffects, key, result);
+        }
+        return result;
     }
 
     private static BoardYield together(ExecutorService pool, List<SolvedChannel> solved, List<ChannelSampler> samplers,

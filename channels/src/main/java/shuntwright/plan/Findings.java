@@ -10,6 +10,7 @@ import java.util.Optional;
 import shuntwright.accuracy.Assessment;
 import shuntwright.accuracy.BudgetLine;
 import shuntwright.accuracy.ChannelAccuracy;
+import shuntwright.accuracy.LimitWords;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Channel;
 import shuntwright.circuit.HysteresisNetwork;
@@ -88,15 +89,16 @@ final class Findings {
         double low = allowed.min() - reached.min();
         double high = reached.max() - allowed.max();
         List<String> misses = new ArrayList<>();
-        if (low > 0) {
+        if (low > 0 && !LimitWords.none(low)) {
             misses.add("too low by " + show(low, AMPERE));
         }
-        if (high > 0) {
+        if (high > 0 && !LimitWords.none(high)) {
             misses.add("too high by " + show(high, AMPERE));
         }
         boolean likely = verdict == Verdict.LIKELY;
-        String text = capital(each.outcome().words()) + ": by limits " + show(reached, AMPERE, 4) + ", allowed "
-                + show(allowed, AMPERE, 4) + "; " + String.join(" and ", misses) + ". " + largest(each)
+        String text = capital(each.outcome().words()) + ": by limits " + LimitWords.show(reached, 4) + ", allowed "
+                + show(allowed, AMPERE, 4) + (misses.isEmpty() ? "" : "; " + String.join(" and ", misses)) + "."
+                + (LimitWords.none(reached.max()) ? "" : " " + largest(each))
                 + (likely
                         ? " The coverage interval " + show(each.coverage(), AMPERE, 4) + " is within."
                         : "");

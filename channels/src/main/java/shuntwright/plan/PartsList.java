@@ -118,8 +118,13 @@ final class PartsList {
 
     private void resistor(ResistorSeries series, double ohm, String user) {
         String value = QuantityWriter.show(ohm, Dimension.RESISTANCE, 4);
-        add("R", series.partNumber() + "-" + QuantityWriter.letterCode(ohm),
+        add("R", number(series, ohm),
                 "resistor " + value + ", " + series.description(), series.purchase(), user);
+    }
+
+    /** Part number of one value of a series. */
+    static String number(ResistorSeries series, double ohm) {
+        return series.partNumber() + "-" + QuantityWriter.letterCode(ohm);
     }
 
     private Line add(String letter, String number, String description, Purchase purchase, String user) {

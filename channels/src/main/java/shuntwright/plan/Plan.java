@@ -40,6 +40,12 @@ public record Plan(Board board, String currency, List<ChannelPlan> channels, Lis
         return channels.stream().filter(each -> each.channel().name().equals(name)).findFirst();
     }
 
+    Plan withChoice(BoardChoice newChoice) {
+        return new Plan(board, currency, channels, shared, alerts, taps, references, parts, findings,
+                Optional.of(newChoice),
+                study);
+    }
+
     /** True when every channel is accepted and no finding about the board is a fault. */
     public boolean accepted() {
         return channels.stream().allMatch(ChannelPlan::accepted)

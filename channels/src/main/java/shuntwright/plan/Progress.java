@@ -32,6 +32,11 @@ public interface Progress {
     default void better(BoardChoice best) {
     }
 
+    /** True when the search for a better choice should end with the best it has; the plan is finished with that. */
+    default boolean enough() {
+        return false;
+    }
+
     /** True when the work should stop at the next step. */
     boolean cancelled();
 }

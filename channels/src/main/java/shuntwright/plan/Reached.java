@@ -17,7 +17,7 @@ public record Reached(Objective objective, double value, OptionalDouble bound, P
 
     /** How sure it is that nothing is better. */
     public enum Proof {
-        /** No choice is better: proven. */
+        /** No choice is better: proven; heat within the design rules' heat step for each channel, which later objectives may use. */
         PROVEN,
         /** Nothing is better than the bound; between it and the value there may be something. */
         BOUNDED,

@@ -338,12 +338,15 @@ public final class ChannelModel implements Model {
         double[] atUpper = scratch.column(UPPER);
         double[] atLower = scratch.column(LOWER);
         double[][] then = atCalibration(x);
+        then[Slot.THERMAL_EMF.place()] = x[Slot.CALIBRATION_EMF_UPPER.place()];
         common(then, count, scratch);
         then[Slot.ADC_STEP.place()] = x[Slot.CALIBRATION_STEP_UPPER.place()];
         reading(upper, then, count, scratch, atUpper);
         boolean two = calibration.points() == Calibration.Points.TWO;
         if (two) {
             then[Slot.ADC_STEP.place()] = x[Slot.CALIBRATION_STEP_LOWER.place()];
+            then[Slot.THERMAL_EMF.place()] = x[Slot.CALIBRATION_EMF_LOWER.place()];
+            inputError(then, scratch.column(LOCAL), count, scratch.column(ERROR));
             reading(lower, then, count, scratch, atLower);
         }
         double[] error = x[Slot.CALIBRATION_CURRENT.place()];

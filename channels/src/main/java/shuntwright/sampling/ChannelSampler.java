@@ -84,6 +84,11 @@ public final class ChannelSampler {
         };
     }
 
+    /** What the demand allows for each outcome asked for, A. */
+    List<Range> allowed() {
+        return allowed;
+    }
+
     /** The shared things whose draws it takes. */
     public Set<String> shared() {
         Set<String> names = new LinkedHashSet<>();
@@ -140,9 +145,9 @@ public final class ChannelSampler {
                 remembered.run().outside()), remembered.outside());
     }
 
-    /** Only the probabilistically symmetric coverage intervals, by plain trials. */
-    List<CoverageInterval> quickly(double coverage, Sampling sampling) {
-        return MonteCarlo.intervals(model, variables, allowed, coverage, sampling);
+    /** Only the probabilistically symmetric coverage intervals; empty once that of an outcome in question is known to be outside. */
+    Optional<List<CoverageInterval>> quickly(double coverage, Sampling sampling, List<Integer> inQuestion) {
+        return MonteCarlo.intervals(model, variables, allowed, coverage, sampling, inQuestion);
     }
 
     /** The same result with effect indices. */

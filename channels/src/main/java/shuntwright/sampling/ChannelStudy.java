@@ -21,6 +21,11 @@ public record ChannelStudy(String channel, double coverage, boolean settled, Lis
         outcomes = List.copyOf(outcomes);
     }
 
+    /** How many were drawn of each outcome. */
+    public long trials() {
+        return outcomes.isEmpty() ? 0 : outcomes.getFirst().sampled().trials();
+    }
+
     public Optional<Propagated> outcome(Outcome wanted) {
         return outcomes.stream().filter(each -> each.outcome() == wanted).findFirst();
     }

@@ -3,6 +3,7 @@ package shuntwright.sampling;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 
 import shuntwright.board.Sampling;
 import shuntwright.quantity.Range;
@@ -23,6 +24,8 @@ public final class MonteCarlo {
     private static final int PARTS = 10;
     /** With fewer trials beyond an end or a bound than this, weighted trials say more. */
     private static final int FEW = 100;
+    /** Trials of the longest sequence that is kept whole, to be looked at for stability. */
+    private static final int LONGEST = 1 << 22;
     /** A first picture of fewer trials than this does without weighted ones. */
     private static final int ENOUGH = 100_000;
 
@@ -111,13 +114,52 @@ public final class MonteCarlo {
         return monteCarlo.outside;
     }
 
-    /** Only the probabilistically symmetric coverage intervals, by plain trials. */
-    static List<CoverageInterval> intervals(Model model, List<Variable> variables, List<Range> allowed, double coverage,
-            Sampling sampling) {
+    /**
+     * Only the probabilistically symmetric coverage intervals, by plain trials; empty as soon as so many trials are beyond a bound
+     * that the interval of an output in question cannot be within what is allowed.
+     *
+     * @param inQuestion outputs whose intervals decide
+     */
+    static Optional<List<CoverageInterval>> intervals(Model model, List<Variable> variables, List<Range> allowed,
+            double coverage, Sampling sampling, List<Integer> inQuestion) {
         MonteCarlo monteCarlo = new MonteCarlo(model, variables, allowed, coverage, sampling, Watch.NONE);
+        int total = sampling.trials().atMost();
+        // One more than beyond the end, for what reading a rank from a cell may be off.
+        double most = (1 - coverage) / 2 * total + 1;
+        long[] below = new long[allowed.size()];
+        long[] above = new long[allowed.size()];
+        for (int block = 0; block < PILOT_BLOCKS && block * Draws.BLOCK < total; block++) {
+            monteCarlo.pilot(block);
+            if (monteCarlo.beyond(inQuestion, Math.min(Draws.BLOCK, total - block * Draws.BLOCK), most, below, above)) {
+                return Optional.empty();
+            }
+        }
         List<Tally> tallies = monteCarlo.tallies();
-        monteCarlo.count(0, sampling.trials().atMost(), tallies);
-        return tallies.stream().map(each -> each.symmetric(coverage)).toList();
+        for (int at = 0; at < total; at += Draws.BLOCK) {
+            int count = Math.min(Draws.BLOCK, total - at);
+            monteCarlo.count(at, at + count, tallies);
+            if (at / Draws.BLOCK >= PILOT_BLOCKS && monteCarlo.beyond(inQuestion, count, most, below, above)) {
+                return Optional.empty();
+            }
+        }
+        return Optional.of(tallies.stream().map(each -> each.symmetric(coverage)).toList());
+    }
+
+    /** Counts the block's trials beyond either bound; true when there are too many. */
+    private boolean beyond(List<Integer> inQuestion, int count, double most, long[] below, long[] above) {
+        for (int i : inQuestion) {
+            double low = allowed.get(i).min();
+            double high = allowed.get(i).max();
+            for (int j = 0; j < count; j++) {
+                below[i] += y[i][j] < low ? 1 : 0;
+                // Without a value it is above all others.
+                above[i] += y[i][j] <= high ? 0 : 1;
+            }
+            if (below[i] > most || above[i] > most) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private Run run() {
@@ -166,8 +208,7 @@ public final class MonteCarlo {
         long[] values = new long[model.outputs()];
         double[] origin = new double[model.outputs()];
         for (int block = 0; block < PILOT_BLOCKS; block++) {
-            evaluate(block, Draws.BLOCK);
-            pilot.add(Arrays.stream(y).map(double[]::clone).toArray(double[][]::new));
+            pilot(block);
             for (int i = 0; i < y.length; i++) {
                 for (double value : y[i]) {
                     if (Double.isFinite(value)) {
@@ -187,6 +228,14 @@ public final class MonteCarlo {
             tallies.add(new Tally(origin[i] + mean, Math.sqrt(Math.max(0, variance))));
         }
         return tallies;
+    }
+
+    /** Evaluates one of the first blocks and remembers it. */
+    private void pilot(int block) {
+        evaluate(block, Draws.BLOCK);
+        if (block == pilot.size()) {
+            pilot.add(Arrays.stream(y).map(double[]::clone).toArray(double[][]::new));
+        }
     }
 
     private void evaluate(int block, int count) {
@@ -250,12 +299,17 @@ public final class MonteCarlo {
     }
 
     private boolean adaptive(int digits, int most, List<Tally> whole) {
-        int blocks = (Stability.sequence(coverage) + Draws.BLOCK - 1) / Draws.BLOCK;
-        int sequence = blocks * Draws.BLOCK;
+        long wanted = Stability.sequence(coverage);
+        if (wanted > LONGEST || 2 * wanted > most) {
+            // Stable after two sequences at the earliest: as many as may be, and nothing is said of stability.
+            fixed(most, whole);
+            return false;
+        }
+        int sequence = (int) ((wanted + Draws.BLOCK - 1) / Draws.BLOCK) * Draws.BLOCK;
         List<Stability> stabilities = new ArrayList<>();
         whole.forEach(_ -> stabilities.add(new Stability(coverage, digits)));
         boolean stable = false;
-        for (int from = 0; !stable && from + sequence <= Math.max(most, sequence); from += sequence) {
+        for (int from = 0; !stable && from + sequence <= most; from += sequence) {
             double[][] values = new double[y.length][sequence];
             List<Tally> some = whole.stream().map(Tally::another).toList();
             int[] kept = new int[y.length];

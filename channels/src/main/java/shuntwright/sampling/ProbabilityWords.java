@@ -33,6 +33,17 @@ public final class ProbabilityWords {
                 + near(low, RoundingMode.FLOOR) + " to " + near(high, RoundingMode.CEILING) + ")";
     }
 
+    /** What the product of the channels' own probabilities claims for the board; a bound where it would be a certainty. */
+    public static String product(BoardStudy study) {
+        double product = study.yield().product();
+        if (product >= 1) {
+            return "above 1 - " + text(rounded(1 - study.productAtLeast(), BOUND_DIGITS, RoundingMode.CEILING));
+        }
+        return product <= 0
+                ? "below " + text(rounded(study.productAtMost(), BOUND_DIGITS, RoundingMode.CEILING))
+                : estimate(product);
+    }
+
     /** The estimate alone, for where its interval stands beside it. */
     public static String estimate(double probability) {
         return near(probability, RoundingMode.HALF_UP);

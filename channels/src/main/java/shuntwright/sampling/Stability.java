@@ -21,8 +21,8 @@ final class Stability {
     }
 
     /** Trials of one sequence: max(J, 10⁴), J the least whole number ≥ 100/(1 − p). */
-    static int sequence(double coverage) {
-        return (int) Math.max(10_000, Math.ceil(100 / (1 - coverage) * (1 - 1e-12)));
+    static long sequence(double coverage) {
+        return (long) Math.max(10_000, Math.ceil(100 / (1 - coverage) * (1 - 1e-12)));
     }
 
     /** @param values of one sequence, all finite; sorted here */

@@ -27,10 +27,16 @@ final class StudentTable {
         exact = new TDistribution(degrees);
         for (int i = 0; i <= CELLS; i++) {
             double z = i * CELL;
-            // By the lower tail, where small probabilities keep their digits.
-            values[i] = -exact.inverseCumulativeProbability(NORMAL.cumulativeProbability(-z));
+            values[i] = i == 0 ? 0 : exactly(z);
             slopes[i] = CELL * NORMAL.density(z) / exact.density(values[i]);
         }
+    }
+
+    /** By the lower tail, where small probabilities keep their digits; a step of Newton's method brings those of small quantiles. */
+    private double exactly(double z) {
+        double p = NORMAL.cumulativeProbability(-z);
+        double about = exact.inverseCumulativeProbability(p);
+        return (exact.cumulativeProbability(about) - p) / exact.density(about) - about;
     }
 
     static StudentTable of(double degrees) {
@@ -41,7 +47,7 @@ final class StudentTable {
     double quantile(double z) {
         double at = Math.abs(z) / CELL;
         if (!(at < CELLS)) {
-            return Math.copySign(-exact.inverseCumulativeProbability(NORMAL.cumulativeProbability(-Math.abs(z))), z);
+            return Math.copySign(exactly(Math.abs(z)), z);
         }
         int i = (int) at;
         double t = at - i;

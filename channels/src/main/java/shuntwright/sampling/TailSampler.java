@@ -116,19 +116,18 @@ final class TailSampler {
         if (ways.isEmpty()) {
             return Optional.empty();
         }
-        double[][] all = new double[BLOCKS * Draws.BLOCK][];
+        double[] values = new double[BLOCKS * Draws.BLOCK];
+        double[] weights = new double[values.length];
         double[] parts = new double[BLOCKS];
         for (int block = 0; block < BLOCKS; block++) {
-            double[] weights = draw(ways, block, stream);
-            double[][] some = new double[Draws.BLOCK][];
+            int from = block * Draws.BLOCK;
+            System.arraycopy(draw(ways, block, stream), 0, weights, from, Draws.BLOCK);
             for (int j = 0; j < Draws.BLOCK; j++) {
-                double value = Double.isFinite(y[output][j]) ? y[output][j] : Tally.NO_VALUE;
-                some[j] = new double[]{value, weights[j]};
-                all[block * Draws.BLOCK + j] = some[j];
+                values[from + j] = Double.isFinite(y[output][j]) ? y[output][j] : Tally.NO_VALUE;
             }
-            parts[block] = beyond(some, tail, upper);
+            parts[block] = beyond(values, weights, from, from + Draws.BLOCK, tail, upper);
         }
-        double value = beyond(all, tail, upper);
+        double value = beyond(values, weights, 0, values.length, tail, upper);
         double squares = 0;
         for (double part : parts) {
             squares += (part - value) * (part - value);
@@ -136,19 +135,14 @@ final class TailSampler {
         return Optional.of(new Estimate(value, Math.sqrt(squares / (BLOCKS - 1.0) / BLOCKS)));
     }
 
-    /** The value beyond which the weights add up to a share of the trials. */
-    private static double beyond(double[][] trials, double tail, boolean upper) {
-        double[][] sorted = trials.clone();
-        Arrays.sort(sorted, (a, b) -> upper ? Double.compare(b[0], a[0]) : Double.compare(a[0], b[0]));
-        double wanted = tail * sorted.length;
-        double sum = 0;
-        for (double[] each : sorted) {
-            sum += each[1];
-            if (sum >= wanted) {
-                return each[0];
-            }
+    /** The value beyond which the weights of trials {@code from} to before {@code to} add up to a share of them. */
+    private static double beyond(double[] values, double[] weights, int from, int to, double tail, boolean upper) {
+        double[] away = new double[to - from];
+        for (int i = 0; i < away.length; i++) {
+            away[i] = upper ? -values[from + i] : values[from + i];
         }
-        return sorted[sorted.length - 1][0];
+        double found = WeightedRank.value(away, Arrays.copyOfRange(weights, from, to), tail * away.length);
+        return upper ? -found : found;
     }
 
     private double middle(int output) {

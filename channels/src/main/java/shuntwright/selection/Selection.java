@@ -39,7 +39,8 @@ public final class Selection {
      */
     public record Resource(String name, OptionalDouble limit, double fixed) {
 
-        double most() {
+        /** The limit; infinite for none. */
+        public double most() {
             return limit.orElse(Double.POSITIVE_INFINITY);
         }
     }

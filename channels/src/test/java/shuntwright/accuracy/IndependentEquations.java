@@ -182,24 +182,25 @@ final class IndependentEquations {
         double set = calibration.upper().orElse(load);
         Gradient told = x(Slot.CALIBRATION_CURRENT).add(1);
         Gradient raw = reading(actual);
-        Gradient rawAtUpper = atProduction(Slot.CALIBRATION_STEP_UPPER).reading(set);
+        Gradient rawAtUpper = atProduction(Slot.CALIBRATION_STEP_UPPER, Slot.CALIBRATION_EMF_UPPER).reading(set);
         if (calibration.points() == Calibration.Points.ONE) {
             return raw.multiply(told.multiply(set).divide(rawAtUpper));
         }
         double low = calibration.lower().orElse(set / 10);
-        Gradient rawAtLower = atProduction(Slot.CALIBRATION_STEP_LOWER).reading(low);
+        Gradient rawAtLower = atProduction(Slot.CALIBRATION_STEP_LOWER, Slot.CALIBRATION_EMF_LOWER).reading(low);
         Gradient gain = told.multiply(set - low).divide(rawAtUpper.subtract(rawAtLower));
         Gradient offset = told.multiply(low).subtract(gain.multiply(rawAtLower));
         return gain.multiply(raw).add(offset);
     }
 
     /** The same circuit new, in the production hall. */
-    private IndependentEquations atProduction(Slot step) {
+    private IndependentEquations atProduction(Slot step, Slot emf) {
         Gradient[] then = inputs.clone();
         then[Slot.AMBIENT.place()] = x(Slot.CALIBRATION_TEMPERATURE);
         then[Slot.SUPPLY.place()] = x(Slot.CALIBRATION_SUPPLY);
         then[Slot.RAIL.place()] = x(Slot.CALIBRATION_RAIL);
         then[Slot.ADC_STEP.place()] = x(step);
+        then[Slot.THERMAL_EMF.place()] = x(emf);
         then[Slot.ZONE_RISE.place()] = constant(0);
         then[Slot.GAIN_AGEING.place()] = constant(0);
         then[Slot.ADC_REFERENCE_AGEING.place()] = constant(0);

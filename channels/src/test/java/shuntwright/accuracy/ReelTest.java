@@ -45,6 +45,23 @@ class ReelTest {
         assertThat(both.variancePart(0)).isCloseTo(9 + 12 * r, within(1e-12));
     }
 
+    /**
+     * Two drifts of one reel times a temperature difference of expectation 0: nothing in first order, u² = u_T²·(u_1² + u_2² +
+     * 2·r·u_1·u_2) in second; a product of two correlated normal inputs of expectation 0 has u² = u_1²·u_2²·(1 + r²).
+     */
+    @ParameterizedTest
+    @ValueSource(doubles = {-1, -0.3, 0, 0.5, 1})
+    void whatIsMultipliedByTemperatureDeviatesAlikeToo(double r) {
+        Expression drifts = new Expression(x -> x[0].add(x[1]).multiply(x[2]));
+        List<Estimate> inputs = List.of(Estimate.of(0, 3), Estimate.of(0, 4), Estimate.of(0, 2));
+        Propagation found = Propagation.secondOrder(drifts, inputs, new double[][]{{1, r, 0}, {r, 1, 0}, {0, 0, 1}});
+        assertThat(found.standard()).isCloseTo(2 * Math.sqrt(9 + 16 + 24 * r), within(1e-12));
+        assertThat(found.variancePart(0) + found.variancePart(1) + found.variancePart(2))
+                .isCloseTo(found.standard() * found.standard(), within(1e-12));
+        Expression product = new Expression(x -> x[0].multiply(x[1]));
+        assertThat(standard(product, inputs.subList(0, 2), r)).isCloseTo(12 * Math.sqrt(1 + r * r), within(1e-12));
+    }
+
     /** 5.2.2, example, as remembered: ten resistors of 1000 Ω calibrated with one standard of 100 mΩ in series: 1 Ω, not √10 times 0.1 Ω. */
     @Test
     void tenResistorsCalibratedWithOneStandard() {

@@ -206,6 +206,51 @@ class BoardSamplerTest {
         assertThat(study.outcomes()).hasSize(3);
     }
 
+    /** After an edit a first picture has few trials of what the edit touched, and all that were drawn of the rest. */
+    @Test
+    void aSketchKeepsWhatWasSampledBetterBefore() {
+        BoardSampler sampler = new BoardSampler(2);
+        Plan before = plan(board(tight("a", 3), bySupply("b", 2), coarse("c", 4)));
+        Plan edited = plan(board(tight("a", 3), bySupply("b", 2.5), coarse("c", 4)));
+        BoardStudy full = study(sampler.sample(before, SAMPLING, BoardSampler.Depth.FULL, Progress.SILENT));
+        BoardStudy sketch = study(
+                sampler.sample(edited, sampling(10_000, 1), BoardSampler.Depth.SKETCH, Progress.SILENT));
+        assertThat(sketch.channel("a")).isEqualTo(full.channel("a"));
+        assertThat(sketch.channel("b").orElseThrow().trials()).isEqualTo(10_000);
+        assertThat(sketch.channel("c")).isEqualTo(full.channel("c"));
+        assertThat(sketch.yield().inside().trials()).as("what is known of all").isEqualTo(10_000);
+        BoardStudy otherSeed = study(
+                sampler.sample(edited, sampling(10_000, 2), BoardSampler.Depth.SKETCH, Progress.SILENT));
+        assertThat(otherSeed.channels()).allSatisfy(each -> assertThat(each.trials()).isEqualTo(10_000));
+    }
+
+    /** Channels that were done when it was cancelled need not be sampled again. */
+    @Test
+    void whatWasDoneBeforeCancellingIsKept() {
+        Plan plan = plan(board(tight("a", 3), bySupply("b", 2), coarse("c", 4)));
+        BoardSampler sampler = new BoardSampler(1);
+        AtomicInteger most = new AtomicInteger();
+        Progress stops = new Progress() {
+            @Override
+            public void reached(String stage, int done, int total) {
+                most.set(done);
+            }
+
+            @Override
+            public boolean cancelled() {
+                // the first channel of 200 thousand trials is done, the second is not
+                return most.get() > 200;
+            }
+        };
+        assertThatExceptionOfType(BoardPlanner.Cancelled.class).isThrownBy(
+                () -> sampler.sample(plan, sampling(200_000, 1), BoardSampler.Depth.FULL, stops));
+        BoardStudy sketch = study(
+                sampler.sample(plan, sampling(10_000, 1), BoardSampler.Depth.SKETCH, Progress.SILENT));
+        assertThat(sketch.channel("a").orElseThrow().trials()).isEqualTo(200_000);
+        assertThat(sketch.channel("a")).isEqualTo(study(sample(plan, sampling(200_000, 1), 1)).channel("a"));
+        assertThat(sketch.channel("c").orElseThrow().trials()).isEqualTo(10_000);
+    }
+
     @Test
     void progressCancels() {
         AtomicInteger reports = new AtomicInteger();

@@ -158,15 +158,16 @@ class DistributionsTest {
     @Test
     void studentTableIsTheClosedFormOfFourDegrees() {
         NormalDistribution law = new NormalDistribution(0, 1);
-        for (double z = 0.005; z < 6.4; z += 0.0077) {
+        for (double z = 0.001; z < 6.4; z += z < 0.05 ? 0.0007 : 0.0077) {
             double p = law.cumulativeProbability(-z);
             double root = Math.sqrt(4 * p * (1 - p));
             double exact = 2 * Math.sqrt(Math.cos(Math.acos(root) / 3) / root - 1);
             assertThat(StudentTable.of(4).quantile(z)).as("z = %s", z).isCloseTo(exact,
-                    within(1e-8 * Math.max(0.1, exact)));
+                    within(1e-8 * exact));
             assertThat(StudentTable.of(4).quantile(-z)).as("z = %s", -z).isCloseTo(-exact,
-                    within(1e-8 * Math.max(0.1, exact)));
+                    within(1e-8 * exact));
         }
+        assertThat(StudentTable.of(4).quantile(0)).isZero();
     }
 
     @ParameterizedTest
@@ -178,6 +179,11 @@ class DistributionsTest {
             double p = law.cumulativeProbability(z);
             assertThat(t.cumulativeProbability(StudentTable.of(degrees).quantile(z))).as("z = %s", z).isCloseTo(p,
                     within(1e-7 * p));
+        }
+        for (double z = 0.001; z < 0.5; z += 0.0033) {
+            double half = law.cumulativeProbability(z) - 0.5;
+            assertThat(t.cumulativeProbability(StudentTable.of(degrees).quantile(z)) - 0.5).as("z = %s", z)
+                    .isCloseTo(half, within(1e-8 * half));
         }
     }
 

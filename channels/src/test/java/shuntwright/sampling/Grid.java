@@ -9,13 +9,15 @@ import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 final class Grid {
 
     private static final int POINTS = 24;
+    /** Remembers the points, which take long to find. */
+    private static final GaussIntegratorFactory FACTORY = new GaussIntegratorFactory();
 
     private Grid() {
     }
 
     /** Mean of a smooth function over an interval. */
     static double mean(double from, double to, DoubleUnaryOperator function) {
-        GaussIntegrator integrator = new GaussIntegratorFactory().legendre(POINTS, from, to);
+        GaussIntegrator integrator = FACTORY.legendre(POINTS, from, to);
         return integrator.integrate(function::applyAsDouble) / (to - from);
     }
 

@@ -81,8 +81,9 @@ class ValidationTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"0.5,10000", "0.95,10000", "0.99,10000", "0.9973,37038", "0.999,100000"})
-    void sequencesHaveTheStatedLength(double coverage, int trials) {
+    @CsvSource({"0.5,10000", "0.95,10000", "0.99,10000", "0.9973,37038", "0.999,100000",
+            "0.999999999068677425384521484375,107374182400"})
+    void sequencesHaveTheStatedLength(double coverage, long trials) {
         assertThat(Stability.sequence(coverage)).isEqualTo(trials);
     }
 
@@ -206,6 +207,20 @@ class ValidationTest {
                 List.of(Formula.ANYTHING), NINETY_FIVE, adaptive(1, 10_000, 1), Watch.NONE);
         assertThat(least.settled()).isFalse();
         assertThat(least.outputs().getFirst().trials()).isGreaterThanOrEqualTo(10_000);
+    }
+
+    /** Sequences of 10⁹ trials, of which two were needed, are not begun: all that is allowed is drawn, and called not settled. */
+    @Test
+    void coverageBeyondTheMostTrialsIsNotSettled() {
+        for (double coverage : new double[]{0.999, 0.9999999, 1 - 1e-12}) {
+            MonteCarlo.Run run = MonteCarlo.run(Formula.sum(4), Runs.many(4, key -> Variable.normal(key, 0, 1)),
+                    List.of(Formula.ANYTHING), coverage, adaptive(2, 150_000, 1), Watch.NONE);
+            assertThat(run.settled()).isFalse();
+            Sampled found = run.outputs().getFirst();
+            assertThat(found.trials()).isEqualTo(150_000);
+            double end = 2 * Normal.quantile((1 + coverage) / 2);
+            assertThat(found.symmetric().range().max()).isCloseTo(end, within(0.02 * end));
+        }
     }
 
     @Test

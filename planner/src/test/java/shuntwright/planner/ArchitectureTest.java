@@ -35,7 +35,7 @@ class ArchitectureTest {
 
     /** Packages of channels; each may use itself and those before it. */
     private static final List<String> CHANNELS = List.of("quantity", "parts", "board", "circuit", "accuracy",
-            "sampling", "timing",
+            "sampling", "timing", "selection",
             "choice", "plan");
 
     private static final Set<String> NOT_CHANNELS = Set.of("io", "planner");

@@ -2,7 +2,6 @@ package shuntwright.io.boardfile;
 
 import java.util.HashSet;
 import java.util.List;
-import java.util.Locale;
 
 import shuntwright.board.Objective;
 import shuntwright.board.Preference;
@@ -17,8 +16,7 @@ import shuntwright.quantity.Dimension;
 
 final class PreferenceForm extends Form<Preference> {
     private final Key<List<Objective>> order = withDefault("order",
-            Kinds.list(
-                    Kinds.choice(each -> each.name().toLowerCase(Locale.ROOT).replace('_', ' '), Objective.values())),
+            Kinds.list(Kinds.choice(Objective::word, Objective.values())),
             Preference.DEFAULT.order(),
             "what is wanted: the first decides, each next one among choices equally good so far; none twice");
     private final Key<Double> partNumberCost = withDefault("partNumberCost",

@@ -1,6 +1,7 @@
 package shuntwright.io.form;
 
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 import shuntwright.io.json.Json;
 import shuntwright.io.json.JsonText;
@@ -44,7 +45,9 @@ public final class Key<V> {
             case Json.Obj _ -> "its defaults";
             case Json.Arr(var elements) when elements.isEmpty() -> "none";
             case Json.Text(String text) -> text.isEmpty() ? "empty" : "`\"" + text + "\"`";
-            case Json.Arr _,Json.Num _,Json.Whole _,Json.Bool _ -> "`" + JsonText.print(written).strip() + "`";
+            case Json.Arr(var elements) -> elements.stream().map(each -> JsonText.print(each).strip())
+                    .collect(Collectors.joining(", ", "`[", "]`"));
+            case Json.Num _,Json.Whole _,Json.Bool _ -> "`" + JsonText.print(written).strip() + "`";
         };
     }
 

@@ -124,6 +124,8 @@ final class BoardTables {
             .object("acceptance", ACCEPTANCE, "when a channel is accepted", Board::acceptance)
             .object("rules", RULES, "design rules", Board::rules)
             .object("uncertainty", UncertaintyTables.UNCERTAINTY, "distributions and trials", Board::uncertainty)
+            .object("preference", ChoiceTables.PREFERENCE, "what was wanted of the board-wide choice",
+                    Board::preference)
             .form();
 
     private BoardTables() {

@@ -37,11 +37,16 @@ public final class PlanFile {
 
     /** The whole file. */
     public static byte[] bytes(Plan plan) {
+        return bytes(PlanTables.PLAN, plan);
+    }
+
+    /** An object as a whole file. */
+    static <T> byte[] bytes(ObjectTable<T> table, T object) {
         ByteArrayOutputStream buffer = new ByteArrayOutputStream();
         DefaultPrettyPrinter layout = new DefaultPrettyPrinter()
                 .withObjectIndenter(new DefaultIndenter("  ", "\n"));
         try (JsonGenerator out = MAPPER.writer().with(layout).createGenerator(buffer)) {
-            PlanTables.PLAN.write(plan, out);
+            table.write(object, out);
             out.writeRaw('\n');
         }
         return buffer.toByteArray();

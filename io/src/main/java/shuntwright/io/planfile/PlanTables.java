@@ -166,6 +166,9 @@ final class PlanTables {
             .text("currency", "ISO 4217 code of all costs", Plan::currency)
             .number("costPerBoard", Unit.CURRENCY, "parts of one board at the prices of the build quantity",
                     Plan::costPerBoard)
+            .number("buildCost", Unit.CURRENCY, "of the whole build: the cheapest order that covers each part's need "
+                    + "(whole packs, minimum order, more than needed where a price break makes that cheaper), and the "
+                    + "cost of each distinct part number", Plan::buildCost)
             .object("board", BoardTables.BOARD, "what was asked", Plan::board)
             .list("channels", CHANNEL, "in the board's order", Plan::channels)
             .list("shared", SHARED, "supply, references, heat", Plan::shared)
@@ -173,6 +176,10 @@ final class PlanTables {
             .list("references", REFERENCE, "with their parts", Plan::references)
             .list("parts", PART, "the consolidated parts list", Plan::parts)
             .list("findings", FINDING, "about the board as a whole", Plan::findings)
+            .maybeObject("choice", ChoiceTables.CHOICE,
+                    "how all channels were chosen together; absent for a board that "
+                            + "was only checked",
+                    Plan::choice)
             .maybeObject("study", StudyTables.STUDY, "propagated distributions; absent until sampled", Plan::study);
 
     private PlanTables() {

@@ -1,5 +1,6 @@
 package shuntwright.io.planfile;
 
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 import shuntwright.sampling.BoardStudy;
@@ -127,7 +128,9 @@ final class StudyTables {
             "The propagated distributions of the board.")
             .object("sampling", UncertaintyTables.SAMPLING, "how it was sampled", BoardStudy::sampling)
             .list("channels", CHANNEL, "every channel with a circuit", BoardStudy::channels)
-            .object("yield", YIELD, "that all of them are inside together", BoardStudy::yield).form();
+            .maybeObject("yield", YIELD, "that all of them are inside together; absent where there is no circuit",
+                    study -> study.channels().isEmpty() ? Optional.empty() : Optional.of(study.yield()))
+            .form();
 
     private StudyTables() {
     }

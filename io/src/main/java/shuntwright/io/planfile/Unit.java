@@ -1,6 +1,8 @@
 package shuntwright.io.planfile;
 
 import shuntwright.accuracy.Slot;
+import shuntwright.board.Objective;
+import shuntwright.plan.WhatIf;
 import shuntwright.quantity.Dimension;
 
 /** The unit of a number, as the end of its key and as a symbol. */
@@ -11,6 +13,7 @@ enum Unit {
     PER_KELVIN("per_K", "1/K"), VOLT_PER_KELVIN("V_per_K", "V/K"), DECIBEL("dB", "dB"),
     VOLT_PER_SECOND("V_per_s", "V/s"), SQUARE_MILLIMETRE("mm2", "mm²"),
     CONDUCTOR_CONSTANT("A_sqrt_s_per_mm2", "A·√s/mm²"), STEP("steps", "LSB"), CURRENCY("currency", "currency"),
+    PARTS("parts", "part numbers"), BOARDS("boards", "boards"),
     /** A number that is neither a quantity nor a fraction of one; its key has no ending. */
     PURE("", "");
 
@@ -52,6 +55,23 @@ enum Unit {
             case DECIBEL -> DECIBEL;
             case SLEW_RATE -> VOLT_PER_SECOND;
             case MONEY -> CURRENCY;
+        };
+    }
+
+    static Unit of(Objective objective) {
+        return switch (objective) {
+            case LEAST_HEAT -> WATT;
+            case MOST_EVEN_HEAT, WIDEST_MARGIN -> FRACTION;
+            case LEAST_COST -> CURRENCY;
+            case FEWEST_PARTS -> PARTS;
+        };
+    }
+
+    static Unit of(WhatIf.Varied varied) {
+        return switch (varied) {
+            case BOARD_HEAT_LIMIT, ZONE_HEAT_LIMIT -> WATT;
+            case SUPPLY_CURRENT -> AMPERE;
+            case BUILD_QUANTITY -> BOARDS;
         };
     }
 

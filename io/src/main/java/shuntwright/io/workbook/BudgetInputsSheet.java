@@ -57,7 +57,7 @@ final class BudgetInputsSheet {
             Column.wrapped("Input", 30, row -> switch (row) {
                 case Sum _ -> ALL;
                 case Line line -> line.input().slot().words();
-            }), words("Owner", 22, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
+            }), words("Owner", 26, BudgetInputsSheet::owner), words("Distribution", 17, SamplingWords::of),
             figure("From", Style.GENERAL, each -> each.limits().min()),
             figure("To", Style.GENERAL, each -> each.limits().max()),
             figure("Standard uncertainty", Style.EXPONENT, Input::standardUncertainty),

@@ -134,7 +134,7 @@ final class Look {
                 indent(made);
                 line(made);
             }
-            case INPUT_COUNT, INPUT_SHARE -> {
+            case INPUT_COUNT, INPUT_SHARE, INPUT_MONEY -> {
                 tint(made, INPUT_TINT);
                 box(made);
                 indent(made);

@@ -10,7 +10,10 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 import shuntwright.plan.PartUse;
 import shuntwright.plan.Plan;
 
-/** The consolidated parts list: one line for each part number, computed from the build quantity by live formulas. */
+/**
+ * The consolidated parts list: one line for each part number, computed from the build quantity by live formulas. Orders are the
+ * cheapest that cover what is needed.
+ */
 final class PartsSheet {
 
     static final String NAME = "Parts list";
@@ -31,11 +34,12 @@ final class PartsSheet {
                     "ROUNDUP(ROUND(" + cells.at(quantity()) + "*BuildQuantity*(1+Attrition),6),0)"));
     private final Column<Line> quantity = Column.number("Pieces per board", 8, Style.COUNT,
             row -> row.part().quantity());
-    private final Column<Line> minimum = Column.number("Minimum order, pieces", 10, Style.COUNT,
-            row -> row.part().purchase().minimumOrder());
-    private final Column<Line> pack = Column.number("Pack, pieces", 8, Style.COUNT,
-            row -> row.part().purchase().packSize());
-    private final Column<Line> order = Column.live("Order, pieces", 9, Style.COUNT, this::orderQuantity);
+    private final Column<Line> minimum = Column.live("Minimum order, pieces", 10, Style.COUNT,
+            (row, _) -> new Column.Content.Formula(PricesSheet.minimum(row.line())));
+    private final Column<Line> pack = Column.live("Pack, pieces", 8, Style.COUNT,
+            (row, _) -> new Column.Content.Formula(PricesSheet.pack(row.line())));
+    private final Column<Line> least = Column.live("Least order, pieces", 9, Style.COUNT, this::leastOrder);
+    private final Column<Line> order = Column.live("Order, pieces", 9, Style.COUNT, this::cheapestOrder);
     private final Column<Line> unitPrice;
     private final Column<Line> extended;
     private final Column<Line> onBoard;
@@ -71,11 +75,11 @@ final class PartsSheet {
                 Column.wrapped("Description", 30, row -> row.part().description()),
                 Column.wrapped("Body", 13, row -> row.part().purchase().body()), quantity,
                 Column.wrapped("Designators", 20, row -> Designators.fold(row.part().designators())), needed, minimum,
-                pack, order, unitPrice, extended, onBoard,
+                pack, least, order, unitPrice, extended, onBoard,
                 Column.wrapped("Supplier", 14, row -> row.part().purchase().supplier()),
                 Column.wrapped("Lifecycle", 13, row -> row.part().purchase().lifecycle()));
         TableSheet<Line> table = new TableSheet<>(book.createSheet(NAME), look, "Parts list: " + plan.board().name(),
-                columns, 7);
+                columns, 9);
         int rows = plan.parts().size();
         String currency = plan.currency();
         name(book, BUILD_QUANTITY, table.above(0, "Build quantity, boards",
@@ -89,7 +93,11 @@ final class PartsSheet {
                 Style.TOTAL_MONEY);
         table.above(4, "Parts on a board, " + currency,
                 new Column.Content.Formula("SUM(" + table.span(onBoard, rows) + ")"), Style.TOTAL_MONEY);
-        table.above(5, "Lines without price", new Column.Content.Formula(
+        XSSFCell number = table.above(5, "Each part number costs, " + currency,
+                new Column.Content.Figure(plan.board().preference().partNumberCost()), Style.INPUT_MONEY);
+        table.above(6, "Whole build, " + currency, new Column.Content.Formula(total.getAddress().formatAsString() + "+"
+                + rows + "*" + number.getAddress().formatAsString()), Style.TOTAL_MONEY);
+        table.above(7, "Lines without price", new Column.Content.Formula(
                 rows + "-COUNT(" + table.span(unitPrice, rows) + ")"), Style.TOTAL_COUNT);
         List<Line> lines = new ArrayList<>();
         for (PartUse each : plan.parts()) {
@@ -98,11 +106,24 @@ final class PartsSheet {
         table.add(lines);
     }
 
-    private Column.Content orderQuantity(Line row, Column.Cells<Line> cells) {
+    /** Whole packs, at least the minimum order. */
+    private Column.Content leastOrder(Line row, Column.Cells<Line> cells) {
         String pieces = cells.at(needed);
         String packs = cells.at(pack);
         return new Column.Content.Formula("IF(" + pieces + "<=0,0,ROUNDUP(MAX(" + pieces + "," + cells.at(minimum)
                 + ")/" + packs + ",0)*" + packs + ")");
+    }
+
+    /** That, or more where a price break makes more cheaper. */
+    private Column.Content cheapestOrder(Line row, Column.Cells<Line> cells) {
+        String pieces = cells.at(least);
+        String quantities = PricesSheet.quantities(plan, row.line());
+        String reached = "MATCH(" + pieces + "," + quantities + ")";
+        return new Column.Content.Formula("IF(" + pieces + "<=0,0,IF(COUNT(" + quantities + ")=0," + pieces + ",IF("
+                + reached + ">=COUNT(" + quantities + ")," + pieces + ",IF(INDEX("
+                + PricesSheet.reachingCosts(plan, row.line()) + "," + reached + ")<" + pieces + "*"
+                + lookup(row, pieces) + ",INDEX(" + PricesSheet.reachingPieces(plan, row.line()) + "," + reached + "),"
+                + pieces + "))))");
     }
 
     private String price(Line row, String ordered) {

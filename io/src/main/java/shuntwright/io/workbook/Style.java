@@ -10,6 +10,7 @@ enum Style {
     ANSWER("General"),
     TITLE("@"), LABEL("@"), GROUP("@"), HEADER("@"), NUMBER_HEADER("@"), ANSWER_HEADER("@"), INPUT_COUNT("#,##0"),
     INPUT_SHARE("0.0%"),
+    INPUT_MONEY("#,##0.00"),
     TOTAL_MONEY("#,##0.00"),
     TOTAL_COUNT("#,##0"), TOTAL_PERCENT("0.000"), GOOD("@"), FAIR("@"), BAD("@");
 

@@ -13,7 +13,7 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 import shuntwright.plan.Plan;
 
 /**
- * Writes plans as .xlsx workbooks: parts list, settings, findings, error budget, what is shared, assumptions and cautions. Formulas
+ * Writes plans as .xlsx workbooks: parts list, settings, findings, board-wide choice, error budget, what is shared, assumptions and cautions. Formulas
  * carry their results, and spreadsheets compute them anew on opening. The same plan gives the same bytes.
  */
 public final class Workbook {
@@ -47,6 +47,7 @@ public final class Workbook {
             PartsSheet.add(book, look, plan);
             SettingsSheet.add(book, look, plan);
             FindingsSheet.add(book, look, plan);
+            ChoiceSheet.add(book, look, plan);
             CuresSheet.add(book, look, plan);
             ErrorBudgetSheet.add(book, look, plan);
             YieldSheet.add(book, look, plan);

@@ -13,7 +13,7 @@ import shuntwright.sampling.BoardYield.SharedCost;
 import shuntwright.sampling.Probability;
 import shuntwright.sampling.ProbabilityWords;
 
-/** The share of boards on which every channel is inside, and what each shared thing costs of it; only of sampled plans. */
+/** The share of boards on which every channel is inside, and what each shared thing costs of it; only of sampled plans with a circuit. */
 final class YieldSheet {
 
     static final String NAME = "Board yield";
@@ -35,7 +35,7 @@ final class YieldSheet {
     }
 
     static void add(XSSFWorkbook book, Look look, Plan plan) {
-        plan.study().ifPresent(study -> write(book, look, study));
+        plan.study().filter(study -> !study.channels().isEmpty()).ifPresent(study -> write(book, look, study));
     }
 
     private static double asDrawn(SharedCost row) {
@@ -73,7 +73,7 @@ final class YieldSheet {
         label(table, 1, "As a fraction, with its interval", ProbabilityWords.of(inside));
         label(table, 2, "Found by", String.format(Locale.ROOT, "%,d boards, %s; shared things drawn once for each",
                 inside.trials(), inside.method().word()));
-        label(table, 3, "Product of the channels' own", ProbabilityWords.estimate(yield.product()));
+        label(table, 3, "Product of the channels' own", ProbabilityWords.product(study));
         label(table, 4, "Channels were sampled by", SamplingWords.of(study.sampling()));
         table.add(yield.shared());
     }

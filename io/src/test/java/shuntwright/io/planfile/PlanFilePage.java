@@ -3,6 +3,7 @@ package shuntwright.io.planfile;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.LinkedHashSet;
+import java.util.List;
 import java.util.Set;
 import java.util.stream.Collectors;
 
@@ -12,15 +13,18 @@ final class PlanFilePage {
     private PlanFilePage() {
     }
 
-    /** All tables that can be reached from the whole file, outer ones first. */
+    /** All tables that can be reached from the plan file and from the files of answers, outer ones first. */
     static Set<ObjectTable<?>> tables() {
         Set<ObjectTable<?>> found = new LinkedHashSet<>();
-        Deque<ObjectTable<?>> open = new ArrayDeque<>();
-        open.add(PlanTables.PLAN);
-        while (!open.isEmpty()) {
-            ObjectTable<?> next = open.remove();
-            if (found.add(next)) {
-                next.attributes().forEach(each -> open.addAll(each.tables()));
+        for (ObjectTable<?> file : List.of(PlanTables.PLAN, AnswerTables.FRONT, AnswerTables.OTHERS,
+                AnswerTables.WHAT_IF)) {
+            Deque<ObjectTable<?>> open = new ArrayDeque<>();
+            open.add(file);
+            while (!open.isEmpty()) {
+                ObjectTable<?> next = open.remove();
+                if (found.add(next)) {
+                    next.attributes().forEach(each -> open.addAll(each.tables()));
+                }
             }
         }
         return found;

@@ -18,7 +18,9 @@ import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.json.JsonMapper;
 
 import shuntwright.accuracy.Slot;
+import shuntwright.io.fixture.ChoiceFixtures;
 import shuntwright.io.fixture.PlanFixtures;
+import shuntwright.plan.Plan;
 
 class PlanFilePageTest {
 
@@ -47,10 +49,14 @@ class PlanFilePageTest {
     }
 
     @Test
-    void aFullPlanEmitsEveryDocumentedAttributeAndNoOther() {
-        JsonNode file = JsonMapper.shared().readTree(PlanFile.bytes(PlanFixtures.full()));
+    void aFullPlanWithItsAnswersEmitsEveryDocumentedAttributeAndNoOther() {
+        Plan plan = PlanFixtures.full();
         Set<String> emitted = new TreeSet<>();
-        collect(file, emitted);
+        for (byte[] file : List.of(PlanFile.bytes(plan), AnswerFile.front(plan, ChoiceFixtures.front(plan)),
+                AnswerFile.others(plan, "Pump", ChoiceFixtures.others(plan)),
+                AnswerFile.whatIf(plan, ChoiceFixtures.whatIf()))) {
+            collect(JsonMapper.shared().readTree(file), emitted);
+        }
         Set<String> fixed = new TreeSet<>();
         List<String> stems = new ArrayList<>();
         for (ObjectTable<?> table : PlanFilePage.tables()) {

@@ -43,6 +43,7 @@ class PartsSheetTest {
             XSSFSheet sheet = book.getSheet(PartsSheet.NAME);
             XSSFCell build = Cells.row(sheet, "Build quantity, boards").getCell(1);
             XSSFFormulaEvaluator evaluator = book.getCreationHelper().createFormulaEvaluator();
+            boolean beyond = false;
             for (int boards : List.of(1, 2, 9, 10, 49, 50, 99, 100, 101, 997, 12_345)) {
                 build.setCellValue(boards);
                 evaluator.clearAllCachedResultValues();
@@ -50,7 +51,9 @@ class PartsSheetTest {
                 for (PartUse part : plan.parts()) {
                     Purchase purchase = part.purchase();
                     int needed = part.quantity() * boards;
-                    int ordered = purchase.orderQuantity(needed);
+                    int ordered = purchase.cheapestOrder(needed).quantity();
+                    beyond |= ordered > purchase.orderQuantity(needed);
+                    assertThat(value(evaluator, sheet, part, "Least order")).isEqualTo(purchase.orderQuantity(needed));
                     assertThat(value(evaluator, sheet, part, "Needed")).isEqualTo(needed);
                     assertThat(value(evaluator, sheet, part, "Order, pieces")).isEqualTo(ordered);
                     assertThat(value(evaluator, sheet, part, "Unit price")).isEqualTo(purchase.unitPriceAt(ordered));
@@ -64,7 +67,47 @@ class PartsSheetTest {
                 assertThat(evaluator.evaluate(perBoard).getNumberValue()).isCloseTo(total / boards,
                         within(1e-9 * total));
             }
+            assertThat(beyond).as("some order is larger than needed because of a price break").isTrue();
         }
+    }
+
+    @Test
+    void theWholeBuildCostsWhatThePlanSays() throws IOException {
+        for (Plan plan : List.of(PlanFixtures.full(),
+                PlanFixtures.withParts(parts(RandomGeneratorFactory.of("L64X128MixRandom").create(20260102))))) {
+            assertThat(plan.board().preference().partNumberCost()).isPositive();
+            try (XSSFWorkbook book = Cells.open(plan)) {
+                XSSFCell whole = Cells.row(book.getSheet(PartsSheet.NAME), "Whole build, EUR").getCell(1);
+                assertThat(whole.getNumericCellValue()).isCloseTo(plan.buildCost(), within(1e-9 * plan.buildCost()));
+            }
+        }
+    }
+
+    /** Worked by hand: 100 for 0.50 and 250 for 0.30 (as a reel of 250), so from 151 pieces the reel of 75.00 is cheaper. */
+    @Test
+    void moreIsOrderedThanNeededWhereABreakMakesThatCheaper() throws IOException {
+        Purchase purchase = new Purchase("0805",
+                List.of(new PriceBreak(1, 0.8), new PriceBreak(100, 0.5), new PriceBreak(250, 0.3)), 1, 1, "", "");
+        Plan plan = PlanFixtures
+                .withParts(List.of(new PartUse("P-1", "part", 1, List.of("R1"), List.of("R1"), purchase)));
+        try (XSSFWorkbook book = Cells.open(plan)) {
+            XSSFSheet sheet = book.getSheet(PartsSheet.NAME);
+            assertOrder(book, sheet, 62, 62, 49.6);
+            assertOrder(book, sheet, 63, 100, 50);
+            assertOrder(book, sheet, 100, 100, 50);
+            assertOrder(book, sheet, 150, 150, 75);
+            assertOrder(book, sheet, 151, 250, 75);
+            assertOrder(book, sheet, 251, 251, 75.3);
+        }
+    }
+
+    private static void assertOrder(XSSFWorkbook book, XSSFSheet sheet, int boards, int pieces, double cost) {
+        Cells.row(sheet, "Build quantity, boards").getCell(1).setCellValue(boards);
+        XSSFFormulaEvaluator evaluator = book.getCreationHelper().createFormulaEvaluator();
+        evaluator.clearAllCachedResultValues();
+        assertThat(evaluator.evaluate(Cells.at(sheet, "P-1", "Order, pieces")).getNumberValue()).isEqualTo(pieces);
+        assertThat(evaluator.evaluate(Cells.at(sheet, "P-1", "Extended")).getNumberValue()).isCloseTo(cost,
+                within(1e-9));
     }
 
     @Test

@@ -28,8 +28,9 @@ class WorkbookTest {
 
     @Test
     void hasItsSheetsInOrder() throws IOException {
-        assertThat(sheets(PLAN)).containsExactly("Parts list", "Settings", "Findings", "Cures", "Refused parts",
-                "Error budget", "Error budget by input", "Board yield", "Shared", "Alert lines", "Taps", "Designators",
+        assertThat(sheets(PLAN)).containsExactly("Parts list", "Settings", "Findings", "Choice", "Conflict",
+                "Cures", "Refused parts", "Error budget", "Error budget by input", "Board yield", "Shared",
+                "Alert lines", "Taps", "Designators",
                 "Prices", "Assumptions and cautions");
         assertThat(sheets(PlanFixtures.empty())).containsExactly("Parts list", "Settings", "Findings",
                 "Error budget", "Error budget by input", "Shared", "Designators", "Prices", "Assumptions and cautions");

@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.function.UnaryOperator;
 import java.util.stream.Stream;
 
+import shuntwright.accuracy.LimitWords;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.io.planfile.Cautions;
@@ -174,6 +175,6 @@ final class PlanText {
     }
 
     private static String range(Range range) {
-        return QuantityWriter.show(range, Dimension.CURRENT, DIGITS);
+        return LimitWords.show(range, DIGITS);
     }
 }

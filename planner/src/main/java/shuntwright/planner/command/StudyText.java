@@ -3,6 +3,7 @@ package shuntwright.planner.command;
 import java.util.ArrayList;
 import java.util.List;
 
+import shuntwright.accuracy.LimitWords;
 import shuntwright.accuracy.Outcome;
 import shuntwright.board.Sampling;
 import shuntwright.planner.work.TrialWords;
@@ -42,8 +43,11 @@ final class StudyText {
         if (!unsettled.isEmpty()) {
             lines.add(List.of("not stable yet", names(unsettled) + "; more with --trials"));
         }
+        if (study.channels().isEmpty()) {
+            return lines.lines();
+        }
         lines.add(List.of("boards with every circuit inside", ProbabilityWords.of(study.yield().inside())));
-        lines.add(List.of("claimed by the product of channels", ProbabilityWords.estimate(study.yield().product())));
+        lines.add(List.of("claimed by the product of channels", ProbabilityWords.product(study)));
         if (!study.yield().shared().isEmpty()) {
             lines.add(List.of("shared inputs that cost most of it", costs(study.yield().shared())));
         }
@@ -105,6 +109,6 @@ final class StudyText {
     }
 
     static String range(Range range) {
-        return QuantityWriter.show(range, Dimension.CURRENT, DIGITS);
+        return LimitWords.show(range, DIGITS);
     }
 }

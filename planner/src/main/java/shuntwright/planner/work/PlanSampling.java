@@ -2,6 +2,7 @@ package shuntwright.planner.work;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Executor;
 import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.concurrent.atomic.AtomicReference;
@@ -21,6 +22,7 @@ import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.BoardSampler;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Progress;
+import shuntwright.sampling.BoardStudy;
 
 /**
  * Samples planned boards in the background: a first picture of few trials, a better one, then as the board asks for. The
@@ -62,6 +64,7 @@ public final class PlanSampling {
         private final AtomicReference<@Nullable Reached> reached = new AtomicReference<>();
         private final long circuits;
         private volatile Step step;
+        private volatile boolean byPerson;
 
         Job(Step first, long circuits) {
             this.step = first;
@@ -102,6 +105,8 @@ public final class PlanSampling {
     private final ReadOnlyStringWrapper stage = new ReadOnlyStringWrapper("");
     private final ReadOnlyDoubleWrapper progress = new ReadOnlyDoubleWrapper();
     private @Nullable Job current;
+    /** Ended by the person, and nothing was asked for since. */
+    private @Nullable Job stopped;
 
     /**
      * @param background one thread at a time, since the sampler keeps what it sampled
@@ -151,18 +156,23 @@ public final class PlanSampling {
     }
 
     private void work(Job job, Plan plan, List<Step> steps, Consumer<Plan> reached, Consumer<String> failed) {
+        Optional<Sampling> shown = plan.study().map(BoardStudy::sampling);
         try {
             for (Step step : steps) {
                 if (job.cancelled()) {
-                    return;
+                    throw new BoardPlanner.Cancelled();
                 }
                 job.step = step;
                 Plan sampled = sampler.sample(plan, step.sampling(), step.depth(), job);
                 boolean last = step.equals(steps.getLast());
                 publisher.execute(() -> publish(job, last, () -> reached.accept(sampled)));
+                shown = Optional.of(step.sampling());
             }
         } catch (BoardPlanner.Cancelled _) {
             // whoever cancelled has said so already
+            if (job.byPerson) {
+                shown.ifPresent(each -> finished(job, plan, each, reached));
+            }
         } catch (RuntimeException problem) {
             // a sampler's mistake must not take the window with it: say it, keep the plan
             System.getLogger(PlanSampling.class.getName()).log(System.Logger.Level.ERROR, "sampling failed", problem);
@@ -171,6 +181,16 @@ public final class PlanSampling {
                     + "). What was sampled before stays on show, limits and combined uncertainty hold; undo the "
                     + "last edit or sample again to go on.")));
         }
+    }
+
+    /** The last picture once more, with the channels that were done before the person ended it. */
+    private void finished(Job job, Plan plan, Sampling shown, Consumer<Plan> reached) {
+        Plan sampled = sampler.sample(plan, shown, BoardSampler.Depth.SKETCH, Progress.SILENT);
+        publisher.execute(() -> {
+            if (stopped == job) {
+                reached.accept(sampled);
+            }
+        });
     }
 
     private void publish(Job job, boolean last, Runnable picture) {
@@ -201,10 +221,13 @@ public final class PlanSampling {
         halt(State.IDLE);
     }
 
-    /** Ends it because the person says so; the best picture so far stays. */
+    /** Ends it because the person says so; the best picture so far stays, and gains the channels that are done. */
     public void stop() {
-        if (current != null) {
+        Job job = current;
+        if (job != null) {
+            job.byPerson = true;
             halt(State.STOPPED);
+            stopped = job;
         }
     }
 
@@ -213,6 +236,7 @@ public final class PlanSampling {
         if (job != null) {
             job.stop.set(true);
         }
+        stopped = null;
         end(as);
     }
 

@@ -77,6 +77,14 @@ class StudyTextTest {
         BoardStudy none = new BoardStudy(study.sampling(), List.of(), study.yield());
 
         assertThat(StudyText.channels(none)).isEmpty();
-        assertThat(StudyText.board(none).getFirst()).contains("no circuit");
+        assertThat(StudyText.board(none)).singleElement().asString().contains("no circuit");
+    }
+
+    @Test
+    void a_product_of_which_nothing_failed_is_a_bound() {
+        BoardStudy sure = new BoardStudy(study.sampling(), study.channels(),
+                new BoardYield(study.yield().inside(), 1, List.of()));
+
+        assertThat(StudyText.board(sure).get(2)).contains("product of channels").contains("above 1 - 0.013");
     }
 }

@@ -105,8 +105,29 @@ class PlanSamplingTest {
         held[0] = sampling;
         ask(sampling, plan(Sampling.DEFAULT));
         run(background);
-        assertThat(heard).as("the best so far").containsExactly("10,000 trials", "100,000 trials");
+        assertThat(heard).as("the best so far, then once more with what was done meanwhile")
+                .containsExactly("10,000 trials", "100,000 trials", "100,000 trials");
         assertThat(sampling.stateProperty().get()).isEqualTo(State.STOPPED);
+    }
+
+    /** Nobody waits for what was done before a stop, once something newer is asked for. */
+    @Test
+    void whatAStopLeavesIsNotShownAfterANewerPlan() {
+        PlanSampling[] held = new PlanSampling[1];
+        PlanSampling sampling = new PlanSampling((plan, how, depth, progress) -> {
+            if (depth == Depth.FULL) {
+                held[0].stop();
+                throw new BoardPlanner.Cancelled();
+            }
+            return HandMadeStudies.sample(plan, how, depth, progress);
+        }, background::add, publisher::add);
+        held[0] = sampling;
+        ask(sampling, plan(Sampling.DEFAULT));
+        run(background);
+        sampling.cancel();
+        run(publisher);
+        assertThat(heard).isEmpty();
+        assertThat(sampling.stateProperty().get()).isEqualTo(State.IDLE);
     }
 
     @Test

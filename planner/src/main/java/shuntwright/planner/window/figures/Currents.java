@@ -1,5 +1,6 @@
 package shuntwright.planner.window.figures;
 
+import shuntwright.accuracy.LimitWords;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 import shuntwright.quantity.Range;
@@ -9,27 +10,23 @@ import shuntwright.sampling.CoverageInterval;
 public final class Currents {
     private static final int DIGITS = 5;
     private static final int MOST = 9;
-    /** Beyond any board: how thermal runaway is handed on. */
-    private static final double RUNAWAY = 1e8;
 
     private Currents() {
     }
 
     /** With five digits. */
     public static String show(double current) {
-        return current > RUNAWAY ? "thermal runaway" : QuantityWriter.show(current, Dimension.CURRENT, DIGITS);
+        return LimitWords.none(current) ? "thermal runaway" : QuantityWriter.show(current, Dimension.CURRENT, DIGITS);
     }
 
     /** An uncertainty or a difference, with three digits. */
     public static String small(double current) {
-        return current > RUNAWAY ? show(current) : QuantityWriter.show(current, Dimension.CURRENT, 3);
+        return LimitWords.none(current) ? show(current) : QuantityWriter.show(current, Dimension.CURRENT, 3);
     }
 
     /** Both ends with five digits, "24.51 .. 31.2 A". */
     public static String show(Range range) {
-        return range.max() > RUNAWAY
-                ? show(range.min()) + " .. thermal runaway"
-                : QuantityWriter.show(range, Dimension.CURRENT, DIGITS);
+        return LimitWords.show(range, DIGITS);
     }
 
     /** A sampled interval down to the first digit of its standard errors, "27.191 .. 28.012 A ± 4 mA" with the larger of both. */

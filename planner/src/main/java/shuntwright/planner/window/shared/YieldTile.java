@@ -35,9 +35,7 @@ final class YieldTile {
     }
 
     private static String product(BoardStudy study) {
-        double atLeast = study.channels().stream().mapToDouble(each -> 1 - each.outside().interval().max())
-                .reduce(1, (a, b) -> a * b);
-        return Chance.about(study.yield().product(), atLeast);
+        return Chance.about(study.yield().product(), study.productAtLeast());
     }
 
     private static List<String> details(BoardStudy study, String product) {
