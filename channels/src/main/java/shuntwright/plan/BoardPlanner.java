@@ -546,4 +546,9 @@ public final class BoardPlanner {
     public static Board pinned(Plan plan) {
         return Pinning.of(plan);
     }
+
+    /** The channel with this circuit pinned. */
+    public static Channel pinned(Channel channel, SenseCircuit circuit) {
+        return Pinning.pinned(channel, circuit);
+    }
 }

@@ -5,6 +5,7 @@ import java.util.concurrent.Executor;
 import shuntwright.board.Board;
 import shuntwright.parts.Catalogue;
 import shuntwright.planner.session.BoardSession;
+import shuntwright.planner.work.Exploring;
 import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
 
@@ -36,5 +37,17 @@ public final class Sessions {
     /** Without a board yet. */
     public static BoardSession closed() {
         return planned(HandMadePlans::plan);
+    }
+
+    /** Asks hand-made choices at once. */
+    public static Exploring exploring() {
+        return new Exploring(HandMadeChoices.EXPLORER, Runnable::run, Runnable::run);
+    }
+
+    /** With board-wide choices in its plans. */
+    public static BoardSession chosen(Board board) {
+        BoardSession session = planned(HandMadeChoices::plan);
+        session.start(board, Catalogue.EMPTY, true);
+        return session;
     }
 }

@@ -208,7 +208,7 @@ public final class BoardSession {
         held = Optional.empty();
         planning.ask(of.board(), catalogue.get(), plan -> {
             message.set("");
-            take(new Planned(plan, of));
+            take(new Planned(plan, of, planning.took()));
         }, message::set);
     }
 
@@ -239,7 +239,7 @@ public final class BoardSession {
 
     private void sample(Planned bare) {
         sampling.ask(bare.plan(), plan -> {
-            held = Optional.of(new Planned(plan, bare.of()));
+            held = Optional.of(new Planned(plan, bare.of(), bare.took()));
             release();
         }, problem -> {
             release();
@@ -292,6 +292,11 @@ public final class BoardSession {
     /** The latest good plan; it stays on show while a newer one is being made. */
     public ReadOnlyObjectProperty<Optional<Planned>> plannedProperty() {
         return planned.getReadOnlyProperty();
+    }
+
+    /** ISO 4217 code of the costs on show. */
+    public String currency() {
+        return planned.get().map(each -> each.plan().currency()).orElse(catalogue.get().currency());
     }
 
     /** True when the plan on show is of the board as it stands. */

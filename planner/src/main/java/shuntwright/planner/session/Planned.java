@@ -1,5 +1,6 @@
 package shuntwright.planner.session;
 
+import java.time.Duration;
 import java.util.Optional;
 
 import shuntwright.plan.ChannelPlan;
@@ -10,8 +11,9 @@ import shuntwright.plan.Plan;
  *
  * @param plan what came of planning
  * @param of   the state it was made of
+ * @param took how long planning it took on the wall clock
  */
-public record Planned(Plan plan, BoardState of) {
+public record Planned(Plan plan, BoardState of, Duration took) {
     /** The plan of a row's channel as it was then. */
     public Optional<ChannelPlan> channel(int row) {
         int at = of.rows().indexOf(row);

@@ -35,15 +35,24 @@ import shuntwright.planner.session.Documents;
 import shuntwright.planner.session.Questions;
 import shuntwright.planner.window.budget.BudgetModel;
 import shuntwright.planner.window.budget.BudgetPanel;
+import shuntwright.planner.window.choice.ChoiceModel;
+import shuntwright.planner.window.choice.ChoicePanel;
 import shuntwright.planner.window.findings.FindingsModel;
 import shuntwright.planner.window.findings.FindingsPanel;
+import shuntwright.planner.window.front.FrontModel;
+import shuntwright.planner.window.front.FrontPanel;
 import shuntwright.planner.window.help.HelpTopic;
+import shuntwright.planner.window.others.OthersModel;
+import shuntwright.planner.window.others.OthersPanel;
 import shuntwright.planner.window.parts.PartsModel;
 import shuntwright.planner.window.parts.PartsPanel;
 import shuntwright.planner.window.shared.SharedStrip;
 import shuntwright.planner.window.shared.SharedStripModel;
 import shuntwright.planner.window.table.ChannelTable;
 import shuntwright.planner.window.table.ChannelTableModel;
+import shuntwright.planner.window.whatif.WhatIfModel;
+import shuntwright.planner.window.whatif.WhatIfPanel;
+import shuntwright.planner.work.Exploring;
 import shuntwright.planner.work.PlanSampling;
 
 /** The content of the window. */
@@ -60,11 +69,12 @@ final class MainWindow {
     private TextSize textSize = TextSize.NORMAL;
 
     /**
+     * @param exploring answers what might be
      * @param start what can be started from
      * @param close asked to close the window
      */
-    MainWindow(BoardSession session, Documents documents, Questions questions, StatusModel status, ThemeChoice themes,
-            Start start, Runnable close) {
+    MainWindow(BoardSession session, Exploring exploring, Documents documents, Questions questions, StatusModel status,
+            ThemeChoice themes, Start start, Runnable close) {
         this.session = session;
         this.documents = documents;
         this.questions = questions;
@@ -76,7 +86,7 @@ final class MainWindow {
         ChannelTable table = new ChannelTable(rows);
         rows.filterProperty().bindBidirectional(find.textProperty());
         Commands commands = new Commands(session, documents, themes, start.demos(), start.newParts(), menus());
-        SplitPane split = new SplitPane(table.node(), tabs());
+        SplitPane split = new SplitPane(table.node(), tabs(exploring));
         split.setOrientation(Orientation.VERTICAL);
         split.setDividerPositions(0.56);
         BorderPane work = new BorderPane(split);
@@ -121,9 +131,14 @@ final class MainWindow {
         strip.closeEditor();
     }
 
-    private TabPane tabs() {
+    /** First what is about the selected channel, then what is about the board. */
+    private TabPane tabs(Exploring exploring) {
         TabPane tabs = new TabPane(new Tab("Findings", new FindingsPanel(new FindingsModel(session)).node()),
                 new Tab("Error budget", new BudgetPanel(new BudgetModel(session), documents).node()),
+                new Tab("Other choices", new OthersPanel(new OthersModel(session, exploring)).node()),
+                new Tab("Choice", new ChoicePanel(new ChoiceModel(session)).node()),
+                new Tab("Front", new FrontPanel(new FrontModel(session, exploring), documents).node()),
+                new Tab("What if", new WhatIfPanel(new WhatIfModel(session, exploring), documents).node()),
                 new Tab("Parts list", new PartsPanel(new PartsModel(session)).node()));
         tabs.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
         tabs.setId("tabs");
@@ -188,6 +203,11 @@ final class MainWindow {
                 .then(session.planning().progressProperty()).otherwise(session.sampling().progressProperty()));
         Button cancel = button("Cancel", "Stop planning; the last plan stays on show", session.planning()::cancel);
         shownWhile(session.planning().runningProperty(), cancel);
+        Button keep = button("Keep the best so far", "Look no further; the best choice so far becomes the plan",
+                session.planning()::stop);
+        keep.setId("keep-best");
+        shownWhile(Bindings.createBooleanBinding(() -> session.planning().bestProperty().get().isPresent(),
+                session.planning().bestProperty()), keep);
         var sampling = session.sampling().stateProperty();
         Button stop = button("Stop sampling", "Draw no further trials; the best picture so far stays",
                 session::stopSampling);
@@ -205,7 +225,7 @@ final class MainWindow {
         wrong.setMaxWidth(720);
         wrong.visibleProperty().bind(status.wrongBinding().isNotEmpty());
         wrong.managedProperty().bind(wrong.visibleProperty());
-        bar.getRightItems().addAll(wrong, cancel, stop, again);
+        bar.getRightItems().addAll(wrong, keep, cancel, stop, again);
         return bar;
     }
 

@@ -18,6 +18,8 @@ import shuntwright.planner.session.Documents;
 import shuntwright.planner.session.FileBoardStore;
 import shuntwright.planner.window.dialog.Choosers;
 import shuntwright.planner.window.dialog.Dialogs;
+import shuntwright.planner.work.Explorer;
+import shuntwright.planner.work.Exploring;
 import shuntwright.planner.work.FileWork;
 import shuntwright.planner.work.PlanSampling;
 import shuntwright.planner.work.Planning;
@@ -30,6 +32,7 @@ final class OpenWindow {
 
     private final Threads threads = new Threads();
     private final BoardSession session;
+    private final Exploring exploring;
     private final ThemeChoice themes;
     private final Documents documents;
     private final MainWindow content;
@@ -41,8 +44,9 @@ final class OpenWindow {
      *
      * @param planner used by one thread at a time
      * @param sampler used by one thread at a time
+     * @param explorer used by one thread at a time, while the planner may be at work
      */
-    record Engines(Planning.Planner planner, PlanSampling.Sampler sampler) {}
+    record Engines(Planning.Planner planner, PlanSampling.Sampler sampler, Explorer explorer) {}
 
     /** @param nearby folders near which demo boards may be */
     OpenWindow(Stage stage, Engines engines, Choosers choosers, ObservableValue<ColorScheme> system,
@@ -51,6 +55,7 @@ final class OpenWindow {
         session = new BoardSession(new Planning(engines.planner(), threads.planning(), Platform::runLater),
                 new PlanSampling(engines.sampler(), threads.sampling(), Platform::runLater),
                 CompletableFuture.delayedExecutor(PATIENCE, TimeUnit.MILLISECONDS, Platform::runLater));
+        exploring = new Exploring(engines.explorer(), threads.exploring(), Platform::runLater);
         Theme.loadFonts();
         themes = new ThemeChoice(system);
         StatusModel status = new StatusModel(session);
@@ -60,7 +65,7 @@ final class OpenWindow {
                 new FileWork(threads.files(), Platform::runLater));
         List<Path> demos = Documents.demoBoards(nearby);
         MainWindow.Start start = new MainWindow.Start(demos, Documents.partsBeside(demos));
-        content = new MainWindow(session, documents, dialogs, status, themes, start, this::close);
+        content = new MainWindow(session, exploring, documents, dialogs, status, themes, start, this::close);
         Rectangle2D screen = Screen.getPrimary().getVisualBounds();
         Scene scene = content.scene(Math.min(1500, screen.getWidth() * 0.96),
                 Math.min(920, screen.getHeight() * 0.9));
@@ -114,6 +119,7 @@ final class OpenWindow {
     void release() {
         session.planning().cancel();
         session.sampling().cancel();
+        exploring.cancel();
         threads.close();
     }
 }

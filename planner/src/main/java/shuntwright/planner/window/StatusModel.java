@@ -16,6 +16,7 @@ import shuntwright.plan.Verdict;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Planned;
 import shuntwright.planner.session.WrongEntry;
+import shuntwright.planner.window.figures.Aims;
 import shuntwright.planner.work.TrialWords;
 
 /** What the status bar says. */
@@ -28,7 +29,7 @@ final class StatusModel {
     StatusModel(BoardSession session) {
         this.session = session;
         text = Bindings.createStringBinding(this::words, session.openProperty(), session.messageProperty(), done,
-                session.planning().stageProperty(), session.plannedProperty(), session.stateProperty(),
+                session.planning().stageProperty(), session.planning().bestProperty(), session.plannedProperty(), session.stateProperty(),
                 session.sampling().stageProperty(), session.sampling().stateProperty());
         wrong = Bindings.createStringBinding(() -> {
             var entries = session.state().wrong();
@@ -47,12 +48,19 @@ final class StatusModel {
             return session.messageProperty().get();
         }
         if (!session.planning().stageProperty().get().isEmpty()) {
-            return capital(session.planning().stageProperty().get()) + " …";
+            return capital(session.planning().stageProperty().get()) + " …" + best();
         }
         String last = done.get().isEmpty()
                 ? session.plannedProperty().get().map(this::verdicts).orElse("")
                 : capital(done.get());
         return last.isEmpty() ? capital(sampling()) : last + (sampling().isEmpty() ? "" : " – " + sampling());
+    }
+
+    /** The best choice so far, by what decides first. */
+    private String best() {
+        String currency = session.currency();
+        return session.planning().bestProperty().get().flatMap(each -> each.reached().stream().findFirst())
+                .map(each -> " best so far " + Aims.show(each.objective(), each.value(), currency)).orElse("");
     }
 
     private String sampling() {

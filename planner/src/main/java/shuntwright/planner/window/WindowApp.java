@@ -17,6 +17,7 @@ import org.jspecify.annotations.Nullable;
 import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.BoardSampler;
 import shuntwright.planner.window.dialog.SystemChoosers;
+import shuntwright.planner.work.Explorer;
 
 /** The desktop window as a program. */
 public final class WindowApp extends Application {
@@ -68,7 +69,8 @@ public final class WindowApp extends Application {
     public void start(Stage stage) {
         STARTED.set(true);
         BoardSampler sampler = new BoardSampler(Runtime.getRuntime().availableProcessors());
-        OpenWindow opened = new OpenWindow(stage, new OpenWindow.Engines(new BoardPlanner()::plan, sampler::sample),
+        OpenWindow opened = new OpenWindow(stage,
+                new OpenWindow.Engines(new BoardPlanner()::plan, sampler::sample, Explorer.of(new BoardPlanner())),
                 new SystemChoosers(() -> stage), Platform.getPreferences().colorSchemeProperty(), nearby());
         window = opened;
         Thread.setDefaultUncaughtExceptionHandler((thread, problem) -> {

@@ -1,21 +1,18 @@
 package shuntwright.planner.work;
 
+import java.time.Duration;
+import java.util.Optional;
 import java.util.concurrent.Executor;
-import java.util.concurrent.atomic.AtomicBoolean;
-import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Consumer;
 
 import javafx.beans.property.ReadOnlyBooleanProperty;
-import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyDoubleProperty;
-import javafx.beans.property.ReadOnlyDoubleWrapper;
+import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyStringProperty;
-import javafx.beans.property.ReadOnlyStringWrapper;
-
-import org.jspecify.annotations.Nullable;
 
 import shuntwright.board.Board;
 import shuntwright.parts.Catalogue;
+import shuntwright.plan.BoardChoice;
 import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Progress;
@@ -31,40 +28,8 @@ public final class Planning {
         Plan plan(Board board, Catalogue catalogue, Progress progress);
     }
 
-    private record Reached(String stage, double share) {}
-
-    private final class Job implements Progress {
-        private final AtomicBoolean stop = new AtomicBoolean();
-        private final AtomicReference<@Nullable Reached> reached = new AtomicReference<>();
-
-        @Override
-        public void reached(String what, int done, int total) {
-            double share = total > 0 ? (double) done / total : -1;
-            // one message under way at most, however often the planner reports
-            if (reached.getAndSet(new Reached(what, share)) == null) {
-                publisher.execute(() -> {
-                    Reached now = reached.getAndSet(null);
-                    if (now != null && current == this) {
-                        stage.set(now.stage());
-                        progress.set(now.share());
-                    }
-                });
-            }
-        }
-
-        @Override
-        public boolean cancelled() {
-            return stop.get();
-        }
-    }
-
     private final Planner planner;
-    private final Executor background;
-    private final Executor publisher;
-    private final ReadOnlyBooleanWrapper running = new ReadOnlyBooleanWrapper();
-    private final ReadOnlyStringWrapper stage = new ReadOnlyStringWrapper("");
-    private final ReadOnlyDoubleWrapper progress = new ReadOnlyDoubleWrapper();
-    private @Nullable Job current;
+    private final Inquiry<Plan> inquiry;
 
     /**
      * @param background one thread at a time, since the planner keeps what it worked out
@@ -72,8 +37,7 @@ public final class Planning {
      */
     public Planning(Planner planner, Executor background, Executor publisher) {
         this.planner = planner;
-        this.background = background;
-        this.publisher = publisher;
+        this.inquiry = new Inquiry<>(background, publisher);
     }
 
     /**
@@ -83,66 +47,43 @@ public final class Planning {
      * @param failed hears why there is none, in words
      */
     public void ask(Board board, Catalogue catalogue, Consumer<Plan> done, Consumer<String> failed) {
-        cancel();
-        Job job = new Job();
-        current = job;
-        running.set(true);
-        progress.set(-1);
-        stage.set("planning " + board.name());
-        background.execute(() -> work(job, board, catalogue, done, failed));
+        // a planner's mistake must not take the window with it: say it, keep the last good plan
+        inquiry.ask("planning " + board.name(), progress -> planner.plan(board, catalogue, progress), done,
+                problem -> failed.accept("Planning stopped on an error within the program (" + problem
+                        + "). The last plan stays on show; undo the last edit to go on."));
     }
 
-    private void work(Job job, Board board, Catalogue catalogue, Consumer<Plan> done, Consumer<String> failed) {
-        if (job.cancelled()) {
-            return;
-        }
-        try {
-            Plan plan = planner.plan(board, catalogue, job);
-            publisher.execute(() -> finish(job, () -> done.accept(plan)));
-        } catch (BoardPlanner.Cancelled _) {
-            publisher.execute(() -> finish(job, () -> {
-            }));
-        } catch (RuntimeException problem) {
-            // a planner's mistake must not take the window with it: say it, keep the last good plan
-            System.getLogger(Planning.class.getName()).log(System.Logger.Level.ERROR, "planning failed", problem);
-            publisher.execute(() -> finish(job, () -> failed.accept("Planning stopped on an error within the program ("
-                    + problem + "). The last plan stays on show; undo the last edit to go on.")));
-        }
-    }
-
-    private void finish(Job job, Runnable then) {
-        if (current == job) {
-            current = null;
-            running.set(false);
-            stage.set("");
-            progress.set(0);
-            then.run();
-        }
+    /** Asks the planning under way to come to an end with the best plan it has. */
+    public void stop() {
+        inquiry.stop();
     }
 
     /** Stops the work under way, if there is any; its answer is not given. */
     public void cancel() {
-        Job job = current;
-        if (job != null) {
-            job.stop.set(true);
-            current = null;
-            running.set(false);
-            stage.set("");
-            progress.set(0);
-        }
+        inquiry.cancel();
     }
 
     public ReadOnlyBooleanProperty runningProperty() {
-        return running.getReadOnlyProperty();
+        return inquiry.runningProperty();
     }
 
     /** What is being computed, in words; empty when nothing is. */
     public ReadOnlyStringProperty stageProperty() {
-        return stage.getReadOnlyProperty();
+        return inquiry.stageProperty();
     }
 
     /** Share done, 0 to 1, or below 0 when it is not known. */
     public ReadOnlyDoubleProperty progressProperty() {
-        return progress.getReadOnlyProperty();
+        return inquiry.progressProperty();
+    }
+
+    /** The best choice found so far, while it is looked for; empty otherwise. */
+    public ReadOnlyObjectProperty<Optional<BoardChoice>> bestProperty() {
+        return inquiry.bestProperty();
+    }
+
+    /** How long the last plan took on the wall clock. */
+    public Duration took() {
+        return inquiry.took();
     }
 }

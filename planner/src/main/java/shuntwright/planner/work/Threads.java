@@ -7,6 +7,8 @@ import java.util.concurrent.Executors;
 public final class Threads implements AutoCloseable {
     private final ExecutorService planning = Executors
             .newSingleThreadExecutor(Thread.ofPlatform().name("planning").daemon().factory());
+    private final ExecutorService exploring = Executors
+            .newSingleThreadExecutor(Thread.ofPlatform().name("exploring").daemon().factory());
     private final ExecutorService sampling = Executors
             .newSingleThreadExecutor(Thread.ofPlatform().name("sampling").daemon().factory());
     private final ExecutorService files = Executors
@@ -14,6 +16,11 @@ public final class Threads implements AutoCloseable {
 
     public ExecutorService planning() {
         return planning;
+    }
+
+    /** Answers what might be, while the board itself is planned. */
+    public ExecutorService exploring() {
+        return exploring;
     }
 
     public ExecutorService sampling() {
@@ -28,6 +35,7 @@ public final class Threads implements AutoCloseable {
     @Override
     public void close() {
         planning.shutdownNow();
+        exploring.shutdownNow();
         sampling.shutdownNow();
         files.shutdown();
     }

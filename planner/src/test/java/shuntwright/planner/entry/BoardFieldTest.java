@@ -14,6 +14,8 @@ import org.junit.jupiter.params.provider.EnumSource;
 import shuntwright.board.Board;
 import shuntwright.board.Calibration;
 import shuntwright.board.Channel;
+import shuntwright.board.Objective;
+import shuntwright.board.Preference;
 import shuntwright.board.Sampling;
 import shuntwright.board.StatedDistribution;
 import shuntwright.board.Uncertainty;
@@ -37,7 +39,10 @@ class BoardFieldTest {
             "ALERT_LINES|alert, pumps|alert, pumps", "PARALLEL_SHUNTS|4|4", "POWER_MARGIN|50 %|50 %",
             "TRIALS|250000|250,000", "TRIALS|2.5e5|250,000", "TRIALS|2 000 000|2,000,000",
             "TRIALS|Adaptive|'adaptive, 2 digits, most 10,000,000'",
-            "TRIALS|adaptive 1 digit, at most 50,000|'adaptive, 1 digit, most 50,000'", "SEED|-7|-7"})
+            "TRIALS|adaptive 1 digit, at most 50,000|'adaptive, 1 digit, most 50,000'", "SEED|-7|-7",
+            "WANTED|Least  COST; least heat|'least cost, least heat'", "WANTED|widest margin,|widest margin",
+            "PART_NUMBER_COST|12.50|12.5", "PART_NUMBER_COST|0|0", "ROUNDS|0|0", "ROUNDS|1000000|1000000",
+            "TIME_LIMIT|1500m|1.5 s", "TIME_LIMIT|''|''", "CHOICE_SEED|-9|-9"})
     void takesWhatEngineersWrite(BoardField field, String typed, String shown) {
         assertThat(field.read(typed, board).ifValue().map(field::text)).contains(shown);
     }
@@ -52,7 +57,10 @@ class BoardFieldTest {
             "TRIALS|lots|such as 1,000,000", "TRIALS|1e9|from 10,000", "TRIALS|1.23456e4|whole number",
             "COVERAGE|99.9|Maybe 99.9 % was meant",
             "TRIALS|adaptive 3 digits|such as 1,000,000", "TRIALS|99999999999|from 10,000", "SEED|1.5|whole number",
-            "AMBIENT|-300..20|-273"})
+            "AMBIENT|-300..20|-273", "WANTED|least beauty|none of least heat", "WANTED|''|At least one",
+            "WANTED|'least heat, least heat'|stands twice", "PART_NUMBER_COST|-1|from 0", "PART_NUMBER_COST|much|12.50",
+            "PART_NUMBER_COST|NaN|from 0", "ROUNDS|-1|0 to 1000000", "ROUNDS|1000001|0 to 1000000",
+            "TIME_LIMIT|0|above 0 s", "CHOICE_SEED|1.5|whole number"})
     void refusesWithAReason(BoardField field, String typed, String reason) {
         assertThat(field.read(typed, board).ifProblem().orElse("")).contains(reason);
     }
@@ -94,7 +102,9 @@ class BoardFieldTest {
     void typingLosesNothingThatIsNotShown(BoardField field) {
         Board full = board.withUncertainty(new Uncertainty(
                 List.of(new StatedDistribution("shunt tolerance", Optional.empty(), new Distribution.Normal(3))),
-                new Sampling(new Sampling.Trials.Adaptive(1, 50_000), 9))).withChannels(List.of(
+                new Sampling(new Sampling.Trials.Adaptive(1, 50_000), 9))).withPreference(new Preference(
+                        List.of(Objective.WIDEST_MARGIN, Objective.FEWEST_PARTS), 0.1 + 0.2, 7, OptionalDouble.of(1.5),
+                        -3)).withChannels(List.of(
                         board.channels().getFirst().withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
                                 OptionalDouble.of(0.02), Optional.of(new Calibration(Calibration.Points.ONE,
                                         OptionalDouble.empty(), OptionalDouble.empty(), 1e-3,

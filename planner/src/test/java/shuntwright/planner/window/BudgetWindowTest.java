@@ -48,6 +48,7 @@ import shuntwright.plan.BoardSampler.Depth;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Progress;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.planner.HandMadeChoices;
 import shuntwright.planner.HandMadePlans;
 import shuntwright.planner.HandMadeStudies;
 import shuntwright.planner.session.Questions.Kind;
@@ -77,7 +78,7 @@ class BudgetWindowTest {
                 return Optional.of(folder.resolve("saved" + kind.ending()));
             }
         };
-        window = new OpenWindow(shown, new OpenWindow.Engines(HandMadePlans::plan, this::sample), choosers,
+        window = new OpenWindow(shown, new OpenWindow.Engines(HandMadePlans::plan, this::sample, HandMadeChoices.EXPLORER), choosers,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT), List.of());
         window.show();
         shown.setWidth(1500);

@@ -23,6 +23,7 @@ import org.testfx.framework.junit5.Stop;
 import org.testfx.util.WaitForAsyncUtils;
 
 import shuntwright.board.Channel;
+import shuntwright.planner.HandMadeChoices;
 import shuntwright.planner.HandMadePlans;
 import shuntwright.planner.HandMadeStudies;
 import shuntwright.planner.session.Questions.Kind;
@@ -50,7 +51,7 @@ class NewBoardWindowTest {
             }
         };
         window = new OpenWindow(shown,
-                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample), none,
+                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample, HandMadeChoices.EXPLORER), none,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of());
         window.show();

@@ -29,6 +29,7 @@ import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.BoardSampler;
 import shuntwright.planner.session.Questions.Kind;
 import shuntwright.planner.window.dialog.Choosers;
+import shuntwright.planner.work.Explorer;
 import shuntwright.planner.work.PlanSampling;
 
 /**
@@ -57,7 +58,7 @@ class WindowPictureTest {
             }
         };
         window = new OpenWindow(shown,
-                new OpenWindow.Engines(new BoardPlanner()::plan, new BoardSampler(2)::sample), none,
+                new OpenWindow.Engines(new BoardPlanner()::plan, new BoardSampler(2)::sample, Explorer.of(new BoardPlanner())), none,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of(root));
         window.show();

@@ -32,6 +32,7 @@ import shuntwright.board.Board;
 import shuntwright.io.boardfile.BoardFiles;
 import shuntwright.plan.Verdict;
 import shuntwright.planner.HandMadeBoards;
+import shuntwright.planner.HandMadeChoices;
 import shuntwright.planner.HandMadePlans;
 import shuntwright.planner.HandMadeStudies;
 import shuntwright.planner.session.Questions.Kind;
@@ -64,7 +65,7 @@ class WindowTest {
             }
         };
         window = new OpenWindow(shown,
-                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample), choosers,
+                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample, HandMadeChoices.EXPLORER), choosers,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of());
         window.show();

@@ -21,6 +21,7 @@ import org.jspecify.annotations.Nullable;
 
 import shuntwright.accuracy.Outcome;
 import shuntwright.planner.session.Documents;
+import shuntwright.planner.window.chart.Pictures;
 
 /** The error budget: what the outcome is, which input does what, and the trials in a picture. */
 public final class BudgetPanel {
@@ -74,7 +75,7 @@ public final class BudgetPanel {
         save.setMnemonicParsing(false);
         save.disableProperty().bind(model.drawingProperty().map(java.util.Optional::isEmpty));
         save.setTooltip(new Tooltip("Save the picture as a PNG file"));
-        save.setOnAction(_ -> documents.savePicture(model.summaryProperty().get(), histogram::picture));
+        save.setOnAction(_ -> documents.savePicture(model.summaryProperty().get(), () -> Pictures.of(histogram)));
         HBox head = new HBox(of, outcomes, calibration(), summary, save);
         head.getStyleClass().add("panel-head");
         return head;

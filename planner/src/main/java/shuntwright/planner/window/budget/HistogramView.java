@@ -1,23 +1,19 @@
 package shuntwright.planner.window.budget;
 
-import java.awt.image.BufferedImage;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-import javafx.embed.swing.SwingFXUtils;
 import javafx.geometry.Pos;
 import javafx.geometry.VPos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Node;
-import javafx.scene.SnapshotParameters;
 import javafx.scene.control.Label;
 import javafx.scene.layout.Region;
 import javafx.scene.shape.ClosePath;
 import javafx.scene.shape.LineTo;
 import javafx.scene.shape.MoveTo;
 import javafx.scene.shape.Path;
-import javafx.scene.transform.Transform;
 
 import org.jspecify.annotations.Nullable;
 
@@ -26,7 +22,6 @@ final class HistogramView extends Region {
     private static final double GAP = 8;
     private static final double TICK = 4;
     private static final double ROOM_OF_A_TICK = 62;
-    private static final double PICTURE_SCALE = 2;
 
     private final Region window = part("histogram-window");
     private final Path inside = new Path();
@@ -194,12 +189,5 @@ final class HistogramView extends Region {
             double width = text.prefWidth(-1);
             text.resizeRelocate(Math.rint(x - width / 2), bottom + TICK, width, line);
         }
-    }
-
-    /** The picture, twice as fine as on the screen. */
-    BufferedImage picture() {
-        SnapshotParameters parameters = new SnapshotParameters();
-        parameters.setTransform(Transform.scale(PICTURE_SCALE, PICTURE_SCALE));
-        return SwingFXUtils.fromFXImage(snapshot(parameters, null), null);
     }
 }

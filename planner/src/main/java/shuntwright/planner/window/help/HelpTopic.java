@@ -55,6 +55,27 @@ public enum HelpTopic {
                     + "board and seed give the same figures on every machine.",
             "Distributions that nobody stated are uniform between the limits. The figures are as good as the limits and "
                     + "distributions stated.")),
+    CHOICE("Board-wide choice", List.of(
+            "The parts of all channels are chosen together, so that the limits they share are kept and what is wanted of the "
+                    + "board is reached. The tab Choice puts what is wanted in order: the first decides, each next one among "
+                    + "choices equally good so far.",
+            "Bound – no choice of any kind is better than this. Distance – nothing is better by more than this share of the "
+                    + "value. Proven best – the distance is nothing. No bound known – nothing is known of what could be "
+                    + "better.",
+            "While a better choice is looked for, the best so far shows; it can be kept at once. A click on the tile Choice "
+                    + "opens rounds, time limit and seed of the search. The same board, rounds and seed give the same plan, "
+                    + "unless a time limit or a person ends the search.",
+            "Conflict – demands that cannot be met together, with what each would have to be for the others to be met. A "
+                    + "limit is relaxed by its button; of a channel the findings tell more. Until then the choice that breaks "
+                    + "least is shown and marked.",
+            "Other choices – the next-best circuits of the selected channel; cost, heat and parts are those of the whole "
+                    + "board, chosen again around each. Pin this takes one.",
+            "Front – plans of which none is better in one of two objectives without being worse in the other. The line is "
+                    + "the edge of what was found; ◆ is the board as it is planned. Take this plan pins what a point chose.",
+            "What if – cost, heat and parts as a limit or the number of boards changes. Where nothing meets the limits, "
+                    + "there is a gap.",
+            "What a front, other choices and what-if show is computed in the background, can be cancelled, and is marked "
+                    + "once the board has been changed.")),
     KEYBOARD("Keyboard",
             List.of("Arrow keys: move between cells",
                     "Tab, Shift+Tab: move to the next, the last cell that can be typed into (Ctrl+Tab leaves the "

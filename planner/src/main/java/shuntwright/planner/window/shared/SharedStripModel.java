@@ -58,6 +58,7 @@ public final class SharedStripModel {
             case LIMITS -> "inside by limits";
             case COVERAGE -> "likely too, " + QuantityWriter.show(board.acceptance().coverage(), Dimension.RATIO);
         }, OptionalDouble.empty(), true, List.of(BoardField.BASIS, BoardField.COVERAGE)));
+        all.add(ChoiceTile.of(board, plan));
         plan.flatMap(each -> inside(each, session.sampling().stateProperty().get())).ifPresent(all::add);
         all.add(new SharedTile("Board and build", board.buildQuantity() == 1
                 ? "1 board"
