@@ -1,5 +1,6 @@
 package shuntwright.planner.window.front;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
@@ -105,8 +106,14 @@ public final class FrontModel {
         Objective along = first.get();
         Objective other = second.get();
         asked.ask("looking for the front of " + Aims.title(along) + " and " + Aims.title(other),
-                (board, catalogue) -> progress -> exploring.explorer().front(board, catalogue, along, other, POINTS,
-                        progress));
+                (board, catalogue) -> progress -> ascending(exploring.explorer().front(board, catalogue, along, other,
+                        POINTS, progress)));
+    }
+
+    /** From left to right, so that keys go that way too. */
+    private static Front ascending(Front front) {
+        return new Front(front.first(), front.second(), front.points().stream()
+                .sorted(Comparator.comparingDouble(Front.Point::first)).toList());
     }
 
     /** Chooses a point. */
