@@ -29,6 +29,8 @@ public record ChannelMenu(List<SenseCircuit> circuits, int candidates) {
         public static final Breadth NARROW = new Breadth(2, 1.12, 10);
         /** Something else decides. */
         public static final Breadth WIDE = new Breadth(12, 1.35, 6);
+        /** Limits of calibrated readings take a hundred times as long to judge. */
+        public static final Breadth CALIBRATED = new Breadth(1, 1.12, 2);
         /** For each of several voltages of a tap. */
         public static final Breadth TAP = new Breadth(5, 1.5, 4);
     }

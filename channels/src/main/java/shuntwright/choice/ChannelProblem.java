@@ -49,4 +49,10 @@ public record ChannelProblem(Demand demand, Surroundings around, Catalogue catal
         return new ChannelProblem(same, nameless, catalogue, sources, tap, resistors, pullUp, acceptance,
                 buildQuantity);
     }
+
+    /** The same with a zone that is not warmed. */
+    ChannelProblem atAmbient() {
+        return new ChannelProblem(demand, around.withZone(Optional.empty()), catalogue, sources, tap, resistors, pullUp,
+                acceptance, buildQuantity);
+    }
 }

@@ -28,11 +28,20 @@ final class Judge {
     private final List<ChannelAccuracy.Asked> soonest;
     private final Map<Read, Range> readings = new HashMap<>();
 
+    /** Rise of the zone at which a reading was found outside, K; warmer it is outside as well, as its inputs only spread further. */
+    private final Map<Read, Double> outside;
+
     /** What the limits of a reading depend on; comparator and threshold have no part in them. */
-    private record Read(Outcome outcome, Shunt shunt, int count, SenseAmplifier amplifier) {}
+    record Read(Outcome outcome, Shunt shunt, int count, SenseAmplifier amplifier) {}
 
     Judge(ChannelProblem problem) {
+        this(problem, new HashMap<>());
+    }
+
+    /** @param outside readings found outside, shared by the same problem at several rises of its zone */
+    Judge(ChannelProblem problem, Map<Read, Double> outside) {
         this.problem = problem;
+        this.outside = outside;
         this.asked = ChannelAccuracy.asked(problem.demand(), problem.around().adc().isPresent());
         // The search has sorted out readings that cannot hold, but for calibrated ones; their limits are remembered.
         boolean calibrated = problem.demand().channel().reading().calibration().isPresent();
@@ -52,7 +61,7 @@ final class Judge {
         boolean coverage = problem.acceptance().basis() == Acceptance.Basis.COVERAGE;
         boolean open = false;
         for (ChannelAccuracy.Asked each : soonest) {
-            if (!each.allowed().contains(limits(each, circuit, accuracy))) {
+            if (isOutside(each, circuit, accuracy)) {
                 open = true;
                 if (!coverage || hopeless(each, accuracy.combined(each, problem.acceptance().coverage()))) {
                     return false;
@@ -61,6 +70,24 @@ final class Judge {
         }
         return CandidateSearch.holds(LimitRules.ofThreshold(accuracy.changeover(), circuit.amplifier(),
                 circuit.comparator(), problem.around())) && (!open || likely(circuit, accuracy));
+    }
+
+    private boolean isOutside(ChannelAccuracy.Asked each, SenseCircuit circuit, ChannelAccuracy accuracy) {
+        return switch (each.outcome()) {
+            case TRIP, RELEASE -> !each.allowed().contains(accuracy.limits(each));
+            case READING_AT_LEAST, READING_AT_LOAD -> {
+                Read read = new Read(each.outcome(), circuit.shunt(), circuit.shuntCount(), circuit.amplifier());
+                double rise = problem.around().rise();
+                if (outside.getOrDefault(read, Double.POSITIVE_INFINITY) <= rise) {
+                    yield true;
+                }
+                boolean found = !each.allowed().contains(limits(each, circuit, accuracy));
+                if (found) {
+                    outside.put(read, rise);
+                }
+                yield found;
+            }
+        };
     }
 
     private Range limits(ChannelAccuracy.Asked each, SenseCircuit circuit, ChannelAccuracy accuracy) {

@@ -21,6 +21,7 @@ public final class MenuMaker {
 
     private final DividerTables tables;
     private final Map<ChannelProblem, Known> known = new HashMap<>();
+    private final Map<ChannelProblem, Map<Judge.Read, Double>> outside = new HashMap<>();
 
     public MenuMaker(DividerTables tables) {
         this.tables = tables;
@@ -36,12 +37,17 @@ public final class MenuMaker {
 
     public void forget() {
         known.clear();
+        outside.clear();
+    }
+
+    private Known known(ChannelProblem problem) {
+        return known.computeIfAbsent(problem, key -> new Known(
+                new Judge(key, outside.computeIfAbsent(key.atAmbient(), _ -> new HashMap<>())), new HashMap<>()));
     }
 
     /** The menu; depends on nothing but its arguments. */
     public ChannelMenu menu(ChannelProblem problem, ChannelMenu.Breadth breadth, List<Prices> prices) {
-        Known there = known.computeIfAbsent(problem, key -> new Known(new Judge(key), new HashMap<>()));
-        return new Maker(problem, there, tables, breadth, prices).make();
+        return new Maker(problem, known(problem), tables, breadth, prices).make();
     }
 
     private static final class Maker {

@@ -2,12 +2,14 @@ package shuntwright.plan;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.function.Function;
 
 import shuntwright.accuracy.Assessment;
@@ -51,6 +53,8 @@ final class BoardChooser {
     private final Function<ChannelProblem, Optional<SenseCircuit>> nearest;
     private final MenuMaker maker;
     private final Map<Object, ChannelMenu> menus = new HashMap<>();
+    /** Circuits that menus at other prices have offered. */
+    private final Map<ChannelProblem, Set<SenseCircuit>> offered = new HashMap<>();
     private final Map<Object, List<Threshold>> voltages = new HashMap<>();
     private final Map<Object, Double> margins = new HashMap<>();
 
@@ -123,6 +127,7 @@ final class BoardChooser {
         if (menus.size() > MOST_KEPT || maker.size() > MOST_KEPT) {
             menus.clear();
             maker.forget();
+            offered.clear();
             voltages.clear();
             margins.clear();
         }
@@ -234,6 +239,12 @@ final class BoardChooser {
             ChannelMenu menu = menu(context, each.problem(), breadth, more);
             candidates += menu.candidates();
             List<SenseCircuit> circuits = pinned.map(List::of).orElse(menu.circuits());
+            SenseCircuit before = start.get(each.channel().name());
+            if (before != null && pinned.isEmpty() && !circuits.contains(before)
+                    && offered.getOrDefault(each.problem().anonymous(), Set.of()).contains(before)) {
+                circuits = new ArrayList<>(circuits);
+                circuits.add(before);
+            }
             if (circuits.isEmpty()) {
                 // What it gets all the same takes part in every sum.
                 circuits = nearest.apply(each.problem()).map(List::of).orElse(List.of());
@@ -294,6 +305,7 @@ final class BoardChooser {
         }
         LinkedHashSet<SenseCircuit> all = new LinkedHashSet<>(base.circuits());
         all.addAll(maker.menu(key, breadth, more).circuits());
+        offered.computeIfAbsent(key, _ -> new HashSet<>()).addAll(all);
         return new ChannelMenu(new ArrayList<>(all), base.candidates());
     }
 
@@ -313,8 +325,9 @@ final class BoardChooser {
             List<Open> open = open(with, changed.taps());
             Chosen again = chosen(with, wish, open, tapEntries(with, changed.taps(), open), ChannelMenu.Breadth.WIDE,
                     List.of(), Map.of(), progress);
-            return again.answer().keepsLimits() || Conflicts.possible(again.model().selection(), changed.preference().seed(),
-                    shuntwright.selection.Watch.NONE);
+            return again.answer().keepsLimits()
+                    || Conflicts.possible(again.model().selection(), changed.preference().seed(),
+                            shuntwright.selection.Watch.NONE);
         }, new shuntwright.selection.Watch() {
             @Override
             public boolean ended() {
@@ -381,20 +394,19 @@ final class BoardChooser {
                 starting(model, start), prover, watch);
     }
 
-    /** The options to start from; empty when not all channels have one. */
+    /** The options to start from, -1 for channels that are new or changed; empty for no start. */
     private static List<Integer> starting(ChoiceModel model, Map<String, SenseCircuit> start) {
-        if (start.isEmpty() || !model.selection().groups().isEmpty()) {
+        if (start.isEmpty()) {
             return List.of();
         }
         List<Integer> choice = new ArrayList<>();
         for (int entry = 0; entry < model.entries().size(); entry++) {
-            Optional<SenseCircuit> circuit = Optional.ofNullable(start.get(model.entries().get(entry).name()));
             int at = entry;
-            Optional<Integer> option = circuit.flatMap(each -> model.optionOf(at, each));
-            if (option.isEmpty()) {
-                return List.of();
-            }
-            choice.add(option.get());
+            choice.add(Optional.ofNullable(start.get(model.entries().get(entry).name()))
+                    .flatMap(circuit -> model.optionOf(at, circuit)).orElse(-1));
+        }
+        while (choice.size() < model.selection().slots().size()) {
+            choice.add(-1);
         }
         return choice;
     }

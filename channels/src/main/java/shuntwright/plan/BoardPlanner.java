@@ -53,7 +53,7 @@ public final class BoardPlanner {
     private final Map<Judged, ChannelPlan> judgements = new HashMap<>();
     private final Map<ChannelProblem, Boolean> acceptances = new HashMap<>();
     private final Map<TapProblem, Optional<Threshold>> voltages = new HashMap<>();
-    /** Circuits of the last plan, by channel: what the next one starts from. */
+    /** Circuits of a plan to start from, by channel. */
     private Map<String, SenseCircuit> last = Map.of();
 
     /** With bounds of its own only. */
@@ -64,6 +64,17 @@ public final class BoardPlanner {
     /** @param prover asked where the own bounds do not prove a choice best */
     public BoardPlanner(Prover prover) {
         chooser = new BoardChooser(TABLES, prover, this::nearest);
+    }
+
+    /**
+     * Lets the next plans start from the circuits of this one where that leads to something at least as good: after an edit most channels
+     * then keep what they had. Without it a plan depends on nothing but its board and catalogue.
+     */
+    public void startFrom(Plan plan) {
+        Map<String, SenseCircuit> circuits = new HashMap<>();
+        plan.channels().forEach(each -> each.solved()
+                .ifPresent(solved -> circuits.put(each.channel().name(), solved.circuit())));
+        last = Map.copyOf(circuits);
     }
 
     private record Judged(ChannelProblem problem, SenseCircuit circuit) {}

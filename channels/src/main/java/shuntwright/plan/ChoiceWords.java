@@ -40,10 +40,23 @@ public final class ChoiceWords {
         };
     }
 
+    /**
+     * Whether it is proven best only because heats within the design rules' heat step count as equal: then the bound is what heat could
+     * be without later objectives.
+     */
+    public static boolean withinStep(Reached reached) {
+        double bound = reached.bound().orElse(reached.value());
+        return reached.proof() == Reached.Proof.PROVEN
+                && Math.abs(reached.value() - bound) > 1e-9 * Math.max(Math.abs(reached.value()), Math.abs(bound));
+    }
+
     /** "proven best", or the bound and the distance from it. */
     public static String proof(Reached reached, String currency) {
         return switch (reached.proof()) {
-            case PROVEN -> "proven best";
+            case PROVEN -> withinStep(reached)
+                    ? "proven best within the heat step; nothing is better than "
+                            + value(reached.objective(), reached.bound().orElseThrow(), currency)
+                    : "proven best";
             case BOUNDED -> "not proven best: nothing is better than "
                     + value(reached.objective(), reached.bound().orElseThrow(), currency) + apart(reached.gap());
             case OPEN -> "not proven best: nothing is known of what could be better";
@@ -55,10 +68,10 @@ public final class ChoiceWords {
         return Double.isFinite(share) ? ", " + distance(share) + " away" : "";
     }
 
-    /** The distance from the bound in a few signs: "proven", "1.2 %", "open". */
+    /** The distance from the bound in a few signs: "proven", "within step", "1.2 %", "open". */
     public static String distance(Reached reached) {
         return switch (reached.proof()) {
-            case PROVEN -> "proven";
+            case PROVEN -> withinStep(reached) ? "within step" : "proven";
             case BOUNDED -> {
                 double share = reached.gap().orElse(Double.NaN);
                 yield Double.isFinite(share) ? distance(share) : "open";

@@ -1,5 +1,7 @@
 package shuntwright.plan;
 
+import static shuntwright.quantity.QuantityWriter.show;
+
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -12,8 +14,6 @@ import shuntwright.selection.Conflicts;
 import shuntwright.selection.Prover;
 import shuntwright.selection.Selection;
 import shuntwright.selection.Watch;
-
-import static shuntwright.quantity.QuantityWriter.show;
 
 /** Says which demands of a board cannot be met together, and what each would have to be. */
 final class ConflictWords {
@@ -60,7 +60,8 @@ final class ConflictWords {
             if (channel.isPresent() && model.isChannel(slot)) {
                 members.add(channel(channel.get(), tried++ < MOST_CHANNELS));
             } else {
-                members.add(new Conflict.Member(Conflict.Kind.TAP, name, "one voltage for its channels", OptionalDouble.empty(),
+                members.add(new Conflict.Member(Conflict.Kind.TAP, name, "one voltage for its channels",
+                        OptionalDouble.empty(),
                         OptionalDouble.empty(), Dimension.VOLTAGE));
             }
         }

@@ -55,7 +55,8 @@ public final class Conflicts {
     public static OptionalDouble needed(Selection selection, int resource, long seed, Watch watch) {
         List<Integer> others = limited(selection).stream().filter(r -> r != resource).toList();
         Selection relaxed = selection.with(all(selection), others);
-        Answer answer = Selector.select(relaxed, new Selector.Order(List.of(new Aim.Use(resource)), List.of(0.0), List.of()),
+        Answer answer = Selector.select(relaxed,
+                new Selector.Order(List.of(new Aim.Use(resource)), List.of(0.0), List.of()),
                 new Selector.Effort(ROUNDS, 0, seed), List.of(), Prover.NONE, watch);
         return answer.keepsLimits() ? OptionalDouble.of(answer.reached().getFirst().value()) : OptionalDouble.empty();
     }
@@ -84,7 +85,8 @@ public final class Conflicts {
         List<Integer> limits = limited(selection);
         List<Integer> slots = all(selection);
         Optional<Integer> single = limits.stream().filter(r -> over(selection, r))
-                .max(Comparator.comparingDouble(r -> Bounds.leastUse(selection, r) / selection.resources().get(r).most()));
+                .max(Comparator
+                        .comparingDouble(r -> Bounds.leastUse(selection, r) / selection.resources().get(r).most()));
         if (single.isPresent()) {
             limits = List.of(single.get());
         } else if (answered(selection) != Answered.IMPOSSIBLE) {

@@ -69,7 +69,7 @@ public final class Selector {
     /**
      * The best selection that is found.
      *
-     * @param start option of each slot to start from; empty to start from the best of each slot by itself
+     * @param start option of each slot to start from, -1 where there is none; empty to start from the best of each slot by itself
      */
     public static Answer select(Selection selection, Order order, Effort effort, List<Integer> start, Prover prover,
             Watch watch) {
@@ -86,10 +86,9 @@ public final class Selector {
     }
 
     private Answer run(List<Integer> start) {
-        if (start.size() == selection.slots().size()) {
-            state.restore(start.stream().mapToInt(Integer::intValue).toArray());
-        } else {
-            First.of(selection, order.aims().isEmpty() ? new Aim.Cost() : order.aims().getFirst(), state);
+        First.of(selection, order.aims().isEmpty() ? new Aim.Cost() : order.aims().getFirst(), state);
+        if (start.size() == state.choice.length && !start.isEmpty()) {
+            startFromBetter(start);
         }
         if (order.aims().isEmpty()) {
             search(List.of());
@@ -98,6 +97,64 @@ public final class Selector {
             stage(stage);
         }
         return answer();
+    }
+
+    /** Takes the start, its gaps filled, when it leads to something at least as good as the first selection does. */
+    private void startFromBetter(List<Integer> start) {
+        Optional<int[]> filled = filled(start);
+        if (filled.isEmpty()) {
+            return;
+        }
+        int[] given = filled.get();
+        Goal goal = new Goal(caps, order.aims(), false);
+        double[] fresh = descended(goal);
+        int[] freshChoice = state.choice.clone();
+        state.restore(given);
+        double[] old = descended(goal);
+        if (Goal.compare(fresh, old) < 0) {
+            state.restore(freshChoice);
+        }
+    }
+
+    /** The start with its gaps filled, each group at one value; empty when that cannot be. */
+    private Optional<int[]> filled(List<Integer> start) {
+        int[] values = new int[selection.groups().size()];
+        Arrays.fill(values, -1);
+        for (int slot = 0; slot < state.choice.length; slot++) {
+            int group = selection.menu(slot).group();
+            if (group >= 0 && start.get(slot) >= 0) {
+                int value = state.options(slot)[start.get(slot)].value;
+                if (values[group] >= 0 && values[group] != value) {
+                    return Optional.empty();
+                }
+                values[group] = value;
+            }
+        }
+        int[] filled = state.choice.clone();
+        for (int slot = 0; slot < filled.length; slot++) {
+            int group = selection.menu(slot).group();
+            if (start.get(slot) >= 0) {
+                filled[slot] = start.get(slot);
+            } else if (group >= 0 && values[group] >= 0 && state.options(slot)[filled[slot]].value != values[group]) {
+                Option[] options = state.options(slot);
+                filled[slot] = IntStream.range(0, options.length).filter(o -> options[o].value == values[group])
+                        .findFirst()
+                        .orElse(-1);
+                if (filled[slot] < 0) {
+                    return Optional.empty();
+                }
+            }
+        }
+        return Optional.of(filled);
+    }
+
+    private double[] descended(Goal goal) {
+        LocalSearch search = new LocalSearch(selection, state, goal, random);
+        search.descend();
+        search.finish();
+        double[] score = new double[goal.size()];
+        goal.score(state, score);
+        return score;
     }
 
     private void stage(int stage) {

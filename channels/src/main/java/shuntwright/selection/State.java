@@ -2,6 +2,8 @@ package shuntwright.selection;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 
 /**
  * A selection under way: which option each slot has, and all sums over it, kept up to date by every change.
@@ -72,14 +74,12 @@ final class State {
         for (int menu = 0; menu < count.length; menu++) {
             Arrays.fill(largest, 0);
             for (Option option : selection.menus().get(menu).options()) {
-                int[] own = new int[option.pools.length];
-                for (int i = 0; i < option.lines.length; i++) {
-                    largest[option.lines[i]] = Math.max(largest[option.lines[i]], option.pieces[i]);
+                // An option may take pieces of a line and a package of the same line.
+                Map<Integer, Integer> own = new TreeMap<>(option.lines());
+                for (int pool : option.pools) {
+                    own.merge(selection.pools().get(pool).line(), 1, Integer::sum);
                 }
-                for (int i = 0; i < own.length; i++) {
-                    int line = selection.pools().get(option.pools[i]).line();
-                    largest[line] = Math.max(largest[line], option.pools.length);
-                }
+                own.forEach((line, pieces) -> largest[line] = Math.max(largest[line], pieces));
             }
             for (int line = 0; line < caps.length; line++) {
                 caps[line] += largest[line] * count[menu];

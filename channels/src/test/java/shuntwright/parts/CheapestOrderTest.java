@@ -11,8 +11,10 @@ import org.junit.jupiter.params.provider.CsvSource;
 /** Price breaks 1: 0.50, 100: 0.40, 1,000: 0.25; packs of 50, minimum order 100. The table is worked by hand. */
 class CheapestOrderTest {
 
-    private static final Purchase PURCHASE = new Purchase("", List.of(new PriceBreak(1, 0.50), new PriceBreak(100, 0.40),
-            new PriceBreak(1000, 0.25)), 50, 100, "", "");
+    private static final Purchase PURCHASE = new Purchase("",
+            List.of(new PriceBreak(1, 0.50), new PriceBreak(100, 0.40),
+                    new PriceBreak(1000, 0.25)),
+            50, 100, "", "");
 
     @ParameterizedTest
     @CsvSource({

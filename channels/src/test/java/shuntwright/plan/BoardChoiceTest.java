@@ -2,7 +2,6 @@ package shuntwright.plan;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
-
 import static shuntwright.plan.TrialBoards.CATALOGUE;
 import static shuntwright.plan.TrialBoards.board;
 
@@ -30,7 +29,8 @@ class BoardChoiceTest {
         SplittableRandom random = new SplittableRandom(seed);
         List<Channel> all = new ArrayList<>();
         for (int i = 0; i < channels; i++) {
-            all.add(BoardPlannerTest.random("channel " + i, random).withZone(java.util.Optional.of(i % 2 == 0 ? "left" : "right")));
+            all.add(BoardPlannerTest.random("channel " + i, random)
+                    .withZone(java.util.Optional.of(i % 2 == 0 ? "left" : "right")));
         }
         Board board = TrialBoards.withZones(board(all.toArray(Channel[]::new)), OptionalDouble.empty(),
                 new Zone("left", OptionalDouble.of(50), OptionalDouble.empty()),
@@ -92,9 +92,11 @@ class BoardChoiceTest {
                 cost += 3 + use.purchase().cheapestOrder(use.quantity() * 120).cost();
             }
             double heat = plan.channels().stream().flatMap(each -> each.solved().stream())
-                    .mapToDouble(each -> each.demand().load() * each.demand().load() * each.circuit().resistance()).sum();
+                    .mapToDouble(each -> each.demand().load() * each.demand().load() * each.circuit().resistance())
+                    .sum();
             List<Reached> reached = plan.choice().orElseThrow().reached();
-            assertThat(reached).extracting(Reached::objective).containsExactly(Objective.LEAST_COST, Objective.FEWEST_PARTS,
+            assertThat(reached).extracting(Reached::objective).containsExactly(Objective.LEAST_COST,
+                    Objective.FEWEST_PARTS,
                     Objective.LEAST_HEAT);
             assertThat(reached.get(0).value()).isCloseTo(cost, within(1e-9 * cost));
             assertThat(reached.get(1).value()).isEqualTo(plan.parts().size());
@@ -217,6 +219,23 @@ class BoardChoiceTest {
         });
         assertThat(plan(board)).isEqualTo(first);
         assertThat(better).isNotEmpty();
+    }
+
+    /** An edit starts from the plan before it and ends with nothing worse than a new planner's. */
+    @Test
+    void startsFromThePlanBefore() {
+        Board board = random(9, 6, Objective.LEAST_COST, Objective.LEAST_HEAT);
+        BoardPlanner planner = new BoardPlanner();
+        Plan plan = planner.plan(board, CATALOGUE, Progress.SILENT);
+        planner.startFrom(plan);
+        Plan same = planner.plan(board.withPreference(board.preference().withRounds(0)), CATALOGUE, Progress.SILENT);
+        assertThat(same.buildCost()).isLessThanOrEqualTo(plan.buildCost() * (1 + 1e-9));
+        List<Channel> fewer = board.channels().subList(1, 6);
+        Plan edited = planner.plan(board.withChannels(fewer), CATALOGUE, Progress.SILENT);
+        Plan anew = plan(board.withChannels(fewer));
+        assertThat(edited.buildCost()).isLessThanOrEqualTo(anew.buildCost() * 1.02);
+        assertThat(edited.channels()).extracting(ChannelPlan::accepted)
+                .isEqualTo(anew.channels().stream().map(ChannelPlan::accepted).toList());
     }
 
     @Test

@@ -52,6 +52,17 @@ class ChoiceWordsTest {
     }
 
     @Test
+    void whatIsBestOnlyWithinTheHeatStepSaysSo() {
+        Reached stepped = new Reached(Objective.LEAST_HEAT, 0.28, OptionalDouble.of(0.03), Proof.PROVEN);
+
+        assertThat(ChoiceWords.proof(stepped, "EUR"))
+                .isEqualTo("proven best within the heat step; nothing is better than 30 mW");
+        assertThat(ChoiceWords.distance(stepped)).isEqualTo("within step");
+        assertThat(ChoiceWords.withinStep(new Reached(Objective.LEAST_HEAT, 0.1 + 0.2, OptionalDouble.of(0.3),
+                Proof.PROVEN))).as("rounding is no step").isFalse();
+    }
+
+    @Test
     void aDistanceIsRoundedUpAndNeverAway() {
         assertThat(ChoiceWords.distance(bounded(Objective.LEAST_COST, 1000, 987.6))).isEqualTo("1.3 %");
         assertThat(ChoiceWords.distance(bounded(Objective.LEAST_COST, 1000, 988))).isEqualTo("1.2 %");

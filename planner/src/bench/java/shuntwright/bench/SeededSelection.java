@@ -75,7 +75,8 @@ public final class SeededSelection {
         for (int zone = 0; zone < ZONES; zone++) {
             b.even(b.resource(new Selection.Resource("zone " + zone, OptionalDouble.of(zoneHeat[zone] * 1.1), 0)));
             for (int i = 0; i < AMPLIFIERS; i++) {
-                amplifierPools[zone][i] = b.pool(new Selection.Pool(amplifiers + i, 1 + i % 3 / 2, SUPPLY, 3e-4 + 1e-5 * i));
+                amplifierPools[zone][i] = b
+                        .pool(new Selection.Pool(amplifiers + i, 1 + i % 3 / 2, SUPPLY, 3e-4 + 1e-5 * i));
             }
             for (int i = 0; i < COMPARATORS; i++) {
                 comparatorPools[zone][i] = b.pool(new Selection.Pool(comparators + i, 1 + i % 2, SUPPLY, 1e-4));

@@ -93,9 +93,22 @@ class ArchitectureTest {
     void planner_leaves_formats_to_io() {
         classes().that().resideInAPackage("shuntwright.planner..").should().onlyDependOnClassesThat()
                 .resideInAnyPackage(channelsAnd("shuntwright.io..", "shuntwright.planner..", "java..",
-                        "org.jspecify..", "javafx..", "org.controlsfx..", "picocli.."))
+                        "org.jspecify..", "javafx..", "org.controlsfx..", "picocli..", "com.google.ortools..",
+                        "com.google.protobuf.."))
                 .because("a window or a command that reads JSON or spreadsheets itself would be a second way in")
                 .check(ALL);
+    }
+
+    @Test
+    void only_the_child_process_knows_the_solver() {
+        noClasses().that().resideOutsideOfPackage("shuntwright.planner.proof..").should().dependOnClassesThat()
+                .resideInAnyPackage("com.google.ortools..", "com.google.protobuf..")
+                .because("the solver's library could end the process it runs in, and take the user's work with it")
+                .check(ALL);
+        noClasses().that()
+                .haveNameMatching("shuntwright\\.planner\\.proof\\.(ChildProver|Conversation|Check|Launch|Wire|Task).*")
+                .should().dependOnClassesThat().resideInAPackage("com.google.ortools..")
+                .because("these run in the parent").check(ALL);
     }
 
     static Stream<String> placedPackages() {

@@ -10,8 +10,8 @@ import shuntwright.parts.Catalogue;
 
 /** The demo boards with their parts. */
 public final class DemoBoards {
-    /** Rounds of the search; what is tested does not need the best choice. */
-    private static final int FEW = 2;
+    /** Channels that are kept; more take longer and show no more. */
+    private static final int CHANNELS = 3;
 
     private DemoBoards() {
     }
@@ -19,12 +19,12 @@ public final class DemoBoards {
     /** A board and what it is chosen from. */
     public record Demo(Board board, Catalogue catalogue) {}
 
-    /** The smallest, looked at briefly. */
+    /** The first channels of the smallest. */
     public static Demo camp() {
         Path file = Path.of(System.getProperty("shuntwright.root", "."), "demo-boards", "camp-lantern.board.json");
         return switch (Workplace.open(file, List.of())) {
             case FileReading.Opened<Workplace>(Workplace opened) -> new Demo(
-                    opened.board().withPreference(opened.board().preference().withRounds(FEW)), opened.catalogue());
+                    opened.board().withChannels(opened.board().channels().subList(0, CHANNELS)), opened.catalogue());
             case FileReading.Refused<Workplace>(var problems) -> throw new IllegalStateException(problems.toString());
         };
     }

@@ -33,7 +33,8 @@ final class ChoiceTables {
                             + "the objectives before it; absent where nothing is known",
                     Reached::bound)
             .text("proof",
-                    "\"proven\": no choice is better; \"bounded\": none is better than the bound, between the two "
+                    "\"proven\": no choice is better, of heat by more than the design rules' heat step for each channel, "
+                            + "which later objectives may use; \"bounded\": none is better than the bound, between the two "
                             + "there may be something; \"open\": nothing is known",
                     each -> switch (each.proof()) {
                         case PROVEN -> "proven";
@@ -41,7 +42,8 @@ final class ChoiceTables {
                         case OPEN -> "open";
                     })
             .maybeNumber("gap", Unit.FRACTION, "distance of the value from the bound, of the value: nothing is better "
-                    + "by more; absent where nothing is known or the value is 0", each -> finite(each.gap()))
+                    + "by more; 0 where proven; absent where nothing is known or the value is 0",
+                    each -> finite(each.gap()))
             .form();
 
     private static final Form<Conflict.Member> MEMBER = ObjectTable.<Conflict.Member>named("conflict member",

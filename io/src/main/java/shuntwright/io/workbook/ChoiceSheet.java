@@ -103,24 +103,23 @@ final class ChoiceSheet {
 
     private static Column.Content proof(Reached reached) {
         return switch (reached.proof()) {
-            case PROVEN -> new Column.Content.Marked("proven best", Style.GOOD);
+            case PROVEN -> new Column.Content.Marked(
+                    ChoiceWords.withinStep(reached) ? "proven best within the heat step" : "proven best", Style.GOOD);
             case BOUNDED -> new Column.Content.Marked("not proven best; nothing is better than the bound", Style.FAIR);
             case OPEN -> new Column.Content.Marked("not proven best; nothing is known of better ones", Style.FAIR);
         };
     }
 
     private static Column.Content distance(Line row, Column.Cells<Line> cells) {
-        return switch (row.reached().proof()) {
-            case PROVEN -> new Column.Content.Figure(0);
-            case BOUNDED -> {
-                String value = cells.at(VALUE);
-                String apart = "ABS(" + value + "-" + cells.at(BOUND) + ")";
-                yield Double.isFinite(row.reached().gap().orElse(Double.NaN))
-                        ? new Column.Content.Formula(
-                                "IF(" + apart + "=0,0,100*" + apart + "/ABS(" + value + "))")
-                        : new Column.Content.Empty();
-            }
-            case OPEN -> new Column.Content.Empty();
-        };
+        Reached reached = row.reached();
+        if (reached.bound().isEmpty()) {
+            return reached.gap().isPresent()
+                    ? new Column.Content.Figure(100 * reached.gap().getAsDouble())
+                    : new Column.Content.Empty();
+        }
+        String value = cells.at(VALUE);
+        String apart = "ABS(" + value + "-" + cells.at(BOUND) + ")";
+        return new Column.Content.Formula(
+                "IF(" + apart + "=0,0,IF(" + value + "=0,\"\",100*" + apart + "/ABS(" + value + ")))");
     }
 }

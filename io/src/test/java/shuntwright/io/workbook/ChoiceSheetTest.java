@@ -47,12 +47,23 @@ class ChoiceSheetTest {
                 double gap = each.gap().orElse(Double.NaN);
                 if (Double.isFinite(gap)) {
                     assertThat(cell.getNumericCellValue()).isCloseTo(100 * gap, within(1e-9));
-                } else {
-                    assertThat(cell.getCellType()).isEqualTo(CellType.BLANK);
                 }
             }
+            assertThat(Cells.at(sheet, "fewest parts", "Distance").getCellType()).isEqualTo(CellType.BLANK);
+            assertThat(Cells.at(sheet, "widest margin", "Distance").getStringCellValue())
+                    .as("there is no share of nothing").isEmpty();
             assertThat(Cells.at(sheet, "least cost", "Distance").getCellType()).isEqualTo(CellType.FORMULA);
             assertThat(Cells.at(sheet, "fewest parts", "Nothing is").getCellType()).isEqualTo(CellType.BLANK);
+        }
+    }
+
+    @Test
+    void whatIsBestOnlyWithinTheHeatStepSaysSoAndHowFar() throws IOException {
+        try (XSSFWorkbook book = Cells.open(PlanFixtures.withinStep())) {
+            XSSFSheet sheet = book.getSheet(ChoiceSheet.NAME);
+            assertThat(Cells.at(sheet, "least heat", "Proof").getStringCellValue())
+                    .isEqualTo("proven best within the heat step");
+            assertThat(Cells.at(sheet, "least heat", "Distance").getNumericCellValue()).isCloseTo(75, within(1e-9));
         }
     }
 

@@ -15,6 +15,9 @@ final class CheckCommand implements Callable<Integer> {
     private BoardOptions input = new BoardOptions();
 
     @Mixin
+    private ChoiceOptions.Price price = new ChoiceOptions.Price();
+
+    @Mixin
     private SamplingOptions sampling = new SamplingOptions();
 
     @Mixin
@@ -26,7 +29,7 @@ final class CheckCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        return new Job(Job.Kind.CHECK, input.board(), input.parts(), sampling.chosen(), output.chosen(),
+        return new Job(Job.Kind.CHECK, input.board(), input.parts(), price.chosen(), sampling.chosen(), output.chosen(),
                 Optional.empty()).run(terminal)
                 .number();
     }

@@ -5,6 +5,7 @@ import java.io.PrintWriter;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.function.Supplier;
 
 import picocli.CommandLine;
 import picocli.CommandLine.Help;
@@ -27,9 +28,16 @@ public final class Commands {
     }
 
     static int run(String[] args, Terminal terminal) {
+        return run(args, terminal, Solver.OWN);
+    }
+
+    /** @param solvers what answers questions about whole boards */
+    static int run(String[] args, Terminal terminal, Supplier<Solver> solvers) {
         ShuntwrightCommand top = new ShuntwrightCommand(terminal);
         CommandLine line = new CommandLine(top).addSubcommand(new PlanCommand(terminal))
-                .addSubcommand(new CheckCommand(terminal)).addSubcommand(new WindowCommand());
+                .addSubcommand(new CheckCommand(terminal)).addSubcommand(new FrontCommand(terminal, solvers))
+                .addSubcommand(new OthersCommand(terminal, solvers)).addSubcommand(new WhatIfCommand(terminal, solvers))
+                .addSubcommand(new WindowCommand());
         HelpText.addTo(line);
         line.registerConverter(Path.class, Commands::path);
         line.setOut(new PrintWriter(terminal.out(), true, terminal.charset()))

@@ -26,7 +26,7 @@ final class Demo {
         terminal.print("");
         Job.Output output = new Job.Output(Optional.of(place().resolve(WORKBOOK)), Optional.empty(), false,
                 Optional.empty());
-        ExitCode result = new Job(Job.Kind.PLAN, board, List.of(), SamplingChoice.OF_THE_BOARD, output,
+        ExitCode result = new Job(Job.Kind.PLAN, board, List.of(), List.of(), SamplingChoice.OF_THE_BOARD, output,
                 Optional.empty()).run(terminal);
         terminal.print("");
         terminal.print("To plan a board of your own: shuntwright plan BOARD; for more: shuntwright --help");

@@ -1,17 +1,14 @@
 package shuntwright.planner.command;
 
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 
 import shuntwright.board.Board;
-import shuntwright.board.Channel;
 import shuntwright.io.boardfile.BoardFiles;
-import shuntwright.io.form.NearestWord;
-import shuntwright.io.json.FileReading;
-import shuntwright.io.json.Problem;
 import shuntwright.io.planfile.PlanFile;
 import shuntwright.io.save.SafeSave;
 import shuntwright.io.save.SaveResult;
@@ -27,11 +24,13 @@ import shuntwright.plan.Plan;
  * @param kind     what to do with the board
  * @param board    board file
  * @param parts    parts files besides the board's own
+ * @param wanted   of the choice of parts, for this run
  * @param sampling how to sample the plan
  * @param output   what to make of the plan
  * @param pinned   where to write the board with every choice pinned
  */
-record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Output output, Optional<Path> pinned) {
+record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, SamplingChoice sampling, Output output,
+        Optional<Path> pinned) {
 
     /** What is done with the board. */
     enum Kind {
@@ -50,7 +49,11 @@ record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Out
 
     Job {
         parts = List.copyOf(parts);
+        wanted = List.copyOf(wanted);
     }
+
+    /** @param choosing time it took to choose the parts, or to check them */
+    private record Judged(Plan plan, Duration choosing) {}
 
     /** @throws BadInput when a file cannot be opened or saved */
     ExitCode run(Terminal terminal) {
@@ -58,17 +61,19 @@ record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Out
         inputs.add(board);
         List<Path> targets = Stream.of(output.workbook(), output.plan(), pinned).flatMap(Optional::stream).toList();
         Targets.check(inputs, targets);
-        Workplace opened = open();
+        Workplace opened = Opening.of(board, parts);
         Targets.check(PartsPaths.of(opened.board(), board), targets);
-        output.budget().ifPresent(name -> known(name, opened.board()));
-        Plan plan = judge(opened, terminal);
+        output.budget().ifPresent(name -> Opening.known("--budget", name, opened.board()));
+        Judged judged = judge(opened, terminal);
+        Plan plan = judged.plan();
         List<String> failed = save(plan, opened.board());
         if (output.json()) {
             terminal.printBytes(PlanFile.bytes(plan));
         } else {
             output.budget().flatMap(plan::channel)
                     .map(each -> BudgetText.of(plan, each, terminal.colour()))
-                    .orElseGet(() -> PlanText.of(plan, terminal.colour())).forEach(terminal::print);
+                    .orElseGet(() -> PlanText.of(plan, Optional.of(judged.choosing()), terminal.colour()))
+                    .forEach(terminal::print);
         }
         if (!failed.isEmpty()) {
             throw new BadInput(failed);
@@ -79,33 +84,21 @@ record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Out
         return plan.accepted() ? ExitCode.ACCEPTED : ExitCode.NOT_ACCEPTED;
     }
 
-    private Workplace open() {
-        return switch (Workplace.open(board, parts)) {
-            case FileReading.Opened<Workplace>(Workplace opened) -> opened;
-            case FileReading.Refused<Workplace>(List<Problem> problems) ->
-                throw new BadInput(problems.stream().map(Problem::toString).toList());
-        };
-    }
-
-    private static void known(String channel, Board board) {
-        List<String> names = board.channels().stream().map(Channel::name).toList();
-        if (!names.contains(channel)) {
-            throw new BadInput("--budget: " + NearestWord.unknown("channel", channel, names));
-        }
-    }
-
-    private Plan judge(Workplace opened, Terminal terminal) {
-        Board asked = sampling.applied(opened.board());
+    private Judged judge(Workplace opened, Terminal terminal) {
+        Board asked = Entered.applied(wanted, sampling.applied(opened.board()));
         try (ProgressLine progress = ProgressLine.on(terminal, !output.json())) {
-            BoardPlanner planner = new BoardPlanner();
+            BoardPlanner planner = Solver.planner();
+            long start = System.nanoTime();
             Plan plan = switch (kind) {
                 case PLAN -> planner.plan(asked, opened.catalogue(), progress);
                 case CHECK -> planner.check(asked, opened.catalogue(), progress);
             };
-            return sampling.skipped()
+            Duration choosing = Duration.ofNanos(System.nanoTime() - start);
+            return new Judged(sampling.skipped()
                     ? plan
                     : new BoardSampler(Runtime.getRuntime().availableProcessors()).sample(plan,
-                            asked.uncertainty().sampling(), BoardSampler.Depth.FULL, progress);
+                            asked.uncertainty().sampling(), BoardSampler.Depth.FULL, progress),
+                    choosing);
         }
     }
 
@@ -121,7 +114,7 @@ record Job(Kind kind, Path board, List<Path> parts, SamplingChoice sampling, Out
         output.workbook()
                 .ifPresent(file -> results.add(SafeSave.save(file, out -> Workbook.write(plan, out))));
         pinned.ifPresent(file -> {
-            Board own = SamplingChoice.restored(BoardPlanner.pinned(plan), original);
+            Board own = Entered.restored(BoardPlanner.pinned(plan), original);
             results.add(BoardFiles.save(PartsPaths.moved(own, board, parts, file), file));
         });
         return results.stream().flatMap(each -> switch (each) {

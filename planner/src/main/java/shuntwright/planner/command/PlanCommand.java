@@ -1,8 +1,10 @@
 package shuntwright.planner.command;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.stream.Stream;
 
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -15,6 +17,15 @@ final class PlanCommand implements Callable<Integer> {
 
     @Mixin
     private BoardOptions input = new BoardOptions();
+
+    @Mixin
+    private ChoiceOptions.Wanted wanted = new ChoiceOptions.Wanted();
+
+    @Mixin
+    private ChoiceOptions.Search search = new ChoiceOptions.Search();
+
+    @Mixin
+    private ChoiceOptions.Price price = new ChoiceOptions.Price();
 
     @Mixin
     private SamplingOptions sampling = new SamplingOptions();
@@ -31,7 +42,9 @@ final class PlanCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        return new Job(Job.Kind.PLAN, input.board(), input.parts(), sampling.chosen(), output.chosen(), pinned)
+        return new Job(Job.Kind.PLAN, input.board(), input.parts(),
+                Stream.of(wanted.chosen(), search.chosen(), price.chosen()).flatMap(List::stream).toList(),
+                sampling.chosen(), output.chosen(), pinned)
                 .run(terminal)
                 .number();
     }

@@ -1,5 +1,6 @@
 package shuntwright.planner.command;
 
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -11,6 +12,7 @@ import shuntwright.accuracy.LimitWords;
 import shuntwright.circuit.LimitCheck;
 import shuntwright.circuit.SenseCircuit;
 import shuntwright.io.planfile.Cautions;
+import shuntwright.plan.BoardChoice;
 import shuntwright.plan.ChannelPlan;
 import shuntwright.plan.Cure;
 import shuntwright.plan.FamilyRefusal;
@@ -30,20 +32,29 @@ final class PlanText {
 
     private final Plan plan;
     private final boolean colour;
+    private final Optional<Duration> took;
     private final List<String> lines = new ArrayList<>();
 
-    private PlanText(Plan plan, boolean colour) {
+    private PlanText(Plan plan, Optional<Duration> took, boolean colour) {
         this.plan = plan;
+        this.took = took;
         this.colour = colour;
     }
 
     /** The lines to print. */
     static List<String> of(Plan plan, boolean colour) {
-        PlanText text = new PlanText(plan, colour);
+        return of(plan, Optional.empty(), colour);
+    }
+
+    /** @param took to choose the parts */
+    static List<String> of(Plan plan, Optional<Duration> took, boolean colour) {
+        PlanText text = new PlanText(plan, took, colour);
         text.summary();
+        text.choice();
         text.channels();
         text.sampled();
         text.findings();
+        text.conflict();
         text.shared();
         text.lines.add("");
         text.lines.add(Cautions.LINE);
@@ -58,6 +69,19 @@ final class PlanText {
                 + " for each board of a build of " + plan.board().buildQuantity());
         lines.addAll(plan.study().map(StudyText::board).orElse(List.of(NOT_SAMPLED)));
         lines.add("");
+    }
+
+    private void choice() {
+        lines.add(ChoiceText.build(plan));
+        plan.choice().ifPresent(choice -> lines.addAll(ChoiceText.of(choice, plan.currency(), took)));
+        lines.add("");
+    }
+
+    private void conflict() {
+        plan.choice().flatMap(BoardChoice::conflict).ifPresent(conflict -> {
+            lines.add("");
+            lines.addAll(ChoiceText.of(conflict));
+        });
     }
 
     private void channels() {
@@ -91,12 +115,15 @@ final class PlanText {
 
     private static List<String> solved(SolvedChannel solved) {
         SenseCircuit circuit = solved.circuit();
-        String count = circuit.shuntCount() > 1 ? circuit.shuntCount() + " × " : "";
-        String shunt = count + show(circuit.shunt().resistance(), Dimension.RESISTANCE) + " "
-                + circuit.shunt().partNumber();
-        return List.of(range(solved.trip().limits()), range(solved.trip().allowed()), shunt,
+        return List.of(range(solved.trip().limits()), range(solved.trip().allowed()), shunt(circuit),
                 show(circuit.amplifier().gain(), Dimension.GAIN),
                 show(solved.settings().threshold(), Dimension.VOLTAGE), show(solved.heat(), Dimension.POWER));
+    }
+
+    /** "2 × 50 mΩ" with the part number. */
+    static String shunt(SenseCircuit circuit) {
+        String count = circuit.shuntCount() > 1 ? circuit.shuntCount() + " × " : "";
+        return count + show(circuit.shunt().resistance(), Dimension.RESISTANCE) + " " + circuit.shunt().partNumber();
     }
 
     private void findings() {

@@ -2,6 +2,7 @@ package shuntwright.planner.command;
 
 import java.util.concurrent.locks.LockSupport;
 
+import shuntwright.plan.BoardChoice;
 import shuntwright.plan.Progress;
 
 /**
@@ -17,6 +18,8 @@ final class ProgressLine implements Progress, AutoCloseable {
     private long last = System.nanoTime();
     private int width;
     private boolean ended;
+    private String stage = "";
+    private String best = "";
 
     private ProgressLine(Terminal terminal, boolean shown) {
         this.terminal = terminal;
@@ -46,12 +49,21 @@ final class ProgressLine implements Progress, AutoCloseable {
     }
 
     @Override
-    public synchronized void reached(String stage, int done, int total) {
+    public synchronized void reached(String what, int done, int total) {
+        if (!what.equals(stage)) {
+            stage = what;
+            best = "";
+        }
         long now = System.nanoTime();
         if (shown && !ended && now - last >= NANOS_BETWEEN) {
             last = now;
-            show(stage + " " + done + " of " + total);
+            show(what + " " + done + " of " + total + best);
         }
+    }
+
+    @Override
+    public synchronized void better(BoardChoice found) {
+        best = "; best so far " + ChoiceText.brief(found);
     }
 
     @Override

@@ -4,24 +4,20 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.TypeConversionException;
-import shuntwright.board.Board;
 import shuntwright.planner.entry.BoardField;
-import shuntwright.quantity.Reading;
 
 /** How a plan is sampled, for this run only. */
 final class SamplingOptions {
 
     @Option(names = "--trials", paramLabel = "N|adaptive", converter = Trials.class, description = "Trials of each channel, 10,000 to 100,000,000, or adaptive: until the results are stable. For this run, instead of the board's.")
-    private Optional<SamplingChoice.Entry> trials = Optional.empty();
+    private Optional<Entered> trials = Optional.empty();
 
     @Option(names = "--seed", paramLabel = "N", converter = Seed.class, description = "Seed of all draws, a whole number. The same seed gives the same results to the last digit on any number of threads. For this run, instead of the board's.")
-    private Optional<SamplingChoice.Entry> seed = Optional.empty();
+    private Optional<Entered> seed = Optional.empty();
 
     @Option(names = "--coverage", paramLabel = "P", converter = Coverage.class, description = "Coverage probability of the coverage intervals, from 50 %% to below 100 %%: 99.9%% or 0.999. For this run, instead of the board's.")
-    private Optional<SamplingChoice.Entry> coverage = Optional.empty();
+    private Optional<Entered> coverage = Optional.empty();
 
     @Option(names = "--no-sampling", description = "Do not sample: faster, but without probabilities and yield, and coverage intervals rest on a first look.")
     private boolean skipped;
@@ -35,46 +31,27 @@ final class SamplingOptions {
             throw new BadInput("With --no-sampling nothing is drawn, so " + String.join(" and ", idle)
                     + " can have no effect; leave out one or the other.");
         }
-        List<SamplingChoice.Entry> entries = new ArrayList<>();
+        List<Entered> entries = new ArrayList<>();
         List.of(trials, seed, coverage).forEach(each -> each.ifPresent(entries::add));
         return new SamplingChoice(entries, skipped);
     }
 
-    /** Reads what can be typed into a field of the board in the window. */
-    abstract static class Typed implements ITypeConverter<SamplingChoice.Entry> {
-        private static final Board ANY = Board.named("any");
-
-        private final BoardField field;
-
-        Typed(BoardField field) {
-            this.field = field;
-        }
-
-        @Override
-        public SamplingChoice.Entry convert(String text) {
-            return switch (field.read(text, ANY)) {
-                case Reading.Value<Board> _ -> new SamplingChoice.Entry(field, text);
-                case Reading.Misread<Board>(String problem) -> throw new TypeConversionException(problem);
-            };
-        }
-    }
-
     /** Reads a number of trials. */
-    static final class Trials extends Typed {
+    static final class Trials extends Entered.Typed {
         Trials() {
             super(BoardField.TRIALS);
         }
     }
 
     /** Reads a seed. */
-    static final class Seed extends Typed {
+    static final class Seed extends Entered.Typed {
         Seed() {
             super(BoardField.SEED);
         }
     }
 
     /** Reads a coverage probability. */
-    static final class Coverage extends Typed {
+    static final class Coverage extends Entered.Typed {
         Coverage() {
             super(BoardField.COVERAGE);
         }

@@ -83,15 +83,19 @@ public enum BoardField {
             + "standard uncertainty's digits are stable)", TrialsText::trials, TrialsText::withTrials),
     SEED("Seed of all draws", "a whole number; another seed gives other draws, the same seed the same figures",
             board -> Long.toString(board.uncertainty().sampling().seed()), TrialsText::withSeed),
-    WANTED("Wanted, in this order", "the first decides, each next one among choices equally good: least heat, most even "
-            + "heat, least cost, fewest parts, widest margin", board -> PreferenceText.order(board.preference().order()),
+    WANTED("Wanted, in this order",
+            "the first decides, each next one among choices equally good: least heat, most even "
+                    + "heat, least cost, fewest parts, widest margin",
+            board -> PreferenceText.order(board.preference().order()),
             PreferenceText::withOrder),
     PART_NUMBER_COST("Cost of a part number", "of one more distinct part number in the whole build, in the catalogue's "
             + "currency, such as 12.50", PreferenceText::partNumberCost, PreferenceText::withPartNumberCost),
     ROUNDS("Rounds of the search", "0 to 1000000; more take longer and may find better choices",
-            board -> Integer.toString(board.preference().rounds()), (text, board) -> whole(text, 0, Preference.MOST_ROUNDS)
+            board -> Integer.toString(board.preference().rounds()),
+            (text, board) -> whole(text, 0, Preference.MOST_ROUNDS)
                     .then(rounds -> Reading.value(board.withPreference(board.preference().withRounds(rounds))))),
-    TIME_LIMIT("Time limit of the search", "such as 20 s; empty for none. What is found within it depends on the machine",
+    TIME_LIMIT("Time limit of the search",
+            "such as 20 s; empty for none. What is found within it depends on the machine",
             PreferenceText::timeLimit, PreferenceText::withTimeLimit),
     CHOICE_SEED("Seed of the search", "a whole number; the same board, rounds and seed give the same plan",
             board -> Long.toString(board.preference().seed()), PreferenceText::withSeed);

@@ -156,6 +156,62 @@ class BoardCommandsTest {
                 .doesNotContain("channels accepted");
     }
 
+    @Test
+    void what_is_wanted_of_the_choice_decides_it() {
+        Run cheap = Run.of("plan", easy, "--no-sampling", "--prefer", "least cost", "--rounds", "20");
+        Run cool = Run.of("plan", easy, "--no-sampling", "--prefer", "least heat, least cost", "--rounds", "20");
+
+        assertThat(cheap.out()).contains("chosen for  least cost\n")
+                .containsPattern("search +[\\d.]+ m?s, \\d+ rounds?, seed");
+        assertThat(cool.out()).contains("chosen for  least heat, then least cost\n");
+        assertThat(build(cheap)).isLessThanOrEqualTo(build(cool));
+    }
+
+    private static double build(Run run) {
+        String line = run.out().lines().filter(each -> each.startsWith("whole build: ")).findFirst().orElseThrow();
+        return Double.parseDouble(line.substring("whole build: ".length(), line.indexOf(" EUR")).replace(",", ""));
+    }
+
+    @Test
+    void a_front_of_a_real_board_leads_from_cool_to_cheap_and_its_plans_check() {
+        Path out = folder.resolve("easy-front");
+
+        Run run = Run.of("front", easy, "--points", "3", "--rounds", "20", "--out", out);
+
+        assertThat(run.err()).isEmpty();
+        assertThat(run.code()).isZero();
+        List<Plan> plans = List.of(checked(out.resolve("front-01.board.json")),
+                checked(out.resolve("front-02.board.json")));
+        assertThat(heat(plans.get(0))).isLessThan(heat(plans.get(1)));
+        assertThat(plans.get(0).buildCost()).isGreaterThan(plans.get(1).buildCost());
+        assertThat(plans).allMatch(Plan::accepted);
+    }
+
+    private static Plan checked(Path board) {
+        Workplace workplace = Workplace.open(board, List.of()).ifOpened().orElseThrow();
+        return new BoardPlanner().check(workplace.board(), workplace.catalogue(), Progress.SILENT);
+    }
+
+    private static double heat(Plan checked) {
+        return checked.channels().stream().mapToDouble(each -> each.solved().orElseThrow().heat()).sum();
+    }
+
+    @Test
+    void other_choices_and_what_ifs_of_a_real_board_are_answered() {
+        String channel = plan.channels().getFirst().channel().name();
+
+        Run others = Run.of("others", easy, channel, "--most", "2", "--rounds", "10");
+        Run whatIf = Run.of("what-if", easy, "--vary", "build quantity", "--from", "5", "--to", "50", "--steps", "2",
+                "--rounds", "10");
+
+        assertThat(others.err() + whatIf.err()).isEmpty();
+        assertThat(others.out().lines()).anyMatch(line -> line.startsWith("now "))
+                .anyMatch(line -> line.startsWith("1   ")).anyMatch(line -> line.startsWith("2   "));
+        assertThat(whatIf.code()).isZero();
+        assertThat(whatIf.out().lines()).anyMatch(line -> line.startsWith("5 boards") && line.contains(" EUR"))
+                .anyMatch(line -> line.startsWith("50 boards") && line.contains(" EUR"));
+    }
+
     private static Path pinnedEasy() {
         Path pinned = folder.resolve("easy-pinned.board.json");
         assertThat(Run.of("plan", easy, "--no-sampling", "--pinned", pinned).code()).isZero();

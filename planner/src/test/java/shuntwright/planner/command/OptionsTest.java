@@ -14,7 +14,7 @@ import shuntwright.io.planfile.Cautions;
 class OptionsTest {
 
     @ParameterizedTest
-    @ValueSource(strings = {"", "plan", "check", "window"})
+    @ValueSource(strings = {"", "plan", "check", "front", "others", "what-if", "window"})
     void every_command_explains_itself_with_examples(String command) {
         Run run = Run.of(Stream.of(command, "--help").filter(each -> !each.isEmpty()).toArray());
 
@@ -28,7 +28,7 @@ class OptionsTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"plan", "check"})
+    @ValueSource(strings = {"plan", "check", "front", "others", "what-if"})
     void the_help_says_what_exit_codes_mean(String command) {
         assertThat(Run.of(command, "--help").out()).containsSubsequence("Exit codes:", "0   ", "1   ", "2   ", "3   ");
     }

@@ -47,6 +47,23 @@ class ProgressLineTest {
     }
 
     @Test
+    void the_best_so_far_stands_with_its_own_stage_only() throws InterruptedException {
+        PrintStream stream = new PrintStream(err, true, StandardCharsets.UTF_8);
+        try (ProgressLine line = ProgressLine.on(new Terminal(stream, stream, StandardCharsets.UTF_8, false, true),
+                true)) {
+            line.reached("choosing", 0, 300);
+            line.better(ChoiceFixture.plan().choice().orElseThrow());
+            Thread.sleep(LONGER_THAN_SILENCE);
+            line.reached("choosing", 12, 300);
+            Thread.sleep(LONGER_THAN_SILENCE);
+            line.reached("sampling", 1, 8);
+        }
+
+        assertThat(err.toString(StandardCharsets.UTF_8))
+                .startsWith("\rchoosing 12 of 300; best so far 1.8 W (proven), 1,250.00 (2 %)\rsampling 1 of 8 ");
+    }
+
+    @Test
     void nothing_is_shown_where_nobody_watches() throws InterruptedException {
         assertThat(shown(false)).isEmpty();
     }

@@ -5,6 +5,7 @@ import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.function.Supplier;
 import java.util.stream.Stream;
 
 /**
@@ -21,10 +22,17 @@ record Run(int code, String out, String err) {
     static final Path WREN = ROOT.resolve("demo-boards").resolve("sledge-wren.board.json");
 
     static Run of(Object... args) {
+        return with(Solver.OWN, args);
+    }
+
+    /** With other answers to questions about whole boards than the program's own. */
+    static Run with(Supplier<Solver> solvers, Object... args) {
         ByteArrayOutputStream out = new ByteArrayOutputStream();
         ByteArrayOutputStream err = new ByteArrayOutputStream();
         int code = Commands.run(Stream.of(args).map(Object::toString).toArray(String[]::new),
-                new PrintStream(out, true, StandardCharsets.UTF_8), new PrintStream(err, true, StandardCharsets.UTF_8));
+                Terminal.piped(new PrintStream(out, true, StandardCharsets.UTF_8),
+                        new PrintStream(err, true, StandardCharsets.UTF_8)),
+                solvers);
         return new Run(code, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));
     }
 

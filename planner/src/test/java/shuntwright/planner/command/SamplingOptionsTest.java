@@ -39,7 +39,7 @@ class SamplingOptionsTest {
 
         assertThat(run.uncertainty().sampling()).isEqualTo(new Sampling(new Trials.Fixed(1_000_000), -3));
         assertThat(run.acceptance()).isEqualTo(new Acceptance(Acceptance.Basis.COVERAGE, 0.999));
-        assertThat(SamplingChoice.restored(run, BOARD)).isEqualTo(BOARD);
+        assertThat(Entered.restored(run, BOARD)).isEqualTo(BOARD);
     }
 
     @ParameterizedTest

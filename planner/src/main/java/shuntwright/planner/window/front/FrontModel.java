@@ -33,10 +33,11 @@ import shuntwright.planner.work.Exploring;
 /** The front of two objectives, and the point chosen of it. */
 public final class FrontModel {
     /** Most plans of a front. */
-    static final int POINTS = 15;
+    private static final int POINTS = 15;
 
     private final BoardSession session;
     private final Exploring exploring;
+    private final int points;
     private final Asked<Front> asked;
     private final ObjectProperty<Objective> first = new SimpleObjectProperty<>(Objective.LEAST_HEAT);
     private final ObjectProperty<Objective> second = new SimpleObjectProperty<>(Objective.LEAST_COST);
@@ -49,6 +50,12 @@ public final class FrontModel {
     private final BooleanBinding takeable;
 
     public FrontModel(BoardSession session, Exploring exploring) {
+        this(session, exploring, POINTS);
+    }
+
+    /** @param points most plans of a front */
+    FrontModel(BoardSession session, Exploring exploring, int points) {
+        this.points = points;
         this.session = session;
         this.exploring = exploring;
         asked = new Asked<>(session, exploring.inquiry());
@@ -107,7 +114,7 @@ public final class FrontModel {
         Objective other = second.get();
         asked.ask("looking for the front of " + Aims.title(along) + " and " + Aims.title(other),
                 (board, catalogue) -> progress -> ascending(exploring.explorer().front(board, catalogue, along, other,
-                        POINTS, progress)));
+                        points, progress)));
     }
 
     /** From left to right, so that keys go that way too. */

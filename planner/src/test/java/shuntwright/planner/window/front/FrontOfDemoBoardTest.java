@@ -19,7 +19,7 @@ import shuntwright.planner.work.Exploring;
 class FrontOfDemoBoardTest {
     private final BoardSession session = Sessions.planned(new BoardPlanner()::plan);
     private final FrontModel model = new FrontModel(session,
-            new Exploring(Explorer.of(new BoardPlanner()), Runnable::run, Runnable::run));
+            new Exploring(Explorer.of(new BoardPlanner()), Runnable::run, Runnable::run), 4);
 
     @Test
     void theBoardHasThePlanThatWasTaken() {
