@@ -14,18 +14,13 @@ import shuntwright.quantity.Dimension;
 import shuntwright.quantity.Reading;
 
 /** What is wanted of the board-wide choice as text. */
-public final class PreferenceText {
+final class PreferenceText {
     private PreferenceText() {
     }
 
-    /** "least heat", as in the board file. */
-    public static String wanted(Objective objective) {
-        return objective.word();
-    }
-
     /** "least heat, least cost". */
-    public static String order(List<Objective> order) {
-        return order.stream().map(PreferenceText::wanted).collect(Collectors.joining(", "));
+    static String order(List<Objective> order) {
+        return order.stream().map(Objective::word).collect(Collectors.joining(", "));
     }
 
     static Reading<Board> withOrder(String text, Board board) {
@@ -35,7 +30,7 @@ public final class PreferenceText {
             if (typed.isEmpty()) {
                 continue;
             }
-            Optional<Objective> found = Arrays.stream(Objective.values()).filter(each -> wanted(each).equals(typed))
+            Optional<Objective> found = Arrays.stream(Objective.values()).filter(each -> each.word().equals(typed))
                     .findFirst();
             if (found.isEmpty()) {
                 return Reading.misread("\"" + part.strip() + "\" is none of "

@@ -40,6 +40,7 @@ public final class Inquiry<T> {
 
     private final class Job implements Progress {
         private final AtomicBoolean stop = new AtomicBoolean();
+        private final AtomicBoolean content = new AtomicBoolean();
         private final AtomicReference<@Nullable Reached> reached = new AtomicReference<>();
         private final AtomicReference<@Nullable BoardChoice> better = new AtomicReference<>();
 
@@ -73,6 +74,11 @@ public final class Inquiry<T> {
         @Override
         public boolean cancelled() {
             return stop.get();
+        }
+
+        @Override
+        public boolean enough() {
+            return content.get();
         }
     }
 
@@ -120,8 +126,6 @@ public final class Inquiry<T> {
 
     private void work(Job job, Question<T> question, Consumer<T> done, Consumer<RuntimeException> failed) {
         if (job.cancelled()) {
-            publisher.execute(() -> finish(job, () -> {
-            }));
             return;
         }
         long start = clock.getAsLong();
@@ -160,7 +164,7 @@ public final class Inquiry<T> {
     public void stop() {
         Job job = current;
         if (job != null) {
-            job.stop.set(true);
+            job.content.set(true);
             stage.set("ending with the best so far");
             progress.set(-1);
         }

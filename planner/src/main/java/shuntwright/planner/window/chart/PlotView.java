@@ -284,7 +284,13 @@ public final class PlotView extends Region {
             mark.resizeRelocate(field.x(spot.place().x()) - Math.floor(size / 2),
                     field.y(spot.place().y()) - Math.floor(size / 2), size, size);
             Tooltip.install(mark, new Tooltip(spot.words()));
-            if (spot.kind() != Plot.Kind.PRESENT) {
+            if (spot.kind() == Plot.Kind.PRESENT) {
+                Label word = label("now");
+                double width = word.prefWidth(-1);
+                boolean room = mark.getLayoutX() + size + width + GAP < field.right();
+                word.resizeRelocate(room ? mark.getLayoutX() + size + 2 : mark.getLayoutX() - 2 - width,
+                        mark.getLayoutY(), width, size);
+            } else {
                 mark.setOnMouseClicked(event -> {
                     if (event.getButton() == MouseButton.PRIMARY) {
                         requestFocus();

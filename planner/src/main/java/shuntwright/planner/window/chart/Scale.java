@@ -15,7 +15,6 @@ import java.util.stream.DoubleStream;
  */
 public record Scale(Unit unit, double min, double max, boolean logarithmic) {
     private static final double ROOM = 0.07;
-    private static final double[] ROUND = {1, 2, 5};
 
     public Scale {
         if (!(min < max) || (logarithmic && !(min > 0))) {
@@ -74,24 +73,24 @@ public record Scale(Unit unit, double min, double max, boolean logarithmic) {
         return ticks;
     }
 
-    /** 1, 2 and 5 of each power of ten, or the powers alone where those are too many. */
+    /** 1, 2 and 5 of each power of ten, where those are too many 1 and 3, or the powers alone. */
     private List<Tick> decades(int most) {
-        List<Tick> all = new ArrayList<>();
-        List<Tick> powers = new ArrayList<>();
-        int first = (int) Math.floor(Math.log10(min));
-        for (int exponent = first; Math.pow(10, exponent) <= max; exponent++) {
-            for (double round : ROUND) {
-                double number = round * Math.pow(10, exponent);
+        List<Tick> all = decades(List.of(1, 2, 5));
+        List<Tick> fewer = all.size() <= most ? all : decades(List.of(1, 3));
+        return fewer.size() <= most ? fewer : decades(List.of(1));
+    }
+
+    private List<Tick> decades(List<Integer> digits) {
+        List<Tick> ticks = new ArrayList<>();
+        for (int exponent = (int) Math.floor(Math.log10(min)); Math.pow(10, exponent) <= max; exponent++) {
+            for (int digit : digits) {
+                double number = digit * Math.pow(10, exponent);
                 if (number >= min && number <= max) {
-                    Tick tick = tick(number, Math.max(0, -exponent));
-                    all.add(tick);
-                    if (round == 1) {
-                        powers.add(tick);
-                    }
+                    ticks.add(tick(number, Math.max(0, -exponent)));
                 }
             }
         }
-        return all.size() <= most ? all : powers;
+        return ticks;
     }
 
     private Tick tick(double number, int decimals) {

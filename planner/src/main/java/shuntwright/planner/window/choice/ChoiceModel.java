@@ -14,7 +14,6 @@ import shuntwright.board.Objective;
 import shuntwright.plan.BoardChoice;
 import shuntwright.plan.Conflict;
 import shuntwright.plan.Plan;
-import shuntwright.planner.entry.PreferenceText;
 import shuntwright.planner.session.BoardSession;
 import shuntwright.planner.session.Planned;
 
@@ -104,8 +103,8 @@ public final class ChoiceModel {
         if (from >= 0 && from != to) {
             moved.remove(from);
             moved.add(to, objective);
-            edit("put " + PreferenceText.wanted(objective) + (by < 0 ? " before " : " behind ")
-                    + PreferenceText.wanted(order.get().get(to)), moved);
+            edit("put " + objective.word() + (by < 0 ? " before " : " behind ")
+                    + order.get().get(to).word(), moved);
         }
     }
 
@@ -114,7 +113,7 @@ public final class ChoiceModel {
         List<Objective> more = new ArrayList<>(order.get());
         if (!more.contains(objective)) {
             more.add(objective);
-            edit("want " + PreferenceText.wanted(objective) + " too", more);
+            edit("want " + objective.word() + " too", more);
         }
     }
 
@@ -122,7 +121,7 @@ public final class ChoiceModel {
     void remove(Objective objective) {
         List<Objective> left = new ArrayList<>(order.get());
         if (left.size() > 1 && left.remove(objective)) {
-            edit("do not want " + PreferenceText.wanted(objective), left);
+            edit("do not want " + objective.word(), left);
         }
     }
 

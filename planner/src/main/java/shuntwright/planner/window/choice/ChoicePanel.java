@@ -147,8 +147,7 @@ public final class ChoicePanel {
     }
 
     private void conflict(Shown.Clash clash) {
-        list.getChildren().addAll(title("Demands that cannot be met together"),
-                flagged("conflict", "fault", clash.words()), text(clash.minimal()),
+        list.getChildren().addAll(title(clash.title()), flagged("conflict", "fault", clash.words()),
                 title("What would end the conflict, each by itself"));
         for (Shown.Part part : clash.parts()) {
             Label words = text(part.demand() + ": " + part.change());

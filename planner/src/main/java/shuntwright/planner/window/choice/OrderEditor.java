@@ -13,7 +13,6 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Region;
 
 import shuntwright.board.Objective;
-import shuntwright.planner.entry.PreferenceText;
 import shuntwright.planner.window.figures.Aims;
 
 /** What is wanted of the choice, to be put in order. */
@@ -50,7 +49,7 @@ final class OrderEditor {
         grid.add(title, 0, 0, 5, 1);
         for (int at = 0; at < order.size(); at++) {
             Objective each = order.get(at);
-            String name = PreferenceText.wanted(each);
+            String name = each.word();
             Label place = new Label(at + 1 + ".");
             place.getStyleClass().add("hint");
             Label words = new Label(Aims.wanted(each));

@@ -12,13 +12,14 @@ import shuntwright.board.Board;
 import shuntwright.board.SenseSupply;
 import shuntwright.board.Zone;
 import shuntwright.plan.Conflict;
-import shuntwright.quantity.Dimension;
-import shuntwright.quantity.QuantityWriter;
 
 /** Relaxes a limit that takes part in a conflict. */
 final class Relaxing {
+    /** Names of limits in a choice. */
+    private static final String SUPPLY = "sense supply";
+    private static final String BOARD = "board heat";
     private static final String ZONE = "zone ";
-    private static final MathContext UPWARD = new MathContext(3, RoundingMode.CEILING);
+    private static final MathContext UPWARD = new MathContext(4, RoundingMode.CEILING);
 
     private Relaxing() {
     }
@@ -34,21 +35,6 @@ final class Relaxing {
         return OptionalDouble.of(larger ? round : exact);
     }
 
-    /** "2.5 W → 2.9 W", or why there is no such number. */
-    static String words(Conflict.Member member) {
-        OptionalDouble needed = needed(member);
-        String now = member.now().isPresent() ? show(member.now().getAsDouble(), member.dimension()) : "";
-        if (needed.isEmpty()) {
-            return (now.isEmpty() ? "" : now + "; ") + "relaxing it alone was not found to help";
-        }
-        String then = "would need " + show(needed.getAsDouble(), member.dimension());
-        return now.isEmpty() ? then : now + " → " + then;
-    }
-
-    private static String show(double value, Dimension dimension) {
-        return QuantityWriter.show(value, dimension);
-    }
-
     /** The change of the board that relaxes this limit; empty for a member that is no limit of the board. */
     static Optional<UnaryOperator<Board>> change(Conflict.Member member, Board board) {
         OptionalDouble needed = needed(member);
@@ -56,10 +42,10 @@ final class Relaxing {
             return Optional.empty();
         }
         double value = needed.getAsDouble();
-        if (member.name().equals("supply")) {
+        if (member.name().equals(SUPPLY)) {
             return Optional.of(at -> at.withSupply(new SenseSupply(at.supply().voltage(), value)));
         }
-        if (member.name().equals("board")) {
+        if (member.name().equals(BOARD)) {
             return Optional.of(at -> at.withHeatLimit(OptionalDouble.of(value)));
         }
         return zone(member.name(), board).map(zone -> at -> at.withZones(relaxed(at.zones(), zone, value)));

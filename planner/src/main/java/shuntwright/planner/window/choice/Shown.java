@@ -44,10 +44,10 @@ record Shown(String title, boolean working, List<Aim> aims, List<Fact> facts, Li
     /**
      * Demands that cannot be met together.
      *
-     * @param words   what conflicts with what
-     * @param minimal how sure it is that all of them are needed for the conflict
+     * @param title how sure it is that all of them are needed for the conflict
+     * @param words what conflicts with what
      */
-    record Clash(String words, String minimal, List<Part> parts) {
+    record Clash(String title, String words, List<Part> parts) {
         Clash {
             parts = List.copyOf(parts);
         }

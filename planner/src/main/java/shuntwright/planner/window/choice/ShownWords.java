@@ -3,10 +3,10 @@ package shuntwright.planner.window.choice;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
 
 import shuntwright.board.Board;
 import shuntwright.plan.BoardChoice;
+import shuntwright.plan.ChoiceWords;
 import shuntwright.plan.Conflict;
 import shuntwright.plan.Reached;
 import shuntwright.planner.window.figures.Aims;
@@ -25,11 +25,14 @@ final class ShownWords {
     private static Shown.Aim aim(Reached reached, String currency) {
         String wanted = Aims.wanted(reached.objective());
         String value = Aims.show(reached.objective(), reached.value(), currency);
-        OptionalDouble gap = reached.gap();
         String bound = reached.bound().isPresent()
                 ? Aims.show(reached.objective(), reached.bound().getAsDouble(), currency)
                 : reached.proof() == Reached.Proof.PROVEN ? value : "–";
-        String distance = gap.isPresent() ? Aims.atMost(gap.getAsDouble()) : "–";
+        String distance = switch (reached.proof()) {
+            case PROVEN -> "0 %";
+            case BOUNDED -> ChoiceWords.distance(reached);
+            case OPEN -> "–";
+        };
         return new Shown.Aim(wanted, value, bound, distance, reached.proof(), switch (reached.proof()) {
             case PROVEN -> "proven best";
             case BOUNDED -> "at most " + distance + " from the best";
@@ -52,20 +55,15 @@ final class ShownWords {
 
     /** @param current false when the conflict is of an earlier state of the board, so that nothing can be applied */
     static Shown.Clash clash(Conflict conflict, Board board, boolean current) {
-        return new Shown.Clash(conflict.words(), conflict.minimal()
-                ? "Proven minimal: leaving out any one of these makes the others possible."
-                : "Not proven minimal: a part of these may conflict already.",
-                conflict.members().stream().map(each -> new Shown.Part(each, demand(each), Relaxing.words(each),
+        return new Shown.Clash(conflict.minimal()
+                ? "Demands that cannot be met together; without any one of them the others can"
+                : "Demands that cannot be met together; a part of them may conflict already",
+                conflict.words(),
+                conflict.members().stream().map(each -> new Shown.Part(each, demand(each), ChoiceWords.relaxed(each),
                         current && Relaxing.change(each, board).isPresent())).toList());
     }
 
     private static String demand(Conflict.Member member) {
-        String kind = switch (member.kind()) {
-            case SHARED_LIMIT -> "";
-            case CHANNEL -> "channel ";
-            case TAP -> "tap ";
-        };
-        String name = member.name().startsWith(kind) ? member.name() : kind + member.name();
-        return member.what().isEmpty() ? name : name + ", " + member.what();
+        return ChoiceWords.owner(member) + (member.what().isEmpty() ? "" : ", " + member.what());
     }
 }

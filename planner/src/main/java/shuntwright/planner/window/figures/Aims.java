@@ -3,7 +3,6 @@ package shuntwright.planner.window.figures;
 import java.util.Locale;
 
 import shuntwright.board.Objective;
-import shuntwright.planner.entry.PreferenceText;
 import shuntwright.quantity.Dimension;
 import shuntwright.quantity.QuantityWriter;
 
@@ -14,7 +13,7 @@ public final class Aims {
 
     /** "Least heat". */
     public static String wanted(Objective objective) {
-        String words = PreferenceText.wanted(objective);
+        String words = objective.word();
         return Character.toUpperCase(words.charAt(0)) + words.substring(1);
     }
 
@@ -31,6 +30,9 @@ public final class Aims {
 
     /** "4.127 W", "81.3 %", "812.40 EUR", "37 part numbers". */
     public static String show(Objective objective, double value, String currency) {
+        if (!Double.isFinite(value)) {
+            return "none";
+        }
         return switch (objective) {
             case LEAST_HEAT -> QuantityWriter.show(value, Dimension.POWER);
             case MOST_EVEN_HEAT, WIDEST_MARGIN -> percent(value);
@@ -50,12 +52,6 @@ public final class Aims {
 
     private static String percent(double fraction) {
         return String.format(Locale.ROOT, "%.1f %%", fraction * 100).replace('-', '−');
-    }
-
-    /** A share in per cent that is never said to be less than it is, "3.2 %". */
-    public static String atMost(double share) {
-        double percent = Math.ceil(share * 1000) / 10;
-        return percent >= 10 ? Math.round(Math.ceil(share * 100)) + " %" : String.format(Locale.ROOT, "%.1f %%", percent);
     }
 
     /** Heat for columns, always with three decimals, "1.128 W". */

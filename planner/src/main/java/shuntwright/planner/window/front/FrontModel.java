@@ -1,5 +1,6 @@
 package shuntwright.planner.window.front;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
@@ -32,10 +33,11 @@ import shuntwright.planner.work.Exploring;
 /** The front of two objectives, and the point chosen of it. */
 public final class FrontModel {
     /** Most plans of a front. */
-    static final int POINTS = 15;
+    private static final int POINTS = 15;
 
     private final BoardSession session;
     private final Exploring exploring;
+    private final int points;
     private final Asked<Front> asked;
     private final ObjectProperty<Objective> first = new SimpleObjectProperty<>(Objective.LEAST_HEAT);
     private final ObjectProperty<Objective> second = new SimpleObjectProperty<>(Objective.LEAST_COST);
@@ -48,6 +50,12 @@ public final class FrontModel {
     private final BooleanBinding takeable;
 
     public FrontModel(BoardSession session, Exploring exploring) {
+        this(session, exploring, POINTS);
+    }
+
+    /** @param points most plans of a front */
+    FrontModel(BoardSession session, Exploring exploring, int points) {
+        this.points = points;
         this.session = session;
         this.exploring = exploring;
         asked = new Asked<>(session, exploring.inquiry());
@@ -105,8 +113,14 @@ public final class FrontModel {
         Objective along = first.get();
         Objective other = second.get();
         asked.ask("looking for the front of " + Aims.title(along) + " and " + Aims.title(other),
-                (board, catalogue) -> progress -> exploring.explorer().front(board, catalogue, along, other, POINTS,
-                        progress));
+                (board, catalogue) -> progress -> ascending(exploring.explorer().front(board, catalogue, along, other,
+                        points, progress)));
+    }
+
+    /** From left to right, so that keys go that way too. */
+    private static Front ascending(Front front) {
+        return new Front(front.first(), front.second(), front.points().stream()
+                .sorted(Comparator.comparingDouble(Front.Point::first)).toList());
     }
 
     /** Chooses a point. */

@@ -7,10 +7,10 @@ import java.util.OptionalDouble;
 
 import shuntwright.board.Board;
 import shuntwright.plan.BoardChoice;
+import shuntwright.plan.ChoiceWords;
 import shuntwright.plan.Plan;
 import shuntwright.plan.Reached;
 import shuntwright.planner.entry.BoardField;
-import shuntwright.planner.entry.PreferenceText;
 import shuntwright.planner.window.figures.Aims;
 
 /** The tile that says what is wanted of the board-wide choice, and how good it is. */
@@ -23,7 +23,7 @@ final class ChoiceTile {
 
     static SharedTile of(Board board, Optional<Plan> plan) {
         Optional<BoardChoice> choice = plan.flatMap(Plan::choice);
-        String wanted = PreferenceText.wanted(board.preference().order().getFirst());
+        String wanted = board.preference().order().getFirst().word();
         boolean holds = choice.map(each -> each.broken().isEmpty() && each.conflict().isEmpty()).orElse(true);
         SharedTile tile = new SharedTile("Choice, " + wanted, choice.map(ChoiceTile::value).orElse("–"),
                 OptionalDouble.empty(), holds, FIELDS);
@@ -39,7 +39,7 @@ final class ChoiceTile {
     private static String proof(Reached reached) {
         return switch (reached.proof()) {
             case PROVEN -> "proven best";
-            case BOUNDED -> "at most " + Aims.atMost(reached.gap().orElse(0)) + " from best";
+            case BOUNDED -> "at most " + ChoiceWords.distance(reached) + " from best";
             case OPEN -> "no bound known";
         };
     }

@@ -44,7 +44,8 @@ class ScaleTest {
         Scale boards = Scale.around(Unit.count("Boards"), DoubleStream.of(1, 10, 100), true);
         assertThat(boards.place(10) - boards.place(1)).isCloseTo(boards.place(100) - boards.place(10), within(1e-12));
         assertThat(texts(boards, 9)).containsExactly("1", "2", "5", "10", "20", "50", "100");
-        assertThat(texts(boards, 5)).as("powers alone where there is little room").containsExactly("1", "10", "100");
+        assertThat(texts(boards, 6)).containsExactly("1", "3", "10", "30", "100");
+        assertThat(texts(boards, 4)).as("powers alone where there is little room").containsExactly("1", "10", "100");
     }
 
     /** Whatever the values are, all stand on the scale, and there are neither none nor too many numbers. */
