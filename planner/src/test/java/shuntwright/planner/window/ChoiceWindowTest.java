@@ -197,7 +197,7 @@ class ChoiceWindowTest {
         picture(robot, "hand-front-empty");
         robot.clickOn("#compute-front");
         waitFor(() -> !robot.lookup("#front .plot-spot").queryAll().isEmpty());
-        robot.clickOnonScreen(( -> robot.lookup("#front .plot-spot").queryAll().stream().findFirst()
+        robot.clickOn(onScreen(() -> robot.lookup("#front .plot-spot").queryAll().stream().findFirst()
                 .orElseThrow()));
         robot.push(KeyCode.RIGHT);
         WaitForAsyncUtils.waitForFxEvents();
