@@ -372,16 +372,14 @@ final class BoardChooser {
                 wish.aims().stream().map(model::slack).toList(),
                 wish.caps().entrySet().stream().map(each -> new Aim.Cap(model.aim(each.getKey()), each.getValue()))
                         .toList());
-        long until = preference.timeLimit().isPresent()
-                ? System.nanoTime() + (long) (preference.timeLimit().getAsDouble() * 1e9)
-                : Long.MAX_VALUE;
+        double until = progress.seconds() + preference.timeLimit().orElse(Double.POSITIVE_INFINITY);
         shuntwright.selection.Watch watch = new shuntwright.selection.Watch() {
             @Override
             public boolean ended() {
                 if (progress.cancelled()) {
                     throw new BoardPlanner.Cancelled();
                 }
-                return progress.enough() || (until != Long.MAX_VALUE && System.nanoTime() > until);
+                return progress.enough() || progress.seconds() > until;
             }
 
             @Override

@@ -32,6 +32,14 @@ public interface Progress {
     default void better(BoardChoice best) {
     }
 
+    /**
+     * Reading of a clock, s, from any start: what a time limit of the search is measured with. The domain has no clock of its own; without
+     * one a time limit never cuts in.
+     */
+    default double seconds() {
+        return 0;
+    }
+
     /** True when the search for a better choice should end with the best it has; the plan is finished with that. */
     default boolean enough() {
         return false;

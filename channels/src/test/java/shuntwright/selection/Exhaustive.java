@@ -36,7 +36,7 @@ final class Exhaustive {
         for (int o = 0; o < options.size(); o++) {
             int value = options.get(o).value();
             boolean first = group >= 0 && !values.containsKey(group);
-            if (group >= 0 && !first && values.get(group) != value) {
+            if (group >= 0 && values.getOrDefault(group, value) != value) {
                 continue;
             }
             if (first) {

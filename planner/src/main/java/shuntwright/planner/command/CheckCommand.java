@@ -1,6 +1,7 @@
 package shuntwright.planner.command;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 
 import picocli.CommandLine.Command;
@@ -30,7 +31,7 @@ final class CheckCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         return new Job(Job.Kind.CHECK, input.board(), input.parts(), price.chosen(), sampling.chosen(), output.chosen(),
-                Optional.empty()).run(terminal)
+                Optional.empty(), OptionalDouble.empty()).run(terminal)
                 .number();
     }
 }

@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import java.security.CodeSource;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.stream.Stream;
 
 /** The demo board that comes with the program, for a first look. */
@@ -27,7 +28,7 @@ final class Demo {
         Job.Output output = new Job.Output(Optional.of(place().resolve(WORKBOOK)), Optional.empty(), false,
                 Optional.empty());
         ExitCode result = new Job(Job.Kind.PLAN, board, List.of(), List.of(), SamplingChoice.OF_THE_BOARD, output,
-                Optional.empty()).run(terminal);
+                Optional.empty(), OptionalDouble.empty()).run(terminal);
         terminal.print("");
         terminal.print("To plan a board of your own: shuntwright plan BOARD; for more: shuntwright --help");
         return result;

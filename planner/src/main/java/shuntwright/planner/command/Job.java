@@ -3,8 +3,11 @@ package shuntwright.planner.command;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.stream.Stream;
 
 import shuntwright.board.Board;
@@ -17,6 +20,8 @@ import shuntwright.io.workplace.Workplace;
 import shuntwright.plan.BoardPlanner;
 import shuntwright.plan.BoardSampler;
 import shuntwright.plan.Plan;
+import shuntwright.planner.proof.ChildProver;
+import shuntwright.selection.Prover;
 
 /**
  * Opens a board, plans or checks it, samples the plan, saves and prints.
@@ -28,9 +33,10 @@ import shuntwright.plan.Plan;
  * @param sampling how to sample the plan
  * @param output   what to make of the plan
  * @param pinned   where to write the board with every choice pinned
+ * @param proving  seconds a solver in a process of its own may take for each objective; empty for own bounds only
  */
 record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, SamplingChoice sampling, Output output,
-        Optional<Path> pinned) {
+        Optional<Path> pinned, OptionalDouble proving) {
 
     /** What is done with the board. */
     enum Kind {
@@ -87,19 +93,32 @@ record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, Sampli
     private Judged judge(Workplace opened, Terminal terminal) {
         Board asked = Entered.applied(wanted, sampling.applied(opened.board()));
         try (ProgressLine progress = ProgressLine.on(terminal, !output.json())) {
-            BoardPlanner planner = Solver.planner();
+            Set<String> complaints = new LinkedHashSet<>();
+            BoardPlanner planner = proving.isEmpty() ? Solver.planner() : new BoardPlanner(prover(complaints));
             long start = System.nanoTime();
             Plan plan = switch (kind) {
                 case PLAN -> planner.plan(asked, opened.catalogue(), progress);
                 case CHECK -> planner.check(asked, opened.catalogue(), progress);
             };
             Duration choosing = Duration.ofNanos(System.nanoTime() - start);
+            complaints.forEach(each -> terminal.complain("The solver was no help; the bounds are the program's own. " + each));
             return new Judged(sampling.skipped()
                     ? plan
                     : new BoardSampler(Runtime.getRuntime().availableProcessors()).sample(plan,
                             asked.uncertainty().sampling(), BoardSampler.Depth.FULL, progress),
                     choosing);
         }
+    }
+
+    private Prover prover(Set<String> complaints) {
+        Prover child = new ChildProver(Duration.ofMillis(Math.max(1, Math.round(proving.orElseThrow() * 1000))));
+        return (selection, question, watch) -> {
+            Prover.Finding finding = child.ask(selection, question, watch);
+            if (!finding.complaint().isEmpty()) {
+                complaints.add(finding.complaint());
+            }
+            return finding;
+        };
     }
 
     /**

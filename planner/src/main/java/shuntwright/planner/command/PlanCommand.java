@@ -10,6 +10,8 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
+import shuntwright.board.Board;
+
 /** Plans a board. */
 @Command(name = "plan", description = "Chooses parts for every channel of a board and judges the result.")
 final class PlanCommand implements Callable<Integer> {
@@ -36,6 +38,9 @@ final class PlanCommand implements Callable<Integer> {
     @Option(names = "--pinned", paramLabel = "FILE", description = "Write the board with every choice pinned, so that check judges exactly this plan.")
     private Optional<Path> pinned = Optional.empty();
 
+    @Option(names = "--prove", paramLabel = "T", converter = ChoiceOptions.TimeLimit.class, description = "Let a solver in a process of its own look for a better bound, or a proof, of each objective for at most this time, such as 10s. Without it the bounds are the program's own.")
+    private Optional<Entered> proving = Optional.empty();
+
     PlanCommand(Terminal terminal) {
         this.terminal = terminal;
     }
@@ -44,7 +49,8 @@ final class PlanCommand implements Callable<Integer> {
     public Integer call() {
         return new Job(Job.Kind.PLAN, input.board(), input.parts(),
                 Stream.of(wanted.chosen(), search.chosen(), price.chosen()).flatMap(List::stream).toList(),
-                sampling.chosen(), output.chosen(), pinned)
+                sampling.chosen(), output.chosen(), pinned,
+                Entered.applied(proving.stream().toList(), Board.named("")).preference().timeLimit())
                 .run(terminal)
                 .number();
     }

@@ -67,6 +67,11 @@ final class ProgressLine implements Progress, AutoCloseable {
     }
 
     @Override
+    public double seconds() {
+        return System.nanoTime() / 1e9;
+    }
+
+    @Override
     public boolean cancelled() {
         return Thread.currentThread().isInterrupted();
     }

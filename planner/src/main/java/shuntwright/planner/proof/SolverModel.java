@@ -36,7 +36,7 @@ final class SolverModel {
     /** Digits of costs; prices have few decimals, so that they are mostly exact. */
     private static final int COST_DIGITS = 10;
     /** Prices of a piece that differ by less than this share of what a slot costs are told apart only by the sum of pieces. */
-    private static final double SPREAD = Double.parseDouble(System.getProperty("spread", "0.01"));
+    private static final double SPREAD = 0.01;
 
     private final Selection selection;
     private final Prover.Question question;

@@ -72,6 +72,11 @@ public final class Inquiry<T> {
         }
 
         @Override
+        public double seconds() {
+            return System.nanoTime() / 1e9;
+        }
+
+        @Override
         public boolean cancelled() {
             return stop.get();
         }

@@ -93,6 +93,11 @@ public final class PlanSampling {
         }
 
         @Override
+        public double seconds() {
+            return System.nanoTime() / 1e9;
+        }
+
+        @Override
         public boolean cancelled() {
             return stop.get();
         }
