@@ -48,6 +48,7 @@ final class ThresholdTerms {
                 + resistors.temperatureCoefficient() * (tap ? distance[end] : local[end]);
     }
 
+    @SuppressWarnings("ReferenceEquality")
     Range extremes(SourceVoltage source, int end) {
         for (int i = 0; i < extremes.length; i++) {
             // Almost always the very same record; comparing all its fields took a tenth of a plan.

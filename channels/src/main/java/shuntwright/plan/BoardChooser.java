@@ -144,7 +144,7 @@ final class BoardChooser {
         List<ChoiceModel.TapEntry> tapEntries = tapEntries(context, taps, open);
         ChannelMenu.Breadth breadth = wish.wide() ? ChannelMenu.Breadth.WIDE : ChannelMenu.Breadth.NARROW;
         Chosen first = chosen(context, wish, open, tapEntries, breadth, List.of(), start, progress);
-        if (!first.answer().keepsLimits() && breadth == ChannelMenu.Breadth.NARROW) {
+        if (!first.answer().keepsLimits() && breadth.equals(ChannelMenu.Breadth.NARROW)) {
             first = chosen(context, wish, open, tapEntries, ChannelMenu.Breadth.WIDE, List.of(), first.circuits(),
                     progress);
         }
@@ -381,7 +381,7 @@ final class BoardChooser {
                 if (progress.cancelled()) {
                     throw new BoardPlanner.Cancelled();
                 }
-                return progress.enough() || until != Long.MAX_VALUE && System.nanoTime() > until;
+                return progress.enough() || (until != Long.MAX_VALUE && System.nanoTime() > until);
             }
 
             @Override

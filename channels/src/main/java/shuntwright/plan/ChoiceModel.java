@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
@@ -47,7 +48,6 @@ final class ChoiceModel {
     private final List<TapEntry> taps;
     private final Selection selection;
     private final List<List<SenseCircuit>> menus = new ArrayList<>();
-    private final Map<Integer, Integer> slotOfEntry = new HashMap<>();
 
     /**
      * A channel that takes part.
@@ -171,6 +171,11 @@ final class ChoiceModel {
         }
     }
 
+    private int line(String number) {
+        return Objects.requireNonNull(lines.get(number));
+    }
+
+    /** Slots of channels come first, in the order of the entries. */
     private void slot(int index, Map<Object, Integer> known) {
         Entry entry = entries.get(index);
         String zone = entry.demand().channel().zone().orElse("");
@@ -187,19 +192,19 @@ final class ChoiceModel {
             menus.add(circuits);
             return builder.menu(new Selection.Menu(options, entry.tap()));
         });
-        slotOfEntry.put(index, builder.slot(new Selection.Slot(entry.name(), menu)));
+        builder.slot(new Selection.Slot(entry.name(), menu));
     }
 
     private Option option(Entry entry, SenseCircuit circuit, int value, String zone) {
         Map<Integer, Integer> pieces = new TreeMap<>();
-        pieces.merge(lines.get(circuit.shunt().partNumber()), circuit.shuntCount(), Integer::sum);
-        values(circuit).forEach((number, count) -> pieces.merge(lines.get(number), count, Integer::sum));
+        pieces.merge(line(circuit.shunt().partNumber()), circuit.shuntCount(), Integer::sum);
+        values(circuit).forEach((number, count) -> pieces.merge(line(number), count, Integer::sum));
         double load = entry.demand().load();
         double heat = load * load * circuit.resistance() * entry.demand().channel().diversity();
         Map<Integer, Double> amounts = new TreeMap<>();
         amounts.put(HEAT, heat);
         if (zones.containsKey(zone)) {
-            amounts.put(zones.get(zone), heat);
+            amounts.put(Objects.requireNonNull(zones.get(zone)), heat);
         }
         if (circuit.threshold() instanceof Threshold.Divider divider && divider.tap().isEmpty()) {
             draw(divider, amounts);
@@ -215,13 +220,13 @@ final class ChoiceModel {
         double current = divider.source().voltage().max() / (divider.top() + divider.bottom());
         amounts.merge(SUPPLY, current, Double::sum);
         if (divider.source().source() instanceof Source.OfReference(String name) && references.containsKey(name)) {
-            amounts.merge(references.get(name), current, Double::sum);
+            amounts.merge(Objects.requireNonNull(references.get(name)), current, Double::sum);
         }
     }
 
     private int pool(Part part, int sections, double supply, String zone) {
         return pools.computeIfAbsent(zone + "\n" + part.partNumber(),
-                _ -> builder.pool(new Selection.Pool(lines.get(part.partNumber()), sections, SUPPLY, supply)));
+                _ -> builder.pool(new Selection.Pool(line(part.partNumber()), sections, SUPPLY, supply)));
     }
 
     /** Part numbers of a tap's own resistors. */
@@ -237,7 +242,7 @@ final class ChoiceModel {
         List<Threshold> thresholds = taps.get(tap).thresholds();
         for (int value = 0; value < thresholds.size(); value++) {
             Map<Integer, Integer> pieces = new TreeMap<>();
-            tapLines(thresholds.get(value)).forEach(number -> pieces.merge(lines.get(number), 1, Integer::sum));
+            tapLines(thresholds.get(value)).forEach(number -> pieces.merge(line(number), 1, Integer::sum));
             Map<Integer, Double> amounts = new TreeMap<>();
             if (thresholds.get(value) instanceof Threshold.Divider divider) {
                 draw(divider, amounts);
@@ -272,18 +277,13 @@ final class ChoiceModel {
 
     /** The circuit of an entry. */
     SenseCircuit circuit(int entry, List<Integer> choice) {
-        int slot = slotOfEntry.get(entry);
-        return menus.get(selection.slots().get(slot).menu()).get(choice.get(slot));
+        return menus.get(selection.slots().get(entry).menu()).get(choice.get(entry));
     }
 
     /** The option of an entry that is this circuit; empty when it is not among them. */
     Optional<Integer> optionOf(int entry, SenseCircuit circuit) {
-        int at = menus.get(selection.slots().get(slotOfEntry.get(entry)).menu()).indexOf(circuit);
+        int at = menus.get(selection.slots().get(entry).menu()).indexOf(circuit);
         return at < 0 ? Optional.empty() : Optional.of(at);
-    }
-
-    int slot(int entry) {
-        return slotOfEntry.get(entry);
     }
 
     /** Index of the tap of that name; empty when it takes no part. */

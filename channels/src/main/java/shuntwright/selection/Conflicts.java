@@ -117,10 +117,9 @@ public final class Conflicts {
     }
 
     private static List<Integer> reduced(List<Integer> members, Test test) {
-        List<Integer> kept = new ArrayList<>(members);
+        List<Integer> kept = members;
         for (Integer each : members) {
-            List<Integer> fewer = new ArrayList<>(kept);
-            fewer.remove(each);
+            List<Integer> fewer = kept.stream().filter(other -> !other.equals(each)).toList();
             if (!fewer.isEmpty() && test.impossible(fewer)) {
                 kept = fewer;
             }

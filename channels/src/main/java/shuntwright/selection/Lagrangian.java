@@ -167,8 +167,8 @@ final class Lagrangian {
      * @param reached a value of the aim that is known to be reached; the bound cannot exceed it
      */
     double bound(double reached, int iterations, Watch watch) {
-        for (Option[] each : options) {
-            if (each.length == 0 && count[index(each)] > 0) {
+        for (int menu = 0; menu < options.length; menu++) {
+            if (options[menu].length == 0 && count[menu] > 0) {
                 best = Double.POSITIVE_INFINITY;
                 return best;
             }
@@ -219,15 +219,6 @@ final class Lagrangian {
             weight += each;
         }
         return aim.isEmpty() && best > SURELY * weight;
-    }
-
-    private int index(Option[] menu) {
-        for (int i = 0; i < options.length; i++) {
-            if (options[i] == menu) {
-                return i;
-            }
-        }
-        throw new IllegalStateException("no such menu");
     }
 
     /** The bound at the multipliers; leaves the subgradient there. */

@@ -188,14 +188,14 @@ public final class Selector {
         search.descend();
         OptionalDouble bound = aims.isEmpty() ? OptionalDouble.empty() : Bounds.separable(selection, aims.getFirst());
         boolean done = search.holds()
-                && (aims.isEmpty() || bound.isPresent() && reaches(search.value(), bound.getAsDouble()));
+                && (aims.isEmpty() || (bound.isPresent() && reaches(search.value(), bound.getAsDouble())));
         for (int from = 0; from < most && !done; from += LOOK) {
             int to = Math.min(most, from + LOOK);
             double before = aims.isEmpty() ? 0 : search.value();
             int run = search.rounds(from, to, most, watch);
             rounds += run;
             cutShort |= run < to - from;
-            done = cutShort || search.holds() && aims.isEmpty();
+            done = cutShort || (search.holds() && aims.isEmpty());
             if (!aims.isEmpty() && search.holds() && search.value() < before) {
                 watch.better(look(selection, order.aims(), Arrays.stream(search.best()).boxed().toList()));
             }

@@ -15,9 +15,7 @@ class ConflictsTest {
     }
 
     private static List<Integer> without(List<Integer> all, Integer one) {
-        List<Integer> rest = new ArrayList<>(all);
-        rest.remove(one);
-        return rest;
+        return all.stream().filter(each -> !each.equals(one)).toList();
     }
 
     /** Against every selection there is: the core is impossible, and possible without any one of its members. */

@@ -250,7 +250,7 @@ final class OrderModel {
                     next = one <= other ? to : next;
                 }
                 long rise = tier.packs(next, boards) - tier.packs(at, boards);
-                long run = next - at;
+                long run = (long) next - at;
                 // packs ≥ packs(at) + rise/run·(pieces − at), only when open
                 vars.notNegative(new Sum().add(run, packs).add(-rise, pieces)
                         .add(rise * at - run * tier.packs(at, boards), open));

@@ -8,5 +8,4 @@ package shuntwright.planner.proof;
  * @param workers      threads
  * @param memory       MiB of the whole child, at most
  */
-record SolverLimits(double seconds, double steadyEffort, int workers, int memory) {
-}
+record SolverLimits(double seconds, double steadyEffort, int workers, int memory) {}

@@ -14,7 +14,6 @@ import java.util.function.ToLongFunction;
 
 import com.google.ortools.sat.CpModel;
 import com.google.ortools.sat.LinearExpr;
-
 import shuntwright.selection.Aim;
 import shuntwright.selection.Option;
 import shuntwright.selection.Prover;
@@ -90,7 +89,8 @@ final class SolverModel {
         for (int menu = 0; menu < count.length; menu++) {
             List<Integer> all = new ArrayList<>();
             for (int i = 0; count[menu] > 0 && i < taken[menu].length; i++) {
-                all.addAll(Collections.nCopies((int) values.applyAsLong(taken[menu][i]), kept.get(menu).options().get(i)));
+                all.addAll(
+                        Collections.nCopies((int) values.applyAsLong(taken[menu][i]), kept.get(menu).options().get(i)));
             }
             byMenu.add(all);
         }

@@ -68,7 +68,8 @@ final class Sum {
 
     /** The value of {@link #floor(int)} at the selection known beforehand. */
     long hintFloor(int decimals) {
-        return terms.entrySet().stream().mapToLong(each -> floor(each.getValue(), decimals) * each.getKey().hint()).sum();
+        return terms.entrySet().stream().mapToLong(each -> floor(each.getValue(), decimals) * each.getKey().hint())
+                .sum();
     }
 
     /** Largest value without the constant, when no factor is negative. */

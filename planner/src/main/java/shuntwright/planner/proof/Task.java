@@ -10,5 +10,4 @@ import shuntwright.selection.Selection;
  * @param question  what is asked of it
  * @param limits    of the solver
  */
-record Task(Selection selection, Prover.Question question, SolverLimits limits) {
-}
+record Task(Selection selection, Prover.Question question, SolverLimits limits) {}

@@ -9,5 +9,4 @@ import com.google.ortools.sat.IntVar;
  * @param most largest value
  * @param hint value in the selection known beforehand
  */
-record Var(IntVar it, long most, long hint) {
-}
+record Var(IntVar it, long most, long hint) {}

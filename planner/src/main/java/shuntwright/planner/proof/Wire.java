@@ -178,7 +178,8 @@ final class Wire {
 
         private Prover.Question question() {
             List<Aim.Cap> caps = list(
-                    () -> new Aim.Cap(aim().orElseThrow(() -> new IllegalArgumentException("a cap on nothing")), real()));
+                    () -> new Aim.Cap(aim().orElseThrow(() -> new IllegalArgumentException("a cap on nothing")),
+                            real()));
             Optional<Aim> aim = aim();
             return new Prover.Question(caps, aim, list(this::whole));
         }

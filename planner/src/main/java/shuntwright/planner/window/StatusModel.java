@@ -29,7 +29,8 @@ final class StatusModel {
     StatusModel(BoardSession session) {
         this.session = session;
         text = Bindings.createStringBinding(this::words, session.openProperty(), session.messageProperty(), done,
-                session.planning().stageProperty(), session.planning().bestProperty(), session.plannedProperty(), session.stateProperty(),
+                session.planning().stageProperty(), session.planning().bestProperty(), session.plannedProperty(),
+                session.stateProperty(),
                 session.sampling().stageProperty(), session.sampling().stateProperty());
         wrong = Bindings.createStringBinding(() -> {
             var entries = session.state().wrong();

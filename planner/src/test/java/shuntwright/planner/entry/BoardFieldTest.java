@@ -104,7 +104,8 @@ class BoardFieldTest {
                 List.of(new StatedDistribution("shunt tolerance", Optional.empty(), new Distribution.Normal(3))),
                 new Sampling(new Sampling.Trials.Adaptive(1, 50_000), 9))).withPreference(new Preference(
                         List.of(Objective.WIDEST_MARGIN, Objective.FEWEST_PARTS), 0.1 + 0.2, 7, OptionalDouble.of(1.5),
-                        -3)).withChannels(List.of(
+                        -3))
+                .withChannels(List.of(
                         board.channels().getFirst().withReading(new Channel.ReadingDemand(OptionalDouble.empty(),
                                 OptionalDouble.of(0.02), Optional.of(new Calibration(Calibration.Points.ONE,
                                         OptionalDouble.empty(), OptionalDouble.empty(), 1e-3,

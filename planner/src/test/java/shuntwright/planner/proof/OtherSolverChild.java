@@ -13,7 +13,6 @@ import com.google.ortools.linearsolver.MPObjective;
 import com.google.ortools.linearsolver.MPSolver;
 import com.google.ortools.linearsolver.MPSolverParameters;
 import com.google.ortools.linearsolver.MPVariable;
-
 import shuntwright.selection.Aim;
 import shuntwright.selection.Option;
 import shuntwright.selection.Selection;

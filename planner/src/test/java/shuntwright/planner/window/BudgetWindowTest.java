@@ -78,7 +78,8 @@ class BudgetWindowTest {
                 return Optional.of(folder.resolve("saved" + kind.ending()));
             }
         };
-        window = new OpenWindow(shown, new OpenWindow.Engines(HandMadePlans::plan, this::sample, HandMadeChoices.EXPLORER), choosers,
+        window = new OpenWindow(shown,
+                new OpenWindow.Engines(HandMadePlans::plan, this::sample, HandMadeChoices.EXPLORER), choosers,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT), List.of());
         window.show();
         shown.setWidth(1500);

@@ -153,8 +153,9 @@ class ChoiceWindowTest {
         assertThat(labels(robot, "#choice")).contains("zone port, heat limit: 400 mW → 564.1 mW would do",
                 "Breaks the limit of zone port.", "proven best");
         picture(robot, "hand-conflict");
-        robot.clickOn((Node) onScreen(() -> robot.lookup(".conflict-button").queryAllAs(Button.class).stream().findFirst()
-                .orElseThrow()));
+        robot.clickOn(
+                (Node) onScreen(() -> robot.lookup(".conflict-button").queryAllAs(Button.class).stream().findFirst()
+                        .orElseThrow()));
         waitFor(() -> window.session().currentBinding().get());
         assertThat(board().zones().getFirst().heatLimit()).hasValue(0.5641);
         assertThat(labels(robot, "#choice")).contains("The best choice found").noneMatch(each -> each.contains("port"));
@@ -196,7 +197,7 @@ class ChoiceWindowTest {
         picture(robot, "hand-front-empty");
         robot.clickOn("#compute-front");
         waitFor(() -> !robot.lookup("#front .plot-spot").queryAll().isEmpty());
-        robot.clickOn((Node) onScreen(() -> robot.lookup("#front .plot-spot").queryAll().stream().findFirst()
+        robot.clickOn(onScreen(() -> robot.lookup("#front .plot-spot").queryAll().stream().findFirst()
                 .orElseThrow()));
         robot.push(KeyCode.RIGHT);
         WaitForAsyncUtils.waitForFxEvents();

@@ -59,7 +59,9 @@ class WindowPictureTest {
             }
         };
         window = new OpenWindow(shown,
-                new OpenWindow.Engines(new BoardPlanner()::plan, new BoardSampler(2)::sample, Explorer.of(new BoardPlanner())), none,
+                new OpenWindow.Engines(new BoardPlanner()::plan, new BoardSampler(2)::sample,
+                        Explorer.of(new BoardPlanner())),
+                none,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of(root));
         window.show();

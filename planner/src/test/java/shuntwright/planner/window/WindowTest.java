@@ -65,7 +65,8 @@ class WindowTest {
             }
         };
         window = new OpenWindow(shown,
-                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample, HandMadeChoices.EXPLORER), choosers,
+                new OpenWindow.Engines(HandMadePlans::plan, HandMadeStudies::sample, HandMadeChoices.EXPLORER),
+                choosers,
                 new SimpleObjectProperty<>(ColorScheme.LIGHT),
                 List.of());
         window.show();

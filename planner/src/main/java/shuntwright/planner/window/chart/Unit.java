@@ -15,7 +15,9 @@ public record Unit(String title, String symbol, double factor, boolean whole) {
 
     /** A quantity with a prefix that suits its largest value. */
     public static Unit of(String title, String symbol, double largest) {
-        return largest > 0 && largest < 1 ? new Unit(title, "m" + symbol, 1000, false) : new Unit(title, symbol, 1, false);
+        return largest > 0 && largest < 1
+                ? new Unit(title, "m" + symbol, 1000, false)
+                : new Unit(title, symbol, 1, false);
     }
 
     public static Unit count(String title) {

@@ -61,7 +61,8 @@ public final class ChoiceModel {
     }
 
     private Shown working(BoardChoice best) {
-        return new Shown("Best so far, still looking for a better choice", true, ShownWords.aims(best, session.currency()),
+        return new Shown("Best so far, still looking for a better choice", true,
+                ShownWords.aims(best, session.currency()),
                 ShownWords.facts(best, Duration.ZERO), best.broken(), Optional.empty());
     }
 

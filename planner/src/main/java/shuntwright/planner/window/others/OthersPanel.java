@@ -129,8 +129,9 @@ public final class OthersPanel {
         PinCell() {
             pin.setMnemonicParsing(false);
             pin.getStyleClass().addAll("pin-button", "small-button");
-            pin.setTooltip(new Tooltip("Pins these parts and values on the channel; the rest of the board is chosen again "
-                    + "around it. Undo takes it back"));
+            pin.setTooltip(
+                    new Tooltip("Pins these parts and values on the channel; the rest of the board is chosen again "
+                            + "around it. Undo takes it back"));
             pin.setOnAction(_ -> {
                 OtherRow row = getItem();
                 if (row != null) {
@@ -142,9 +143,10 @@ public final class OthersPanel {
         @Override
         protected void updateItem(@Nullable OtherRow row, boolean empty) {
             super.updateItem(row, empty);
-            boolean other = !empty && row != null && row.choice().isPresent();
-            setGraphic(other ? pin : null);
-            if (other) {
+            if (empty || row == null || row.choice().isEmpty()) {
+                setGraphic(null);
+            } else {
+                setGraphic(pin);
                 pin.setDisable(!model.pinnable(row));
                 pin.setAccessibleText("Pin choice " + row.number() + ": " + row.shunt() + ", " + row.amplifier());
             }
