@@ -14,6 +14,7 @@ import javafx.application.ColorScheme;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.scene.control.TabPane;
 import javafx.scene.image.WritableImage;
+import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 
 import org.junit.jupiter.api.extension.ExtendWith;
@@ -102,11 +103,19 @@ class WindowPictureTest {
         robot.interact(() -> window.session().selectionProperty().set(List.of(7)));
         WaitForAsyncUtils.waitForFxEvents();
         write(robot, wish, "window");
-        for (int tab = 1; tab < 3; tab++) {
-            int shown = tab;
-            robot.interact(() -> robot.lookup("#tabs").queryAs(TabPane.class).getSelectionModel().select(shown));
-            WaitForAsyncUtils.waitForFxEvents();
-            write(robot, wish, tab == 1 ? "budget" : "parts");
+        show(robot, wish, "Error budget", "budget");
+        show(robot, wish, "Choice", "choice");
+        show(robot, wish, "Parts list", "parts");
+        if (pictures()) {
+            ask(robot, "Other choices", "#find-others");
+            show(robot, wish, "Other choices", "other-choices");
+            ask(robot, "Front", "#compute-front");
+            robot.interact(() -> robot.lookup("#front").query().requestFocus());
+            robot.push(KeyCode.RIGHT);
+            robot.push(KeyCode.RIGHT);
+            show(robot, wish, "Front", "front");
+            ask(robot, "What if", "#compute-what-if");
+            show(robot, wish, "What if", "what-if");
         }
         WritableImage[] image = new WritableImage[1];
         robot.interact(() -> image[0] = stage.getScene().snapshot(null));
@@ -117,6 +126,33 @@ class WindowPictureTest {
                 wish == ThemeChoice.Wish.DARK
                         ? (Integer dark) -> assertThat(dark).isLessThan(80)
                         : (Integer light) -> assertThat(light).isGreaterThan(200));
+    }
+
+    private void select(FxRobot robot, String title) {
+        robot.interact(() -> {
+            TabPane tabs = robot.lookup("#tabs").queryAs(TabPane.class);
+            tabs.getSelectionModel().select(tabs.getTabs().stream().filter(each -> each.getText().equals(title))
+                    .findFirst().orElseThrow());
+        });
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    private void show(FxRobot robot, ThemeChoice.Wish wish, String title, String name) {
+        select(robot, title);
+        write(robot, wish, name);
+    }
+
+    /** Asks and waits for the answer; that takes a while, so only for pictures that are kept. */
+    private void ask(FxRobot robot, String title, String button) throws Exception {
+        select(robot, title);
+        robot.interact(() -> robot.lookup(button).queryButton().fire());
+        WaitForAsyncUtils.waitFor(600, TimeUnit.SECONDS,
+                () -> WaitForAsyncUtils.asyncFx(() -> !robot.lookup(button).queryButton().isDisabled()).get());
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    private static boolean pictures() {
+        return !System.getProperty("shuntwright.pictures", "").isEmpty();
     }
 
     private void write(FxRobot robot, ThemeChoice.Wish wish, String name) {
