@@ -101,7 +101,8 @@ record Job(Kind kind, Path board, List<Path> parts, List<Entered> wanted, Sampli
                 case CHECK -> planner.check(asked, opened.catalogue(), progress);
             };
             Duration choosing = Duration.ofNanos(System.nanoTime() - start);
-            complaints.forEach(each -> terminal.complain("The solver was no help; the bounds are the program's own. " + each));
+            complaints.forEach(
+                    each -> terminal.complain("The solver was no help; the bounds are the program's own. " + each));
             return new Judged(sampling.skipped()
                     ? plan
                     : new BoardSampler(Runtime.getRuntime().availableProcessors()).sample(plan,

@@ -9,7 +9,6 @@ import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-
 import shuntwright.board.Board;
 
 /** Plans a board. */
