@@ -145,8 +145,8 @@ final class BoardChooser {
         ChannelMenu.Breadth breadth = wish.wide() ? ChannelMenu.Breadth.WIDE : ChannelMenu.Breadth.NARROW;
         Chosen first = chosen(context, wish, open, tapEntries, breadth, List.of(), start, progress);
         if (!first.answer().keepsLimits() && breadth.equals(ChannelMenu.Breadth.NARROW)) {
-            first = chosen(context, wish, open, tapEntries, ChannelMenu.Breadth.WIDE, List.of(), first.circuits(),
-                    progress);
+            breadth = ChannelMenu.Breadth.WIDE;
+            first = chosen(context, wish, open, tapEntries, breadth, List.of(), first.circuits(), progress);
         }
         boolean money = wish.aims().contains(Objective.LEAST_COST) || wish.aims().contains(Objective.FEWEST_PARTS);
         if (!money || wish.rounds() == 0 || progress.enough()) {

@@ -17,6 +17,7 @@ import org.junit.jupiter.api.Test;
 import shuntwright.board.Board;
 import shuntwright.board.Channel;
 import shuntwright.board.Objective;
+import shuntwright.board.SenseSupply;
 import shuntwright.board.Zone;
 import shuntwright.circuit.HysteresisNetwork;
 import shuntwright.circuit.SenseCircuit;
@@ -182,6 +183,32 @@ class BoardChoiceTest {
                         .orElseThrow().broken()).as(member.name()).isEmpty();
             }
         }
+    }
+
+    /** A supply limit that circuits of least heat break is kept with hotter ones, whatever objective comes first. */
+    @Test
+    void keepsALimitThatLeastHeatAloneWouldBreak() {
+        int tight = 0;
+        for (int seed = 20; seed < 32; seed++) {
+            Board board = random(seed, 5, Objective.LEAST_HEAT, Objective.LEAST_COST);
+            double used = supply(plan(board));
+            for (double share : new double[]{0.98, 0.95, 0.9, 0.8, 0.7}) {
+                Board less = board.withSupply(
+                        new SenseSupply(board.supply().voltage(), share * used));
+                boolean can = plan(less.withPreference(less.preference().withOrder(List.of(Objective.LEAST_COST))))
+                        .choice().orElseThrow().broken().isEmpty();
+                if (can) {
+                    tight++;
+                    assertThat(plan(less).choice().orElseThrow().broken()).as("seed %s, %s", seed, share).isEmpty();
+                }
+            }
+        }
+        assertThat(tight).isGreaterThan(5);
+    }
+
+    private static double supply(Plan plan) {
+        return plan.shared().stream().filter(each -> each.kind() == SharedUse.Kind.SUPPLY).findFirst().orElseThrow()
+                .used();
     }
 
     @Test
